@@ -1,0 +1,24 @@
+import * as z from 'zod';
+
+import { period } from './quantities.ts';
+import { site } from './site.ts';
+import { hasOneSource, oneSourceIssue, stationSourceFields } from './station.ts';
+
+/** At which site, and from which stations, the field is asked for. */
+export const fieldStrengthsRequest = z
+  .strictObject({ site, ...stationSourceFields, period: period.default('night') })
+  .refine(hasOneSource, oneSourceIssue);
+export type FieldStrengthsRequest = z.output<typeof fieldStrengthsRequest>;
+export type FieldStrengthsInput = z.input<typeof fieldStrengthsRequest>;
+
+export const fieldStrength = z.object({
+  station: z.int(),
+  distanceM: z.number().nullable(),
+  groundDb: z.number().nullable(),
+  skyDb: z.number().nullable(),
+  fieldDb: z.number().nullable(),
+  notes: z.array(z.string()),
+});
+
+export const fieldStrengthsAnswer = z.object({ fields: z.array(fieldStrength) });
+export type FieldStrengthsAnswer = z.infer<typeof fieldStrengthsAnswer>;

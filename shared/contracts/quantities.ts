@@ -1,0 +1,58 @@
+import * as z from 'zod';
+
+const MAX_FREQUENCY_HZ = 1_000_000_000;
+
+/** A frequency of a receiver or a station: whole hertz from 1 kHz to 1 GHz. */
+export const frequencyHz = z
+  .int('Give a whole number of hertz.')
+  .min(1000, 'Give a frequency of 1 kHz or more.')
+  .max(MAX_FREQUENCY_HZ, 'Give a frequency of 1 GHz or less.');
+
+/** A difference of frequencies: whole hertz above 0. */
+export const spanHz = z
+  .int('Give a whole number of hertz.')
+  .min(1, 'Give a width above 0.')
+  .max(MAX_FREQUENCY_HZ, 'Give a width of 1 GHz or less.');
+
+/** A level, ratio or field, decibels. */
+export const decibelsValue = z
+  .number('Give a number of decibels.')
+  .min(-300, 'Give a level of -300 dB or more.')
+  .max(300, 'Give a level of 300 dB or less.');
+
+/** Loaded Q of a circuit. */
+export const qValue = z
+  .number('Give a Q.')
+  .min(1, 'Give a Q of 1 or more.')
+  .max(100_000, 'Give a Q of 100000 or less.');
+
+export const latitude = z
+  .number('Give degrees, north positive.')
+  .min(-90, 'Give a latitude between -90 and 90 degrees.')
+  .max(90, 'Give a latitude between -90 and 90 degrees.');
+
+export const longitude = z
+  .number('Give degrees, east positive.')
+  .min(-180, 'Give a longitude between -180 and 180 degrees.')
+  .max(180, 'Give a longitude between -180 and 180 degrees.');
+
+/** Radiated power, watts; 0 means silent. */
+export const powerW = z
+  .number('Give a power in watts.')
+  .min(0, 'Give a power of 0 W (silent) or more.')
+  .max(100_000_000, 'Give a power of 100 MW or less.');
+
+export const resourceId = z.int().positive();
+
+/** A name people read: trimmed, not empty. */
+export const nameText = z
+  .string('Give a name.')
+  .trim()
+  .min(1, 'Give a name.')
+  .max(120, 'Give at most 120 characters.');
+
+export const noteText = z.string().trim().max(4000, 'Give at most 4000 characters.');
+
+export const ituRegion = z.literal([1, 2, 3], 'Give the ITU Region: 1, 2 or 3.');
+
+export const period = z.enum(['day', 'night'], 'Give "day" or "night".');

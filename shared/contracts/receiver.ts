@@ -1,0 +1,142 @@
+import * as z from 'zod';
+
+import type { Receiver as RadioReceiver } from '../radio/receiver.ts';
+import { band } from './receiver-band.ts';
+import { decibelsValue, frequencyHz, nameText, qValue, resourceId, spanHz } from './quantities.ts';
+
+const widths = z
+  .strictObject({ kind: z.literal('widths'), b6Hz: spanHz, b60Hz: spanHz })
+  .refine(({ b6Hz, b60Hz }) => b60Hz > b6Hz, {
+    path: ['b60Hz'],
+    message: 'The width at -60 dB must be larger than the width at -6 dB.',
+  });
+
+const transformers = z.strictObject({
+  kind: z.literal('transformers'),
+  count: z.int().min(1).max(10, 'Give 1 to 10 IF transformers.'),
+  q: qValue,
+  coupling: z.number().min(0.05).max(10, 'Give a coupling kQ between 0.05 and 10.').default(1),
+});
+
+const table = z.strictObject({
+  kind: z.literal('table'),
+  points: z
+    .array(z.strictObject({ offsetHz: z.int().min(0), rejectionDb: decibelsValue }))
+    .min(2, 'Give at least two points.')
+    .max(200, 'Give at most 200 points.'),
+});
+
+const trap = z.strictObject({
+  kind: z.enum(['parallel', 'series']),
+  inductanceH: z.number().min(1e-9).max(1, 'Give an inductance between 1 nH and 1 H.'),
+  capacitanceF: z.number().min(1e-13).max(1e-3, 'Give a capacitance between 0.1 pF and 1 mF.'),
+  q: qValue,
+  sourceOhms: z.number().min(0.1).max(1e7, 'Give 0.1 ohm to 10 megohms.'),
+  loadOhms: z.number().min(0.1).max(1e7, 'Give 0.1 ohm to 10 megohms.'),
+});
+
+const aerial = z.discriminatedUnion('kind', [
+  z.strictObject({ kind: z.literal('primary'), resonanceHz: frequencyHz, q: qValue }),
+  z.strictObject({ kind: z.literal('loop') }),
+]);
+
+const fixedFilter = z.strictObject({
+  kind: z.enum(['crystal', 'mechanical', 'ceramic']),
+  centreHz: frequencyHz,
+  widthHz: spanHz,
+});
+
+const bfo = z.strictObject({
+  centreHz: frequencyHz,
+  rangeHz: z.int().min(0).max(1_000_000, 'Give a reach of 1 MHz or less.'),
+  pitchHz: z.int().min(0).max(20_000, 'Give a pitch of 20 kHz or less.'),
+});
+
+const secondConversion = z.strictObject({
+  ifHz: frequencyHz,
+  oscillator: z.enum(['above', 'below']),
+});
+
+/** The fields of a receiver, as sent and as stored; defaults are filled when parsed. */
+const receiverFields = {
+  name: z.string().trim().max(120, 'Give at most 120 characters.').default(''),
+  ifHz: frequencyHz,
+  selectivity: z.discriminatedUnion('kind', [widths, transformers, table]),
+  audioCornerHz: z.int().min(100).max(100_000).nullable().default(3500),
+  strayDb: z
+    .strictObject({ if: decibelsValue, image: decibelsValue })
+    .nullable()
+    .default({ if: 60, image: 60 }),
+  ifFeedthroughDb: decibelsValue.default(3),
+  signalToOscillatorDb: decibelsValue.default(-40),
+  ifRange: z.number().min(0).max(0.9, 'Give a fraction between 0 and 0.9.').default(0.06),
+  fixedFilter: fixedFilter.nullable().default(null),
+  bfo: bfo.nullable().default(null),
+  trap: trap.nullable().default(null),
+  aerial: aerial.nullable().default(null),
+  secondConversion: secondConversion.nullable().default(null),
+  bands: z.array(band).min(1, 'Give at least one band.').max(20, 'Give at most 20 bands.'),
+};
+
+/** An oscillator below the signal needs every band above the IF. */
+function checkOscillators(
+  receiver: Pick<RadioReceiver, 'ifHz' | 'bands'>,
+  context: z.RefinementCtx,
+): void {
+  receiver.bands.forEach((each, index) => {
+    if (each.oscillator !== 'below' || each.lowHz > receiver.ifHz) return;
+    context.addIssue({
+      code: 'custom',
+      path: ['bands', index, 'oscillator'],
+      message:
+        'An oscillator below the signal would reach zero here: the band must begin above the IF, ' +
+        'or the oscillator run above.',
+    });
+  });
+}
+
+/** What a client sends to compute with a receiver. */
+export const receiverDraft = z.strictObject(receiverFields).superRefine(checkOscillators);
+
+/** A receiver as it is typed or sent, before defaults are filled. */
+export type ReceiverInput = z.input<typeof receiverDraft>;
+/** A receiver, whole: exactly what the engine computes with. */
+export type ReceiverDraft = z.output<typeof receiverDraft>;
+
+/** What a client sends to store a receiver: it needs a name. */
+export const newReceiver = z
+  .strictObject({ ...receiverFields, name: nameText })
+  .superRefine(checkOscillators);
+
+/** What the server alone decides about a stored receiver. */
+const keptFields = {
+  id: resourceId,
+  ownerName: z.string(),
+  /** Whether the caller may change it. */
+  editable: z.boolean(),
+  createdAt: z.iso.datetime(),
+  updatedAt: z.iso.datetime(),
+};
+
+/** A change names the version it was made from; what the server decides may come back unread. */
+export const receiverChange = z
+  .strictObject({
+    ...receiverFields,
+    ...z.object(keptFields).partial().shape,
+    name: nameText,
+    version: z.int('Send the version you changed.').positive(),
+  })
+  .superRefine(checkOscillators);
+export type ReceiverChange = z.output<typeof receiverChange>;
+
+/** A receiver as it is kept. */
+export const storedReceiver = z.object({
+  ...keptFields,
+  ...receiverFields,
+  version: z.int().positive(),
+});
+export type StoredReceiver = z.infer<typeof storedReceiver>;
+
+type SameShape<T extends RadioReceiver> = T;
+/** Fails to compile when the contract and the engine's receiver part ways. */
+export type CheckedReceiver = SameShape<ReceiverDraft>;

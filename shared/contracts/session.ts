@@ -1,0 +1,46 @@
+import * as z from 'zod';
+
+import { resourceId } from './quantities.ts';
+
+export const role = z.enum(['member', 'librarian', 'admin']);
+export type Role = z.infer<typeof role>;
+
+export const email = z
+  .email('Give an e-mail address such as name@example.org.')
+  .max(254, 'Give at most 254 characters.')
+  .transform((value) => value.toLowerCase());
+
+/** What registering takes. The length is counted in characters; every one of them matters. */
+export const accountDraft = z.strictObject({
+  email,
+  name: z.string().trim().min(1, 'Give your name.').max(120, 'Give at most 120 characters.'),
+  password: z
+    .string('Give a password.')
+    .min(8, 'Give a password of at least 8 characters; 12 or more are better.')
+    .max(256, 'Give a password of at most 256 characters.'),
+});
+export type AccountDraft = z.output<typeof accountDraft>;
+
+export const credentials = z.strictObject({
+  email,
+  password: z.string('Give your password.').min(1, 'Give your password.').max(256),
+});
+export type Credentials = z.output<typeof credentials>;
+
+const membership = z.object({ id: resourceId, name: z.string(), role });
+
+/** Who is signed in, and in which workshop. */
+export const user = z.object({
+  id: resourceId,
+  email: z.string(),
+  name: z.string(),
+  /** The workshop the session works in. */
+  workshop: membership,
+  /** All workshops of this account. */
+  workshops: z.array(membership),
+});
+export type User = z.infer<typeof user>;
+
+/** Goes to another workshop of one's own. */
+export const sessionChange = z.strictObject({ workshopId: resourceId });
+export type SessionChange = z.infer<typeof sessionChange>;

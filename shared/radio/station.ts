@@ -1,0 +1,28 @@
+/**
+ * A transmitter of an allocation list, as the engine computes with it.
+ *
+ * @module radio/station
+ */
+
+/** One station. What is null was not given. */
+export interface Station {
+  /** Index in the list that was sent, or the station's id in an edition. */
+  readonly id: number;
+  readonly name: string;
+  readonly frequencyHz: number;
+  readonly latitude: number | null;
+  readonly longitude: number | null;
+  /** Effective monopole-radiated power by day, watts; 0: silent. */
+  readonly powerDayW: number | null;
+  /** Effective monopole-radiated power by night, watts; 0: silent. */
+  readonly powerNightW: number | null;
+  /** Field at the site, dB(uV/m), when it is known; nothing is computed then. */
+  readonly fieldDb: number | null;
+}
+
+/** A part of the spectrum divided into equal channels. */
+export interface RasterRange {
+  readonly lowHz: number;
+  readonly highHz: number;
+  readonly stepHz: number;
+}
