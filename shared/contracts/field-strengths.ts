@@ -13,6 +13,8 @@ export type FieldStrengthsInput = z.input<typeof fieldStrengthsRequest>;
 
 export const fieldStrength = z.object({
   station: z.int(),
+  name: z.string(),
+  frequencyHz: z.int(),
   distanceM: z.number().nullable(),
   groundDb: z.number().nullable(),
   skyDb: z.number().nullable(),
