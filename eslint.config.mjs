@@ -1,0 +1,160 @@
+import angular from 'angular-eslint';
+import boundaries from 'eslint-plugin-boundaries';
+import tseslint from 'typescript-eslint';
+
+/** Parts of the house, the most specific first; each is a folder seen from the root. */
+const element = (type, pattern, capture = []) => ({ type, pattern, capture, partialMatch: false });
+const elements = [
+  element('engine', 'shared/radio'),
+  element('contracts', 'shared/contracts'),
+  element('core', 'src/app/core'),
+  element('ui', 'src/app/ui'),
+  element('charts', 'src/app/charts'),
+  element('feature', 'src/app/*', ['name']),
+  element('http', 'server/http'),
+  element('db', 'server/db'),
+  element('dev', 'server/dev'),
+  element('resource', 'server/*', ['name']),
+  element('test', 'test'),
+  element('data', 'datasets'),
+];
+
+/** Files that belong to no folder of the house: they wire it together. */
+const files = [
+  { category: 'spec', pattern: '**/*.spec.ts' },
+  { category: 'settings', pattern: ['server/config.ts', 'server/logger.ts'] },
+  { category: 'wiring', pattern: ['src/*.ts', 'src/app/*.ts', 'server/*.ts'] },
+];
+
+const part = (...types) => ({ element: { types: { anyOf: types } } });
+const may = (from, ...types) => ({ from: part(from), allow: { to: part(...types) } });
+const ownFolder = { captured: { name: '{{ from.element.captured.name }}' } };
+
+/** Who may import whom; whatever is not listed is refused. */
+const policies = [
+  may('engine', 'engine'),
+  may('contracts', 'contracts', 'engine'),
+  may('core', 'core', 'contracts', 'engine'),
+  may('ui', 'ui', 'contracts', 'engine'),
+  may('charts', 'charts', 'contracts', 'engine'),
+  may('feature', 'core', 'ui', 'charts', 'contracts', 'engine', 'data'),
+  { from: part('feature'), allow: { to: { element: { type: 'feature', ...ownFolder } } } },
+  may('http', 'http', 'db', 'contracts'),
+  may('db', 'db', 'http', 'contracts'),
+  may('resource', 'http', 'db', 'contracts', 'engine', 'data'),
+  { from: part('resource'), allow: { to: { element: { type: 'resource', ...ownFolder } } } },
+  {
+    from: part('resource'),
+    allow: { to: part('resource'), dependency: { kind: 'type' } },
+  },
+  {
+    from: part('http', 'db', 'resource'),
+    allow: { to: { file: { categories: 'settings' } } },
+  },
+  { from: part('dev', 'test'), allow: { to: { module: { origin: 'local' } } } },
+  { from: { file: { categories: 'wiring' } }, allow: { to: { module: { origin: 'local' } } } },
+  { from: { file: { categories: 'spec' } }, allow: { to: part('test', 'data') } },
+];
+
+const house = {
+  files: ['{shared,src,server,test}/**/*.{ts,mjs}'],
+  plugins: { boundaries },
+  settings: {
+    'boundaries/elements': elements,
+    'boundaries/files': files,
+    'import/resolver': {
+      typescript: { project: ['server/tsconfig.json', 'src/tsconfig.app.json'] },
+    },
+  },
+  rules: {
+    'boundaries/dependencies': ['error', { default: 'disallow', policies }],
+    'boundaries/no-unknown-files': 'error',
+  },
+};
+
+const typescript = {
+  files: ['**/*.ts'],
+  extends: [...tseslint.configs.strictTypeChecked, ...tseslint.configs.stylisticTypeChecked],
+  languageOptions: {
+    parserOptions: {
+      project: [
+        'shared/tsconfig.json',
+        'server/tsconfig.json',
+        'test/tsconfig.json',
+        'src/tsconfig.app.json',
+        'src/tsconfig.spec.json',
+      ],
+      tsconfigRootDir: import.meta.dirname,
+    },
+  },
+  rules: {
+    '@typescript-eslint/consistent-type-imports': ['error', { fixStyle: 'inline-type-imports' }],
+    '@typescript-eslint/no-extraneous-class': ['error', { allowWithDecorator: true }],
+    '@typescript-eslint/no-unused-vars': ['error', { argsIgnorePattern: '^_' }],
+    '@typescript-eslint/restrict-template-expressions': ['error', { allowNumber: true }],
+    eqeqeq: 'error',
+    'max-lines': ['error', 400],
+    'max-lines-per-function': ['error', { max: 40, skipBlankLines: true, skipComments: true }],
+    'no-restricted-imports': [
+      'error',
+      { paths: [{ name: 'zod', importNames: ['z'], message: "Write import * as z from 'zod'." }] },
+    ],
+  },
+};
+
+const client = {
+  files: ['src/**/*.ts'],
+  extends: [...angular.configs.tsRecommended],
+  processor: angular.processInlineTemplates,
+  rules: {
+    '@angular-eslint/component-selector': [
+      'error',
+      { type: 'element', prefix: 'app', style: 'kebab-case' },
+    ],
+    '@angular-eslint/directive-selector': [
+      'error',
+      { type: 'attribute', prefix: 'app', style: 'camelCase' },
+    ],
+    '@angular-eslint/prefer-on-push-component-change-detection': 'error',
+  },
+};
+
+const templates = {
+  files: ['src/**/*.html'],
+  ignores: ['src/index.html'],
+  extends: [...angular.configs.templateRecommended, ...angular.configs.templateAccessibility],
+  rules: {
+    '@angular-eslint/template/i18n': [
+      'error',
+      { checkId: false, ignoreTags: ['mat-icon'], boundTextAllowedPattern: '\\W*' },
+    ],
+    '@angular-eslint/template/prefer-control-flow': 'error',
+    'max-lines': ['error', 80],
+  },
+};
+
+const specs = {
+  files: ['**/*.spec.ts', 'test/**/*.ts'],
+  rules: { 'max-lines-per-function': 'off' },
+};
+
+/** The engine reads no clock, chance, environment, file or network: they come as arguments. */
+const pure = {
+  files: ['shared/radio/**/*.ts'],
+  ignores: ['**/*.spec.ts'],
+  rules: {
+    'no-restricted-globals': ['error', 'Date', 'performance', 'crypto', 'fetch', 'process'],
+    'no-restricted-properties': ['error', { object: 'Math', property: 'random' }],
+  },
+};
+
+export default tseslint.config(
+  { ignores: ['dist/', '.angular/', '.data/', '.screenshots/', 'datasets/'] },
+  { linterOptions: { reportUnusedDisableDirectives: 'error' } },
+  typescript,
+  client,
+  templates,
+  specs,
+  pure,
+  house,
+);
