@@ -102,6 +102,13 @@ export const importState = z.object({
   /** From 0 to 1. */
   progress: z.number(),
   rows: importCheck.shape.rows.nullable(),
+  /** The first 1000 faults, from the check until the commit; else none, so that polling stays light. */
+  faults: z.array(importFault).default([]),
+  /** What was found in the file, its columns as last matched: a reloaded page goes on from here. */
+  proposal: importProposal,
+  /** What the edition will be called, once the matching has been sent. */
+  label: z.string().nullable(),
+  date: z.iso.date().nullable(),
   editionId: resourceId.nullable(),
   /** Why it failed, in a sentence; else null. */
   reason: z.string().nullable(),
