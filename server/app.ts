@@ -1,0 +1,48 @@
+import express, { type Express } from 'express';
+import type { Sequelize } from 'sequelize';
+
+import type { Config } from './config.ts';
+import { client } from './http/client.ts';
+import { UnknownPathError } from './http/errors.ts';
+import { health } from './http/health.ts';
+import { problemHandler } from './http/problem-handler.ts';
+import { requestLog } from './http/request-log.ts';
+import type { Route } from './http/route.ts';
+import { routerOf } from './http/router.ts';
+import { securityHeaders } from './http/security-headers.ts';
+import { xsrf } from './http/xsrf.ts';
+import type { Logger } from './logger.ts';
+import type { Services } from './services.ts';
+
+/** Every operation of the API. A resource is mounted by adding its rows here. */
+export function apiRoutes(_services: Services): Route[] {
+  return [];
+}
+
+/** Assembles the application without opening a port, so tests can drive it in memory. */
+export function createApp(
+  services: Services,
+  database: Pick<Sequelize, 'query'>,
+  config: Config,
+  log: Logger,
+): Express {
+  const app = express();
+  app.disable('x-powered-by').disable('etag').set('trust proxy', config.TRUSTED_PROXIES);
+  app.use(requestLog(log), securityHeaders(config), health(database));
+
+  app.use('/api', noStore, xsrf(config));
+  app.use(routerOf(apiRoutes(services), services));
+  app.use('/api', unknownPath);
+
+  app.use(client(config), unknownPath, problemHandler(log));
+  return app;
+}
+
+const noStore: express.RequestHandler = (_request, response, next) => {
+  response.set('Cache-Control', 'no-store');
+  next();
+};
+
+const unknownPath: express.RequestHandler = () => {
+  throw new UnknownPathError();
+};

@@ -1,0 +1,62 @@
+import { readdir } from 'node:fs/promises';
+
+import { createConnection } from 'mariadb';
+import type { Sequelize } from 'sequelize';
+import { SequelizeStorage, Umzug } from 'umzug';
+
+const FOLDER = new URL('./migrations/', import.meta.url);
+const LOCK_SECONDS = 120;
+
+/** Runs one SQL statement. */
+export type Run = (sql: string) => Promise<unknown>;
+
+/** What every file in `migrations/` exports. */
+export interface Migration {
+  readonly up: (run: Run) => Promise<void>;
+  readonly down: (run: Run) => Promise<void>;
+}
+
+async function createMigrator(database: Sequelize): Promise<Umzug<Run>> {
+  const names = (await readdir(FOLDER)).filter((name) => /^\d{12}-.+\.(ts|js)$/.test(name)).sort();
+  const load = (name: string) => import(new URL(name, FOLDER).href) as Promise<Migration>;
+  return new Umzug<Run>({
+    migrations: names.map((name) => ({
+      name: name.replace(/\.(ts|js)$/, ''),
+      up: async ({ context }) => (await load(name)).up(context),
+      down: async ({ context }) => (await load(name)).down(context),
+    })),
+    context: (sql) => database.query(sql),
+    storage: new SequelizeStorage({ sequelize: database, tableName: 'migrations' }),
+    logger: undefined,
+  });
+}
+
+/** Brings the tables up to date; two processes starting at once take turns. */
+export async function migrate(database: Sequelize, url: string): Promise<string[]> {
+  return locked(url, async () => {
+    const done = await (await createMigrator(database)).up();
+    return done.map(({ name }) => name);
+  });
+}
+
+/** Takes back every migration after the named one, or all of them. */
+export async function migrateDown(database: Sequelize, url: string, to?: string): Promise<void> {
+  await locked(url, async () => {
+    await (await createMigrator(database)).down({ to: to ?? 0 });
+  });
+}
+
+async function locked<T>(url: string, work: () => Promise<T>): Promise<T> {
+  const connection = await createConnection(url.replace(/^mysql:/, 'mariadb:'));
+  connection.on('error', () => undefined); // A lost lock ends with its server; the work reports it.
+  try {
+    const [row] = (await connection.query(
+      "SELECT GET_LOCK(CONCAT(DATABASE(), '.migrate'), ?) AS held",
+      [LOCK_SECONDS],
+    )) as { held: number | bigint | null }[];
+    if (Number(row?.held) !== 1) throw new Error('Another process is still migrating.');
+    return await work();
+  } finally {
+    await connection.end(); // Frees the lock.
+  }
+}
