@@ -1,0 +1,50 @@
+/** Numbers as charts, tables and sentences show them. */
+
+const MINUS = '\u2212';
+
+function fixed(value: number, decimals: number): string {
+  const text = Math.abs(value).toFixed(decimals);
+  return value < 0 && Number(text) !== 0 ? MINUS + text : text;
+}
+
+/** A frequency in kilohertz without needless zeros: 554, 553.5, 818.333. */
+export function kilohertz(hz: number): string {
+  const [whole = '0', fraction = ''] = fixed(hz / 1000, 3).split('.');
+  const kept = fraction.replace(/0+$/, '');
+  return kept === '' ? whole : `${whole}.${kept}`;
+}
+
+/** A frequency with its unit: kHz below 3 MHz, MHz from there. */
+export function frequency(hz: number): string {
+  return Math.abs(hz) < 3_000_000
+    ? $localize`${kilohertz(hz)}:value: kHz`
+    : $localize`${kilohertz(hz / 1000)}:value: MHz`;
+}
+
+/** A level or ratio to a tenth of a decibel, without its unit. */
+export const tenths = (db: number): string => fixed(db, 1);
+
+/** A level or ratio in whole decibels, as sentences say it, without its unit. */
+export const whole = (db: number): string => fixed(db, 0);
+
+/** A level that may be missing, to a tenth of a decibel with its unit; a dash when missing. */
+export const decibels = (db: number | null | undefined): string =>
+  db === null || db === undefined ? '\u2013' : $localize`${tenths(db)}:value: dB`;
+
+/** The same for a field strength. */
+export const field = (db: number | null | undefined): string =>
+  db === null || db === undefined ? '\u2013' : $localize`${tenths(db)}:value: dB(µV/m)`;
+
+/** A change with its sign: +3.2 dB, −16.0 dB. */
+export const change = (db: number): string =>
+  $localize`${(db > 0 ? '+' : '') + tenths(db)}:value: dB`;
+
+/** A fraction as a percentage with its sign. */
+export const percent = (fraction: number): string =>
+  `${fraction > 0 ? '+' : ''}${fixed(fraction * 100, 2)} %`;
+
+/** A distance in kilometres. */
+export const distance = (metres: number | null): string =>
+  metres === null
+    ? '\u2013'
+    : $localize`${fixed(metres / 1000, metres < 100_000 ? 1 : 0)}:value: km`;
