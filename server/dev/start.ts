@@ -1,0 +1,133 @@
+import { mkdirSync } from 'node:fs';
+import { join, resolve } from 'node:path';
+import { fileURLToPath } from 'node:url';
+
+import { type DemoSignIn, launchApi } from './api-process.ts';
+import { buildClient } from './client-build.ts';
+import { firstFreePort } from './free-port.ts';
+import { DATABASE_GRACE_MS, databaseUrl, launchMariaDB } from './private-mariadb.ts';
+import { ensurePrograms, MARIADB } from './programs.ts';
+import { keepSecret } from './secret.ts';
+import { readStartSettings, type StartSettings } from './start-settings.ts';
+import { Supervisor } from './supervisor.ts';
+
+const root = resolve(fileURLToPath(new URL('../..', import.meta.url)));
+
+/** Away from 3306, where a MariaDB of the machine's own may be. */
+const DATABASE_PORT = 33_060;
+const API_GRACE_MS = 15_000;
+
+const say = (line: string): void => {
+  console.log(line);
+};
+
+/** What has to be ended when we end, in the order in which it was started. */
+const running: (() => Promise<void>)[] = [];
+let ending: Promise<never> | undefined;
+
+/** Brings up database, client and API, says where they are, and keeps them running. */
+export async function start(environment: NodeJS.ProcessEnv): Promise<void> {
+  for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP'] as const) {
+    process.on(signal, () => void end(0));
+  }
+  try {
+    await bringUp(environment);
+  } catch (error) {
+    fail(error instanceof Error ? error : new Error(String(error)));
+  }
+}
+
+async function bringUp(environment: NodeJS.ProcessEnv): Promise<void> {
+  const began = performance.now();
+  const settings = await readStartSettings(environment, root, say);
+  mkdirSync(settings.dataFolder, { recursive: true, mode: 0o700 });
+  const client = buildClient(root, say);
+  running.push(client.stop);
+  const [database] = await Promise.all([ensureDatabase(settings), client.done]);
+  const apiEnvironment = {
+    ...environment,
+    HOST: settings.host,
+    PORT: String(settings.port),
+    DATABASE_URL: database,
+    SESSION_SECRET: environment.SESSION_SECRET ?? keepSecret(settings.dataFolder, 'session-key'),
+    DATA_DIR: settings.dataFolder,
+    CLIENT_DIR: client.folder,
+    DEMO_CLUB: environment.NODE_ENV === 'production' ? '0' : '1',
+  };
+  const demo = await startApi(settings, apiEnvironment);
+  announce(settings, demo, performance.now() - began);
+}
+
+/** Address of the user's own server, or of ours once it runs. */
+async function ensureDatabase(settings: StartSettings): Promise<string> {
+  if (settings.databaseUrl !== undefined) {
+    say('Using the database named by DATABASE_URL.');
+    return settings.databaseUrl;
+  }
+  ensurePrograms([MARIADB], say);
+  const port = await firstFreePort('127.0.0.1', DATABASE_PORT);
+  const database = {
+    folder: join(settings.dataFolder, 'mariadb'),
+    password: keepSecret(settings.dataFolder, 'database-password'),
+    rights: 'own database',
+    durable: true,
+  } as const;
+  const ward = {
+    name: 'MariaDB',
+    launch: () => launchMariaDB(database, port),
+    graceMs: DATABASE_GRACE_MS,
+  };
+  await supervise(new Supervisor(ward, say, fail));
+  say(`MariaDB runs on 127.0.0.1:${port}, its data in ${database.folder}.`);
+  return databaseUrl(database, port);
+}
+
+async function startApi(settings: StartSettings, environment: NodeJS.ProcessEnv) {
+  const logFile = join(settings.dataFolder, 'server.log');
+  let demo: readonly DemoSignIn[] = [];
+  const launch = () =>
+    launchApi({ root, logFile, environment }, (message) => {
+      demo = message.demo ?? [];
+    });
+  await supervise(
+    new Supervisor({ name: 'The API server', launch, graceMs: API_GRACE_MS }, say, fail),
+  );
+  say(`The server logs to ${logFile}.`);
+  return demo;
+}
+
+async function supervise(supervisor: Supervisor): Promise<void> {
+  running.push(() => supervisor.stop());
+  await supervisor.start();
+}
+
+function announce(settings: StartSettings, demo: readonly DemoSignIn[], tookMs: number): void {
+  const isLoopback = ['127.0.0.1', '::1', '0.0.0.0'].includes(settings.host);
+  const url = `http://${isLoopback ? 'localhost' : settings.host}:${settings.port}`;
+  say(`Ready after ${(tookMs / 1000).toFixed(1)} s.`);
+  say('');
+  say(`  Fallow is at ${url}`);
+  if (demo.length > 0) say('  Demo sign-ins:');
+  for (const { role, email, password } of demo) {
+    say(`    ${role.padEnd(10)} ${email}  ${password}`);
+  }
+  say('');
+  say('Ctrl-C stops it; the data stay.');
+  process.send?.({ type: 'ready', url, demo });
+}
+
+function fail(error: Error): void {
+  if (ending) return;
+  console.error(error.message);
+  void end(1);
+}
+
+/** Ends everything, the last started first. Asked twice, it goes on with the first. */
+function end(code: number): Promise<never> {
+  ending ??= (async () => {
+    if (code === 0) say('Stopping.');
+    for (const stop of running.toReversed()) await stop();
+    process.exit(code);
+  })();
+  return ending;
+}
