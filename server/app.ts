@@ -1,7 +1,9 @@
 import express, { type Express } from 'express';
 import type { Sequelize } from 'sequelize';
 
+import { accountRoutes } from './accounts/account-routes.ts';
 import type { Config } from './config.ts';
+import { authentication } from './http/authentication.ts';
 import { client } from './http/client.ts';
 import { UnknownPathError } from './http/errors.ts';
 import { health } from './http/health.ts';
@@ -12,11 +14,23 @@ import { routerOf } from './http/router.ts';
 import { securityHeaders } from './http/security-headers.ts';
 import { xsrf } from './http/xsrf.ts';
 import type { Logger } from './logger.ts';
+import { receiverRoutes } from './receivers/receiver-routes.ts';
 import type { Services } from './services.ts';
+import { sessionCookie } from './sessions/session-door.ts';
+import { sessionRoutes } from './sessions/session-routes.ts';
+import { siteRoutes } from './sites/site-routes.ts';
+import { workshopRoutes } from './workshops/workshop-routes.ts';
 
 /** Every operation of the API. A resource is mounted by adding its rows here. */
-export function apiRoutes(_services: Services): Route[] {
-  return [];
+export function apiRoutes(services: Services): Route[] {
+  const { accounts, door, limits, members, receivers, sessions, sites, workshops } = services;
+  return [
+    ...accountRoutes(accounts, door, limits),
+    ...sessionRoutes(sessions, door, accounts, limits),
+    ...workshopRoutes(workshops, members),
+    ...receiverRoutes(receivers),
+    ...siteRoutes(sites),
+  ];
 }
 
 /** Assembles the application without opening a port, so tests can drive it in memory. */
@@ -30,7 +44,7 @@ export function createApp(
   app.disable('x-powered-by').disable('etag').set('trust proxy', config.TRUSTED_PROXIES);
   app.use(requestLog(log), securityHeaders(config), health(database));
 
-  app.use('/api', noStore, xsrf(config));
+  app.use('/api', noStore, xsrf(config), authentication(sessionCookie(config), services.sessions));
   app.use(routerOf(apiRoutes(services), services));
   app.use('/api', unknownPath);
 

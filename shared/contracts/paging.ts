@@ -7,6 +7,12 @@ export const pageQuery = z.strictObject({
 });
 export type PageQuery = z.infer<typeof pageQuery>;
 
+/** A page of those whose name contains a text, whatever its case. */
+export const searchQuery = pageQuery.extend({
+  search: z.string().trim().max(120, 'Give at most 120 characters.').default(''),
+});
+export type SearchQuery = z.infer<typeof searchQuery>;
+
 /** A page of a list and the number of rows in all. */
 export const pageOf = <T extends z.ZodType>(item: T) =>
   z.object({ items: z.array(item), total: z.int().nonnegative() });

@@ -1,6 +1,7 @@
 import * as z from 'zod';
 
 import type { Receiver as RadioReceiver } from '../radio/receiver.ts';
+import { searchQuery } from './paging.ts';
 import { band } from './receiver-band.ts';
 import { decibelsValue, frequencyHz, nameText, qValue, resourceId, spanHz } from './quantities.ts';
 
@@ -108,6 +109,9 @@ export const newReceiver = z
   .strictObject({ ...receiverFields, name: nameText })
   .superRefine(checkOscillators);
 
+/** A receiver without what the server decides about it, which parsing leaves out. */
+export const bareReceiver = z.object(receiverFields);
+
 /** What the server alone decides about a stored receiver. */
 const keptFields = {
   id: resourceId,
@@ -128,6 +132,12 @@ export const receiverChange = z
   })
   .superRefine(checkOscillators);
 export type ReceiverChange = z.output<typeof receiverChange>;
+
+/** Which receivers are asked for, and in which order. */
+export const receiverQuery = searchQuery.extend({
+  sort: z.enum(['name', 'updated'], 'Give "name" or "updated".').default('name'),
+});
+export type ReceiverQuery = z.output<typeof receiverQuery>;
 
 /** A receiver as it is kept. */
 export const storedReceiver = z.object({

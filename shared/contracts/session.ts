@@ -27,7 +27,9 @@ export const credentials = z.strictObject({
 });
 export type Credentials = z.output<typeof credentials>;
 
+/** A workshop of an account, and the role it has there. */
 const membership = z.object({ id: resourceId, name: z.string(), role });
+export type Membership = z.infer<typeof membership>;
 
 /** Who is signed in, and in which workshop. */
 export const user = z.object({

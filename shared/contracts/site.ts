@@ -45,6 +45,17 @@ export const namedSite = z
 export type NamedSite = z.output<typeof namedSite>;
 export type NamedSiteInput = z.input<typeof namedSite>;
 
+/** A change of a stored site; what the server decides may come back unread. */
+export const siteChange = z
+  .strictObject({
+    name: nameText,
+    ...siteFields,
+    id: resourceId.optional(),
+    editable: z.boolean().optional(),
+  })
+  .refine(noiseIsKnown.check, noiseIsKnown.issue)
+  .transform(({ id: _id, editable: _editable, ...bare }) => bare);
+
 /** A site as it is kept. */
 export const storedSite = z.object({
   id: resourceId,
