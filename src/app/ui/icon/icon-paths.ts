@@ -1,0 +1,31 @@
+/** Strokes of our own on a grid of 24; drawn with round ends, 1.75 wide. */
+export const iconPaths = {
+  account: 'M12 12a4 4 0 1 0 0-8 4 4 0 0 0 0 8ZM4 20c.8-3.6 4-5 8-5s7.2 1.4 8 5',
+  add: 'M12 5v14M5 12h14',
+  back: 'M20 12H5m6-6-6 6 6 6',
+  check: 'm5 12.5 4.5 4.5L19 7.5',
+  close: 'm6 6 12 12M18 6 6 18',
+  copy: 'M9 9h11v11H9zM15 9V4H4v11h5',
+  delete: 'M5 7h14M10 7V4.5h4V7m-7 0 .8 12.5h8.4L17 7m-7 3.5v6m4-6v6',
+  dial: 'M3 18a9 9 0 0 1 18 0M12 18l4-9M6 18h.01M18 18h.01',
+  down: 'M12 5v14m-6-6 6 6 6-6',
+  download: 'M12 4v11m-5-5 5 5 5-5M5 20h14',
+  edit: 'M4 20l1-4L16 5l3 3L8 19l-4 1Zm10-13 3 3',
+  expand: 'm6 9 6 6 6-6',
+  forward: 'M4 12h15m-6-6 6 6-6 6',
+  info: 'M12 21a9 9 0 1 0 0-18 9 9 0 0 0 0 18Zm0-10v6m0-9.5v.01',
+  more: 'M12 5.5v.01M12 12v.01M12 18.5v.01',
+  pause: 'M8 5v14M16 5v14',
+  play: 'M8 5v14l11-7z',
+  remove: 'M5 12h14',
+  search: 'M10.5 17a6.5 6.5 0 1 0 0-13 6.5 6.5 0 0 0 0 13Zm5-1.5L20 20',
+  signOut: 'M13 4H5v16h8m-4-8h11m-4-4 4 4-4 4',
+  table: 'M4 5h16v14H4zM4 10h16M10 5v14',
+  theme: 'M12 20a8 8 0 1 0 0-16v16Zm0-16a8 8 0 0 0 0 16',
+  undo: 'M8 5 4 9l4 4M4 9h10a5 5 0 0 1 0 10H8',
+  up: 'M12 19V5m-6 6 6-6 6 6',
+  upload: 'M12 15V4m-5 5 5-5 5 5M5 20h14',
+  warning: 'M12 4 2.5 20h19L12 4Zm0 6v5m0 2.5v.01',
+} as const;
+
+export type IconName = keyof typeof iconPaths;
