@@ -61,7 +61,9 @@ function filesUnder(root: string, path: string): readonly string[] {
   if (!existsSync(join(root, path))) return [];
   if (!statSync(join(root, path)).isDirectory()) return [path];
   return readdirSync(join(root, path), { withFileTypes: true, recursive: true })
-    .filter((entry) => entry.isFile() && BUILT_FROM.test(entry.name) && !entry.name.endsWith(".spec.ts"))
+    .filter(
+      (entry) => entry.isFile() && BUILT_FROM.test(entry.name) && !entry.name.endsWith('.spec.ts'),
+    )
     .map((entry) => join(entry.parentPath, entry.name).slice(root.length).replace(/^\//, ''))
     .sort();
 }

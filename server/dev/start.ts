@@ -46,16 +46,28 @@ async function bringUp(environment: NodeJS.ProcessEnv): Promise<void> {
   const [database] = await Promise.all([ensureDatabase(settings), client.done]);
   const apiEnvironment = {
     ...environment,
+    ...keptSecrets(environment, settings.dataFolder),
     HOST: settings.host,
     PORT: String(settings.port),
     DATABASE_URL: database,
-    SESSION_SECRET: environment.SESSION_SECRET ?? keepSecret(settings.dataFolder, 'session-key'),
     DATA_DIR: settings.dataFolder,
     CLIENT_DIR: client.folder,
-    DEMO_CLUB: environment.NODE_ENV === 'production' ? '0' : '1',
   };
   const demo = await startApi(settings, apiEnvironment);
   announce(settings, demo, performance.now() - began);
+}
+
+/** Secrets of this installation, unless the environment brings its own. */
+function keptSecrets(environment: NodeJS.ProcessEnv, folder: string): NodeJS.ProcessEnv {
+  const session = {
+    SESSION_SECRET: environment.SESSION_SECRET ?? keepSecret(folder, 'session-key'),
+  };
+  if (environment.NODE_ENV === 'production') return session;
+  return {
+    ...session,
+    DEMO_CLUB: '1',
+    DEMO_PASSWORD: environment.DEMO_PASSWORD ?? keepSecret(folder, 'demo-password', 9),
+  };
 }
 
 /** Address of the user's own server, or of ours once it runs. */
