@@ -92,6 +92,7 @@ const typescript = {
   },
   rules: {
     '@typescript-eslint/consistent-type-imports': ['error', { fixStyle: 'inline-type-imports' }],
+    '@typescript-eslint/no-confusing-void-expression': ['error', { ignoreArrowShorthand: true }],
     '@typescript-eslint/no-extraneous-class': ['error', { allowWithDecorator: true }],
     '@typescript-eslint/no-unused-vars': ['error', { argsIgnorePattern: '^_' }],
     '@typescript-eslint/restrict-template-expressions': ['error', { allowNumber: true }],

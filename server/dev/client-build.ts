@@ -44,7 +44,7 @@ export function buildClient(root: string, say: (line: string) => void): ClientBu
 }
 
 /** One figure for all the sources: it changes when any file's name or content does. */
-function fingerprint(root: string): string {
+export function fingerprint(root: string): string {
   const hash = createHash('sha256');
   for (const source of SOURCES) {
     for (const path of filesUnder(root, source)) {

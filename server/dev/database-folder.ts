@@ -4,7 +4,7 @@ import { userInfo } from 'node:os';
 import { dirname, join } from 'node:path';
 import { setTimeout as wait } from 'node:timers/promises';
 
-import { programOf, readProcess, type RunningProcess, runningProcesses } from './process-table.ts';
+import { readProcess, type RunningProcess, runningProcesses } from './process-table.ts';
 import { findProgram } from './programs.ts';
 
 /** A MariaDB of our own: where its data are and what its one user is called. */
@@ -73,7 +73,7 @@ function startStatements({ password, rights }: PrivateDatabase): string {
 export async function freeFolder(folder: string): Promise<void> {
   for (const owner of ownersOf(folder)) {
     const parent = readProcess(owner.parentPid);
-    if (parent && programOf(parent) === 'node') {
+    if (parent?.program === 'node') {
       throw new Error(
         `${folder} is in use: Fallow runs already (process ${parent.pid}). Stop that one first.`,
       );
@@ -84,7 +84,7 @@ export async function freeFolder(folder: string): Promise<void> {
 
 function ownersOf(folder: string): readonly RunningProcess[] {
   return runningProcesses().filter(
-    (found) => programOf(found) === 'mariadbd' && found.command.includes(`--datadir=${folder}`),
+    (found) => found.program === 'mariadbd' && found.command.includes(`--datadir=${folder}`),
   );
 }
 

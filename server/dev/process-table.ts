@@ -1,9 +1,11 @@
-import { readdirSync, readFileSync } from 'node:fs';
+import { readdirSync, readFileSync, readlinkSync } from 'node:fs';
 import { basename } from 'node:path';
 
 export interface RunningProcess {
   readonly pid: number;
   readonly parentPid: number;
+  /** Name of the program's file: a process may call itself anything, as npm and vitest do. */
+  readonly program: string;
   readonly command: readonly string[];
 }
 
@@ -23,12 +25,9 @@ export function readProcess(pid: number): RunningProcess | undefined {
   try {
     const command = readFileSync(`/proc/${pid}/cmdline`, 'utf8').split('\0').slice(0, -1);
     const parent = /^PPid:\s*(\d+)/m.exec(readFileSync(`/proc/${pid}/status`, 'utf8'))?.[1];
-    return command.length === 0 ? undefined : { pid, parentPid: Number(parent ?? 0), command };
+    const program = basename(readlinkSync(`/proc/${pid}/exe`)).replace(/ \(deleted\)$/, '');
+    return { pid, parentPid: Number(parent ?? 0), program, command };
   } catch {
     return undefined;
   }
-}
-
-export function programOf({ command }: RunningProcess): string {
-  return basename(command[0] ?? '');
 }
