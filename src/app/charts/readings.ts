@@ -14,13 +14,6 @@ export function kilohertz(hz: number): string {
   return kept === '' ? whole : `${whole}.${kept}`;
 }
 
-/** A frequency with its unit: kHz below 3 MHz, MHz from there. */
-export function frequency(hz: number): string {
-  return Math.abs(hz) < 3_000_000
-    ? $localize`${kilohertz(hz)}:value: kHz`
-    : $localize`${kilohertz(hz / 1000)}:value: MHz`;
-}
-
 /** A level or ratio to a tenth of a decibel, without its unit. */
 export const tenths = (db: number): string => fixed(db, 1);
 

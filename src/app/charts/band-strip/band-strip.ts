@@ -1,0 +1,147 @@
+import {
+  ChangeDetectionStrategy,
+  Component,
+  computed,
+  input,
+  model,
+  output,
+  signal,
+} from '@angular/core';
+import { type ScaleLinear } from 'd3';
+
+import { formatFrequency } from '../../ui/frequency-pipe';
+import { ChartHead } from '../chart-head/chart-head';
+import { type StationAtSite } from '../choice-chart/choice-layout';
+import { frame, NARROW } from '../frame';
+import { observeWidth } from '../observe-width';
+import { Plot } from '../plot/plot';
+import { type PlotMark } from '../plot/plot-mark';
+import { RangeBars } from '../range-bars/range-bars';
+import { kilohertz } from '../readings';
+import { scaleMarks } from '../scale-marks';
+import { TwinTable } from '../twin-table/twin-table';
+import { type Window } from '../zoom-window';
+import {
+  dialScale,
+  heardMarks,
+  type JudgedBand,
+  responseMark,
+  STRIP,
+  STRIP_HEIGHT,
+  stripLabels,
+  wantedMarks,
+} from './strip-layout';
+import { stripColumns, stripReadout, stripRows, stripSentence } from './strip-words';
+
+const NUMERAL_GAP = 46;
+const TICK_GAP = 5;
+
+/** One band as a strip like a dial glass: what is heard over it, the scale, the stations under it. */
+@Component({
+  selector: 'app-band-strip',
+  templateUrl: './band-strip.html',
+  styleUrl: './band-strip.scss',
+  imports: [ChartHead, Plot, RangeBars, TwinTable],
+  changeDetection: ChangeDetectionStrategy.OnPush,
+})
+export class BandStrip {
+  readonly band = input.required<JudgedBand>();
+  /** The band's own range, hertz. */
+  readonly range = input.required<{ readonly low: number; readonly high: number }>();
+  readonly stations = input.required<readonly StationAtSite[]>();
+  /** Noise at a frequency, dB(µV/m); null: not known. */
+  readonly noise = input.required<(hz: number) => number | null>();
+  /** Levels over the noise, the same for every band of the receiver. */
+  readonly loudness = input.required<ScaleLinear<number, number>>();
+  readonly isLog = input(false);
+  readonly picked = model<string | null>(null);
+  /** Asks for the working behind a response. */
+  readonly working = output<string>();
+
+  private readonly width = observeWidth();
+  protected readonly window = signal<Window | null>(null);
+  protected readonly isTable = signal(false);
+  protected readonly strip = STRIP;
+  protected readonly columns = stripColumns();
+  protected readonly leadsOn = $localize`Enter shows the working.`;
+  private readonly isNarrow = computed(() => this.width() < NARROW);
+  protected readonly frame = computed(() =>
+    frame(this.width(), STRIP_HEIGHT + 20, {
+      top: 18,
+      right: this.isNarrow() ? 6 : 16,
+      bottom: 2,
+      left: this.isNarrow() ? 26 : 36,
+    }),
+  );
+  protected readonly wholeScale = computed(() => {
+    const { low, high } = this.range();
+    return dialScale(low, high, this.frame().innerWidth, this.isLog());
+  });
+  private readonly shown = computed<Window>(
+    () => this.window() ?? [this.range().low, this.range().high],
+  );
+  protected readonly x = computed(() =>
+    dialScale(...this.shown(), this.frame().innerWidth, this.isLog()),
+  );
+  protected readonly numerals = computed(() =>
+    scaleMarks(this.x(), ...this.shown(), NUMERAL_GAP).map((mark) => ({
+      ...mark,
+      text: kilohertz(mark.hz),
+    })),
+  );
+  protected readonly ticks = computed(() => scaleMarks(this.x(), ...this.shown(), TICK_GAP));
+  protected readonly levels = computed(() =>
+    this.loudness()
+      .ticks(3)
+      .map((value) => ({ value, y: this.loudness()(value) })),
+  );
+  protected readonly heard = computed(() =>
+    // What is hidden is drawn first, so that it never covers what is heard.
+    heardMarks(this.band(), this.x(), this.loudness()).sort(
+      (a, b) => Number(a.response.hidden === null) - Number(b.response.hidden === null),
+    ),
+  );
+  protected readonly wanted = computed(() => wantedMarks(this.stations(), this.x(), this.noise()));
+  protected readonly marks = computed<PlotMark[]>(() => [...this.heard(), ...this.wanted()]);
+  protected readonly order = computed(() => [
+    ...this.band().responses.flatMap((each) =>
+      each.dialHz === null || each.interferenceDb === null
+        ? []
+        : { id: responseMark(this.band().name, each), value: each.dialHz },
+    ),
+    ...wantedMarks(this.stations(), this.wholeScale(), this.noise()).map(({ id, station }) => ({
+      id,
+      value: station.frequencyHz,
+    })),
+  ]);
+  protected readonly harmonics = computed(() =>
+    this.band()
+      .harmonics.filter(({ dialHz }) => dialHz >= this.shown()[0] && dialHz <= this.shown()[1])
+      .map(({ harmonic, dialHz }) => ({
+        harmonic,
+        x: this.x()(dialHz),
+        text: $localize`${harmonic}:order: × IF`,
+      })),
+  );
+  protected readonly labels = computed(() =>
+    stripLabels(
+      this.heard(),
+      this.wanted(),
+      this.nameOf,
+      this.frame().innerWidth,
+      this.isNarrow() ? 3 : 10,
+    ),
+  );
+  protected readonly sentence = computed(() => stripSentence(this.band(), this.nameOf));
+  protected readonly heading = computed(() => {
+    const { low, high } = this.range();
+    return $localize`${this.band().name}:band:, ${kilohertz(low)}:low:–${formatFrequency(high)}:high:`;
+  });
+  protected readonly rows = computed(() => stripRows(this.band(), this.nameOf));
+  private readonly byId = computed(() => new Map(this.stations().map((each) => [each.id, each])));
+
+  protected readonly describe = (id: string) =>
+    stripReadout(id, this.heard(), this.wanted(), this.nameOf, this.noise());
+
+  private readonly nameOf = (id: number): string => this.byId().get(id)?.name ?? `#${id}`;
+}
