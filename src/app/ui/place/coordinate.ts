@@ -5,7 +5,7 @@ export type Axis = 'latitude' | 'longitude';
 const LETTERS: Readonly<Record<Axis, string>> = { latitude: 'NS', longitude: 'EW' };
 
 /** Letters of a hemisphere in front or behind, a sign, and what lies between. */
-const TYPED = /^([NSEW])?\s*([+-])?\s*(.*?)\s*([NSEW])?$/isu;
+const TYPED = /^(?:([NSEW])(?![a-z]))?\s*([+-])?\s*(.*?)\s*(?:(?<![a-z])([NSEW]))?$/isu;
 /** Degrees, minutes and seconds apart by their marks, by colons or by spaces. */
 const MARKS = /\s*(?:[°'′’"″”:\u0301]|''|′′)+\s*|\s+|(?<=\d)-(?=\d)/u;
 /** "48d12m30s": the last letter means seconds, not the south. */
