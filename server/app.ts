@@ -3,6 +3,7 @@ import type { Sequelize } from 'sequelize';
 
 import { accountRoutes } from './accounts/account-routes.ts';
 import type { Config } from './config.ts';
+import { editionRoutes } from './editions/edition-routes.ts';
 import { authentication } from './http/authentication.ts';
 import { client } from './http/client.ts';
 import { UnknownPathError } from './http/errors.ts';
@@ -13,8 +14,10 @@ import type { Route } from './http/route.ts';
 import { routerOf } from './http/router.ts';
 import { securityHeaders } from './http/security-headers.ts';
 import { xsrf } from './http/xsrf.ts';
+import { importRoutes } from './imports/import-routes.ts';
 import type { Logger } from './logger.ts';
 import { receiverRoutes } from './receivers/receiver-routes.ts';
+import { regionRoutes } from './regions/region-routes.ts';
 import type { Services } from './services.ts';
 import { sessionCookie } from './sessions/session-door.ts';
 import { sessionRoutes } from './sessions/session-routes.ts';
@@ -24,12 +27,16 @@ import { workshopRoutes } from './workshops/workshop-routes.ts';
 /** Every operation of the API. A resource is mounted by adding its rows here. */
 export function apiRoutes(services: Services): Route[] {
   const { accounts, door, limits, members, receivers, sessions, sites, workshops } = services;
+  const { editions, imports, regions, uploads } = services;
   return [
     ...accountRoutes(accounts, door, limits),
     ...sessionRoutes(sessions, door, accounts, limits),
     ...workshopRoutes(workshops, members),
     ...receiverRoutes(receivers),
     ...siteRoutes(sites),
+    ...regionRoutes(regions),
+    ...editionRoutes(editions),
+    ...importRoutes(imports, uploads),
   ];
 }
 

@@ -10,6 +10,7 @@ export function startHousekeeping(services: Services, log: Logger): () => void {
       services.sessions.forgetOld(),
       services.limits.forgetOld(),
       services.idempotency.forgetOld(),
+      services.imports.tidy(),
     ]).catch((error: unknown) => log.warn({ error }, 'housekeeping failed, will be tried again'));
   }, EVERY_MS);
   timer.unref();

@@ -1,12 +1,19 @@
+import { join } from 'node:path';
+
 import type { Sequelize } from 'sequelize';
 
 import { Accounts } from './accounts/accounts.ts';
 import { Passwords } from './accounts/passwords.ts';
 import type { Config } from './config.ts';
+import { EditionWriter } from './editions/edition-writer.ts';
+import { Editions } from './editions/editions.ts';
 import { Idempotency } from './http/idempotency.ts';
 import { Limits } from './http/limits.ts';
+import { Imports } from './imports/imports.ts';
+import { Uploads } from './imports/uploads.ts';
 import type { Logger } from './logger.ts';
 import { Receivers } from './receivers/receivers.ts';
+import { Regions } from './regions/regions.ts';
 import { SessionDoor } from './sessions/session-door.ts';
 import { Sessions } from './sessions/sessions.ts';
 import { Sites } from './sites/sites.ts';
@@ -17,11 +24,13 @@ import { Workshops } from './workshops/workshops.ts';
 export type Services = ReturnType<typeof createServices>;
 
 /** Builds every service and hands each the others it needs. */
-export function createServices(database: Sequelize, config: Config, _log: Logger) {
+export function createServices(database: Sequelize, config: Config, log: Logger) {
   const passwords = new Passwords();
   const workshops = new Workshops(database);
   const accounts = new Accounts(database, passwords, workshops);
   const sessions = new Sessions(database, config, accounts, workshops);
+  const regions = new Regions(database);
+  const uploads = new Uploads(join(config.DATA_DIR, 'uploads'));
   return {
     idempotency: new Idempotency(database),
     limits: new Limits(database, config),
@@ -33,5 +42,9 @@ export function createServices(database: Sequelize, config: Config, _log: Logger
     door: new SessionDoor(sessions, config),
     receivers: new Receivers(database, accounts),
     sites: new Sites(database),
+    regions,
+    editions: new Editions(database, regions),
+    uploads,
+    imports: new Imports(database, regions, new EditionWriter(database), uploads, log),
   };
 }

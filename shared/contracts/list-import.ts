@@ -57,7 +57,8 @@ export const importMatching = z.strictObject({
     )
     .max(200)
     .optional(),
-  label: nameText,
+  /** What to call the edition; left out: as the file is called. */
+  label: nameText.optional(),
   date: z.iso.date('Give a date such as 2026-03-01.').optional(),
 });
 export type ImportMatching = z.output<typeof importMatching>;

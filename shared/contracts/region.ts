@@ -9,6 +9,7 @@ import {
   resourceId,
   spanHz,
 } from './quantities.ts';
+import { pageQuery } from './paging.ts';
 
 /** A part of the spectrum divided into equal channels. */
 export const rasterRange = z
@@ -45,13 +46,20 @@ export type Region = z.infer<typeof region>;
 export const edition = z.object({
   id: resourceId,
   regionId: resourceId,
+  regionName: z.string(),
   label: z.string(),
   date: z.iso.date(),
+  /** Name of the file it came from. */
+  source: z.string(),
   note: z.string(),
   stations: z.int().nonnegative(),
   createdAt: z.iso.datetime(),
 });
 export type Edition = z.infer<typeof edition>;
+
+/** Which stations of an edition are asked for: by name, call sign or frequency in kHz. */
+export const stationQuery = pageQuery.extend({ search: z.string().trim().max(100).default('') });
+export type StationQuery = z.output<typeof stationQuery>;
 
 /** A station of an edition. */
 export const listedStation = z.object({

@@ -1,0 +1,112 @@
+import { Op, type Sequelize, type WhereOptions } from 'sequelize';
+
+import type { Page, PageQuery } from '../../shared/contracts/paging.ts';
+import type {
+  Edition,
+  ListedStation,
+  Region,
+  StationQuery,
+} from '../../shared/contracts/region.ts';
+import { nearestChannel } from '../../shared/radio/raster.ts';
+import type { Actor } from '../http/actor.ts';
+import { NotFoundError } from '../http/errors.ts';
+import { EditionModel } from './edition-model.ts';
+import { StationModel } from './station-model.ts';
+import { matchesSearch } from './station-search.ts';
+
+/** What the editions need of the regions they belong to. */
+interface RegionRegister {
+  get(actor: Actor, id: number): Promise<Region>;
+  byId(actor: Actor): Promise<ReadonlyMap<number, Region>>;
+}
+
+/** Keeps the editions of the regions' lists. */
+export class Editions {
+  private readonly regions: RegionRegister;
+
+  constructor(database: Sequelize, regions: RegionRegister) {
+    this.regions = regions;
+    EditionModel.register(database);
+    StationModel.register(database);
+  }
+
+  /** All editions of the workshop, the newest first. */
+  async list(actor: Actor, query: PageQuery): Promise<Page<Edition>> {
+    return page(await this.regions.byId(actor), query);
+  }
+
+  async listOf(actor: Actor, regionId: number, query: PageQuery): Promise<Page<Edition>> {
+    const region = await this.regions.get(actor, regionId);
+    return page(new Map([[region.id, region]]), query);
+  }
+
+  async get(actor: Actor, id: number): Promise<Edition> {
+    const { row, region } = await this.find(actor, id);
+    return toEdition(row, region);
+  }
+
+  async stations(actor: Actor, id: number, query: StationQuery): Promise<Page<ListedStation>> {
+    const { region } = await this.find(actor, id);
+    const where: WhereOptions = { editionId: id, ...matchesSearch(query.search) };
+    const { rows, count } = await StationModel.findAndCountAll({
+      where,
+      order: [
+        ['frequencyHz', 'ASC'],
+        ['id', 'ASC'],
+      ],
+      limit: query.pageSize,
+      offset: (query.page - 1) * query.pageSize,
+    });
+    return { items: rows.map((row) => toStation(row, region)), total: count };
+  }
+
+  /** The edition with the region it belongs to; another workshop's is not found. */
+  async find(actor: Actor, id: number): Promise<{ row: EditionModel; region: Region }> {
+    const row = await EditionModel.findByPk(id);
+    const region = row && (await this.regions.byId(actor)).get(row.regionId);
+    if (!row || !region) throw new NotFoundError('edition', id);
+    return { row, region };
+  }
+}
+
+async function page(
+  regions: ReadonlyMap<number, Region>,
+  { page: number, pageSize }: PageQuery,
+): Promise<Page<Edition>> {
+  const { rows, count } = await EditionModel.findAndCountAll({
+    where: { regionId: { [Op.in]: [...regions.keys()] } },
+    order: [
+      ['date', 'DESC'],
+      ['id', 'DESC'],
+    ],
+    limit: pageSize,
+    offset: (number - 1) * pageSize,
+  });
+  return { items: rows.map((row) => toEdition(row, regions.get(row.regionId))), total: count };
+}
+
+const toEdition = (row: EditionModel, region: Region | undefined): Edition => ({
+  id: row.id,
+  regionId: row.regionId,
+  regionName: region?.name ?? '',
+  label: row.label,
+  date: row.date,
+  source: row.source,
+  note: row.note,
+  stations: row.stations,
+  createdAt: row.createdAt.toISOString(),
+});
+
+const toStation = (row: StationModel, { raster }: Region): ListedStation => ({
+  id: row.id,
+  name: row.name,
+  callSign: row.callSign,
+  frequencyHz: row.frequencyHz,
+  latitude: row.latitude,
+  longitude: row.longitude,
+  powerDayW: row.powerDayW,
+  powerNightW: row.powerNightW,
+  hours: row.hours,
+  note: row.note,
+  onRaster: nearestChannel(raster, row.frequencyHz) === row.frequencyHz,
+});

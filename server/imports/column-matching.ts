@@ -1,0 +1,84 @@
+import type { ImportColumn, ImportField, ImportUnit } from '../../shared/contracts/list-import.ts';
+import { type Axis, readCoordinate } from './cell-coordinate.ts';
+import { type DecimalMark, isBlank } from './cell-number.ts';
+import { readHeader } from './header-words.ts';
+
+const FREQUENCY_UNITS: readonly ImportUnit[] = ['kHz', 'MHz', 'Hz'];
+const POWER_UNITS: readonly ImportUnit[] = ['W', 'kW', 'dBW'];
+const ANGLE_UNITS: readonly ImportUnit[] = ['degrees', 'dms'];
+
+/** Units in which a field can be given; none for text. */
+export const UNITS_OF: Readonly<Record<ImportField, readonly ImportUnit[]>> = {
+  name: [],
+  callSign: [],
+  frequency: FREQUENCY_UNITS,
+  latitude: ANGLE_UNITS,
+  longitude: ANGLE_UNITS,
+  locator: [],
+  power: POWER_UNITS,
+  powerDay: POWER_UNITS,
+  powerNight: POWER_UNITS,
+  hours: [],
+  note: [],
+};
+
+/**
+ * Proposes what each column holds, by its header. Of two columns for one field the first is taken.
+ * A unit that neither header nor cells tell stays open: it is asked, never guessed.
+ */
+export function proposeColumns(
+  headers: readonly string[],
+  sample: readonly (readonly string[])[],
+  mark: DecimalMark,
+): ImportColumn[] {
+  const taken = new Set<ImportField>();
+  return headers.map((header, index) => {
+    const { field, unit } = readHeader(header);
+    if (field === null || taken.has(field)) return { header, field: null, unit: null };
+    taken.add(field);
+    const cells = sample.map((row) => row[index] ?? '').filter((cell) => !isBlank(cell));
+    return { header, field, unit: unitOf(field, unit, cells, mark) };
+  });
+}
+
+function unitOf(
+  field: ImportField,
+  named: ImportUnit | null,
+  cells: readonly string[],
+  mark: DecimalMark,
+): ImportUnit | null {
+  if (named !== null && UNITS_OF[field].includes(named)) return named;
+  if (field === 'latitude' || field === 'longitude') return angleUnit(field, cells, mark);
+  return UNITS_OF[field].length === 0 ? null : cellUnit(field, cells);
+}
+
+/** Packed digits (DDMMSS) are no decimal degrees: where most cells are, the unit is dms. */
+function angleUnit(axis: Axis, cells: readonly string[], mark: DecimalMark): ImportUnit {
+  const reads = (unit: ImportUnit) =>
+    cells.filter((cell) => readCoordinate(cell, axis, unit, mark) !== null).length;
+  return reads('dms') > reads('degrees') ? 'dms' : 'degrees';
+}
+
+/** The unit that every cell carries behind its number, if all carry the same. */
+function cellUnit(field: ImportField, cells: readonly string[]): ImportUnit | null {
+  const carried = new Set(
+    cells.map((cell) => /\d\s*([a-z]+)\s*$/i.exec(cell)?.[1]?.toLowerCase() ?? ''),
+  );
+  const [only] = carried;
+  if (carried.size !== 1) return null;
+  return UNITS_OF[field].find((unit) => unit.toLowerCase() === only) ?? null;
+}
+
+/** Whether the columns can be read without asking: a frequency, a name, and every unit known. */
+export function isComplete(columns: readonly ImportColumn[]): boolean {
+  const fields = new Set(columns.map(({ field }) => field));
+  const isNamed = fields.has('name') || fields.has('callSign');
+  const isPlaced = fields.has('latitude') === fields.has('longitude');
+  return fields.has('frequency') && isNamed && isPlaced && openUnits(columns).length === 0;
+}
+
+/** Indexes of the columns whose unit is needed and not known. */
+export const openUnits = (columns: readonly ImportColumn[]): number[] =>
+  columns.flatMap(({ field, unit }, index) =>
+    field !== null && unit === null && UNITS_OF[field].length > 0 ? [index] : [],
+  );

@@ -1,0 +1,35 @@
+import { stringify } from 'csv-stringify';
+
+import { judgedRows } from './list-check.ts';
+import type { ListReading } from './list-inspection.ts';
+import { RowTally } from './row-tally.ts';
+
+/**
+ * The rejected rows as CSV in UTF-8: the file's own columns, then `line` and `fault`, so that the
+ * mended file can be imported again. Text that a spreadsheet would run as a formula is defused by
+ * an apostrophe; numbers stay numbers.
+ */
+export async function* rejectedRows(path: string, reading: ListReading): AsyncGenerator<string[]> {
+  const width = reading.columns.length;
+  yield [...reading.columns.map(({ header }) => header), 'line', 'fault'];
+  for await (const judged of judgedRows(path, reading, new RowTally())) {
+    if (!('faults' in judged)) continue;
+    const { line, cells } = judged.row;
+    const own = Array.from({ length: width }, (_, index) => cells[index] ?? '');
+    const faults = judged.faults.map(
+      ({ column, value, expected }) => `${column}: "${value}" is not ${expected}`,
+    );
+    yield [...own, ...cells.slice(width), String(line), faults.join('; ')];
+  }
+}
+
+/** Turns rows into the text of a CSV file. */
+export const csvWriter = (delimiter: string) =>
+  stringify({ bom: true, delimiter, record_delimiter: 'windows', cast: { string: defuse } });
+
+const PLAIN_NUMBER = /^[-+]?[\d\s.,]*\d[\d\s.,]*(?:e[-+]?\d+)?$/i;
+
+/** Keeps a spreadsheet from running a cell. */
+export function defuse(cell: string): string {
+  return /^[=+\-@\t\r]/.test(cell) && !PLAIN_NUMBER.test(cell) ? `'${cell}` : cell;
+}

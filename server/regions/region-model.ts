@@ -1,0 +1,38 @@
+import {
+  type CreationOptional,
+  DataTypes,
+  type InferAttributes,
+  type InferCreationAttributes,
+  Model,
+  type NonAttribute,
+  type Sequelize,
+} from 'sequelize';
+
+import type { ItuRegion } from '../../shared/radio/site.ts';
+import type { RasterRange } from '../../shared/radio/station.ts';
+
+export class RegionModel extends Model<
+  InferAttributes<RegionModel>,
+  InferCreationAttributes<RegionModel>
+> {
+  declare id: CreationOptional<number>;
+  declare workshopId: number;
+  declare name: string;
+  declare ituRegion: ItuRegion;
+  declare raster: RasterRange[];
+  /** Number of its editions, where the query counts them. */
+  declare editions?: NonAttribute<number>;
+
+  static register(sequelize: Sequelize): void {
+    RegionModel.init(
+      {
+        id: { type: DataTypes.INTEGER.UNSIGNED, autoIncrement: true, primaryKey: true },
+        workshopId: { type: DataTypes.INTEGER.UNSIGNED, allowNull: false },
+        name: { type: DataTypes.STRING(120), allowNull: false },
+        ituRegion: { type: DataTypes.TINYINT.UNSIGNED, allowNull: false },
+        raster: { type: DataTypes.JSON, allowNull: false },
+      },
+      { sequelize, modelName: 'Region', tableName: 'regions' },
+    );
+  }
+}

@@ -1,0 +1,106 @@
+import { literal, type Sequelize } from 'sequelize';
+
+import type { Page, PageQuery } from '../../shared/contracts/paging.ts';
+import type { Region, RegionDraft } from '../../shared/contracts/region.ts';
+import { defaultRaster } from '../../shared/radio/raster.ts';
+import { isDeadlock } from '../db/database-faults.ts';
+import { inTransaction } from '../db/transaction.ts';
+import { type Actor, hasRole } from '../http/actor.ts';
+import { ConflictError, NotFoundError } from '../http/errors.ts';
+import { RegionModel } from './region-model.ts';
+
+const EDITIONS = literal('(SELECT COUNT(*) FROM editions WHERE editions.region_id = Region.id)');
+
+/** Keeps the regions of a workshop. */
+export class Regions {
+  private readonly database: Sequelize;
+
+  constructor(database: Sequelize) {
+    this.database = database;
+    RegionModel.register(database);
+  }
+
+  async list(actor: Actor, { page, pageSize }: PageQuery): Promise<Page<Region>> {
+    const { workshopId } = actor;
+    const rows = await RegionModel.findAll({
+      attributes: { include: [[EDITIONS, 'editions']] },
+      where: { workshopId },
+      order: [
+        ['name', 'ASC'],
+        ['id', 'ASC'],
+      ],
+      limit: pageSize,
+      offset: (page - 1) * pageSize,
+    });
+    const total = await RegionModel.count({ where: { workshopId } });
+    return { items: rows.map((row) => toRegion(actor, row)), total };
+  }
+
+  async get(actor: Actor, id: number): Promise<Region> {
+    return toRegion(actor, await find(actor, id));
+  }
+
+  /** The workshop's regions by id, for what belongs to them. */
+  async byId(actor: Actor): Promise<ReadonlyMap<number, Region>> {
+    const rows = await RegionModel.findAll({ where: { workshopId: actor.workshopId } });
+    return new Map(rows.map((row) => [row.id, toRegion(actor, row)]));
+  }
+
+  async add(actor: Actor, draft: RegionDraft): Promise<Region> {
+    const row = await RegionModel.create({ workshopId: actor.workshopId, ...filled(draft) });
+    return this.get(actor, row.id);
+  }
+
+  async change(actor: Actor, id: number, draft: RegionDraft): Promise<Region> {
+    await this.whileFree(actor, id, (row) => row.update(filled(draft)));
+    return this.get(actor, id);
+  }
+
+  /** Removes the region with its editions; plans keep what they were judged against. */
+  async remove(actor: Actor, id: number): Promise<void> {
+    await this.whileFree(actor, id, (row) => row.destroy());
+  }
+
+  /** An import in progress holds the region; waiting for it could take as long as the import. */
+  private async whileFree(
+    actor: Actor,
+    id: number,
+    work: (row: RegionModel) => Promise<unknown>,
+  ): Promise<void> {
+    await inTransaction(this.database, async () => {
+      const row = await find(actor, id);
+      try {
+        await this.database.query('SELECT id FROM regions WHERE id = ? FOR UPDATE NOWAIT', {
+          replacements: [id],
+        });
+      } catch (error) {
+        if (!isDeadlock(error)) throw error;
+        throw new ConflictError(
+          'A list is being stored in this region. Wait for it, or cancel it.',
+        );
+      }
+      await work(row);
+    });
+  }
+}
+
+async function find({ workshopId }: Actor, id: number): Promise<RegionModel> {
+  const row = await RegionModel.findOne({
+    attributes: { include: [[EDITIONS, 'editions']] },
+    where: { id, workshopId },
+  });
+  if (!row) throw new NotFoundError('region', id);
+  return row;
+}
+
+const filled = ({ name, ituRegion, raster }: RegionDraft) => ({
+  name,
+  ituRegion,
+  raster: raster ?? defaultRaster(ituRegion),
+});
+
+function toRegion(actor: Actor, row: RegionModel): Region {
+  const { id, name, ituRegion, raster, editions } = row;
+  const editable = hasRole(actor, 'librarian');
+  return { id, name, ituRegion, raster, editable, editions: Number(editions ?? 0) };
+}
