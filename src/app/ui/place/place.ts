@@ -1,22 +1,18 @@
+import { locatorCentre } from '../../../../shared/radio/locator';
+import type { Place } from '../../../../shared/radio/path';
 import { type Axis, formatCoordinate, parseCoordinate } from './coordinate';
-import { locatorCentre } from './locator';
-
-/** A point on the globe, degrees, north and east positive. */
-export interface Place {
-  readonly latitude: number;
-  readonly longitude: number;
-}
 
 export type PlaceReading = { readonly place: Place | null } | { readonly problem: string };
 
+/** Four characters or more: two name a square as large as a country. */
+const LOCATOR = /^[A-R]{2}\d{2}(?:[A-X]{2}(?:\d{2})?)?$/iu;
 const HEMISPHERE_BETWEEN = /^(.*[NS])[\s,;/]*(.*[EW])$|^([NS].*?)[\s,;/]*([EW].*)$/isu;
 
 /** Reads a pair of coordinates, latitude first, or a Maidenhead locator. */
 export function parsePlace(text: string): PlaceReading {
   const plain = text.replaceAll('º', '°').normalize('NFKC').trim();
   if (plain === '') return { place: null };
-  const centre = locatorCentre(plain);
-  if (centre) return { place: centre };
+  if (LOCATOR.test(plain)) return { place: centreOf(plain) };
 
   const [north, east] = splitPair(plain);
   if (north === undefined || east === undefined) return { problem: expected() };
@@ -33,6 +29,12 @@ export function formatPlace(latitude: number | null, longitude: number | null): 
   if (latitude === null || longitude === null) return '–';
   const write = (degrees: number, axis: Axis) => formatCoordinate(degrees, axis);
   return `${write(latitude, 'latitude')}, ${write(longitude, 'longitude')}`;
+}
+
+/** Centre of a locator's square, to the metre. */
+function centreOf(locator: string): Place {
+  const { latitude, longitude } = locatorCentre(locator);
+  return { latitude: Number(latitude.toFixed(5)), longitude: Number(longitude.toFixed(5)) };
 }
 
 /** Parts at the letter between the two, at a semicolon or slash, at ", ", else at the one comma or space. */
