@@ -11,8 +11,7 @@ const NOBODY = '$2b$10$aJ1kkidavSMuTVOetcaNte/cfmuoVf4BHTl/jOBxmFxodAHED.rSm';
 /** Hashes and checks passwords in a few threads of their own: it is slow on purpose. */
 export class Passwords {
   private readonly pool = new Piscina({
-    filename: new URL('./password-worker.ts', import.meta.url).href,
-    execArgv: ['--import', 'tsx'],
+    filename: new URL('./password-thread.mjs', import.meta.url).href,
     minThreads: 0,
     maxThreads: THREADS,
     maxQueue: MAX_WAITING,

@@ -25,7 +25,8 @@ async function createMigrator(database: Sequelize): Promise<Umzug<Run>> {
       up: async ({ context }) => (await load(name)).up(context),
       down: async ({ context }) => (await load(name)).down(context),
     })),
-    context: (sql) => database.query(sql),
+    // Umzug calls a function to get the context, and the context here is a function itself.
+    context: () => (sql) => database.query(sql),
     storage: new SequelizeStorage({ sequelize: database, tableName: 'migrations' }),
     logger: undefined,
   });

@@ -10,20 +10,29 @@ export const email = z
   .max(254, 'Give at most 254 characters.')
   .transform((value) => value.toLowerCase());
 
-/** What registering takes. The length is counted in characters; every one of them matters. */
+/** Characters as people count them: one outside the basic plane is two units of a string. */
+const characters = (text: string): number => [...text].length;
+
+/** What registering takes. Every character of the password matters. */
 export const accountDraft = z.strictObject({
   email,
   name: z.string().trim().min(1, 'Give your name.').max(120, 'Give at most 120 characters.'),
   password: z
     .string('Give a password.')
-    .min(8, 'Give a password of at least 8 characters; 12 or more are better.')
-    .max(256, 'Give a password of at most 256 characters.'),
+    .refine(
+      (text) => characters(text) >= 8,
+      'Give a password of at least 8 characters; 12 or more are better.',
+    )
+    .refine((text) => characters(text) <= 256, 'Give a password of at most 256 characters.'),
 });
 export type AccountDraft = z.output<typeof accountDraft>;
 
 export const credentials = z.strictObject({
   email,
-  password: z.string('Give your password.').min(1, 'Give your password.').max(256),
+  password: z
+    .string('Give your password.')
+    .min(1, 'Give your password.')
+    .max(512, 'Give a password of at most 256 characters.'),
 });
 export type Credentials = z.output<typeof credentials>;
 
