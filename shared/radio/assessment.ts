@@ -3,13 +3,26 @@
  *
  * @module radio/assessment
  */
+import type { BandScan, Finding, FindingSink } from './band-scan.ts';
+import { Deficit } from './deficit.ts';
+import { type DialTotal, DialTotals } from './dial-totals.ts';
 import type { FieldStrength } from './field-strength.ts';
 import type { Grade } from './grades.ts';
+import { ifHarmonics } from './harmonic-whistles.ts';
+import { intermodulatingPairs, intermodulationResponse } from './intermodulation.ts';
 import type { Receiver } from './receiver.ts';
+import { bandScans } from './receiver-at-site.ts';
+import { type RejectionPoint, rejectionCurve } from './rejection-curve.ts';
 import type { Response } from './response.ts';
+import { ResponseSelection } from './response-selection.ts';
+import { buildResponse } from './responses.ts';
+import { ifSelectivity } from './selectivity.ts';
 import type { Period, Site } from './site.ts';
+import { Spectrum } from './spectrum.ts';
 import type { RasterRange, Station } from './station.ts';
-import type { Verdict } from './verdict.ts';
+import { type FrequencySpan, imageSpan, oscillatorSpan } from './tuning-spans.ts';
+import { type BandDeficit, type Verdict, verdictOf } from './verdict.ts';
+import { type Warning, warningsOf } from './warnings.ts';
 
 /** What is assessed. */
 export interface AssessmentInput {
@@ -30,44 +43,16 @@ export interface AssessmentInput {
   readonly limit: number;
 }
 
-/** Something the user should know about the input; `path` names the field. */
-export interface Warning {
-  readonly path: string;
-  readonly message: string;
-}
-
 /** A station that was not computed. */
 export interface SkippedStation {
   readonly station: number;
   readonly reason: string;
 }
 
-/** Two frequencies, the lower first. */
-export interface FrequencySpan {
-  readonly low: number;
-  readonly high: number;
-}
-
-/** Rejection at one dial setting, stray pick-up included. */
-export interface RejectionPoint {
-  readonly dialHz: number;
-  readonly imageDb: number;
-  readonly ifDb: number;
-}
-
 /** Where a harmonic of the IF falls on a band. */
 export interface HarmonicPoint {
   readonly harmonic: number;
   readonly dialHz: number;
-}
-
-/** Power sum of all that is heard at one dial setting. */
-export interface DialTotal {
-  readonly dialHz: number;
-  readonly ratioDb: number;
-  readonly grade: Grade;
-  /** The stations that are heard, ascending. */
-  readonly stations: readonly number[];
 }
 
 /** One band of the receiver, assessed. */
@@ -89,4 +74,94 @@ export interface Assessment {
   readonly warnings: readonly Warning[];
   readonly skipped: readonly SkippedStation[];
   readonly bands: readonly BandAssessment[];
+}
+
+/**
+ * Assesses a receiver.
+ *
+ * All levels are equivalent fields at the aerial, so the gain of the receiver cancels. A response
+ * of a station of field E through the product (m, n):
+ *
+ *     g = E - A(f);   I = g + H_m - H_h + K_n + (n - 1)(r + g - 80)
+ *     ratio = S - (I + W);   margin = ratio - P0
+ *
+ * Stations without a field in the period are listed as skipped and count nowhere.
+ *
+ * @param input Receiver, site, stations with their fields, raster, orders and limits.
+ * @returns The verdict, and each band with its responses, worst first.
+ * @throws {RangeError} If a value is out of range; the message names it.
+ *
+ * @example
+ *   assess({ receiver, site, stations, fields, raster, period: 'night', maxM: 3, maxN: 2,
+ *     leaveOutBetterThan: 'slightly-annoying', limit: 2000 }).verdict.usable; // 12
+ */
+export function assess(input: AssessmentInput): Assessment {
+  const { receiver, site, raster, period, maxM } = input;
+  const spectrum = new Spectrum(input.stations, input.fields);
+  const selectivity = ifSelectivity(receiver.selectivity, receiver.ifHz);
+  const pairs = intermodulatingPairs(spectrum, receiver.ifHz, selectivity.b6Hz / 2);
+  const everywhere = pairs.map((pair) => intermodulationResponse(spectrum, pair));
+  const bands: BandAssessment[] = [];
+  const deficits: BandDeficit[] = [];
+  for (const scan of bandScans(receiver, site, raster, spectrum)) {
+    const deficit = new Deficit(scan);
+    bands.push(assessBand(input, scan, deficit, everywhere));
+    deficits.push({ band: scan.dial.band, protectionDb: scan.dial.protectionDb, deficit });
+  }
+  return {
+    verdict: verdictOf(spectrum, deficits),
+    warnings: warningsOf({ receiver, selectivity, site, period, spectrum, maxM }),
+    skipped: skippedStations(input),
+    bands,
+  };
+}
+
+function assessBand(
+  input: AssessmentInput,
+  scan: BandScan,
+  deficit: Deficit,
+  everywhere: readonly Response[],
+): BandAssessment {
+  const { receiver, period, limit } = input;
+  const { dial } = scan;
+  const { band } = dial;
+  const totals = new DialTotals(dial);
+  const selection = new ResponseSelection(dial, input.leaveOutBetterThan, limit);
+  scan.scan(receiver.ifHz, input, new Sinks([deficit, totals, selection]));
+  const context = { receiver, period, scan };
+  const responses = selection.selected().map((selected) => buildResponse(context, selected));
+  return {
+    name: band.name,
+    oscillatorHz: oscillatorSpan(band, receiver.ifHz),
+    imageHz: imageSpan(band, receiver.ifHz),
+    rejection: rejectionCurve(receiver, scan.frontEnd, band),
+    harmonics: ifHarmonics(receiver.ifHz, band.lowHz, band.highHz),
+    totals: totals.totals(),
+    total: selection.total + everywhere.length,
+    responses: [...responses, ...everywhere].slice(0, limit),
+  };
+}
+
+/** Hands each finding to several sinks. */
+class Sinks implements FindingSink {
+  readonly takesHidden: boolean;
+  private readonly sinks: readonly FindingSink[];
+
+  constructor(sinks: readonly FindingSink[]) {
+    this.sinks = sinks;
+    this.takesHidden = sinks.some(({ takesHidden }) => takesHidden);
+  }
+
+  take(finding: Readonly<Finding>): void {
+    for (const sink of this.sinks) sink.take(finding);
+  }
+}
+
+function skippedStations({ stations, fields }: AssessmentInput): SkippedStation[] {
+  const byId = new Map(fields.map((field) => [field.station, field]));
+  return stations.flatMap(({ id, fieldDb }) => {
+    const field = byId.get(id);
+    if ((fieldDb ?? field?.fieldDb ?? null) !== null) return [];
+    return [{ station: id, reason: field?.notes.join(' ') || 'No field was computed.' }];
+  });
 }

@@ -3,12 +3,13 @@
  *
  * @module radio/candidates
  */
-import type { FrequencySpan, HarmonicPoint } from './assessment.ts';
+import type { HarmonicPoint } from './assessment.ts';
 import type { FieldStrength } from './field-strength.ts';
 import type { Grade } from './grades.ts';
 import type { Receiver } from './receiver.ts';
 import type { Period, Site } from './site.ts';
 import type { RasterRange, Station } from './station.ts';
+import type { FrequencySpan } from './tuning-spans.ts';
 
 /** One site with its list and raster. */
 export interface CandidateCase {

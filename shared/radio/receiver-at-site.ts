@@ -1,0 +1,97 @@
+/**
+ * A receiver set up at a site: every band over the stations that are on the air.
+ *
+ * @module radio/receiver-at-site
+ */
+import { BandScan } from './band-scan.ts';
+import { Dial } from './dial.ts';
+import { FrontEnd } from './front-end.ts';
+import { MAX_OSCILLATOR_ORDER } from './product-levels.ts';
+import { emissionWidth, programmeBands } from './programme.ts';
+import type { Receiver, Service } from './receiver.ts';
+import { type IfSelectivity, ifSelectivity } from './selectivity.ts';
+import type { Site } from './site.ts';
+import type { Spectrum } from './spectrum.ts';
+import type { RasterRange } from './station.ts';
+import { programmeWeighting, toneWeighting } from './weighting.ts';
+import { weightingGrid, WeightingTable } from './weighting-table.ts';
+
+/** Pitch of telegraphy where the receiver does not say, hertz. */
+const USUAL_PITCH_HZ = 1_000;
+
+/**
+ * Weighting tables of one receiver in one ITU Region: one for each kind of listening and tuning
+ * tolerance, made when first asked for.
+ */
+export class WeightingTables {
+  private readonly grids = new Map<boolean, (step: number) => number>();
+  private readonly tables = new Map<string, WeightingTable>();
+  private readonly receiver: Receiver;
+  private readonly selectivity: IfSelectivity;
+  private readonly region: Site['ituRegion'];
+
+  constructor(receiver: Receiver, selectivity: IfSelectivity, region: Site['ituRegion']) {
+    this.receiver = receiver;
+    this.selectivity = selectivity;
+    this.region = region;
+  }
+
+  table(service: Service, toleranceHz: number): WeightingTable {
+    const byTone = service === 'telegraphy' || service === 'beacon';
+    const key = `${byTone}/${toleranceHz}`;
+    const known = this.tables.get(key);
+    if (known !== undefined) return known;
+    const widest = MAX_OSCILLATOR_ORDER * (this.selectivity.b60Hz / 2);
+    const table = new WeightingTable(this.grid(byTone), toleranceHz, widest);
+    this.tables.set(key, table);
+    return table;
+  }
+
+  private grid(byTone: boolean): (step: number) => number {
+    const known = this.grids.get(byTone);
+    if (known !== undefined) return known;
+    const { audioCornerHz, bfo } = this.receiver;
+    const weighting = byTone
+      ? toneWeighting(this.selectivity, bfo?.pitchHz || USUAL_PITCH_HZ)
+      : programmeWeighting(
+          this.selectivity,
+          audioCornerHz,
+          programmeBands(emissionWidth(this.region)),
+        );
+    const grid = weightingGrid(weighting);
+    this.grids.set(byTone, grid);
+    return grid;
+  }
+}
+
+/**
+ * Sets up the bands of a receiver over the stations of a site.
+ *
+ * @param receiver The receiver.
+ * @param site The site.
+ * @param raster Raster of the region.
+ * @param spectrum The stations.
+ * @param tables Weighting tables, shared by all that is computed for the receiver.
+ * @returns One scan a band, in the order of the bands.
+ * @throws {RangeError} If a value of the receiver or the site is out of range.
+ */
+export function bandScans(
+  receiver: Receiver,
+  site: Site,
+  raster: readonly RasterRange[],
+  spectrum: Spectrum,
+  tables = new WeightingTables(
+    receiver,
+    ifSelectivity(receiver.selectivity, receiver.ifHz),
+    site.ituRegion,
+  ),
+): BandScan[] {
+  const { b6Hz, b60Hz } = ifSelectivity(receiver.selectivity, receiver.ifHz);
+  return receiver.bands.map((band) => {
+    const frontEnd = new FrontEnd(receiver, band);
+    const weightingFor = (toleranceHz: number): WeightingTable =>
+      tables.table(band.service, toleranceHz);
+    const dial = new Dial({ band, site, raster, spectrum, frontEnd, b6Hz, b60Hz, weightingFor });
+    return new BandScan(receiver, dial, frontEnd);
+  });
+}
