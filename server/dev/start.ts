@@ -41,6 +41,7 @@ async function bringUp(environment: NodeJS.ProcessEnv): Promise<void> {
   const began = performance.now();
   const settings = await readStartSettings(environment, root, say);
   mkdirSync(settings.dataFolder, { recursive: true, mode: 0o700 });
+  if (settings.databaseUrl === undefined) ensurePrograms([MARIADB], say);
   const client = buildClient(root, say);
   running.push(client.stop);
   const [database] = await Promise.all([ensureDatabase(settings), client.done]);
@@ -76,7 +77,6 @@ async function ensureDatabase(settings: StartSettings): Promise<string> {
     say('Using the database named by DATABASE_URL.');
     return settings.databaseUrl;
   }
-  ensurePrograms([MARIADB], say);
   const port = await firstFreePort('127.0.0.1', DATABASE_PORT);
   const database = {
     folder: join(settings.dataFolder, 'mariadb'),
