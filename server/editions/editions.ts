@@ -1,4 +1,4 @@
-import { Op, type Sequelize, type WhereOptions } from 'sequelize';
+import { Op, type Sequelize } from 'sequelize';
 
 import type { Page, PageQuery } from '../../shared/contracts/paging.ts';
 import type {
@@ -47,9 +47,8 @@ export class Editions {
 
   async stations(actor: Actor, id: number, query: StationQuery): Promise<Page<ListedStation>> {
     const { region } = await this.find(actor, id);
-    const where: WhereOptions = { editionId: id, ...matchesSearch(query.search) };
     const { rows, count } = await StationModel.findAndCountAll({
-      where,
+      where: { [Op.and]: [{ editionId: id }, matchesSearch(query.search)] },
       order: [
         ['frequencyHz', 'ASC'],
         ['id', 'ASC'],

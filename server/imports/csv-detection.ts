@@ -22,7 +22,7 @@ function score(sample: string, delimiter: string): number {
 function parseSample(sample: string, delimiter: string): string[][] {
   try {
     const options = { ...csvOptions(delimiter), info: false, to: SAMPLE_ROWS };
-    return parse(sample, options) as unknown as string[][];
+    return parse(sample, options);
   } catch {
     return []; // A quotation mark that this delimiter leaves open: not the one.
   }

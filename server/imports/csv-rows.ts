@@ -1,7 +1,7 @@
 import { createReadStream } from 'node:fs';
 import { pipeline } from 'node:stream';
 
-import { type CastingContext, CsvError, type Options, parse } from 'csv-parse';
+import { CsvError, type InfoField, type Options, parse } from 'csv-parse';
 import iconv from 'iconv-lite';
 
 import { BadListError } from './bad-list-error.ts';
@@ -36,7 +36,7 @@ export const csvOptions = (delimiter: string): Options => ({
 
 interface ParsedRecord {
   readonly record: string[];
-  readonly info: CastingContext;
+  readonly info: InfoField;
 }
 
 /**

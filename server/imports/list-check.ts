@@ -2,7 +2,7 @@ import type { ImportCheck, ImportFault } from '../../shared/contracts/list-impor
 import { type CsvRow, csvRows } from './csv-rows.ts';
 import { fingerprintOf, identityOf } from './fingerprint.ts';
 import type { ListReading } from './list-inspection.ts';
-import { type KnownRow, RowTally } from './row-tally.ts';
+import type { KnownRow, RowTally } from './row-tally.ts';
 import { RowReader, type StationRow } from './station-row.ts';
 
 const FAULTS_ANSWERED = 1000;

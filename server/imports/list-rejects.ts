@@ -5,27 +5,31 @@ import type { ListReading } from './list-inspection.ts';
 import { RowTally } from './row-tally.ts';
 
 /**
- * The rejected rows as CSV in UTF-8: the file's own columns, then `line` and `fault`, so that the
- * mended file can be imported again. Text that a spreadsheet would run as a formula is defused by
+ * The rejected rows as CSV in UTF-8: `line` and `fault`, then the file's own columns, so
+ * that the mended file can be imported again. Text that a spreadsheet would run as a formula is defused by
  * an apostrophe; numbers stay numbers.
  */
 export async function* rejectedRows(path: string, reading: ListReading): AsyncGenerator<string[]> {
-  const width = reading.columns.length;
-  yield [...reading.columns.map(({ header }) => header), 'line', 'fault'];
+  yield ['line', 'fault', ...reading.columns.map(({ header }) => header)];
   for await (const judged of judgedRows(path, reading, new RowTally())) {
     if (!('faults' in judged)) continue;
     const { line, cells } = judged.row;
-    const own = Array.from({ length: width }, (_, index) => cells[index] ?? '');
     const faults = judged.faults.map(
       ({ column, value, expected }) => `${column}: "${value}" is not ${expected}`,
     );
-    yield [...own, ...cells.slice(width), String(line), faults.join('; ')];
+    yield [String(line), faults.join('; '), ...cells];
   }
 }
 
 /** Turns rows into the text of a CSV file. */
 export const csvWriter = (delimiter: string) =>
-  stringify({ bom: true, delimiter, record_delimiter: 'windows', cast: { string: defuse } });
+  stringify({
+    bom: true,
+    delimiter,
+    record_delimiter: 'windows',
+    quoted_match: /[\r\n]/,
+    cast: { string: defuse },
+  });
 
 const PLAIN_NUMBER = /^[-+]?[\d\s.,]*\d[\d\s.,]*(?:e[-+]?\d+)?$/i;
 

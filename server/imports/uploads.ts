@@ -53,8 +53,8 @@ export class Uploads {
       throw this.tooLarge();
     }
     await new Promise<void>((resolve, reject) => {
-      this.read(request, response, (error: unknown) => {
-        if (error) reject(this.refusal(error));
+      this.read(request, response, (error?: Error | 'router' | 'route' | null) => {
+        if (error instanceof Error) reject(this.refusal(error));
         else resolve();
       });
     });
@@ -82,7 +82,7 @@ export class Uploads {
     }
   }
 
-  private refusal(error: unknown): unknown {
+  private refusal(error: Error): Error {
     if (!(error instanceof MulterError)) {
       // A disk that is full or away is ours to mend; anything else is a body that broke off.
       if ((error as NodeJS.ErrnoException).syscall !== undefined) return error;
