@@ -2,8 +2,10 @@ import express, { type Express } from 'express';
 import type { Sequelize } from 'sequelize';
 
 import { accountRoutes } from './accounts/account-routes.ts';
+import { assessmentRoutes } from './assessments/assessment-routes.ts';
 import type { Config } from './config.ts';
 import { editionRoutes } from './editions/edition-routes.ts';
+import { fieldStrengthRoutes } from './field-strengths/field-strength-routes.ts';
 import { authentication } from './http/authentication.ts';
 import { client } from './http/client.ts';
 import { UnknownPathError } from './http/errors.ts';
@@ -16,6 +18,8 @@ import { securityHeaders } from './http/security-headers.ts';
 import { xsrf } from './http/xsrf.ts';
 import { importRoutes } from './imports/import-routes.ts';
 import type { Logger } from './logger.ts';
+import { docsFiles } from './openapi/docs-files.ts';
+import { withDescription } from './openapi/openapi-routes.ts';
 import { receiverRoutes } from './receivers/receiver-routes.ts';
 import { regionRoutes } from './regions/region-routes.ts';
 import type { Services } from './services.ts';
@@ -27,7 +31,7 @@ import { workshopRoutes } from './workshops/workshop-routes.ts';
 /** Every operation of the API. A resource is mounted by adding its rows here. */
 export function apiRoutes(services: Services): Route[] {
   const { accounts, door, limits, members, receivers, sessions, sites, workshops } = services;
-  const { editions, imports, regions, uploads } = services;
+  const { assessments, editions, fieldStrengths, imports, regions, uploads } = services;
   return [
     ...accountRoutes(accounts, door, limits),
     ...sessionRoutes(sessions, door, accounts, limits),
@@ -37,6 +41,8 @@ export function apiRoutes(services: Services): Route[] {
     ...regionRoutes(regions),
     ...editionRoutes(editions),
     ...importRoutes(imports, uploads),
+    ...fieldStrengthRoutes(fieldStrengths),
+    ...assessmentRoutes(assessments),
   ];
 }
 
@@ -52,7 +58,8 @@ export function createApp(
   app.use(requestLog(log), securityHeaders(config), health(database));
 
   app.use('/api', noStore, xsrf(config), authentication(sessionCookie(config), services.sessions));
-  app.use(routerOf(apiRoutes(services), services));
+  const routes = withDescription(apiRoutes(services), sessionCookie(config));
+  app.use(routerOf(routes, services), docsFiles());
   app.use('/api', unknownPath);
 
   app.use(client(config), unknownPath, problemHandler(log));

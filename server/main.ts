@@ -75,7 +75,10 @@ function stopOnSignal(log: Logger, stop: () => Promise<void>): void {
       },
     );
   };
-  process.on('SIGTERM', once).on('SIGINT', once).on('disconnect', () => once('disconnect'));
+  process
+    .on('SIGTERM', once)
+    .on('SIGINT', once)
+    .on('disconnect', () => once('disconnect'));
 }
 
 function start(): void {

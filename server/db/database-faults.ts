@@ -31,7 +31,9 @@ export const isDatabaseAway = (error: unknown): boolean =>
 /** Sequelize and the connector do not always wrap what a broken connection says. */
 function isLostConnection(error: unknown): boolean {
   if (!(error instanceof Error) || error instanceof UniqueConstraintError) return false;
-  const { code } = (error instanceof BaseError ? (error as { parent?: unknown }).parent : error) as {
+  const { code } = (
+    error instanceof BaseError ? (error as { parent?: unknown }).parent : error
+  ) as {
     code?: unknown;
   };
   return typeof code === 'string' && LOST.has(code);

@@ -26,7 +26,7 @@ async function createMigrator(database: Sequelize): Promise<Umzug<Run>> {
       down: async ({ context }) => (await load(name)).down(context),
     })),
     // Umzug calls a function to get the context, and the context here is a function itself.
-    context: () => (sql) => database.query(sql),
+    context: () => (sql: string) => database.query(sql),
     storage: new SequelizeStorage({ sequelize: database, tableName: 'migrations' }),
     logger: undefined,
   });

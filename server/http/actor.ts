@@ -35,7 +35,9 @@ export const hasRole = (actor: Actor, least: Role): boolean => RANK[actor.role] 
 /** Refuses an actor below the given role. */
 export function requireRole(actor: Actor, least: Role): void {
   if (hasRole(actor, least)) return;
-  throw new ForbiddenError(`Only ${least === 'admin' ? 'an admin' : 'a librarian or an admin'} may.`);
+  throw new ForbiddenError(
+    `Only ${least === 'admin' ? 'an admin' : 'a librarian or an admin'} may.`,
+  );
 }
 
 /** A member changes what is his or her own; an admin changes everything. */

@@ -1,6 +1,6 @@
 import { randomBytes } from 'node:crypto';
 import { readFile } from 'node:fs/promises';
-import { extname, join, resolve } from 'node:path';
+import { join, resolve } from 'node:path';
 
 import express, { type RequestHandler, Router } from 'express';
 
@@ -32,9 +32,12 @@ export function client(settings: ClientSettings): Router {
   return router;
 }
 
+/** Addresses of pages have no dot in their last part. */
+const isFile = (path: string): boolean => path !== '/index.html' && /\.[^/]*$/.test(path);
+
 function page(file: string, isBehindTls: boolean): RequestHandler {
   return async (request, response, next) => {
-    if (extname(request.path) !== '' && request.path !== '/index.html') throw new UnknownPathError();
+    if (isFile(request.path)) throw new UnknownPathError();
     const html = await readFile(file, 'utf8').catch(() => {
       throw new UnavailableError('The pages have not been built yet.');
     });

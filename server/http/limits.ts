@@ -31,7 +31,8 @@ export class Limits {
 
   async computing(actor: Actor | undefined, address: string): Promise<void> {
     const { LIMIT_COMPUTE_ACCOUNT, LIMIT_COMPUTE_VISITOR } = this.settings;
-    if (actor) await this.spend(`compute-account:${actor.accountId}`, LIMIT_COMPUTE_ACCOUNT, MINUTE);
+    if (actor)
+      await this.spend(`compute-account:${actor.accountId}`, LIMIT_COMPUTE_ACCOUNT, MINUTE);
     else await this.spend(`compute-address:${digest(address)}`, LIMIT_COMPUTE_VISITOR, MINUTE);
   }
 

@@ -1,4 +1,9 @@
-import { credentials, type Credentials, sessionChange, user } from '../../shared/contracts/session.ts';
+import {
+  credentials,
+  type Credentials,
+  sessionChange,
+  user,
+} from '../../shared/contracts/session.ts';
 import type { Limits } from '../http/limits.ts';
 import { route, type Route } from '../http/route.ts';
 import type { SessionDoor } from './session-door.ts';

@@ -44,14 +44,24 @@ export const powerW = z
 
 export const resourceId = z.int().positive();
 
-/** A name people read: trimmed, not empty. */
-export const nameText = z
-  .string('Give a name.')
-  .trim()
+/** One line of text, trimmed: no control characters, no halves of a character. */
+export const lineText = (whatToGive: string) =>
+  z
+    .string(whatToGive)
+    .trim()
+    .regex(/^[^\p{Cc}\p{Cs}]*$/u, 'Leave out control characters.');
+
+/** A name people read: not empty. */
+export const nameText = lineText('Give a name.')
   .min(1, 'Give a name.')
   .max(120, 'Give at most 120 characters.');
 
-export const noteText = z.string().trim().max(4000, 'Give at most 4000 characters.');
+/** Text of several lines. */
+export const noteText = z
+  .string('Give a text.')
+  .trim()
+  .max(4000, 'Give at most 4000 characters.')
+  .regex(/^(?:[^\p{Cc}\p{Cs}]|[\t\n\r])*$/u, 'Leave out control characters.');
 
 export const ituRegion = z.literal([1, 2, 3], 'Give the ITU Region: 1, 2 or 3.');
 

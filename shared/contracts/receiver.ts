@@ -3,7 +3,15 @@ import * as z from 'zod';
 import type { Receiver as RadioReceiver } from '../radio/receiver.ts';
 import { searchQuery } from './paging.ts';
 import { band } from './receiver-band.ts';
-import { decibelsValue, frequencyHz, nameText, qValue, resourceId, spanHz } from './quantities.ts';
+import {
+  decibelsValue,
+  frequencyHz,
+  lineText,
+  nameText,
+  qValue,
+  resourceId,
+  spanHz,
+} from './quantities.ts';
 
 const widths = z
   .strictObject({ kind: z.literal('widths'), b6Hz: spanHz, b60Hz: spanHz })
@@ -60,7 +68,7 @@ const secondConversion = z.strictObject({
 
 /** The fields of a receiver, as sent and as stored; defaults are filled when parsed. */
 const receiverFields = {
-  name: z.string().trim().max(120, 'Give at most 120 characters.').default(''),
+  name: lineText('Give a name.').max(120, 'Give at most 120 characters.').default(''),
   ifHz: frequencyHz,
   selectivity: z.discriminatedUnion('kind', [widths, transformers, table]),
   audioCornerHz: z.int().min(100).max(100_000).nullable().default(3500),

@@ -1,6 +1,6 @@
 import * as z from 'zod';
 
-import { resourceId } from './quantities.ts';
+import { lineText, resourceId } from './quantities.ts';
 
 export const role = z.enum(['member', 'librarian', 'admin']);
 export type Role = z.infer<typeof role>;
@@ -16,7 +16,9 @@ const characters = (text: string): number => [...text].length;
 /** What registering takes. Every character of the password matters. */
 export const accountDraft = z.strictObject({
   email,
-  name: z.string().trim().min(1, 'Give your name.').max(120, 'Give at most 120 characters.'),
+  name: lineText('Give your name.')
+    .min(1, 'Give your name.')
+    .max(120, 'Give at most 120 characters.'),
   password: z
     .string('Give a password.')
     .refine(

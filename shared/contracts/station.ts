@@ -4,6 +4,7 @@ import {
   decibelsValue,
   frequencyHz,
   latitude,
+  lineText,
   longitude,
   powerW,
   resourceId,
@@ -11,7 +12,7 @@ import {
 
 /** A station sent along with a computation. What is missing is said in the answer's `skipped`. */
 export const sentStation = z.strictObject({
-  name: z.string().trim().max(200).default(''),
+  name: lineText('Give a name.').max(200).default(''),
   frequencyHz,
   latitude: latitude.nullable().default(null),
   longitude: longitude.nullable().default(null),

@@ -12,7 +12,13 @@ beforeAll(async () => {
 });
 afterAll(() => server.close());
 
-const attic = { name: 'Attic', latitude: 48.25, longitude: -7.123456789, noise: 'quiet', ituRegion: 1 };
+const attic = {
+  name: 'Attic',
+  latitude: 48.25,
+  longitude: -7.123456789,
+  noise: 'quiet',
+  ituRegion: 1,
+};
 
 describe('/api/sites', () => {
   it('keeps a site exactly, changes and removes it', async () => {

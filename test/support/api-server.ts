@@ -19,6 +19,7 @@ let accountsMade = 0;
 /** The whole server over a database of its own, listening on a free port. */
 export interface ApiServer {
   readonly url: string;
+  readonly app: ReturnType<typeof createApp>;
   readonly services: Services;
   readonly databaseUrl: string;
   /** Folder of uploads and the like. */
@@ -51,10 +52,12 @@ export async function startApiServer(settings: NodeJS.ProcessEnv = {}): Promise<
   const database = connectDatabase(databaseUrl, 10, log);
   await migrate(database, databaseUrl);
   const services = createServices(database, config, log);
-  const server = await listen(createApp(services, database, config, log));
+  const app = createApp(services, database, config, log);
+  const server = await listen(app);
   const url = addressOf(server);
   return {
     url,
+    app,
     services,
     databaseUrl,
     dataFolder,
