@@ -1,0 +1,69 @@
+import type { FormArray, FormGroup } from '@angular/forms';
+import * as z from 'zod';
+
+import type { ReceiverDraft } from '../../../../../shared/contracts/receiver';
+import {
+  bandControls,
+  circuitControls,
+  type ReceiverControls,
+  type ReceiverFields,
+} from './controls';
+
+/** What the fields say, as the contract wants it; it may still be incomplete or wrong. */
+export function receiverOf(fields: ReceiverFields): unknown {
+  const { selectivity, strayDb, fixedFilter, bfo, trap, ...rest } = fields;
+  const { other, ...widths } = selectivity;
+  return {
+    ...rest,
+    selectivity: other ?? { kind: 'widths', ...widths },
+    strayDb: whenFitted(strayDb),
+    fixedFilter: whenFitted(fixedFilter),
+    bfo: whenFitted(bfo),
+    trap: whenFitted(trap),
+  };
+}
+
+const whenFitted = <T extends { fitted: boolean }>({ fitted, ...parts }: T) =>
+  fitted ? parts : null;
+
+type Patch = Parameters<ReceiverControls['patchValue']>[0];
+
+/** A receiver as the fields show it. */
+export function fieldsOf(receiver: ReceiverDraft): Patch {
+  const { selectivity, strayDb, fixedFilter, bfo, trap, ...rest } = receiver;
+  return {
+    ...rest,
+    bands: rest.bands.map((band) => ({ ...band, circuits: [...band.circuits] })),
+    selectivity:
+      selectivity.kind === 'widths'
+        ? { other: null, b6Hz: selectivity.b6Hz, b60Hz: selectivity.b60Hz }
+        : { other: selectivity, b6Hz: null, b60Hz: null },
+    strayDb: { fitted: strayDb !== null, ...strayDb },
+    fixedFilter: { fitted: fixedFilter !== null, ...fixedFilter },
+    bfo: { fitted: bfo !== null, ...bfo },
+    trap: { fitted: trap !== null, ...trap },
+  };
+}
+
+/** Rows a draft must have; the rest of it may be missing or strange, the fields sort it out. */
+const rowsOfDraft = z.looseObject({
+  bands: z.array(z.looseObject({ circuits: z.array(z.looseObject({})) })).min(1),
+});
+
+/** Writes whatever fits into the fields; answers whether it had the shape of fields at all. */
+export function writeFields(form: ReceiverControls, fields: unknown): boolean {
+  const rows = rowsOfDraft.safeParse(fields);
+  if (!rows.success) return false;
+  resize(form.controls.bands, rows.data.bands.length, bandControls);
+  rows.data.bands.forEach(({ circuits }, at) => {
+    const band = form.controls.bands.controls[at];
+    if (band) resize(band.controls.circuits, circuits.length, circuitControls);
+  });
+  form.patchValue(fields as Patch);
+  return true;
+}
+
+function resize<T extends FormGroup>(rows: FormArray<T>, length: number, make: () => T): void {
+  while (rows.length > length) rows.removeAt(-1, { emitEvent: false });
+  while (rows.length < length) rows.push(make(), { emitEvent: false });
+}

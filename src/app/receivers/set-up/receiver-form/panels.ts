@@ -1,0 +1,59 @@
+import type { FormIssue } from '../../../ui/form-problems/form-issues';
+import { formatFrequency } from '../../../ui/frequency-pipe';
+import type { ReceiverFields } from './controls';
+
+/** The parts of the set-up that open on demand. */
+export type Panel = 'selectivity' | 'circuits' | 'mixer' | 'filter' | 'bfo' | 'trap';
+
+const panelOfField: Readonly<Record<string, Panel>> = {
+  selectivity: 'selectivity',
+  audioCornerHz: 'selectivity',
+  ifRange: 'selectivity',
+  strayDb: 'mixer',
+  ifFeedthroughDb: 'mixer',
+  signalToOscillatorDb: 'mixer',
+  fixedFilter: 'filter',
+  bfo: 'bfo',
+  trap: 'trap',
+};
+
+/** The panel that hides a field, if one does. */
+export function panelOf(path: string): Panel | undefined {
+  const [part = '', , below] = path.split('.');
+  return part === 'bands' && below === 'circuits' ? 'circuits' : panelOfField[part];
+}
+
+/** The panels that hide what is wrong. */
+export const panelsOf = (issues: readonly FormIssue[]): Panel[] =>
+  issues.map(({ path }) => panelOf(path)).filter((panel) => panel !== undefined);
+
+/** What a closed panel holds, in a few words. */
+export function summaries(fields: ReceiverFields): Record<Panel, string> {
+  const { selectivity, strayDb, fixedFilter, bfo, trap, bands } = fields;
+  const none = $localize`none`;
+  return {
+    selectivity: widths(selectivity),
+    circuits: circuits(bands),
+    mixer: strayDb.fitted
+      ? $localize`at most ${strayDb.if ?? '…'}:if: dB at the IF, ${strayDb.image ?? '…'}:image: dB for images`
+      : $localize`no limit by stray pick-up`,
+    filter: fixedFilter.fitted ? frequency(fixedFilter.centreHz) : none,
+    bfo: bfo.fitted ? frequency(bfo.centreHz) : none,
+    trap: trap.fitted ? $localize`fitted` : none,
+  };
+}
+
+const frequency = (hz: number | null): string => (hz === null ? '…' : formatFrequency(hz));
+
+function widths({ other, b6Hz, b60Hz }: ReceiverFields['selectivity']): string {
+  return other === null
+    ? $localize`${frequency(b6Hz)}:b6: at −6 dB, ${frequency(b60Hz)}:b60: at −60 dB`
+    : $localize`known in another way`;
+}
+
+function circuits(bands: ReceiverFields['bands']): string {
+  const counts = [...new Set(bands.map((band) => band.circuits.length))];
+  return counts.length === 1
+    ? $localize`${counts[0] ?? 0}:count: on every band`
+    : $localize`${Math.min(...counts)}:least: to ${Math.max(...counts)}:most:, by band`;
+}
