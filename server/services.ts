@@ -4,9 +4,12 @@ import type { Sequelize } from 'sequelize';
 
 import { Accounts } from './accounts/accounts.ts';
 import { Passwords } from './accounts/passwords.ts';
+import { Assessments } from './assessments/assessments.ts';
 import type { Config } from './config.ts';
 import { EditionWriter } from './editions/edition-writer.ts';
 import { Editions } from './editions/editions.ts';
+import { FieldStrengths } from './field-strengths/field-strengths.ts';
+import { ListsAtSites } from './field-strengths/lists-at-sites.ts';
 import { Idempotency } from './http/idempotency.ts';
 import { Limits } from './http/limits.ts';
 import { Imports } from './imports/imports.ts';
@@ -30,6 +33,8 @@ export function createServices(database: Sequelize, config: Config, log: Logger)
   const accounts = new Accounts(database, passwords, workshops);
   const sessions = new Sessions(database, config, accounts, workshops);
   const regions = new Regions(database);
+  const editions = new Editions(database, regions);
+  const lists = new ListsAtSites(editions);
   const uploads = new Uploads(join(config.DATA_DIR, 'uploads'));
   return {
     idempotency: new Idempotency(database),
@@ -43,8 +48,10 @@ export function createServices(database: Sequelize, config: Config, log: Logger)
     receivers: new Receivers(database, accounts),
     sites: new Sites(database),
     regions,
-    editions: new Editions(database, regions),
+    editions,
     uploads,
     imports: new Imports(database, regions, new EditionWriter(database), uploads, log),
+    fieldStrengths: new FieldStrengths(lists),
+    assessments: new Assessments(lists),
   };
 }

@@ -8,6 +8,7 @@ import type {
   StationQuery,
 } from '../../shared/contracts/region.ts';
 import { nearestChannel } from '../../shared/radio/raster.ts';
+import type { Station } from '../../shared/radio/station.ts';
 import type { Actor } from '../http/actor.ts';
 import { NotFoundError } from '../http/errors.ts';
 import { EditionModel } from './edition-model.ts';
@@ -57,6 +58,32 @@ export class Editions {
       offset: (query.page - 1) * query.pageSize,
     });
     return { items: rows.map((row) => toStation(row, region)), total: count };
+  }
+
+  async rasterOf(actor: Actor, id: number): Promise<Region['raster']> {
+    return (await this.find(actor, id)).region.raster;
+  }
+
+  /** Every station of an edition as the engine computes with it, ascending by frequency. */
+  async everyStation(id: number): Promise<Station[]> {
+    const rows = await StationModel.findAll({
+      attributes: [
+        'id',
+        'name',
+        'frequencyHz',
+        'latitude',
+        'longitude',
+        'powerDayW',
+        'powerNightW',
+      ],
+      where: { editionId: id },
+      order: [
+        ['frequencyHz', 'ASC'],
+        ['id', 'ASC'],
+      ],
+      raw: true,
+    });
+    return rows.map((row) => ({ ...row, fieldDb: null }));
   }
 
   /** The edition with the region it belongs to; another workshop's is not found. */

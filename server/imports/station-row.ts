@@ -3,7 +3,7 @@ import { readCoordinate } from './cell-coordinate.ts';
 import { type DecimalMark, isBlank } from './cell-number.ts';
 import { readFrequency, readPower } from './cell-unit.ts';
 import type { CsvRow } from './csv-rows.ts';
-import { readLocator } from './locator.ts';
+import { readLocator } from './cell-locator.ts';
 
 /** A row that can be stored. */
 export interface StationRow {
@@ -78,7 +78,7 @@ export class RowReader {
   }
 
   #text(field: keyof typeof LENGTHS, row: CsvRow, faults: ImportFault[]): string {
-    const text = this.#cell(field, row).replace(/\s+/g, ' ').trim();
+    const text = this.#cell(field, row).replace(/[\s\p{Cc}]+/gu, ' ').trim();
     if (text.length <= LENGTHS[field]) return text;
     this.#fault(row, field, `at most ${LENGTHS[field]} characters`, faults);
     return '';
