@@ -1,0 +1,61 @@
+import { describe, expect, it } from 'vitest';
+
+import propagation from '../../datasets/reference/propagation.json' with { type: 'json' };
+import { locator, locatorCentre } from '../../shared/radio/locator.ts';
+import { noiseField } from '../../shared/radio/noise.ts';
+import { pathLength, sunTimes } from '../../shared/radio/path.ts';
+import type { NoiseClass } from '../../shared/radio/site.ts';
+import { skyWave } from '../../shared/radio/sky-wave.ts';
+import { metres } from '../../shared/radio/units.ts';
+
+const { skyWave: sky, noise, distance, locators, sun } = propagation;
+
+/** The rule speaks of 100 mV/m at 1 km, the engine of 1 kW e.m.r.p.: 300 mV/m. */
+const KILOWATT_DB = 20 * Math.log10(3);
+
+describe(`sky wave: ${sky.source} [${sky.mark}]`, () => {
+  it.each(sky.checks)(
+    '$distanceM m, $geomagneticLatitude degrees, $percentOfNights % of nights: $fieldDb',
+    ({ distanceM, geomagneticLatitude, percentOfNights, fieldDb }) => {
+      const share = percentOfNights === 10 ? 10 : 50;
+      const field = skyWave(metres(distanceM), geomagneticLatitude, share) - KILOWATT_DB;
+
+      expect(Math.abs(field - fieldDb)).toBeLessThan(0.0002);
+    },
+  );
+});
+
+describe(`noise: ${noise.source} [${noise.mark}]`, () => {
+  it.each(noise.checks)('$noise: $fieldDb dB(uV/m)', (check) => {
+    const site = { noise: check.noise as NoiseClass, indoors: false, noiseFloorDb: null };
+
+    expect(noiseField(site, check.frequencyHz, check.bandwidthHz)).toBeCloseTo(check.fieldDb, 2);
+  });
+});
+
+describe(`distance: ${distance.source} [${distance.mark}]`, () => {
+  it.each(distance.checks)('$distanceM m', ({ from, to, distanceM }) => {
+    expect(pathLength(from, to)).toBeCloseTo(distanceM, 1);
+  });
+});
+
+describe(`locators: ${locators.source} [${locators.mark}]`, () => {
+  it.each(locators.checks)('$locator', (check) => {
+    const centre = locatorCentre(check.locator);
+
+    expect(locator(check)).toBe(check.locator);
+    expect(Math.abs(centre.latitude - check.latitude)).toBeLessThan(1 / 48);
+    expect(Math.abs(centre.longitude - check.longitude)).toBeLessThan(1 / 24);
+  });
+});
+
+describe(`sun: ${sun.source} [${sun.mark}]`, () => {
+  it.each(sun.checks)('$sunrise to $sunset', ({ date, sunrise, sunset, ...place }) => {
+    const times = sunTimes(place, new Date(date));
+    const minutesOff = (at: Date | null, expected: string) =>
+      Math.abs(Number(at) - Date.parse(expected)) / 60_000;
+
+    expect(minutesOff(times.sunrise, sunrise)).toBeLessThan(sun.toleranceMinutes);
+    expect(minutesOff(times.sunset, sunset)).toBeLessThan(sun.toleranceMinutes);
+  });
+});
