@@ -9,7 +9,11 @@ import { type DialTotal, DialTotals } from './dial-totals.ts';
 import type { FieldStrength } from './field-strength.ts';
 import type { Grade } from './grades.ts';
 import { ifHarmonics } from './harmonic-whistles.ts';
-import { intermodulatingPairs, intermodulationResponse } from './intermodulation.ts';
+import {
+  intermodulatingPairs,
+  intermodulationResponse,
+  strongestStations,
+} from './intermodulation.ts';
 import type { Receiver } from './receiver.ts';
 import { bandScans } from './receiver-at-site.ts';
 import { type RejectionPoint, rejectionCurve } from './rejection-curve.ts';
@@ -99,7 +103,11 @@ export function assess(input: AssessmentInput): Assessment {
   const { receiver, site, raster, period, maxM } = input;
   const spectrum = new Spectrum(input.stations, input.fields);
   const selectivity = ifSelectivity(receiver.selectivity, receiver.ifHz);
-  const pairs = intermodulatingPairs(spectrum, receiver.ifHz, selectivity.b6Hz / 2);
+  const pairs = intermodulatingPairs(
+    strongestStations(spectrum),
+    receiver.ifHz,
+    selectivity.b6Hz / 2,
+  );
   const everywhere = pairs.map((pair) => intermodulationResponse(spectrum, pair));
   const bands: BandAssessment[] = [];
   const deficits: BandDeficit[] = [];

@@ -11,43 +11,70 @@ const STRONGEST = 50;
 
 /** Two stations whose sum or difference lies near the IF. */
 export interface IntermodulatingPair {
-  /** Positions in the spectrum. */
-  readonly stronger: number;
-  readonly weaker: number;
+  readonly stronger: StrongStation;
+  readonly weaker: StrongStation;
   /** `||f1 +- f2| - IF|`, hertz; the smaller of the two. */
   readonly beatHz: number;
   readonly relation: 'sum' | 'difference';
 }
 
+/** A station that may take part. */
+export interface StrongStation {
+  /** Position in the spectrum. */
+  readonly position: number;
+  readonly id: number;
+  readonly hz: number;
+}
+
 /**
- * The pairs among the 50 strongest stations whose second-order product lies on or near the IF.
+ * The 50 strongest stations, the strongest first; of equals the one with the lower number.
  *
  * @param spectrum The stations.
+ * @returns At most 50 stations.
+ */
+export function strongestStations(spectrum: Spectrum): StrongStation[] {
+  const { fieldDb, ids } = spectrum;
+  const field = (position: number): number => fieldDb[position] ?? -Infinity;
+  return Array.from({ length: fieldDb.length }, (_, position) => position)
+    .sort((a, b) => field(b) - field(a) || (ids[a] ?? 0) - (ids[b] ?? 0))
+    .slice(0, STRONGEST)
+    .map((position) => ({
+      position,
+      id: ids[position] ?? -1,
+      hz: spectrum.hz[spectrum.groupOf(position)] ?? NaN,
+    }));
+}
+
+/**
+ * The pairs of strong stations whose second-order product lies on or near the IF.
+ *
+ * @param strongest The stations, the strongest first.
  * @param ifHz Intermediate frequency, hertz.
  * @param reachHz Largest beat that counts, hertz: half of B6.
- * @returns The pairs, by the station numbers of stronger and weaker.
+ * @returns The pairs, by the numbers of stronger and weaker.
  *
  * @example
- *   intermodulatingPairs(spectrumOf([1000e3, 1455e3]), 455e3, 3e3).length; // 1
+ *   const two = [{ position: 0, id: 0, hz: 1_000_000 }, { position: 1, id: 1, hz: 1_455_000 }];
+ *   intermodulatingPairs(two, 455_000, 3_000).length; // 1
  */
 export function intermodulatingPairs(
-  spectrum: Spectrum,
+  strongest: readonly StrongStation[],
   ifHz: number,
   reachHz: number,
 ): IntermodulatingPair[] {
-  const strongest = strongestOf(spectrum);
   const pairs: IntermodulatingPair[] = [];
-  strongest.forEach(({ position: stronger, hz: f1 }, index) => {
-    for (const { position: weaker, hz: f2 } of strongest.slice(index + 1)) {
-      const sum = Math.abs(f1 + f2 - ifHz);
-      const difference = Math.abs(Math.abs(f1 - f2) - ifHz);
+  strongest.forEach((stronger, index) => {
+    for (let next = index + 1; next < strongest.length; next++) {
+      const weaker = strongest[next];
+      if (weaker === undefined) continue;
+      const sum = Math.abs(stronger.hz + weaker.hz - ifHz);
+      const difference = Math.abs(Math.abs(stronger.hz - weaker.hz) - ifHz);
       const beatHz = Math.min(sum, difference);
       if (beatHz > reachHz) continue;
       pairs.push({ stronger, weaker, beatHz, relation: sum < difference ? 'sum' : 'difference' });
     }
   });
-  const id = (position: number): number => spectrum.ids[position] ?? 0;
-  return pairs.sort((a, b) => id(a.stronger) - id(b.stronger) || id(a.weaker) - id(b.weaker));
+  return pairs.sort((a, b) => a.stronger.id - b.stronger.id || a.weaker.id - b.weaker.id);
 }
 
 /**
@@ -60,8 +87,8 @@ export function intermodulatingPairs(
 export function intermodulationResponse(spectrum: Spectrum, pair: IntermodulatingPair): Response {
   const { stronger, weaker, beatHz, relation } = pair;
   return {
-    station: spectrum.ids[stronger] ?? -1,
-    secondStation: spectrum.ids[weaker] ?? -1,
+    station: stronger.id,
+    secondStation: weaker.id,
     cause: 'intermodulation',
     name: `${relation} of two stations`,
     m: null,
@@ -69,7 +96,7 @@ export function intermodulationResponse(spectrum: Spectrum, pair: Intermodulatin
     dialHz: null,
     beatHz: Math.round(beatHz),
     fieldDb: null,
-    distanceM: spectrum.distanceM[stronger] ?? null,
+    distanceM: spectrum.distanceM[stronger.position] ?? null,
     interferenceDb: null,
     weightingDb: null,
     wantedDb: null,
@@ -83,14 +110,4 @@ export function intermodulationResponse(spectrum: Spectrum, pair: Intermodulatin
     borderline: false,
     ledger: [],
   };
-}
-
-/** Strongest first; of equals the one with the lower number. */
-function strongestOf(spectrum: Spectrum): { position: number; hz: number }[] {
-  const { fieldDb, ids } = spectrum;
-  const field = (position: number): number => fieldDb[position] ?? -Infinity;
-  return Array.from({ length: fieldDb.length }, (_, position) => position)
-    .sort((a, b) => field(b) - field(a) || (ids[a] ?? 0) - (ids[b] ?? 0))
-    .slice(0, STRONGEST)
-    .map((position) => ({ position, hz: spectrum.hz[spectrum.groupOf(position)] ?? NaN }));
 }

@@ -7,7 +7,7 @@ import { describe, expect, it } from 'vitest';
 
 import { assess, type Assessment } from '../../shared/radio/assessment.ts';
 import type { Response } from '../../shared/radio/response.ts';
-import { plainResponses, plainVerdict, type PlainCase } from '../support/plain-assessment.ts';
+import { plainResponses, plainVerdict } from '../support/plain-assessment.ts';
 import { plainCase, receivers, sites, stationLists } from '../support/random-cases.ts';
 
 const cases = fc.record({
@@ -27,7 +27,7 @@ function key(
   return `${band}/${station}/${m}/${n}/${Math.floor((dialHz ?? 0) + 0.5)}`;
 }
 
-function answered(it: PlainCase, all: Assessment): Map<string, Response> {
+function answered(all: Assessment): Map<string, Response> {
   return new Map(
     all.bands.flatMap(({ responses }, band) =>
       responses
@@ -44,7 +44,7 @@ describe('assess', () => {
         const plain = plainCase(drawn);
         const expected = plainResponses(plain);
         const all = assess({ ...drawn, ...plain.input, leaveOutBetterThan: null, limit: 10_000 });
-        const found = answered(plain, all);
+        const found = answered(all);
 
         expect(found.size).toBe(expected.length);
         for (const each of expected) {

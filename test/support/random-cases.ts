@@ -10,13 +10,13 @@ import type { PlainCase } from './plain-assessment.ts';
 
 const q = fc.integer({ min: 15, max: 150 });
 
-const BAND_LIMITS = [
+const BAND_LIMITS: [number, number][] = [
   [150_000, 285_000],
   [550_000, 1_600_000],
   [1_600_000, 4_000_000],
   [5_900_000, 9_000_000],
   [520_000, 1_710_000],
-] as const;
+];
 
 /** Bands whose oscillator runs at every IF that is drawn here. */
 const band: fc.Arbitrary<Band> = fc
@@ -153,8 +153,6 @@ export function plainCase(drawn: Drawn): PlainCase & {
   }));
   const fields = heard.map(({ id, fieldDb, groundDb }) => ({
     station: id,
-    name: `station ${id}`,
-    frequencyHz: drawn.stations[id]?.frequencyHz ?? NaN,
     distanceM: given(id) ? null : 1000,
     groundDb,
     skyDb: null,
