@@ -56,14 +56,15 @@ export const DEMO_LISTS: readonly DemoList[] = [
       seed: 2,
       rows: 210,
       raster: defaultRaster(2),
-      // Given by hand to the station next to the demo site.
-      unusedHz: [560_000],
+      // 560 and 600 are given by hand; the low end of the dial is quiet, so that breakthrough shows.
+      unusedHz: [560_000, 600_000, 610_000, 620_000, 630_000],
       callPrefix: 'QS',
       area: { south: 29, north: 37, west: -62, east: -48 },
     },
     byHand: [
-      byHand('Radio Zelmere', 'QSAQ', 560, 33.42, -55.3, 20, 10, 'two masts, day and night'),
+      byHand('Radio Zelmere', 'QSAQ', 560, 33.4, -55.37, 10, 10, 'two masts, day and night'),
       byHand('Vessgard Sound', 'QSFS', 560, 36.4, -49.2, 5, 1, 'reduced at night'),
+      byHand('Jornfell Sound', 'QSJS', 600, 33.9, -54.6, 5, 5, 'one mast'),
       byHand('Zelmere Second', 'QSA2', 850, 33.1, -55.6, 10, 5, 'reduced at night'),
       byHand('Voice of Quorrel', 'QSVS', 1240, 33.7, -55, 50, 50, 'one mast'),
       byHand('Zelmere aerodrome', 'QSAA', 382, 33.3, -55.2, 0.1, 0.1, 'aeronautical beacon'),
