@@ -1,4 +1,32 @@
 import type { Routes } from '@angular/router';
 
+import { signedInGuard } from '../core/session/signed-in-guard';
+import { PlansStore } from './plans/plans-store';
+
 /** The feature's only public file: `app.routes.ts` loads it lazily. */
-export const receiverRoutes: Routes = [];
+export const receiverRoutes: Routes = [
+  {
+    path: '',
+    pathMatch: 'full',
+    canActivate: [signedInGuard],
+    title: $localize`Choice of IF`,
+    loadComponent: () => import('./receiver-page/receiver-page').then((m) => m.ReceiverPage),
+  },
+  {
+    path: 'plans',
+    canActivate: [signedInGuard],
+    providers: [PlansStore],
+    children: [
+      {
+        path: '',
+        title: $localize`Plans`,
+        loadComponent: () => import('./plans/plan-list/plan-list').then((m) => m.PlanList),
+      },
+      {
+        path: ':planId',
+        title: $localize`Plan`,
+        loadComponent: () => import('./plans/plan-page/plan-page').then((m) => m.PlanPage),
+      },
+    ],
+  },
+];

@@ -35,8 +35,8 @@ const MOVES: Readonly<Record<string, number>> = {
     tabindex: '0',
     'aria-label': $localize`IF on trial`,
     'aria-orientation': 'horizontal',
-    '[attr.aria-valuemin]': 'reach().low',
-    '[attr.aria-valuemax]': 'reach().high',
+    '[attr.aria-valuemin]': 'limits().low',
+    '[attr.aria-valuemax]': 'limits().high',
     '[attr.aria-valuenow]': 'ifHz()',
     '[attr.aria-valuetext]': 'spoken()',
     '[style.left.px]': 'left()',
@@ -54,7 +54,8 @@ export class IfMarker {
 
   readonly scale = input.required<ScaleLinear<number, number>>();
   readonly frame = input.required<Frame>();
-  readonly reach = input.required<{ readonly low: number; readonly high: number }>();
+  /** The ends of the chart. */
+  readonly limits = input.required<{ readonly low: number; readonly high: number }>();
   readonly ifHz = model.required<number>();
   /** The marker was let go, or a key released. */
   readonly settled = output();
@@ -71,7 +72,7 @@ export class IfMarker {
   });
 
   protected press(event: KeyboardEvent): void {
-    const { low, high } = this.reach();
+    const { low, high } = this.limits();
     const ends: Readonly<Record<string, number>> = { Home: low, End: high };
     const move = MOVES[event.key];
     const target =
@@ -105,7 +106,7 @@ export class IfMarker {
   }
 
   private put(hz: number): void {
-    const { low, high } = this.reach();
+    const { low, high } = this.limits();
     this.ifHz.set(Math.min(Math.max(Math.round(hz / STEP) * STEP, low), high));
   }
 }

@@ -1,0 +1,50 @@
+import { convertToParamMap } from '@angular/router';
+
+import { addressParams, readAddress, type TrialAddress } from './trial-address';
+
+describe('the address of a trial', () => {
+  it('says site, edition, period and IF', () => {
+    const params = convertToParamMap({ site: '3', edition: '7', period: 'day', if: '554000' });
+
+    expect(readAddress(params)).toEqual({
+      siteId: 3,
+      source: { kind: 'edition', editionId: 7 },
+      period: 'day',
+      ifHz: 554_000,
+    });
+  });
+
+  it('reads nonsense as not said', () => {
+    const params = convertToParamMap({ site: '-3', every: 'loud', period: 'dusk', if: '1e3' });
+
+    expect(readAddress(params)).toEqual({
+      siteId: undefined,
+      source: undefined,
+      period: 'night',
+      ifHz: undefined,
+    });
+  });
+
+  it.each<TrialAddress>([
+    { siteId: 3, source: { kind: 'edition', editionId: 7 }, period: 'day', ifHz: 554_000 },
+    {
+      siteId: 4,
+      source: { kind: 'every-channel', fieldDb: 72.5 },
+      period: 'night',
+      ifHz: undefined,
+    },
+  ])('reads back what it writes', (address) => {
+    const said = Object.entries(addressParams(address)).flatMap(([key, value]) =>
+      value === null ? [] : [[key, String(value)]],
+    );
+
+    expect(readAddress(convertToParamMap(Object.fromEntries(said)))).toEqual(address);
+  });
+
+  it('takes the other source out when one is named', () => {
+    expect(addressParams({ source: { kind: 'edition', editionId: 7 } })).toEqual({
+      edition: 7,
+      every: null,
+    });
+  });
+});

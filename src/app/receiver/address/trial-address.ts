@@ -1,0 +1,48 @@
+import type { ParamMap, Params } from '@angular/router';
+
+import type { Period } from '../../../../shared/radio/site';
+import type { StationSource } from '../trial/station-source';
+
+/** What the address of a receiver's page says; what it does not say is undefined. */
+export interface TrialAddress {
+  readonly siteId: number | undefined;
+  readonly source: StationSource | undefined;
+  readonly period: Period;
+  readonly ifHz: number | undefined;
+}
+
+function wholeNumber(text: string | null): number | undefined {
+  return text !== null && /^\d{1,15}$/.test(text) && Number(text) > 0 ? Number(text) : undefined;
+}
+
+function sourceFrom(params: ParamMap): StationSource | undefined {
+  const editionId = wholeNumber(params.get('edition'));
+  if (editionId !== undefined) return { kind: 'edition', editionId };
+  const every = params.get('every');
+  const fieldDb = every === null || every.trim() === '' ? NaN : Number(every);
+  return Math.abs(fieldDb) <= 300 ? { kind: 'every-channel', fieldDb } : undefined;
+}
+
+/** Reads an address; what makes no sense counts as not said. */
+export function readAddress(params: ParamMap): TrialAddress {
+  return {
+    siteId: wholeNumber(params.get('site')),
+    source: sourceFrom(params),
+    period: params.get('period') === 'day' ? 'day' : 'night',
+    ifHz: wholeNumber(params.get('if')),
+  };
+}
+
+/** Query parameters that say a change; null takes one out of the address. */
+export function addressParams(change: Partial<TrialAddress>): Params {
+  const params: Params = {};
+  if ('siteId' in change) params['site'] = change.siteId ?? null;
+  if ('period' in change) params['period'] = change.period;
+  if ('ifHz' in change) params['if'] = change.ifHz ?? null;
+  if ('source' in change) {
+    const { source } = change;
+    params['edition'] = source?.kind === 'edition' ? source.editionId : null;
+    params['every'] = source?.kind === 'every-channel' ? source.fieldDb : null;
+  }
+  return params;
+}

@@ -1,0 +1,141 @@
+import type { Candidate } from '../../../../shared/contracts/candidates';
+import type { Period } from '../../../../shared/radio/site';
+import { change, kilohertz, percent, tenths } from '../../charts/readings';
+
+/** A term by which candidates are told apart. */
+export interface CandidateColumn {
+  readonly key: string;
+  readonly label: string;
+  /** Sorts by this; null goes last. */
+  readonly value: (candidate: Candidate) => number | null;
+  readonly text: (candidate: Candidate) => string;
+}
+
+const NOTHING = '\u2013';
+
+const khz = (hz: number | null): string => (hz === null ? NOTHING : kilohertz(hz));
+
+/** Beat of the harmonic of the IF that whistles nearest to a channel. */
+function nearestBeat({ harmonics }: Candidate): { harmonic: number; beatHz: number } | null {
+  const beats = harmonics.flatMap(({ harmonic, beatHz }) =>
+    beatHz === null ? [] : { harmonic, beatHz },
+  );
+  return beats.sort((a, b) => a.beatHz - b.beatHz)[0] ?? null;
+}
+
+function ratio(
+  key: 'breakthrough' | 'image' | 'products',
+  label: string,
+  period: Period,
+): CandidateColumn {
+  const worst = (candidate: Candidate) => candidate[period]?.[key].worstRatioDb ?? null;
+  return {
+    key,
+    label,
+    value: worst,
+    text: (candidate) => {
+      const found = worst(candidate);
+      return found === null ? NOTHING : tenths(found);
+    },
+  };
+}
+
+function changeText(candidate: Candidate, period: Period): string {
+  const { breakthroughChangeDb = null, changeSigmaDb = null } = candidate[period] ?? {};
+  if (breakthroughChangeDb === null) return NOTHING;
+  const sigma = changeSigmaDb === null ? '' : ` ±${tenths(changeSigmaDb)}`;
+  return change(breakthroughChangeDb) + sigma;
+}
+
+/** Every term in its own column; ratios and changes are those of the period. */
+export const candidateColumns = (period: Period): readonly CandidateColumn[] => [
+  {
+    key: 'deficit',
+    label: $localize`Left to be desired, dB`,
+    value: ({ deficitDb }) => deficitDb,
+    text: ({ deficitDb }) => tenths(deficitDb),
+  },
+  {
+    key: 'change',
+    label: $localize`Breakthrough against now`,
+    value: (candidate) => candidate[period]?.breakthroughChangeDb ?? null,
+    text: (candidate) => changeText(candidate, period),
+  },
+  ratio('breakthrough', $localize`Worst breakthrough, ratio dB`, period),
+  ratio('image', $localize`Worst image, ratio dB`, period),
+  ratio('products', $localize`Worst product, ratio dB`, period),
+  {
+    key: 'harmonic',
+    label: $localize`Nearest harmonic whistle, kHz`,
+    value: (candidate) => nearestBeat(candidate)?.beatHz ?? null,
+    text: (candidate) => {
+      const beat = nearestBeat(candidate);
+      return beat
+        ? $localize`${kilohertz(beat.beatHz)}:beat: (${beat.harmonic}:order: × IF)`
+        : NOTHING;
+    },
+  },
+  {
+    key: 'raster',
+    label: $localize`To the raster: IF, twice, thrice, kHz`,
+    value: ({ rasterDistanceHz }) => rasterDistanceHz.if,
+    text: ({ rasterDistanceHz: d }) => [d.if, d.twice, d.thrice].map(khz).join(' / '),
+  },
+  {
+    key: 'intermodulation',
+    label: $localize`Intermodulation, pairs`,
+    value: ({ intermodulation }) => intermodulation.count,
+    text: ({ intermodulation }) => String(intermodulation.count),
+  },
+  {
+    key: 'window',
+    label: $localize`Holds from – to, kHz`,
+    value: ({ windowHz }) => windowHz && windowHz.high - windowHz.low,
+    text: ({ windowHz }) =>
+      windowHz ? `${kilohertz(windowHz.low)} – ${kilohertz(windowHz.high)}` : NOTHING,
+  },
+  {
+    key: 'bfo',
+    label: $localize`BFO moves, kHz`,
+    value: ({ bfoShiftHz }) => bfoShiftHz && Math.abs(bfoShiftHz),
+    text: ({ bfoShiftHz }) => khz(bfoShiftHz),
+  },
+  {
+    key: 'capacitance',
+    label: $localize`IF capacitance`,
+    value: ({ capacitanceChange }) => Math.abs(capacitanceChange),
+    text: ({ capacitanceChange }) => percent(capacitanceChange),
+  },
+  {
+    key: 'tracking',
+    label: $localize`Tracking costs, dB`,
+    value: ({ trackingCostDb }) => trackingCostDb,
+    text: ({ trackingCostDb }) => (trackingCostDb === null ? NOTHING : tenths(trackingCostDb)),
+  },
+  {
+    key: 'reach',
+    label: $localize`Within reach`,
+    value: ({ reachable }) => Number(!reachable.ok),
+    text: ({ reachable }) => (reachable.ok ? $localize`yes` : (reachable.reason ?? $localize`no`)),
+  },
+];
+
+/** Candidates by a column, or in the order of the ranking when none is chosen. */
+export function sortedCandidates(
+  candidates: readonly Candidate[],
+  columns: readonly CandidateColumn[],
+  active: string,
+  direction: 'asc' | 'desc' | '',
+): Candidate[] {
+  const read =
+    active === 'if'
+      ? ({ ifHz }: Candidate) => ifHz
+      : columns.find(({ key }) => key === active)?.value;
+  if (!read || direction === '') return [...candidates];
+  const sign = direction === 'asc' ? 1 : -1;
+  return [...candidates].sort((a, b) => {
+    const [left, right] = [read(a), read(b)];
+    if (left === null || right === null) return Number(left === null) - Number(right === null);
+    return sign * (left - right);
+  });
+}

@@ -1,0 +1,120 @@
+import { HttpClient } from '@angular/common/http';
+import { computed, effect, inject, Injectable, linkedSignal, untracked } from '@angular/core';
+import { toSignal } from '@angular/core/rxjs-interop';
+import { ActivatedRoute, Router } from '@angular/router';
+import { firstValueFrom } from 'rxjs';
+
+import { pageOf } from '../../../../shared/contracts/paging';
+import { type Plan, plan, type PlanInput } from '../../../../shared/contracts/plan';
+import { bareReceiver, storedReceiver } from '../../../../shared/contracts/receiver';
+import { edition, region } from '../../../../shared/contracts/region';
+import { type NamedSite, type StoredSite, storedSite } from '../../../../shared/contracts/site';
+import { defaultRaster } from '../../../../shared/radio/raster';
+import type { Period } from '../../../../shared/radio/site';
+import { remote } from '../../core/remote';
+import { addressParams, readAddress, type TrialAddress } from '../address/trial-address';
+import { ASSUMED_FIELD_DB, type StationSource } from '../trial/station-source';
+import type { TrialInputs, TrialSetup } from '../trial/trial-inputs';
+
+const MOST = 500;
+
+/** A stored receiver on trial: what is chosen stands in the address. */
+@Injectable()
+export class ReceiverStore implements TrialInputs {
+  private readonly http = inject(HttpClient);
+  private readonly route = inject(ActivatedRoute);
+  private readonly router = inject(Router);
+  private readonly params = toSignal(this.route.paramMap, { requireSync: true });
+  private readonly query = toSignal(this.route.queryParamMap, { requireSync: true });
+
+  readonly id = computed(() => this.params().get('id') ?? '');
+  readonly address = computed(() => readAddress(this.query()));
+  readonly receiver = remote(
+    () => `/api/receivers/${encodeURIComponent(this.id())}`,
+    storedReceiver,
+  );
+  readonly sites = remote(() => `/api/sites?pageSize=${MOST}`, pageOf(storedSite));
+  readonly editions = remote(() => `/api/editions?pageSize=${MOST}`, pageOf(edition));
+  readonly edition = computed(() => {
+    const { source } = this.address();
+    if (source?.kind !== 'edition') return undefined;
+    return this.editions.value()?.items.find(({ id }) => id === source.editionId);
+  });
+  private readonly region = remote(() => {
+    const listed = this.edition();
+    return listed && `/api/regions/${listed.regionId}`;
+  }, region);
+
+  readonly site = computed(() => {
+    const { siteId } = this.address();
+    return this.sites.value()?.items.find(({ id }) => id === siteId);
+  });
+  readonly period = computed<Period>(() => this.address().period);
+  readonly trialHz = linkedSignal(() => this.address().ifHz ?? this.receiver.value()?.ifHz ?? 0);
+  readonly setup = computed<TrialSetup | null>(() => {
+    const [receiver, site] = [this.receiver.value(), this.site()];
+    const { source } = this.address();
+    const raster = this.raster();
+    if (!receiver || !site || !source || !raster) return null;
+    return { receiver: bareReceiver.parse(receiver), site: bareSite(site), source, raster };
+  });
+
+  private readonly raster = computed(() => {
+    const site = this.site();
+    if (this.address().source?.kind === 'edition') return this.region.value()?.raster;
+    return site && defaultRaster(site.ituRegion);
+  });
+
+  constructor() {
+    effect(() => {
+      const missing = this.missing();
+      if (Object.keys(missing).length > 0) untracked(() => void this.go(missing, true));
+    });
+  }
+
+  /** Writes a choice into the address; the page follows it. */
+  async go(change: Partial<TrialAddress>, replaceUrl = false): Promise<void> {
+    await this.router.navigate([], {
+      relativeTo: this.route,
+      queryParams: addressParams(change),
+      queryParamsHandling: 'merge',
+      replaceUrl,
+      scroll: 'manual',
+    });
+  }
+
+  settle(): void {
+    const trialHz = this.trialHz();
+    const ifHz = trialHz === this.receiver.value()?.ifHz ? undefined : trialHz;
+    if (ifHz !== this.address().ifHz) void this.go({ ifHz });
+  }
+
+  async addSite(draft: NamedSite): Promise<void> {
+    const added = storedSite.parse(await firstValueFrom(this.http.post('/api/sites', draft)));
+    this.sites.reload();
+    await this.go({ siteId: added.id }, true);
+  }
+
+  /** Keeps the IF on trial as a plan. Rejects with the server's problem. */
+  async keep(draft: PlanInput): Promise<Plan> {
+    const address = `/api/receivers/${encodeURIComponent(this.id())}/plans`;
+    return plan.parse(await firstValueFrom(this.http.post(address, draft)));
+  }
+
+  /** What the address does not say and can be filled in: the first site, the newest edition. */
+  private missing(): Partial<TrialAddress> {
+    const sites = this.sites.value()?.items;
+    const editions = this.editions.value()?.items;
+    const first = sites?.[0];
+    if (!first || !editions) return {};
+    const source: StationSource = editions[0]
+      ? { kind: 'edition', editionId: editions[0].id }
+      : { kind: 'every-channel', fieldDb: ASSUMED_FIELD_DB };
+    return {
+      ...(this.address().siteId === undefined ? { siteId: first.id } : {}),
+      ...(this.address().source === undefined ? { source } : {}),
+    };
+  }
+}
+
+const bareSite = ({ id: _id, name: _name, editable: _editable, ...site }: StoredSite) => site;

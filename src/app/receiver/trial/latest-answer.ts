@@ -1,0 +1,88 @@
+import {
+  computed,
+  DestroyRef,
+  inject,
+  Injector,
+  type Signal,
+  signal,
+  untracked,
+} from '@angular/core';
+import { takeUntilDestroyed, toObservable } from '@angular/core/rxjs-interop';
+import {
+  catchError,
+  debounceTime,
+  map,
+  merge,
+  type Observable,
+  of,
+  Subject,
+  switchMap,
+  tap,
+} from 'rxjs';
+
+import type { Problem } from '../../../../shared/contracts/problem';
+import { toProblem } from '../../core/api-problem';
+
+/** The answer to the question as it stands now; the one before stays until the new one is there. */
+export interface LatestAnswer<A> {
+  readonly value: Signal<A | undefined>;
+  readonly isLoading: Signal<boolean>;
+  readonly problem: Signal<Problem | undefined>;
+  /** Asks the same again. */
+  readonly retry: () => void;
+}
+
+interface State<A> {
+  readonly value: A | undefined;
+  readonly isLoading: boolean;
+  readonly problem: Problem | undefined;
+}
+
+/** Long enough to let a marker pass by, short enough not to be noticed. */
+const SETTLE_MS = 120;
+
+/**
+ * Asks a question whenever it changes and settles. An answer that comes after a newer question was
+ * asked is dropped, never shown. Call while the component or store is made.
+ * @param question What to ask; null: nothing, and no answer is kept.
+ * @param ask Asks it.
+ */
+export function latestAnswer<Q, A>(
+  question: Signal<Q | null>,
+  ask: (question: Q) => Observable<A>,
+): LatestAnswer<A> {
+  const idle: State<A> = { value: undefined, isLoading: false, problem: undefined };
+  const state = signal<State<A>>(idle);
+  const again = new Subject<void>();
+  merge(
+    toObservable(question, { injector: inject(Injector) }),
+    again.pipe(map(() => untracked(question))),
+  )
+    .pipe(
+      tap((asked) => {
+        state.update(({ value }) => ({ value, isLoading: asked !== null, problem: undefined }));
+      }),
+      debounceTime(SETTLE_MS),
+      switchMap((asked) => (asked === null ? of(idle) : stated(ask(asked)))),
+      takeUntilDestroyed(inject(DestroyRef)),
+    )
+    .subscribe((next) => {
+      state.set(next);
+    });
+  return {
+    value: computed(() => state().value),
+    isLoading: computed(() => state().isLoading),
+    problem: computed(() => state().problem),
+    retry: () => {
+      again.next();
+    },
+  };
+}
+
+const stated = <A>(answer: Observable<A>): Observable<State<A>> =>
+  answer.pipe(
+    map((value): State<A> => ({ value, isLoading: false, problem: undefined })),
+    catchError((error: unknown) =>
+      of<State<A>>({ value: undefined, isLoading: false, problem: toProblem(error) }),
+    ),
+  );

@@ -1,0 +1,41 @@
+import { HttpClient } from '@angular/common/http';
+import { inject, Injectable } from '@angular/core';
+import { map, type Observable } from 'rxjs';
+
+import {
+  type Assessment,
+  assessment,
+  type AssessmentInput,
+} from '../../../../shared/contracts/assessment';
+import {
+  type CandidatesAnswer,
+  candidatesAnswer,
+  type CandidatesInput,
+} from '../../../../shared/contracts/candidates';
+import {
+  type FieldStrengthsAnswer,
+  fieldStrengthsAnswer,
+  type FieldStrengthsInput,
+} from '../../../../shared/contracts/field-strengths';
+
+/** The computing calls a trial makes. */
+@Injectable({ providedIn: 'root' })
+export class TrialApi {
+  private readonly http = inject(HttpClient);
+
+  fieldStrengths(body: FieldStrengthsInput): Observable<FieldStrengthsAnswer> {
+    return this.http
+      .post('/api/field-strengths', body)
+      .pipe(map((answer) => fieldStrengthsAnswer.parse(answer)));
+  }
+
+  assess(body: AssessmentInput): Observable<Assessment> {
+    return this.http.post('/api/assessments', body).pipe(map((answer) => assessment.parse(answer)));
+  }
+
+  candidates(body: CandidatesInput): Observable<CandidatesAnswer> {
+    return this.http
+      .post('/api/if-candidates', body)
+      .pipe(map((answer) => candidatesAnswer.parse(answer)));
+  }
+}

@@ -1,0 +1,26 @@
+import type { Signal, WritableSignal } from '@angular/core';
+
+import type { ReceiverDraft } from '../../../../shared/contracts/receiver';
+import type { SiteDraft } from '../../../../shared/contracts/site';
+import type { Period } from '../../../../shared/radio/site';
+import type { RasterRange } from '../../../../shared/radio/station';
+import type { StationSource } from './station-source';
+
+/** What is judged, wherever it comes from: a stored receiver or one that a visitor describes. */
+export interface TrialSetup {
+  readonly receiver: ReceiverDraft;
+  readonly site: SiteDraft;
+  readonly source: StationSource;
+  readonly raster: readonly RasterRange[];
+}
+
+/** Given by the page to the trial it shows. */
+export abstract class TrialInputs {
+  /** Null until everything is chosen. */
+  abstract readonly setup: Signal<TrialSetup | null>;
+  abstract readonly period: Signal<Period>;
+  /** The IF on trial, hertz. */
+  abstract readonly trialHz: WritableSignal<number>;
+  /** Writes the IF on trial into the address. */
+  abstract settle(): void;
+}

@@ -1,0 +1,155 @@
+import { computed, inject, Injectable, signal } from '@angular/core';
+import { map } from 'rxjs';
+
+import type { Period } from '../../../../shared/radio/site';
+import { candidateRange, reachOf } from './candidate-range';
+import { latestAnswer } from './latest-answer';
+import { sourceFields } from './station-source';
+import { TrialApi } from './trial-api';
+import { TrialInputs, type TrialSetup } from './trial-inputs';
+
+const PERIODS: Period[] = ['day', 'night'];
+/** Responses drawn for a band: the worst of them, hidden ones too. */
+const MOST_RESPONSES = 300;
+
+const sameText = (one: unknown, other: unknown): boolean =>
+  JSON.stringify(one) === JSON.stringify(other);
+
+/** Keeps the answers to what is on trial up to date with its inputs. */
+@Injectable()
+export class TrialStore {
+  private readonly api = inject(TrialApi);
+  private readonly inputs = inject(TrialInputs);
+
+  readonly setup = this.inputs.setup;
+  readonly period = this.inputs.period;
+  readonly trialHz = this.inputs.trialHz;
+  readonly presentHz = computed(() => this.setup()?.receiver.ifHz ?? 0);
+  /** How far the IF can be moved. */
+  readonly reach = computed(() => {
+    const receiver = this.setup()?.receiver;
+    return receiver ? reachOf(receiver) : { low: 0, high: 0 };
+  });
+
+  /** Mark picked in any chart or table. */
+  readonly picked = signal<string | null>(null);
+  /** Response whose working is shown. */
+  readonly worked = signal<string | null>(null);
+
+  readonly fields = latestAnswer(
+    computed(
+      () => {
+        const setup = this.setup();
+        return setup && { ...place(setup), period: this.period() };
+      },
+      { equal: sameText },
+    ),
+    (body) => this.api.fieldStrengths(body),
+  );
+
+  /** All candidates; they do not depend on the IF on trial. */
+  readonly candidates = latestAnswer(
+    computed(
+      () => {
+        const setup = this.setup();
+        if (!setup) return null;
+        const { receiver } = setup;
+        return { ...place(setup), receiver, periods: PERIODS, ...candidateRange(receiver) };
+      },
+      { equal: sameText },
+    ),
+    (body) => this.api.candidates(body),
+  );
+
+  /** The set as it stands now: only its verdict is used. */
+  readonly present = latestAnswer(
+    computed(
+      () => {
+        const setup = this.setup();
+        if (!setup) return null;
+        return { ...place(setup), receiver: setup.receiver, period: this.period(), limit: 1 };
+      },
+      { equal: sameText },
+    ),
+    (body) => this.api.assess(body).pipe(map(({ verdict }) => verdict)),
+  );
+
+  /** The set with the IF on trial. */
+  readonly judged = latestAnswer(
+    computed(
+      () => {
+        const setup = this.setup();
+        return setup && { ...place(setup), ...this.onTrial(setup) };
+      },
+      { equal: sameText },
+    ),
+    (body) => this.api.assess(body),
+  );
+
+  /** The IF on trial as a candidate, when it is none of the round ones. */
+  private readonly ownCandidate = latestAnswer(
+    computed(
+      () => {
+        const setup = this.setup();
+        const trialHz = this.trialHz();
+        const known = this.candidates.value()?.candidates;
+        if (!setup || !known || known.some(({ ifHz }) => ifHz === trialHz)) return null;
+        const { receiver } = setup;
+        const only = { fromHz: trialHz, toHz: trialHz, stepHz: 1 };
+        return { ...place(setup), receiver, periods: PERIODS, ...only };
+      },
+      { equal: sameText },
+    ),
+    (body) => this.api.candidates(body),
+  );
+
+  readonly trialCandidate = computed(() => {
+    const trialHz = this.trialHz();
+    const answer = this.candidates.value();
+    return [
+      answer?.present,
+      ...(answer?.candidates ?? []),
+      ...(this.ownCandidate.value()?.candidates ?? []),
+    ].find((each) => each?.ifHz === trialHz);
+  });
+
+  readonly stations = computed(() =>
+    (this.fields.value()?.fields ?? []).map(({ station, ...each }) => ({ id: station, ...each })),
+  );
+  private readonly names = computed(
+    () => new Map(this.stations().map(({ id, name }) => [id, name])),
+  );
+
+  private readonly answers = [this.fields, this.candidates, this.present, this.judged];
+  readonly isLoading = computed(() => this.answers.some(({ isLoading }) => isLoading()));
+  readonly problem = computed(() =>
+    this.answers.map(({ problem }) => problem()).find((each) => each !== undefined),
+  );
+
+  readonly nameOf = (station: number): string => this.names().get(station) ?? `#${station}`;
+
+  retry(): void {
+    for (const each of this.answers) if (each.problem()) each.retry();
+  }
+
+  /** Puts an IF on trial and writes it into the address. */
+  take(ifHz: number): void {
+    this.trialHz.set(ifHz);
+    this.inputs.settle();
+  }
+
+  settle(): void {
+    this.inputs.settle();
+  }
+
+  private onTrial({ receiver }: TrialSetup) {
+    return {
+      receiver: { ...receiver, ifHz: this.trialHz() },
+      period: this.period(),
+      leaveOutBetterThan: null,
+      limit: MOST_RESPONSES,
+    };
+  }
+}
+
+const place = ({ site, source }: TrialSetup) => ({ site, ...sourceFields(source) });
