@@ -40,7 +40,7 @@ const environment = z
     TRUSTED_PROXIES: z.coerce.number().int().min(0).max(10).default(0),
     /** Whether an empty database gets the demo club; never in production. */
     DEMO_CLUB: flag,
-    /** Password of the demo accounts; it must be known to be told again at the next start. */
+    /** Password of the demo accounts. */
     DEMO_PASSWORD: z.string().min(8).max(256).optional(),
     /** Failed sign-ins for one account in 15 minutes: stops guessing, forgives a bad memory. */
     LIMIT_SIGN_IN: count(20),
@@ -56,6 +56,14 @@ const environment = z
   .refine(({ NODE_ENV, SESSION_SECRET }) => NODE_ENV !== 'production' || SESSION_SECRET, {
     path: ['SESSION_SECRET'],
     message: `Needed in production: at least ${MIN_SECRET_LENGTH} characters, made at random.`,
+  })
+  .refine(({ DEMO_CLUB, DEMO_PASSWORD }) => !DEMO_CLUB || DEMO_PASSWORD, {
+    path: ['DEMO_PASSWORD'],
+    message: 'Needed with DEMO_CLUB: the password of its accounts.',
+  })
+  .refine(({ DEMO_CLUB, NODE_ENV }) => !DEMO_CLUB || NODE_ENV !== 'production', {
+    path: ['DEMO_CLUB'],
+    message: 'The demo club has no place in production.',
   })
   .transform((settings) => ({
     ...settings,

@@ -1,13 +1,16 @@
 import { createServer, type Server } from 'node:http';
 import type { AddressInfo } from 'node:net';
 
+import type { Sequelize } from 'sequelize';
+
 import { createApp } from './app.ts';
 import { type Config, readConfig } from './config.ts';
 import { connectDatabase } from './db/connection.ts';
+import { underDatabaseLock } from './db/database-lock.ts';
 import { migrate } from './db/migrator.ts';
 import { startHousekeeping } from './housekeeping.ts';
 import { createLogger, type Logger } from './logger.ts';
-import { createServices } from './services.ts';
+import { createServices, type Services } from './services.ts';
 
 const DRAIN_MS = 10_000;
 
@@ -23,12 +26,13 @@ async function main(config: Config, log: Logger): Promise<void> {
   log.info({ migrations }, 'database ready');
 
   const services = createServices(database, config, log);
+  const demo = await openDemoClub(config, services, database);
   const stopHousekeeping = startHousekeeping(services, log);
   const server = createServer(createApp(services, database, config, log));
   const { port } = await listen(server, config);
   const url = `http://${config.HOST}:${port}`;
   log.info({ url }, 'listening');
-  process.send?.({ type: 'listening', url, port, demo: null });
+  process.send?.({ type: 'listening', url, port, demo });
 
   stopOnSignal(log, async () => {
     stopHousekeeping();
@@ -37,6 +41,17 @@ async function main(config: Config, log: Logger): Promise<void> {
     await services.passwords.close();
     await database.close();
   });
+}
+
+/** Fills an empty database on demand; answers how to enter what it was filled with. */
+async function openDemoClub(config: Config, services: Services, database: Sequelize) {
+  const { DEMO_CLUB, DEMO_PASSWORD, DATABASE_URL } = config;
+  if (!DEMO_CLUB || DEMO_PASSWORD === undefined) return [];
+  const { demoSignIns, loadDemoClub } = await import('./dev/demo-club.ts');
+  await underDatabaseLock(DATABASE_URL, 'demo', () =>
+    loadDemoClub(services, database, DEMO_PASSWORD),
+  );
+  return demoSignIns(services, DEMO_PASSWORD);
 }
 
 function listen(server: Server, { HOST, PORT }: Config): Promise<AddressInfo> {

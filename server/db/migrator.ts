@@ -1,11 +1,11 @@
 import { readdir } from 'node:fs/promises';
 
-import { createConnection } from 'mariadb';
 import type { Sequelize } from 'sequelize';
 import { SequelizeStorage, Umzug } from 'umzug';
 
+import { underDatabaseLock } from './database-lock.ts';
+
 const FOLDER = new URL('./migrations/', import.meta.url);
-const LOCK_SECONDS = 120;
 
 /** Runs one SQL statement. */
 export type Run = (sql: string) => Promise<unknown>;
@@ -34,7 +34,7 @@ async function createMigrator(database: Sequelize): Promise<Umzug<Run>> {
 
 /** Brings the tables up to date; two processes starting at once take turns. */
 export async function migrate(database: Sequelize, url: string): Promise<string[]> {
-  return locked(url, async () => {
+  return underDatabaseLock(url, 'migrate', async () => {
     const done = await (await createMigrator(database)).up();
     return done.map(({ name }) => name);
   });
@@ -42,22 +42,7 @@ export async function migrate(database: Sequelize, url: string): Promise<string[
 
 /** Takes back every migration after the named one, or all of them. */
 export async function migrateDown(database: Sequelize, url: string, to?: string): Promise<void> {
-  await locked(url, async () => {
+  await underDatabaseLock(url, 'migrate', async () => {
     await (await createMigrator(database)).down({ to: to ?? 0 });
   });
-}
-
-async function locked<T>(url: string, work: () => Promise<T>): Promise<T> {
-  const connection = await createConnection(url.replace(/^mysql:/, 'mariadb:'));
-  connection.on('error', () => undefined); // A lost lock ends with its server; the work reports it.
-  try {
-    const [row] = (await connection.query(
-      "SELECT GET_LOCK(CONCAT(DATABASE(), '.migrate'), ?) AS held",
-      [LOCK_SECONDS],
-    )) as { held: number | bigint | null }[];
-    if (Number(row?.held) !== 1) throw new Error('Another process is still migrating.');
-    return await work();
-  } finally {
-    await connection.end(); // Frees the lock.
-  }
 }

@@ -18,6 +18,8 @@ interface ClientSettings {
 export function client(settings: ClientSettings): Router {
   const folder = resolve(settings.CLIENT_DIR);
   const router = Router();
+  const servePage = page(join(folder, 'index.html'), settings.BEHIND_TLS);
+  router.get('/index.html', servePage); // Before the files: as a file it would lack its nonce.
   router.use(
     express.static(folder, {
       index: false,
@@ -28,7 +30,7 @@ export function client(settings: ClientSettings): Router {
       },
     }),
   );
-  router.get('/{*path}', page(join(folder, 'index.html'), settings.BEHIND_TLS));
+  router.get('/{*path}', servePage);
   return router;
 }
 

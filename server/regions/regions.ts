@@ -1,4 +1,4 @@
-import { literal, type Sequelize } from 'sequelize';
+import { literal, QueryTypes, type Sequelize } from 'sequelize';
 
 import type { Page, PageQuery } from '../../shared/contracts/paging.ts';
 import type { Region, RegionDraft } from '../../shared/contracts/region.ts';
@@ -72,6 +72,7 @@ export class Regions {
       try {
         await this.database.query('SELECT id FROM regions WHERE id = ? FOR UPDATE NOWAIT', {
           replacements: [id],
+          type: QueryTypes.SELECT,
         });
       } catch (error) {
         if (!isDeadlock(error)) throw error;

@@ -29,9 +29,7 @@ describe('GET /api/openapi.json', () => {
     );
 
     const described = Object.entries(description.paths).flatMap(([path, operations]) =>
-      Object.keys(operations).map(
-        (method) => `${method} ${path.replace(/\{(\w+)\}/g, ':$1')}`,
-      ),
+      Object.keys(operations).map((method) => `${method} ${path.replace(/\{(\w+)\}/g, ':$1')}`),
     );
 
     expect(described.length).toBeGreaterThan(15);
