@@ -22,6 +22,25 @@ export type ImportField = z.infer<typeof importField>;
 export const importUnit = z.enum(['Hz', 'kHz', 'MHz', 'W', 'kW', 'dBW', 'degrees', 'dms']);
 export type ImportUnit = z.infer<typeof importUnit>;
 
+const FREQUENCY_UNITS = ['kHz', 'MHz', 'Hz'] as const;
+const POWER_UNITS = ['W', 'kW', 'dBW'] as const;
+const ANGLE_UNITS = ['degrees', 'dms'] as const;
+
+/** Units in which a field can be given; none for text. */
+export const importUnitsOf: Readonly<Record<ImportField, readonly ImportUnit[]>> = {
+  name: [],
+  callSign: [],
+  frequency: FREQUENCY_UNITS,
+  latitude: ANGLE_UNITS,
+  longitude: ANGLE_UNITS,
+  locator: [],
+  power: POWER_UNITS,
+  powerDay: POWER_UNITS,
+  powerNight: POWER_UNITS,
+  hours: [],
+  note: [],
+};
+
 /** How one column is read; a column with field null is left out. */
 export const importColumn = z.object({
   header: z.string(),
