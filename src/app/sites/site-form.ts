@@ -38,11 +38,11 @@ export function draftOf(form: SiteForm): Record<keyof NamedSiteInput, unknown> {
 export const siteToSave = namedSite
   .refine(({ latitude, longitude }) => longitude !== null || latitude === null, {
     path: ['longitude'],
-    message: $localize`Give the longitude as well, or neither of the two.`,
+    error: $localize`Give the longitude as well, or neither of the two.`,
   })
   .refine(({ latitude, longitude }) => latitude !== null || longitude === null, {
     path: ['latitude'],
-    message: $localize`Give the latitude as well, or neither of the two.`,
+    error: $localize`Give the latitude as well, or neither of the two.`,
   });
 
 /** Fills the form with a stored site. */

@@ -1,0 +1,34 @@
+import { Injectable, linkedSignal } from '@angular/core';
+
+import { type Page, pageOf } from '../../../shared/contracts/paging';
+import {
+  edition,
+  type ListedStation,
+  listedStation,
+  type StationQuery,
+} from '../../../shared/contracts/region';
+import { remote } from '../core/remote';
+
+const addressOf = (id: string) => `/api/editions/${encodeURIComponent(id)}`;
+
+/** Editions and their stations. Both are read in an injection context. */
+@Injectable()
+export class EditionStore {
+  one(id: () => string) {
+    return remote(() => addressOf(id()), edition);
+  }
+
+  /** A page of an edition's stations; the page before stays until the next one is there. */
+  stations(id: () => string, query: () => StationQuery) {
+    const page = remote(() => {
+      const { page, pageSize, search } = query();
+      const asked = new URLSearchParams({ page: `${page}`, pageSize: `${pageSize}`, search });
+      return `${addressOf(id())}/stations?${asked.toString()}`;
+    }, pageOf(listedStation));
+    const value = linkedSignal<Page<ListedStation> | undefined, Page<ListedStation> | undefined>({
+      source: page.value,
+      computation: (next, previous) => next ?? previous?.value,
+    });
+    return { ...page, value: value.asReadonly() };
+  }
+}

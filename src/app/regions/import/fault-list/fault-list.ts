@@ -1,0 +1,28 @@
+import { DecimalPipe } from '@angular/common';
+import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
+
+import type { ImportFault } from '../../../../../shared/contracts/list-import';
+import { groupFaults } from '../fault-groups';
+
+/** Rows shown of one cause; the download has them all. */
+const SHOWN = 50;
+
+/** What is wrong, grouped by cause and then row by row. */
+@Component({
+  selector: 'app-fault-list',
+  imports: [DecimalPipe],
+  templateUrl: './fault-list.html',
+  styleUrl: './fault-list.scss',
+  changeDetection: ChangeDetectionStrategy.OnPush,
+})
+export class FaultList {
+  readonly faults = input.required<readonly ImportFault[]>();
+
+  protected readonly groups = computed(() =>
+    groupFaults(this.faults()).map((group) => ({
+      ...group,
+      shown: group.faults.slice(0, SHOWN),
+      left: Math.max(0, group.faults.length - SHOWN),
+    })),
+  );
+}

@@ -1,0 +1,51 @@
+import type {
+  ImportColumn,
+  ImportField,
+  ImportUnit,
+} from '../../../../shared/contracts/list-import';
+import { importUnitsOf } from '../../../../shared/contracts/list-import';
+
+/** What a column can hold, in the order in which it is offered. */
+export const FIELDS: readonly { readonly value: ImportField; readonly words: string }[] = [
+  { value: 'frequency', words: $localize`Frequency` },
+  { value: 'name', words: $localize`Name of the station` },
+  { value: 'callSign', words: $localize`Call sign` },
+  { value: 'latitude', words: $localize`Latitude` },
+  { value: 'longitude', words: $localize`Longitude` },
+  { value: 'locator', words: $localize`Locator` },
+  { value: 'power', words: $localize`Power, day and night alike` },
+  { value: 'powerDay', words: $localize`Power by day` },
+  { value: 'powerNight', words: $localize`Power by night` },
+  { value: 'hours', words: $localize`Hours of service` },
+  { value: 'note', words: $localize`Note` },
+];
+
+/** A unit as people read it. */
+export const unitWords = (unit: ImportUnit): string => UNITS[unit] ?? unit;
+
+const UNITS: Readonly<Partial<Record<ImportUnit, string>>> = {
+  degrees: $localize`degrees`,
+  dms: $localize`degrees, minutes, seconds`,
+};
+
+/** What parts the cells of a row, in words. */
+export function delimiterWords(delimiter: string): string {
+  switch (delimiter) {
+    case ',':
+      return $localize`commas`;
+    case ';':
+      return $localize`semicolons`;
+    case '\t':
+      return $localize`tabs`;
+    case '|':
+      return $localize`vertical bars`;
+    default:
+      return `“${delimiter}”`;
+  }
+}
+
+/** Headers of the columns whose unit has to be asked for. */
+export const openUnits = (columns: readonly ImportColumn[]): string[] =>
+  columns
+    .filter(({ field, unit }) => field !== null && unit === null && importUnitsOf[field].length > 0)
+    .map(({ header }) => header);
