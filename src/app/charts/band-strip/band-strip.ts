@@ -54,6 +54,8 @@ export class BandStrip {
   /** Levels over the noise, the same for every band of the receiver. */
   readonly loudness = input.required<ScaleLinear<number, number>>();
   readonly isLog = input(false);
+  /** What Enter does with a response, in words; empty where nobody listens to `working`. */
+  readonly leadsOn = input($localize`Enter shows the working.`);
   readonly picked = model<string | null>(null);
   /** Asks for the working behind a response. */
   readonly working = output<string>();
@@ -63,7 +65,6 @@ export class BandStrip {
   protected readonly isTable = signal(false);
   protected readonly strip = STRIP;
   protected readonly columns = stripColumns();
-  protected readonly leadsOn = $localize`Enter shows the working.`;
   private readonly isNarrow = computed(() => this.width() < NARROW);
   protected readonly frame = computed(() =>
     frame(this.width(), STRIP_HEIGHT + 20, {
