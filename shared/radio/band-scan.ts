@@ -4,8 +4,9 @@
  * @module radio/band-scan
  */
 import type { Dial } from './dial.ts';
-import { DialSettings } from './dial-settings.ts';
+import { DialSettings, type Meeting, MEETINGS } from './dial-settings.ts';
 import type { FrontEnd } from './front-end.ts';
+import { NoiseGate } from './noise-gate.ts';
 import { mixerLevel, signalOrderLevel } from './product-levels.ts';
 import type { Receiver } from './receiver.ts';
 import { StillSettings } from './still-settings.ts';
@@ -56,6 +57,8 @@ export class BandScan {
   readonly frontEnd: FrontEnd;
   private readonly receiver: Receiver;
   private readonly still: StillSettings;
+  private readonly gate: NoiseGate;
+  private readonly settings: DialSettings;
   /** Loss of the terms that do not follow the dial, for each group. */
   private readonly fixedDb: Float64Array;
   private readonly finding: Finding = {
@@ -77,6 +80,8 @@ export class BandScan {
     this.dial = dial;
     this.frontEnd = frontEnd;
     this.fixedDb = dial.spectrum.hz.map((hz) => frontEnd.fixedDb(hz));
+    this.settings = new DialSettings(dial);
+    this.gate = new NoiseGate(dial, frontEnd, this.fixedDb, receiver.strayDb?.image ?? Infinity);
     this.still = new StillSettings(dial, (group, n, row) => this.shiftDb(group, 0, n, row));
   }
 
@@ -90,20 +95,51 @@ export class BandScan {
    */
   scan(ifHz: number, { maxM, maxN }: Orders, sink: FindingSink): void {
     this.scanBreakthrough(ifHz, maxN, sink);
-    const settings = new DialSettings(this.dial, ifHz);
-    const { hz } = this.dial.spectrum;
+    this.settings.moveTo(ifHz);
     for (let n = 1; n <= maxN; n++) {
       for (let m = 1; m <= maxM; m++) {
-        const levelDb = this.productLevelDb(m, n);
-        for (let group = 0; group < hz.length; group++) {
-          const found = settings.solve(hz[group] ?? NaN, m, n);
-          for (let index = 0; index < found; index++) {
-            const row = settings.row[index] ?? 0;
-            if (row === this.dial.vacant) this.dial.lend(settings.solutionHz[index] ?? NaN);
-            this.judge(group, m, n, row, settings.beatHz[index] ?? NaN, levelDb, sink);
-          }
-        }
+        for (const meeting of MEETINGS) this.scanMeeting(m, n, meeting, sink);
       }
+    }
+  }
+
+  private scanMeeting(m: number, n: number, meeting: Meeting, sink: FindingSink): void {
+    const { settings } = this;
+    const { hz } = this.dial.spectrum;
+    const levelDb = this.productLevelDb(m, n);
+    const gate = sink.takesHidden ? null : this.gate.forProduct(n, levelDb);
+    const [lowest, highest] = settings.stationsWithin(m, n, meeting);
+    for (let group = this.dial.spectrum.firstFrom(lowest); group < hz.length; group++) {
+      const stationHz = hz[group] ?? NaN;
+      if (stationHz > highest) return;
+      const solution = settings.solution(stationHz, m, n, meeting);
+      if (Number.isNaN(solution)) continue;
+      let found = 0;
+      if (settings.mayShare(stationHz, m, n)) {
+        // All solutions are settled together, with the first of them that lies in the band.
+        if (!settings.isFirst(stationHz, m, n, meeting)) continue;
+        found = settings.settleAll(stationHz, m, n);
+      } else {
+        if (gate !== null && this.gate.isSilent(gate, group, n, solution)) continue;
+        found = settings.settle(stationHz, m, n, meeting);
+      }
+      this.judgeAll(found, group, m, n, levelDb, sink);
+    }
+  }
+
+  private judgeAll(
+    found: number,
+    group: number,
+    m: number,
+    n: number,
+    levelDb: number,
+    sink: FindingSink,
+  ): void {
+    const { settings } = this;
+    for (let index = 0; index < found; index++) {
+      const row = settings.row[index] ?? 0;
+      if (row === this.dial.vacant) this.dial.lend(settings.solutionHz[index] ?? NaN);
+      this.judge(group, m, n, row, settings.beatHz[index] ?? NaN, levelDb, sink);
     }
   }
 

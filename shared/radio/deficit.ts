@@ -68,18 +68,14 @@ export class Deficit implements FindingSink {
     this.keepLoudest(finding, levelDb - (dial.noiseDb[row] ?? NaN));
   }
 
-  /** The usable stations of the band, with what one kind, or all together, leave them. */
-  usable(kind: Kind | null = null): UsableStation[] {
+  /** The usable stations of the band, with what all responses together leave them. */
+  usable(): UsableStation[] {
     const { dial } = this;
-    const stations: UsableStation[] = [];
-    for (const row of dial.listed) {
-      const position = dial.wanted[row] ?? -1;
-      if (position < 0) continue;
-      const power = this.powerAt(row, kind);
-      const ratioDb = power > 0 ? (dial.wantedDb[row] ?? NaN) - 10 * Math.log10(power) : Infinity;
-      stations.push({ position, dialHz: dial.hz[row] ?? NaN, ratioDb });
-    }
-    return stations;
+    return Array.from(dial.usableRows, (row) => ({
+      position: dial.wanted[row] ?? -1,
+      dialHz: dial.hz[row] ?? NaN,
+      ratioDb: this.ratioDb(row, null),
+    }));
   }
 
   /**
@@ -90,14 +86,20 @@ export class Deficit implements FindingSink {
    */
   deficitDb(kind: Kind | null = null): number {
     const missing = (ratioDb: number): number => Math.max(0, this.dial.protectionDb - ratioDb);
-    const onStations = this.usable(kind).reduce((sum, { ratioDb }) => sum + missing(ratioDb), 0);
+    let onStations = 0;
+    for (const row of this.dial.usableRows) onStations += missing(this.ratioDb(row, kind));
     const counts = kind === null || kind === 'breakthrough';
     return onStations + (counts ? missing(this.emptyBreakthroughDb) : 0);
   }
 
-  private powerAt(row: number, kind: Kind | null): number {
-    if (kind !== null) return this.powers[kind][row] ?? 0;
-    return KINDS.reduce((sum, each) => sum + (this.powers[each][row] ?? 0), 0);
+  /** What one kind, or all together, leave a usable station; Infinity: nothing is heard. */
+  private ratioDb(row: number, kind: Kind | null): number {
+    const { breakthrough, image, products } = this.powers;
+    const power =
+      kind === null
+        ? (breakthrough[row] ?? 0) + (image[row] ?? 0) + (products[row] ?? 0)
+        : (this.powers[kind][row] ?? 0);
+    return power > 0 ? (this.dial.wantedDb[row] ?? NaN) - 10 * Math.log10(power) : Infinity;
   }
 
   private keepWorst(kind: Kind, finding: Readonly<Finding>, ratioDb: number): void {

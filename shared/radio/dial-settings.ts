@@ -6,6 +6,9 @@
 import type { Dial } from './dial.ts';
 import { sideSign } from './superheterodyne.ts';
 
+/** A range of stations is taken this much wider than rounding can make it, hertz. */
+const SLACK_HZ = 1;
+
 /**
  * The dial setting at which the m-th harmonic of the oscillator stands on a frequency.
  *
@@ -29,6 +32,19 @@ export function dialSolution(
   return (targetHz * harmonic) / m - signedIfHz;
 }
 
+/** A way in which a signal and the oscillator make the IF: `m osc = signal n f + offset IF`. */
+export interface Meeting {
+  readonly signal: 1 | -1;
+  readonly offset: 1 | -1;
+}
+
+/** The three ways; the last two are never both above 0. */
+export const MEETINGS: readonly Meeting[] = [
+  { signal: 1, offset: 1 },
+  { signal: 1, offset: -1 },
+  { signal: -1, offset: 1 },
+];
+
 /**
  * Solves a product for one station frequency at a time and keeps what it found in columns.
  *
@@ -46,42 +62,92 @@ export class DialSettings {
   /** d* of each setting; the frequency of the setting where the row is the vacant one. */
   readonly solutionHz: Float64Array;
   private readonly dial: Dial;
-  private readonly signedIfHz: number;
-  private readonly ifHz: number;
+  private signedIfHz = NaN;
+  private ifHz = NaN;
   private found = 0;
 
-  constructor(dial: Dial, ifHz: number) {
+  constructor(dial: Dial) {
     this.dial = dial;
-    this.ifHz = ifHz;
-    this.signedIfHz = sideSign(dial.band.oscillator) * ifHz;
     const most = 2 * (dial.vacant + 1);
     this.row = new Int32Array(most);
     this.beatHz = new Float64Array(most);
     this.solutionHz = new Float64Array(most);
   }
 
+  /** Moves to an IF, hertz. */
+  moveTo(ifHz: number): void {
+    this.ifHz = ifHz;
+    this.signedIfHz = sideSign(this.dial.band.oscillator) * ifHz;
+  }
+
+  /** Frequencies of stations that may be heard somewhere on the band: lowest and highest. */
+  stationsWithin(m: number, n: number, { signal, offset }: Meeting): [number, number] {
+    const { lowHz, highHz, oscillatorHarmonic } = this.dial.band;
+    const stationAt = (dialHz: number): number => {
+      const target = Math.max(0, (m * (dialHz + this.signedIfHz)) / oscillatorHarmonic);
+      return (signal * (target - offset * this.ifHz)) / n;
+    };
+    const ends = [stationAt(lowHz), stationAt(highHz)];
+    return [Math.min(...ends) - SLACK_HZ, Math.max(...ends) + SLACK_HZ];
+  }
+
+  /** d* of a station; NaN: none in the band, or the wanted product itself, which is no response. */
+  solution(stationHz: number, m: number, n: number, meeting: Meeting): number {
+    const { band } = this.dial;
+    const target = this.target(stationHz, n, meeting);
+    if (target <= 0) return NaN;
+    const solution = dialSolution(target, m, band.oscillatorHarmonic, this.signedIfHz);
+    if (solution < band.lowHz || solution > band.highHz) return NaN;
+    const wanted = m === band.oscillatorHarmonic && n === 1 && solution === stationHz;
+    return wanted ? NaN : solution;
+  }
+
+  /** Whether the two solutions of a product lie so near that they may share a setting. */
+  mayShare(stationHz: number, m: number, n: number): boolean {
+    const apart = (2 * Math.min(n * stationHz, this.ifHz) * this.dial.band.oscillatorHarmonic) / m;
+    return apart <= 2 * this.dial.reachHz;
+  }
+
+  /** Whether a way is the first of a product that has a solution in the band. */
+  isFirst(stationHz: number, m: number, n: number, meeting: Meeting): boolean {
+    return meeting === MEETINGS.find((each) => !Number.isNaN(this.solution(stationHz, m, n, each)));
+  }
+
   /**
-   * Finds the settings for a station frequency and a product with m from 1.
+   * Finds the settings of one solution.
    *
    * @returns How many there are; they stand in the columns.
    */
-  solve(stationHz: number, m: number, n: number): number {
+  settle(stationHz: number, m: number, n: number, meeting: Meeting): number {
     this.found = 0;
-    const upper = n * stationHz + this.ifHz;
-    const lower = Math.abs(n * stationHz - this.ifHz);
-    this.addSolution(stationHz, m, n, upper);
-    const first = this.found;
-    if (lower > 0) this.addSolution(stationHz, m, n, lower);
-    if (first > 0 && this.found > first) this.keepSmallerBeats(first);
+    this.addSolution(stationHz, m, n, meeting);
     return this.found;
   }
 
-  private addSolution(stationHz: number, m: number, n: number, targetHz: number): void {
-    const { band } = this.dial;
-    const solution = dialSolution(targetHz, m, band.oscillatorHarmonic, this.signedIfHz);
-    if (solution < band.lowHz || solution > band.highHz) return;
-    // The wanted product itself: tuned to the station, it is no response.
-    if (m === band.oscillatorHarmonic && n === 1 && solution === stationHz) return;
+  /**
+   * Finds the settings of all solutions of a product together: where two lead to one setting, the
+   * smaller beat stands.
+   *
+   * @returns How many there are; they stand in the columns.
+   */
+  settleAll(stationHz: number, m: number, n: number): number {
+    this.found = 0;
+    for (const meeting of MEETINGS) {
+      const first = this.found;
+      this.addSolution(stationHz, m, n, meeting);
+      if (first > 0) this.keepSmallerBeats(first);
+    }
+    return this.found;
+  }
+
+  private target(stationHz: number, n: number, { signal, offset }: Meeting): number {
+    return signal * n * stationHz + offset * this.ifHz;
+  }
+
+  private addSolution(stationHz: number, m: number, n: number, meeting: Meeting): void {
+    const solution = this.solution(stationHz, m, n, meeting);
+    if (Number.isNaN(solution)) return;
+    const targetHz = this.target(stationHz, n, meeting);
     const before = this.found;
     this.addListed(stationHz, m, solution, targetHz);
     if (this.found > before) return;
@@ -139,7 +205,6 @@ export class DialSettings {
   /** Where two solutions of one product lead to one setting, the smaller beat stands. */
   private keepSmallerBeats(first: number): void {
     const { row, beatHz, solutionHz } = this;
-    if (Math.abs((solutionHz[0] ?? 0) - (solutionHz[first] ?? 0)) > 2 * this.dial.reachHz) return;
     let kept = first;
     for (let index = first; index < this.found; index++) {
       const same = row.subarray(0, first).indexOf(row[index] ?? -1);

@@ -16,7 +16,7 @@ import type { WeightingTable } from './weighting-table.ts';
 /** A station is usable from here above the noise, decibels. */
 const USABLE_OVER_NOISE_DB = 26;
 /** Interference this far under noise or band is not heard, decibels. */
-const HIDDEN_UNDER_DB = 6;
+export const HIDDEN_UNDER_DB = 6;
 
 /** What a dial is made of. */
 export interface DialParts {
@@ -49,6 +49,8 @@ export class Dial {
   /** Rows of listed frequencies and of channels, ascending. */
   readonly listed: Int32Array;
   readonly channels: Int32Array;
+  /** Rows of usable stations, ascending. */
+  readonly usableRows: Int32Array;
   readonly noiseDb: Float64Array;
   readonly wantedDb: Float64Array;
   /** Position of the usable station; -1: none, the wanted field is assumed. */
@@ -60,7 +62,10 @@ export class Dial {
   private readonly parts: DialParts;
   /** Power of the band itself; NaN: not yet asked. */
   private readonly bandPowers: Float64Array;
+  /** Level up to which a station elsewhere is hidden; NaN: not yet asked. */
+  private readonly hiddenDbs: Float64Array;
   private readonly tables: WeightingTable[] = [];
+  private readonly tolerances: number[] = [];
   private readonly tableOf: Uint8Array;
 
   constructor(parts: DialParts) {
@@ -87,14 +92,16 @@ export class Dial {
       column(),
     ];
     this.bandPowers = column();
+    this.hiddenDbs = column();
     this.wanted = new Int32Array(settings.length + 1);
     this.tableOf = new Uint8Array(settings.length + 1);
-    settings.forEach((hz, row) => this.fill(row, hz));
+    settings.forEach((hz, row) => this.fill(row, hz, spectrum.groupAt(hz)));
+    this.usableRows = this.listed.filter((row) => (this.wanted[row] ?? -1) >= 0);
   }
 
   /** Lends the spare row to a setting that has none. */
   lend(hz: number): number {
-    this.fill(this.vacant, hz);
+    this.fill(this.vacant, hz, -1);
     return this.vacant;
   }
 
@@ -124,6 +131,16 @@ export class Dial {
     return this.tables[table]?.at(beatHz) ?? NaN;
   }
 
+  /** The largest weighting that any beat can have, decibels. */
+  get greatestWeightingDb(): number {
+    return this.tables[0]?.greatestDb ?? NaN;
+  }
+
+  /** The least noise on the band, dB(uV/m): it changes one way along the dial. */
+  get leastNoiseDb(): number {
+    return Math.min(this.noiseDb[0] ?? NaN, this.noiseDb[this.vacant - 1] ?? NaN);
+  }
+
   /** Level up to which interference is hidden by the noise, dB(uV/m). */
   hiddenByNoiseDb(row: number): number {
     return (this.noiseDb[row] ?? NaN) - HIDDEN_UNDER_DB;
@@ -138,10 +155,13 @@ export class Dial {
    * @returns dB(uV/m).
    */
   hiddenDb(row: number, group: number, position: number): number {
-    const noiseDb = this.noiseDb[row] ?? NaN;
-    const power = this.bandPower(row, group, position);
-    if (power < 0) return noiseDb - HIDDEN_UNDER_DB;
-    return 10 * Math.log10(10 ** (noiseDb / 10) + power) - HIDDEN_UNDER_DB;
+    if (this.isNear(row, group)) return this.hiddenUnder(row, this.sumBand(row, group, position));
+    let hidden = this.hiddenDbs[row] ?? NaN;
+    if (Number.isNaN(hidden)) {
+      hidden = this.hiddenUnder(row, this.bandPower(row, group, position));
+      this.hiddenDbs[row] = hidden;
+    }
+    return hidden;
   }
 
   /** Whether stations of a group lie near enough to count as the band at a row. */
@@ -166,6 +186,12 @@ export class Dial {
     return power;
   }
 
+  private hiddenUnder(row: number, bandPower: number): number {
+    const noiseDb = this.noiseDb[row] ?? NaN;
+    if (bandPower < 0) return noiseDb - HIDDEN_UNDER_DB;
+    return 10 * Math.log10(10 ** (noiseDb / 10) + bandPower) - HIDDEN_UNDER_DB;
+  }
+
   private sumBand(row: number, without: number, position: number): number {
     const { spectrum } = this;
     const hz = this.hz[row] ?? NaN;
@@ -183,10 +209,9 @@ export class Dial {
     return found ? sum : -1;
   }
 
-  private fill(row: number, hz: number): void {
-    const { band, site, b6Hz, spectrum, weightingFor } = this.parts;
+  private fill(row: number, hz: number, group: number): void {
+    const { band, site, b6Hz, spectrum } = this.parts;
     const noiseDb = noiseField(site, hz, b6Hz);
-    const group = spectrum.groupAt(hz);
     const strongest = group < 0 ? -1 : (spectrum.wanted[group] ?? -1);
     const groundDb = spectrum.groundDb[strongest] ?? -Infinity;
     const usable = groundDb >= noiseDb + USABLE_OVER_NOISE_DB;
@@ -195,12 +220,15 @@ export class Dial {
     this.wanted[row] = usable ? strongest : -1;
     this.wantedDb[row] = usable ? groundDb : assumedWantedField(band, site.ituRegion, hz);
     this.bandPowers[row] = NaN;
-    this.tableOf[row] = this.tableNumber(weightingFor(tuningTolerance(band, hz)));
+    this.hiddenDbs[row] = NaN;
+    this.tableOf[row] = this.tableNumber(tuningTolerance(band, hz));
     this.tune(row, hz);
   }
 
-  private tableNumber(table: WeightingTable): number {
-    const known = this.tables.indexOf(table);
-    return known >= 0 ? known : this.tables.push(table) - 1;
+  private tableNumber(toleranceHz: number): number {
+    const known = this.tolerances.indexOf(toleranceHz);
+    if (known >= 0) return known;
+    this.tables.push(this.parts.weightingFor(toleranceHz));
+    return this.tolerances.push(toleranceHz) - 1;
   }
 }

@@ -4,13 +4,15 @@
  * @module radio/front-end
  */
 import type { Band, Receiver, TunedCircuit } from './receiver.ts';
-import { trapLoss } from './trap.ts';
+import { trapFrequency, trapLoss } from './trap.ts';
 import { circuitRejection, detuning } from './tuned-circuit.ts';
 
 /** Loss against frequency of something that does not follow the dial, decibels. */
 export interface FixedTerm {
   readonly term: 'aerial' | 'trap';
   readonly lossDb: (frequencyHz: number) => number;
+  /** Frequency at which the loss is greatest; on either side of it, it falls. */
+  readonly greatestAtHz: number;
 }
 
 /** One line of the rejection. */
@@ -32,6 +34,7 @@ export class FrontEnd {
   /** Q of each circuit at the low end, and its rise per hertz. */
   private readonly qs: Float64Array;
   private readonly slopes: Float64Array;
+  private readonly leastQs: Float64Array;
 
   /**
    * @param receiver The receiver.
@@ -48,6 +51,7 @@ export class FrontEnd {
     }
     this.band = band;
     this.fixed = fixedTerms(receiver);
+    this.leastQs = Float64Array.from(band.circuits, ({ qLow, qHigh }) => Math.min(qLow, qHigh));
     this.qs = Float64Array.from(band.circuits, ({ qLow }) => qLow);
     this.slopes = Float64Array.from(
       band.circuits,
@@ -72,6 +76,24 @@ export class FrontEnd {
     let sum = 0;
     for (const { lossDb } of this.fixed) sum += lossDb(frequencyHz);
     return sum;
+  }
+
+  /** Least factor that the circuits can reject by, tuned anywhere on the band: `product of 1 + x^2`. */
+  leastFactor(frequencyHz: number, tunedHz: number): number {
+    const rho = detuning(frequencyHz, tunedHz);
+    let factor = 1;
+    for (const q of this.leastQs) factor *= 1 + (q * rho) ** 2;
+    return factor;
+  }
+
+  /** The most that the terms which do not follow the dial lose at any setting of the band. */
+  get greatestFixedDb(): number {
+    const { lowHz, highHz } = this.band;
+    return this.fixed.reduce(
+      (sum, { lossDb, greatestAtHz }) =>
+        sum + lossDb(Math.min(highHz, Math.max(lowHz, greatestAtHz))),
+      0,
+    );
   }
 
   /**
@@ -127,5 +149,12 @@ export function qAt(
 }
 
 function fixedTerms({ trap }: Receiver): FixedTerm[] {
-  return trap === null ? [] : [{ term: 'trap', lossDb: (hz) => trapLoss(trap, hz) }];
+  if (trap === null) return [];
+  return [
+    {
+      term: 'trap',
+      lossDb: (hz) => trapLoss(trap, hz),
+      greatestAtHz: trapFrequency(trap),
+    },
+  ];
 }

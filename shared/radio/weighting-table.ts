@@ -43,6 +43,8 @@ export class WeightingTable {
   private readonly largest: Float64Array;
   private readonly largestOfOneMore: Float64Array;
   private readonly tolerance: number;
+  /** The largest weighting of all, decibels. */
+  readonly greatestDb: number;
 
   /**
    * @param grid W0 against the grid step.
@@ -60,6 +62,7 @@ export class WeightingTable {
       { length: Math.max(-this.first, last + this.steps) + 1 },
       (_, step) => grid(step),
     );
+    this.greatestDb = values.reduce((largest, value) => Math.max(largest, value), -Infinity);
     this.largest = slidingMaxima(values, this.first, last, this.steps);
     this.largestOfOneMore = slidingMaxima(values, this.first, last, this.steps + 1);
   }
