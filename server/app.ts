@@ -20,6 +20,7 @@ import { importRoutes } from './imports/import-routes.ts';
 import type { Logger } from './logger.ts';
 import { docsFiles } from './openapi/docs-files.ts';
 import { withDescription } from './openapi/openapi-routes.ts';
+import { planRoutes } from './plans/plan-routes.ts';
 import { receiverRoutes } from './receivers/receiver-routes.ts';
 import { regionRoutes } from './regions/region-routes.ts';
 import type { Services } from './services.ts';
@@ -43,6 +44,7 @@ export function apiRoutes(services: Services): Route[] {
     ...importRoutes(imports, uploads),
     ...fieldStrengthRoutes(fieldStrengths),
     ...assessmentRoutes(assessments),
+    ...planRoutes(services.plans),
   ];
 }
 

@@ -15,6 +15,7 @@ import { Limits } from './http/limits.ts';
 import { Imports } from './imports/imports.ts';
 import { Uploads } from './imports/uploads.ts';
 import type { Logger } from './logger.ts';
+import { Plans } from './plans/plans.ts';
 import { Receivers } from './receivers/receivers.ts';
 import { Regions } from './regions/regions.ts';
 import { SessionDoor } from './sessions/session-door.ts';
@@ -35,6 +36,9 @@ export function createServices(database: Sequelize, config: Config, log: Logger)
   const regions = new Regions(database);
   const editions = new Editions(database, regions);
   const lists = new ListsAtSites(editions);
+  const assessments = new Assessments(lists);
+  const receivers = new Receivers(database, accounts);
+  const sites = new Sites(database);
   const uploads = new Uploads(join(config.DATA_DIR, 'uploads'));
   return {
     idempotency: new Idempotency(database),
@@ -45,13 +49,14 @@ export function createServices(database: Sequelize, config: Config, log: Logger)
     members: new Members(accounts),
     sessions,
     door: new SessionDoor(sessions, config),
-    receivers: new Receivers(database, accounts),
-    sites: new Sites(database),
+    receivers,
+    sites,
     regions,
     editions,
     uploads,
     imports: new Imports(database, regions, new EditionWriter(database), uploads, log),
     fieldStrengths: new FieldStrengths(lists),
-    assessments: new Assessments(lists),
+    assessments,
+    plans: new Plans(database, { receivers, sites, editions, assessments, people: accounts }),
   };
 }

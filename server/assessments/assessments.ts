@@ -4,6 +4,7 @@ import { type Assessment, assess } from '../../shared/radio/assessment.ts';
 import { type Candidates, judgeCandidates } from '../../shared/radio/candidates.ts';
 import type { ListAtSite, ListRequest } from '../field-strengths/lists-at-sites.ts';
 import type { Actor } from '../http/actor.ts';
+import { InvalidError } from '../http/errors.ts';
 import { refuseNotYet } from './not-yet.ts';
 
 /** What is needed of the lists. */
@@ -28,11 +29,9 @@ export class Assessments {
     return assess({ ...request, ...list, fields: list.fields(request.period) });
   }
 
-  async judgeCandidates(
-    actor: Actor | undefined,
-    request: CandidatesRequest,
-  ): Promise<Candidates> {
+  async judgeCandidates(actor: Actor | undefined, request: CandidatesRequest): Promise<Candidates> {
     refuseNotYet(request);
+    refuseZeroOscillator(request);
     const lists: ListAtSite[] = [];
     for (const [path, each] of casesOf(request)) {
       lists.push(await this.lists.find(actor, each, path));
@@ -45,6 +44,16 @@ export class Assessments {
     }));
     return judgeCandidates({ ...request, ...CANDIDATE_ORDERS, cases });
   }
+}
+
+/** A band whose oscillator runs below needs every candidate below the band. */
+function refuseZeroOscillator({ receiver, toHz }: CandidatesRequest): void {
+  const band = receiver.bands.find((each) => each.oscillator === 'below' && each.lowHz <= toHz);
+  if (!band) return;
+  throw new InvalidError({
+    path: 'toHz',
+    message: `The oscillator of band "${band.name}" would reach zero: end below ${band.lowHz} Hz.`,
+  });
 }
 
 function casesOf({ cases, site, ...source }: CandidatesRequest): [string, ListRequest][] {

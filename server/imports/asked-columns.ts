@@ -1,6 +1,10 @@
-import type { ImportColumn, ImportMatching } from '../../shared/contracts/list-import.ts';
+import {
+  type ImportColumn,
+  type ImportMatching,
+  importUnitsOf,
+} from '../../shared/contracts/list-import.ts';
 import { InvalidError } from '../http/errors.ts';
-import { openUnits, UNITS_OF } from './column-matching.ts';
+import { openUnits } from './column-matching.ts';
 
 type Asked = NonNullable<ImportMatching['columns']>;
 type Issue = InvalidError['issues'][number];
@@ -66,9 +70,9 @@ function wrongUnits(columns: readonly ImportColumn[]): Issue[] {
   const open = openUnits(columns);
   return columns.flatMap(({ field, header, unit }, index) => {
     if (field === null) return [];
-    const isWrong = unit !== null && !UNITS_OF[field].includes(unit);
+    const isWrong = unit !== null && !importUnitsOf[field].includes(unit);
     if (!isWrong && !open.includes(index)) return [];
-    const units = UNITS_OF[field].join(', ') || 'none';
+    const units = importUnitsOf[field].join(', ') || 'none';
     return {
       path: `columns.${index}.unit`,
       message: `Say in which unit "${header}" is given. Possible: ${units}.`,

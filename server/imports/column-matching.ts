@@ -1,26 +1,12 @@
-import type { ImportColumn, ImportField, ImportUnit } from '../../shared/contracts/list-import.ts';
+import {
+  type ImportColumn,
+  type ImportField,
+  type ImportUnit,
+  importUnitsOf,
+} from '../../shared/contracts/list-import.ts';
 import { type Axis, readCoordinate } from './cell-coordinate.ts';
 import { type DecimalMark, isBlank } from './cell-number.ts';
 import { readHeader } from './header-words.ts';
-
-const FREQUENCY_UNITS: readonly ImportUnit[] = ['kHz', 'MHz', 'Hz'];
-const POWER_UNITS: readonly ImportUnit[] = ['W', 'kW', 'dBW'];
-const ANGLE_UNITS: readonly ImportUnit[] = ['degrees', 'dms'];
-
-/** Units in which a field can be given; none for text. */
-export const UNITS_OF: Readonly<Record<ImportField, readonly ImportUnit[]>> = {
-  name: [],
-  callSign: [],
-  frequency: FREQUENCY_UNITS,
-  latitude: ANGLE_UNITS,
-  longitude: ANGLE_UNITS,
-  locator: [],
-  power: POWER_UNITS,
-  powerDay: POWER_UNITS,
-  powerNight: POWER_UNITS,
-  hours: [],
-  note: [],
-};
 
 /**
  * Proposes what each column holds, by its header. Of two columns for one field the first is taken.
@@ -47,9 +33,9 @@ function unitOf(
   cells: readonly string[],
   mark: DecimalMark,
 ): ImportUnit | null {
-  if (named !== null && UNITS_OF[field].includes(named)) return named;
+  if (named !== null && importUnitsOf[field].includes(named)) return named;
   if (field === 'latitude' || field === 'longitude') return angleUnit(field, cells, mark);
-  return UNITS_OF[field].length === 0 ? null : cellUnit(field, cells);
+  return importUnitsOf[field].length === 0 ? null : cellUnit(field, cells);
 }
 
 /** Packed digits (DDMMSS) are no decimal degrees: where most cells are, the unit is dms. */
@@ -66,7 +52,7 @@ function cellUnit(field: ImportField, cells: readonly string[]): ImportUnit | nu
   );
   const [only] = carried;
   if (carried.size !== 1) return null;
-  return UNITS_OF[field].find((unit) => unit.toLowerCase() === only) ?? null;
+  return importUnitsOf[field].find((unit) => unit.toLowerCase() === only) ?? null;
 }
 
 /** Whether the columns can be read without asking: a frequency, a name, and every unit known. */
@@ -80,5 +66,5 @@ export function isComplete(columns: readonly ImportColumn[]): boolean {
 /** Indexes of the columns whose unit is needed and not known. */
 export const openUnits = (columns: readonly ImportColumn[]): number[] =>
   columns.flatMap(({ field, unit }, index) =>
-    field !== null && unit === null && UNITS_OF[field].length > 0 ? [index] : [],
+    field !== null && unit === null && importUnitsOf[field].length > 0 ? [index] : [],
   );

@@ -78,7 +78,9 @@ export class RowReader {
   }
 
   #text(field: keyof typeof LENGTHS, row: CsvRow, faults: ImportFault[]): string {
-    const text = this.#cell(field, row).replace(/[\s\p{Cc}]+/gu, ' ').trim();
+    const text = this.#cell(field, row)
+      .replace(/[\s\p{Cc}]+/gu, ' ')
+      .trim();
     if (text.length <= LENGTHS[field]) return text;
     this.#fault(row, field, `at most ${LENGTHS[field]} characters`, faults);
     return '';

@@ -4,7 +4,6 @@ import {
   type InferAttributes,
   type InferCreationAttributes,
   Model,
-  type NonAttribute,
   type Sequelize,
 } from 'sequelize';
 
@@ -20,8 +19,6 @@ export class RegionModel extends Model<
   declare name: string;
   declare ituRegion: ItuRegion;
   declare raster: RasterRange[];
-  /** Number of its editions, where the query counts them. */
-  declare editions?: NonAttribute<number>;
 
   static register(sequelize: Sequelize): void {
     RegionModel.init(

@@ -101,7 +101,7 @@ const filled = ({ name, ituRegion, raster }: RegionDraft) => ({
 });
 
 function toRegion(actor: Actor, row: RegionModel): Region {
-  const { id, name, ituRegion, raster, editions } = row;
+  const { id, name, ituRegion, raster } = row;
   const editable = hasRole(actor, 'librarian');
-  return { id, name, ituRegion, raster, editable, editions: Number(editions ?? 0) };
+  return { id, name, ituRegion, raster, editable, editions: Number(row.get('editions') ?? 0) };
 }

@@ -31,7 +31,8 @@ export const planDraft = z
 export type PlanDraft = z.output<typeof planDraft>;
 export type PlanInput = z.input<typeof planDraft>;
 
-const results = z.object({
+/** What the server computed when the plan was kept; the verdicts are those of the chosen IF. */
+export const planResults = z.object({
   present: candidate,
   chosen: candidate,
   day: verdict,
@@ -54,7 +55,7 @@ export const plan = z.object({
   everyChannelDb: z.number().nullable(),
   /** The receiver as it was judged, still with its present IF. */
   receiver: receiverDraft,
-  results,
+  results: planResults,
   keptBy: z.string(),
   keptAt: z.iso.datetime(),
   /** Whether the caller may delete it. */

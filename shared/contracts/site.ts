@@ -38,6 +38,9 @@ const noiseIsKnown = {
 export const site = z.strictObject(siteFields).refine(noiseIsKnown.check, noiseIsKnown.issue);
 export type SiteDraft = z.output<typeof site>;
 
+/** A site without what storing adds to it, which parsing leaves out. */
+export const bareSite = z.object(siteFields);
+
 /** What a client sends to store a site. */
 export const namedSite = z
   .strictObject({ name: nameText, ...siteFields })

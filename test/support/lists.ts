@@ -1,7 +1,11 @@
 import { createConnection } from 'mariadb';
-import { expect } from 'vitest';
+import { expect, vi } from 'vitest';
 
-import { type ImportProposal, importProposal } from '../../shared/contracts/list-import.ts';
+import {
+  type ImportProposal,
+  importProposal,
+  importState,
+} from '../../shared/contracts/list-import.ts';
 import type { ApiClient, Reply } from './api-client.ts';
 import type { ApiServer } from './api-server.ts';
 
@@ -48,10 +52,10 @@ export async function upload(
 
 /** Waits until an import has reached a state it stays in. */
 export async function settled(client: ApiClient, path: string) {
-  await expect
-    .poll(async () => (await client.get(path)).body.state, { timeout: 20_000, interval: 20 })
-    .not.toBe('committing');
-  return (await client.get(path).expect(200)).body;
+  const state = async () => importState.parse((await client.get(path).expect(200)).body);
+  const isSettled = async () => (await state()).state !== 'committing';
+  await vi.waitUntil(isSettled, { timeout: 20_000, interval: 20 });
+  return state();
 }
 
 /** Brings a list in whole and answers the id of its edition. */

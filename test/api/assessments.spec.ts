@@ -1,0 +1,241 @@
+import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+
+import { assessment } from '../../shared/contracts/assessment.ts';
+import { candidatesAnswer } from '../../shared/contracts/candidates.ts';
+import { fieldStrengthsAnswer } from '../../shared/contracts/field-strengths.ts';
+import type { ReceiverInput } from '../../shared/contracts/receiver.ts';
+import type { ApiClient } from '../support/api-client.ts';
+import { type ApiServer, startApiServer } from '../support/api-server.ts';
+import { addRegion, cleanList, importList } from '../support/lists.ts';
+import { sentReceiver } from '../support/receivers.ts';
+import { BARE_SITE, sentSite } from '../support/sites.ts';
+
+let server: ApiServer;
+let visitor: ApiClient;
+let librarian: ApiClient;
+let editionId: number;
+beforeAll(async () => {
+  server = await startApiServer();
+  visitor = await server.visitor();
+  librarian = await server.newcomer();
+  editionId = await importList(librarian, await addRegion(librarian), cleanList(300));
+});
+afterAll(() => server.close());
+
+const { name: _name, ...SITE } = sentSite();
+const STATIONS = [{ name: 'Strong one', frequencyHz: 1_521_000, fieldDb: 90 }];
+const asked = (change: object = {}) => ({
+  receiver: sentReceiver(),
+  site: BARE_SITE,
+  stations: STATIONS,
+  ...change,
+});
+const bands = (change: object): ReceiverInput['bands'] => [
+  { name: 'MW', lowHz: 550_000, highHz: 1_600_000, oscillator: 'above', ...change },
+];
+
+describe('POST /api/assessments', () => {
+  it('answers a visitor for stations whose field is given', async () => {
+    const receiver = sentReceiver({ strayDb: null });
+
+    const { body } = await visitor.post('/api/assessments', asked({ receiver })).expect(200);
+
+    const [image] = assessment.parse(body).bands[0]?.responses ?? [];
+    // Q 80, one circuit, IF 455 kHz, widths 6 and 22 kHz: the project's second implementation.
+    expect(image).toMatchObject({ station: 0, cause: 'image', dialHz: 612_000, beatHz: 1000 });
+    expect(image?.interferenceDb).toBeCloseTo(45.565, 2);
+    expect(image?.ratioDb).toBeCloseTo(0.353, 2);
+    expect(image?.grade).toBe('very-annoying');
+  });
+
+  it('answers a visitor who has no list', async () => {
+    const request = { receiver: sentReceiver(), site: BARE_SITE, everyChannelDb: 70 };
+
+    const { body } = await visitor.post('/api/assessments', request).expect(200);
+
+    expect(assessment.parse(body).verdict.usable).toBeGreaterThan(100);
+  });
+
+  it('computes with an edition of one’s own, by the ids of its stations', async () => {
+    const request = { receiver: sentReceiver(), site: SITE, editionId, leaveOutBetterThan: null };
+
+    const { body } = await librarian.post('/api/assessments', request).expect(200);
+    const { body: again } = await librarian.post('/api/assessments', request).expect(200);
+
+    const { verdict, bands: judged } = assessment.parse(body);
+    const { body: page } = await librarian.get(`/api/editions/${editionId}/stations?pageSize=500`);
+    const ids = new Set(page.items.map(({ id }: { id: number }) => id));
+    expect(verdict.usable).toBeGreaterThan(0);
+    expect(judged[0]?.total).toBeGreaterThan(0);
+    expect(judged[0]?.responses.every(({ station }) => ids.has(station))).toBe(true);
+    expect(again).toEqual(body);
+  });
+
+  it('asks a visitor to sign in for an edition, and hides that of others', async () => {
+    const request = { receiver: sentReceiver(), site: SITE, editionId };
+    const stranger = await server.newcomer();
+
+    await visitor.post('/api/assessments', request).expect(401);
+    await stranger.post('/api/assessments', request).expect(404);
+    await librarian.post('/api/assessments', { ...request, editionId: 4e9 }).expect(404);
+  });
+
+  it('says which stations could not be computed, and why', async () => {
+    const stations = [...STATIONS, { frequencyHz: 900_000, latitude: 50, longitude: 8 }];
+
+    const { body } = await visitor
+      .post('/api/assessments', asked({ site: SITE, stations }))
+      .expect(200);
+
+    expect(body.skipped).toMatchObject([{ station: 1 }]);
+  });
+
+  it('asks for place and ground where a field has to be computed', async () => {
+    const stations = [{ frequencyHz: 900_000, latitude: 50, longitude: 8, powerDayW: 1000 }];
+
+    const { body } = await visitor.post('/api/assessments', asked({ stations })).expect(400);
+
+    expect(body.issues.map(({ path }: { path: string }) => path)).toEqual([
+      'site.latitude',
+      'site.longitude',
+      'site.ground',
+    ]);
+  });
+
+  it('warns of an IF inside a band of the set, for such sets exist', async () => {
+    const receiver = sentReceiver({ ifHz: 560_000 });
+
+    const { body } = await visitor.post('/api/assessments', asked({ receiver })).expect(200);
+
+    expect(body.warnings).toContainEqual(expect.objectContaining({ path: 'ifHz' }));
+  });
+
+  it.each<[string, object]>([
+    ['receiver.ifHz', { receiver: sentReceiver({ ifHz: 0 }) }],
+    ['receiver.ifHz', { receiver: { ...sentReceiver(), ifHz: 'high' } }],
+    ['receiver.bands.0.highHz', { receiver: sentReceiver({ bands: bands({ highHz: 500_000 }) }) }],
+    [
+      'receiver.bands.0.oscillator',
+      { receiver: sentReceiver({ bands: bands({ lowHz: 400_000, oscillator: 'below' }) }) },
+    ],
+    ['receiver.colour', { receiver: { ...sentReceiver(), colour: 'walnut' } }],
+    ['site.latitude', { site: { ...SITE, latitude: 95 } }],
+    ['site.ituRegion', { site: { noise: 'rural' } }],
+    ['site.noise', { site: { ituRegion: 1 } }],
+    ['stations.0.frequencyHz', { stations: [{ frequencyHz: 0, fieldDb: 60 }] }],
+    ['stations', { editionId: 1 }],
+    ['stations', { stations: undefined }],
+    ['period', { period: 'dusk' }],
+    ['maxN', { maxN: 4 }],
+    ['limit', { limit: 10_001 }],
+    ['colour', { colour: 'red' }],
+  ])('with a bad %s, answers 400 and names it', async (path, change) => {
+    const { body } = await visitor.post('/api/assessments', asked(change)).expect(400);
+
+    expect(body.issues.map((each: { path: string }) => each.path)).toContain(path);
+  });
+
+  it.each<[string, object]>([
+    [
+      'receiver.selectivity.kind',
+      { receiver: sentReceiver({ selectivity: { kind: 'transformers', count: 2, q: 60 } }) },
+    ],
+    ['receiver.aerial', { receiver: sentReceiver({ aerial: { kind: 'loop' } }) }],
+    [
+      'receiver.secondConversion',
+      { receiver: sentReceiver({ secondConversion: { ifHz: 50_000, oscillator: 'above' } }) },
+    ],
+    ['maxM', { maxM: 4 }],
+    ['maxN', { maxN: 3 }],
+  ])('with %s, which is not computed yet, answers 400 and says so', async (path, change) => {
+    const { body } = await visitor.post('/api/assessments', asked(change)).expect(400);
+
+    expect(body.issues).toEqual([{ path, message: 'not yet: this is not computed so far.' }]);
+  });
+});
+
+describe('POST /api/if-candidates', () => {
+  const range = { fromHz: 445_000, toHz: 465_000, stepHz: 5000 };
+
+  it('judges each candidate in the order of the ranking', async () => {
+    const request = asked({ ...range, periods: ['night'] });
+
+    const { body } = await visitor.post('/api/if-candidates', request).expect(200);
+
+    const { present, candidates, ranking } = candidatesAnswer.parse(body);
+    expect(present.ifHz).toBe(455_000);
+    expect(candidates.map(({ ifHz }) => ifHz).sort()).toEqual([
+      445_000, 450_000, 455_000, 460_000, 465_000,
+    ]);
+    expect(ranking).not.toBe('');
+  });
+
+  it('takes several cases, each from its own source', async () => {
+    const cases = [
+      { site: SITE, editionId },
+      { site: BARE_SITE, everyChannelDb: 60 },
+    ];
+    const request = { receiver: sentReceiver(), cases, ...range };
+
+    const { body } = await librarian.post('/api/if-candidates', request).expect(200);
+
+    expect(candidatesAnswer.parse(body).candidates[0]).toMatchObject({ day: {}, night: {} });
+    await visitor.post('/api/if-candidates', request).expect(401);
+  });
+
+  it.each<[string, object]>([
+    ['stepHz', { stepHz: 10 }],
+    ['toHz', { toHz: 400_000 }],
+    ['site', { site: undefined }],
+    ['cases', { cases: [{ site: BARE_SITE, everyChannelDb: 60 }] }],
+    [
+      'toHz',
+      {
+        toHz: 560_000,
+        receiver: sentReceiver({ bands: bands({ oscillator: 'below' }) }),
+      },
+    ],
+    [
+      'cases.0.site.latitude',
+      {
+        cases: [{ site: BARE_SITE, stations: [{ frequencyHz: 900_000, powerDayW: 1 }] }],
+        site: undefined,
+        stations: undefined,
+      },
+    ],
+  ])('with a bad %s, answers 400 and names it', async (path, change) => {
+    const request = asked({ ...range, ...change });
+
+    const { body } = await visitor.post('/api/if-candidates', request).expect(400);
+
+    expect(body.issues.map((each: { path: string }) => each.path)).toContain(path);
+  });
+});
+
+describe('POST /api/field-strengths', () => {
+  it('answers the field of each station with its name and what is missing', async () => {
+    const stations = [
+      { name: 'Near', frequencyHz: 1_000_000, latitude: 50.4, longitude: 8, powerDayW: 10_000 },
+      { name: 'Nowhere', frequencyHz: 1_000_000, powerDayW: 10_000 },
+      { name: 'Given', frequencyHz: 1_000_000, fieldDb: 61 },
+    ];
+
+    const { body } = await visitor
+      .post('/api/field-strengths', { site: SITE, stations, period: 'day' })
+      .expect(200);
+
+    const [near, nowhere, given] = fieldStrengthsAnswer.parse(body).fields;
+    expect(near).toMatchObject({ station: 0, name: 'Near', frequencyHz: 1_000_000, skyDb: null });
+    expect(near?.fieldDb).toBeGreaterThan(60);
+    expect(nowhere).toMatchObject({ fieldDb: null, notes: ['The station has no place.'] });
+    expect(given?.fieldDb).toBe(61);
+  });
+
+  it('computes an edition at a site', async () => {
+    const request = { site: SITE, editionId, period: 'night' };
+
+    const { body } = await librarian.post('/api/field-strengths', request).expect(200);
+
+    expect(fieldStrengthsAnswer.parse(body).fields).toHaveLength(300);
+  });
+});

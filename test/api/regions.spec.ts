@@ -1,0 +1,105 @@
+import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+
+import { region } from '../../shared/contracts/region.ts';
+import type { ApiClient } from '../support/api-client.ts';
+import { type ApiServer, startApiServer } from '../support/api-server.ts';
+import { club } from '../support/club.ts';
+import { addRegion, cleanList, importList, rowsOf } from '../support/lists.ts';
+
+let server: ApiServer;
+let admin: ApiClient;
+beforeAll(async () => {
+  server = await startApiServer();
+  admin = await server.newcomer();
+});
+afterAll(() => server.close());
+
+describe('POST /api/regions', () => {
+  it.each([
+    [1, [153_000, 531_000]],
+    [2, [540_000]],
+    [3, [153_000, 531_000]],
+  ])('in ITU Region %i without a raster takes the Region’s own', async (ituRegion, lows) => {
+    const { body } = await admin.post('/api/regions', { name: 'Vale', ituRegion }).expect(201);
+
+    expect(region.parse(body)).toMatchObject({ name: 'Vale', editable: true, editions: 0 });
+    expect(body.raster.map(({ lowHz }: { lowHz: number }) => lowHz)).toEqual(lows);
+    await admin.get(`/api/regions/${body.id}`).expect(200, body);
+  });
+
+  it.each([
+    ['name', { name: ' ' }],
+    ['ituRegion', { ituRegion: 4 }],
+    ['raster.0.highHz', { raster: [{ lowHz: 600_000, highHz: 500_000, stepHz: 9000 }] }],
+    ['raster.0.stepHz', { raster: [{ lowHz: 500_000, highHz: 600_000, stepHz: 0 }] }],
+    ['colour', { colour: 'green' }],
+  ])('with a bad %s, answers 400 and names it', async (path, change) => {
+    const draft = { name: 'Vale', ituRegion: 1, ...change };
+
+    const { body } = await admin.post('/api/regions', draft).expect(400);
+
+    expect(body.issues[0].path).toBe(path);
+  });
+});
+
+describe('a region', () => {
+  it('is changed and removed with its editions', async () => {
+    const id = await addRegion(admin, 'Old name');
+    const editionId = await importList(admin, id, cleanList(10));
+    const raster = [{ lowHz: 500_000, highHz: 1_600_000, stepHz: 10_000 }];
+
+    const changed = await admin.put(`/api/regions/${id}`, { name: 'New', ituRegion: 2, raster });
+    await admin.delete(`/api/regions/${id}`).expect(204);
+
+    expect(changed.body).toMatchObject({ name: 'New', ituRegion: 2, raster, editions: 1 });
+    await admin.get(`/api/regions/${id}`).expect(404);
+    await admin.get(`/api/editions/${editionId}`).expect(404);
+    expect(await rowsOf(server, `stations WHERE edition_id = ${editionId}`)).toBe(0);
+  });
+
+  it('of another workshop is not there', async () => {
+    const id = await addRegion(admin);
+    const editionId = await importList(admin, id, cleanList(2));
+    const stranger = await server.newcomer();
+
+    const draft = { name: 'Mine', ituRegion: 1 };
+    await stranger.get(`/api/regions/${id}`).expect(404);
+    await stranger.put(`/api/regions/${id}`, draft).expect(404);
+    await stranger.delete(`/api/regions/${id}`).expect(404);
+    await stranger.get(`/api/regions/${id}/editions`).expect(404);
+    await stranger.get(`/api/editions/${editionId}`).expect(404);
+    await stranger.get(`/api/editions/${editionId}/stations`).expect(404);
+    const { body } = await stranger.get('/api/editions').expect(200);
+    expect(body).toEqual({ items: [], total: 0 });
+  });
+
+  it('is read by members and changed by librarians', async () => {
+    const { member, librarian } = await club(server);
+    const id = await addRegion(librarian);
+
+    const { body } = await member.get(`/api/regions/${id}`).expect(200);
+    expect(body.editable).toBe(false);
+    await member.post('/api/regions', { name: 'Mine', ituRegion: 1 }).expect(403);
+    await member.put(`/api/regions/${id}`, { name: 'Mine', ituRegion: 1 }).expect(403);
+    await member.delete(`/api/regions/${id}`).expect(403);
+  });
+});
+
+describe('GET /api/editions', () => {
+  it('lists those of all regions, the newest first, by pages', async () => {
+    const person = await server.newcomer();
+    const [vale, coast] = [await addRegion(person, 'Vale'), await addRegion(person, 'Coast')];
+    await importList(person, vale, cleanList(1), 'First');
+    await importList(person, coast, cleanList(2), 'Second');
+
+    const { body } = await person.get('/api/editions?pageSize=1').expect(200);
+    const { body: second } = await person.get('/api/editions?pageSize=1&page=2').expect(200);
+    const { body: ofVale } = await person.get(`/api/regions/${vale}/editions`).expect(200);
+
+    expect(body).toMatchObject({ total: 2, items: [{ label: 'Second', regionName: 'Coast' }] });
+    expect(second.items).toMatchObject([{ label: 'First', regionName: 'Vale', stations: 1 }]);
+    expect(ofVale.total).toBe(1);
+    await person.get('/api/editions?page=0').expect(400);
+    await person.get('/api/editions?colour=red').expect(400);
+  });
+});
