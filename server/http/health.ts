@@ -1,5 +1,5 @@
 import { Router } from 'express';
-import type { Sequelize } from 'sequelize';
+import { QueryTypes, type Sequelize } from 'sequelize';
 
 /** `/livez`: the process answers. `/readyz`: it can do its work, which needs the database. */
 export function health(database: Pick<Sequelize, 'query'>): Router {
@@ -8,7 +8,7 @@ export function health(database: Pick<Sequelize, 'query'>): Router {
     response.json({ status: 'live' });
   });
   router.get('/readyz', async (_request, response) => {
-    await database.query('SELECT 1');
+    await database.query('SELECT 1', { type: QueryTypes.SELECT });
     response.json({ status: 'ready' });
   });
   return router;

@@ -8,6 +8,8 @@ beforeAll(async () => {
     LIMIT_SIGN_IN: '3',
     LIMIT_SIGN_IN_ADDRESS: '20',
     LIMIT_REGISTER: '4',
+    LIMIT_COMPUTE_VISITOR: '2',
+    LIMIT_COMPUTE_ACCOUNT: '3',
   });
 });
 afterAll(() => server.close());
@@ -71,5 +73,39 @@ describe('registering', () => {
     for (let count = 0; count < 4; count += 1) await attempt(count).expect(201);
 
     await attempt(4).expect(429);
+  });
+});
+
+describe('computing', () => {
+  const request = {
+    site: { noise: 'quiet', ituRegion: 1 },
+    stations: [{ frequencyHz: 909_000, fieldDb: 60 }],
+  };
+
+  it('is limited by address for visitors and by account for the signed in', async () => {
+    await server.sql('DELETE FROM request_counters');
+    const visitor = await server.visitor();
+    const person = await server.newcomer();
+    const compute = (client: typeof visitor) => client.post('/api/field-strengths', request);
+
+    for (let count = 0; count < 2; count += 1) await compute(visitor).expect(200);
+    const { headers } = await compute(visitor).expect(429);
+    expect(Number(headers['retry-after'])).toBeLessThanOrEqual(61);
+    const another = await server.visitor();
+    await compute(another).expect(429);
+
+    for (let count = 0; count < 3; count += 1) await compute(person).expect(200);
+    await compute(person).expect(429);
+  });
+
+  it('takes more than a megabyte of stations, but not everything', async () => {
+    await server.sql('DELETE FROM request_counters');
+    const person = await server.newcomer();
+    const station = { name: 'x'.repeat(100), frequencyHz: 909_000, fieldDb: 60 };
+    const send = (count: number) =>
+      person.post('/api/field-strengths', { ...request, stations: Array(count).fill(station) });
+
+    await send(15_000).expect(200);
+    await send(70_000).expect(413);
   });
 });

@@ -10,7 +10,7 @@ import { migrate } from '../../server/db/migrator.ts';
 import { createLogger } from '../../server/logger.ts';
 import { createServices, type Services } from '../../server/services.ts';
 import { ApiClient } from './api-client.ts';
-import { freshDatabase } from './database.ts';
+import { type FreshDatabase, freshDatabase } from './database.ts';
 
 const UNLIMITED = '1000000000';
 
@@ -33,9 +33,15 @@ export interface ApiServer {
   readonly close: () => Promise<void>;
 }
 
-/** @param settings Settings other than the tests' own, such as `{ LIMIT_SIGN_IN: '3' }`. */
-export async function startApiServer(settings: NodeJS.ProcessEnv = {}): Promise<ApiServer> {
-  const { url: databaseUrl, drop } = await freshDatabase();
+/**
+ * @param settings Settings other than the tests' own, such as `{ LIMIT_SIGN_IN: '3' }`.
+ * @param own A database to use instead of a fresh one.
+ */
+export async function startApiServer(
+  settings: NodeJS.ProcessEnv = {},
+  own?: FreshDatabase,
+): Promise<ApiServer> {
+  const { url: databaseUrl, drop } = own ?? (await freshDatabase());
   const dataFolder = mkdtempSync(join(tmpdir(), 'fallow-data-'));
   const config = readConfig({
     NODE_ENV: 'test',
