@@ -15,7 +15,7 @@ import {
   strongestStations,
 } from './intermodulation.ts';
 import type { Receiver } from './receiver.ts';
-import { bandScans } from './receiver-at-site.ts';
+import { bandScans, WeightingTables } from './receiver-at-site.ts';
 import { type RejectionPoint, rejectionCurve } from './rejection-curve.ts';
 import type { Response } from './response.ts';
 import { ResponseSelection } from './response-selection.ts';
@@ -111,7 +111,8 @@ export function assess(input: AssessmentInput): Assessment {
   const everywhere = pairs.map((pair) => intermodulationResponse(spectrum, pair));
   const bands: BandAssessment[] = [];
   const deficits: BandDeficit[] = [];
-  for (const scan of bandScans(receiver, site, raster, spectrum)) {
+  const tables = new WeightingTables(receiver, selectivity, site.ituRegion, maxM);
+  for (const scan of bandScans(receiver, site, raster, spectrum, tables)) {
     const deficit = new Deficit(scan);
     bands.push(assessBand(input, scan, deficit, everywhere));
     deficits.push({ band: scan.dial.band, protectionDb: scan.dial.protectionDb, deficit });
@@ -119,7 +120,7 @@ export function assess(input: AssessmentInput): Assessment {
   return {
     verdict: verdictOf(spectrum, deficits),
     warnings: warningsOf({ receiver, selectivity, site, period, spectrum, maxM }),
-    skipped: skippedStations(input),
+    skipped: spectrum.ids.length < input.stations.length ? skippedStations(input) : [],
     bands,
   };
 }

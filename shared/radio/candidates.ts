@@ -188,7 +188,7 @@ function listeningsOf(
 ): Listening[] {
   return cases.map(({ site, stations, fields, raster }) => {
     const spectrum = new Spectrum(stations, fields[period] ?? []);
-    const tables = new WeightingTables(receiver, selectivity, site.ituRegion);
+    const tables = new WeightingTables(receiver, selectivity, site.ituRegion, maxM);
     const scans = bandScans(receiver, site, raster, spectrum, tables);
     return new Listening(spectrum, scans, { orders: { maxM, maxN }, b6Hz: selectivity.b6Hz });
   });

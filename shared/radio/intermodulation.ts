@@ -35,7 +35,9 @@ export interface StrongStation {
 export function strongestStations(spectrum: Spectrum): StrongStation[] {
   const { fieldDb, ids } = spectrum;
   const field = (position: number): number => fieldDb[position] ?? -Infinity;
-  return Array.from({ length: fieldDb.length }, (_, position) => position)
+  const least = fieldDb.toSorted().at(-STRONGEST) ?? -Infinity;
+  return Array.from(fieldDb.keys())
+    .filter((position) => field(position) >= least)
     .sort((a, b) => field(b) - field(a) || (ids[a] ?? 0) - (ids[b] ?? 0))
     .slice(0, STRONGEST)
     .map((position) => ({

@@ -9,7 +9,7 @@ import { FrontEnd } from './front-end.ts';
 import { MAX_OSCILLATOR_ORDER } from './product-levels.ts';
 import { emissionWidth, programmeBands } from './programme.ts';
 import type { Receiver, Service } from './receiver.ts';
-import { type IfSelectivity, ifSelectivity } from './selectivity.ts';
+import type { IfSelectivity } from './selectivity.ts';
 import type { Site } from './site.ts';
 import type { Spectrum } from './spectrum.ts';
 import type { RasterRange } from './station.ts';
@@ -27,13 +27,21 @@ export class WeightingTables {
   private readonly grids = new Map<boolean, (step: number) => number>();
   private readonly tables = new Map<string, WeightingTable>();
   private readonly receiver: Receiver;
-  private readonly selectivity: IfSelectivity;
+  readonly selectivity: IfSelectivity;
   private readonly region: Site['ituRegion'];
+  /** Largest beat: a product of order m moves m times as fast as the dial. */
+  private readonly widestHz: number;
 
-  constructor(receiver: Receiver, selectivity: IfSelectivity, region: Site['ituRegion']) {
+  constructor(
+    receiver: Receiver,
+    selectivity: IfSelectivity,
+    region: Site['ituRegion'],
+    maxM: number = MAX_OSCILLATOR_ORDER,
+  ) {
     this.receiver = receiver;
     this.selectivity = selectivity;
     this.region = region;
+    this.widestHz = Math.max(1, maxM) * (selectivity.b60Hz / 2);
   }
 
   table(service: Service, toleranceHz: number): WeightingTable {
@@ -41,8 +49,7 @@ export class WeightingTables {
     const key = `${byTone}/${toleranceHz}`;
     const known = this.tables.get(key);
     if (known !== undefined) return known;
-    const widest = MAX_OSCILLATOR_ORDER * (this.selectivity.b60Hz / 2);
-    const table = new WeightingTable(this.grid(byTone), toleranceHz, widest);
+    const table = new WeightingTable(this.grid(byTone), toleranceHz, this.widestHz);
     this.tables.set(key, table);
     return table;
   }
@@ -80,13 +87,9 @@ export function bandScans(
   site: Site,
   raster: readonly RasterRange[],
   spectrum: Spectrum,
-  tables = new WeightingTables(
-    receiver,
-    ifSelectivity(receiver.selectivity, receiver.ifHz),
-    site.ituRegion,
-  ),
+  tables: WeightingTables,
 ): BandScan[] {
-  const { b6Hz, b60Hz } = ifSelectivity(receiver.selectivity, receiver.ifHz);
+  const { b6Hz, b60Hz } = tables.selectivity;
   return receiver.bands.map((band) => {
     const frontEnd = new FrontEnd(receiver, band);
     const weightingFor = (toleranceHz: number): WeightingTable =>

@@ -32,7 +32,8 @@ export class ResponseSelection implements FindingSink {
   private readonly dial: Dial;
   private readonly limit: number;
   private readonly ratioBelowDb: number;
-  private readonly columns: Float64Array[];
+  /** Ratio, dial setting, position, m, n, row and beat of each response held. */
+  private readonly columns: number[][] = [[], [], [], [], [], [], []];
   private held = 0;
   /** Responses with a larger ratio than this are beyond the limit already. */
   private cutDb = Infinity;
@@ -54,7 +55,6 @@ export class ResponseSelection implements FindingSink {
       leaveOutBetterThan === null
         ? Infinity
         : ratioBelow(dial.band.service, leaveOutBetterThan, dial.protectionDb);
-    this.columns = Array.from({ length: 7 }, () => new Float64Array(2 * limit));
   }
 
   take(finding: Readonly<Finding>): void {
@@ -89,15 +89,14 @@ export class ResponseSelection implements FindingSink {
   private hold({ dialHz, m, n, row, beatHz }: Finding, position: number, ratioDb: number): void {
     if (this.held === 2 * this.limit) this.prune();
     const values = [ratioDb, dialHz, position, m, n, row, beatHz];
-    values.forEach((value, column) => (this.columns[column]![this.held] = value));
+    this.columns.forEach((column, index) => column.push(values[index] ?? NaN));
     this.held++;
   }
 
   private prune(): void {
     const kept = this.order().slice(0, this.limit);
     for (const column of this.columns) {
-      const values = kept.map((index) => column[index] ?? NaN);
-      column.set(values);
+      column.splice(0, column.length, ...kept.map((index) => column[index] ?? NaN));
     }
     this.held = this.limit;
     this.cutDb = this.value(0, this.limit - 1);

@@ -7,18 +7,6 @@ import type { FieldStrength } from './field-strength.ts';
 import { MAX_SIGNAL_ORDER } from './product-levels.ts';
 import type { Station } from './station.ts';
 
-/** A station with its field at the site. */
-interface Heard {
-  readonly id: number;
-  readonly hz: number;
-  readonly fieldDb: number;
-  readonly groundDb: number;
-  readonly given: boolean;
-  readonly distanceM: number | null;
-  /** Place in the list that was sent. */
-  readonly order: number;
-}
-
 /**
  * The stations that are on the air, grouped by frequency, the strongest of each group first.
  *
@@ -44,23 +32,25 @@ export class Spectrum {
   /** For each signal order n from 1: sum of 10^(n E/10) from the start of the group. */
   readonly powers: readonly Float64Array[];
 
+  /**
+   * @param stations The list.
+   * @param fields Their fields; a station without one is left out.
+   */
   constructor(stations: readonly Station[], fields: readonly FieldStrength[]) {
-    const sorted = heardStations(stations, fields).sort(
-      (a, b) => a.hz - b.hz || b.fieldDb - a.fieldDb || a.id - b.id,
-    );
-    this.hz = Float64Array.from(new Set(sorted.map(({ hz }) => hz)));
-    this.start = groupStarts(sorted);
-    this.fieldDb = Float64Array.from(sorted, ({ fieldDb }) => fieldDb);
-    this.groundDb = Float64Array.from(sorted, ({ groundDb }) => groundDb);
-    this.given = Uint8Array.from(sorted, ({ given }) => Number(given));
-    this.ids = sorted.map(({ id }) => id);
-    this.distanceM = sorted.map(({ distanceM }) => distanceM);
+    const heard = heardStations(stations, fields);
+    const places = sortedPlaces(heard);
+    this.fieldDb = gathered(heard.fieldDb, places);
+    this.groundDb = gathered(heard.groundDb, places);
+    this.given = Uint8Array.from(gathered(heard.given, places));
+    this.ids = Array.from(gathered(heard.ids, places));
+    this.distanceM = Array.from(places, (place) => heard.distanceM[place] ?? null);
+    const hz = gathered(heard.hz, places);
+    this.start = groupStarts(hz);
+    this.hz = Float64Array.from(this.start.subarray(0, -1), (position) => hz[position] ?? NaN);
     this.wanted = Int32Array.from(this.hz, (_, group) =>
-      strongestByGround(sorted, this.startOf(group), this.startOf(group + 1)),
+      strongestByGround(this.groundDb, places, this.startOf(group), this.startOf(group + 1)),
     );
-    this.powers = Array.from({ length: MAX_SIGNAL_ORDER }, (_, index) =>
-      runningPowers(this.fieldDb, this.start, index + 1),
-    );
+    this.powers = runningPowers(this.fieldDb, this.start);
   }
 
   /** Position of the first station of a group. */
@@ -118,45 +108,87 @@ export function lowerBound(sorted: ArrayLike<number>, limit: number): number {
   return low;
 }
 
-/** Stations that have a field; a given one counts as received by ground wave. */
-function heardStations(stations: readonly Station[], fields: readonly FieldStrength[]): Heard[] {
+/** Columns of the stations that have a field, in the order of the list. */
+interface Heard {
+  readonly ids: number[];
+  readonly hz: number[];
+  readonly fieldDb: number[];
+  readonly groundDb: number[];
+  readonly given: number[];
+  readonly distanceM: (number | null)[];
+}
+
+/** A field that was given counts as received by ground wave. */
+function heardStations(stations: readonly Station[], fields: readonly FieldStrength[]): Heard {
   const byId = new Map(fields.map((field) => [field.station, field]));
-  return stations.flatMap(({ id, frequencyHz: hz, fieldDb: given }, order) => {
+  const heard: Heard = { ids: [], hz: [], fieldDb: [], groundDb: [], given: [], distanceM: [] };
+  for (const { id, frequencyHz, fieldDb: given } of stations) {
     const field = byId.get(id);
     const fieldDb = given ?? field?.fieldDb ?? null;
-    if (fieldDb === null) return [];
-    const groundDb = given ?? field?.groundDb ?? -Infinity;
-    const distanceM = field?.distanceM ?? null;
-    return [{ id, hz, fieldDb, groundDb, given: given !== null, distanceM, order }];
-  });
+    if (fieldDb === null) continue;
+    heard.ids.push(id);
+    heard.hz.push(frequencyHz);
+    heard.fieldDb.push(fieldDb);
+    heard.groundDb.push(given ?? field?.groundDb ?? -Infinity);
+    heard.given.push(given === null ? 0 : 1);
+    heard.distanceM.push(field?.distanceM ?? null);
+  }
+  return heard;
 }
 
-function groupStarts(sorted: readonly Heard[]): Int32Array {
-  const starts = sorted.flatMap(({ hz }, position) =>
-    position === 0 || sorted[position - 1]?.hz !== hz ? [position] : [],
+/** Places in the list by frequency, then strongest first, then by number. */
+function sortedPlaces({ hz, fieldDb, ids }: Heard): Uint32Array {
+  const at = (column: readonly number[], place: number): number => column[place] ?? NaN;
+  return Uint32Array.from(ids, (_, place) => place).sort(
+    (a, b) => at(hz, a) - at(hz, b) || at(fieldDb, b) - at(fieldDb, a) || at(ids, a) - at(ids, b),
   );
-  return Int32Array.from([...starts, sorted.length]);
 }
 
-/** Of equals the first in the list. */
-function strongestByGround(sorted: readonly Heard[], start: number, end: number): number {
+function groupStarts(hz: Float64Array): Int32Array {
+  const starts: number[] = [];
+  for (let position = 0; position < hz.length; position++) {
+    if (position === 0 || hz[position] !== hz[position - 1]) starts.push(position);
+  }
+  return Int32Array.from([...starts, hz.length]);
+}
+
+/** Position of the strongest; of equals the one that stands first in the list. */
+function strongestByGround(
+  groundDb: Float64Array,
+  places: Uint32Array,
+  start: number,
+  end: number,
+): number {
   let best = start;
   for (let position = start + 1; position < end; position++) {
-    const [one, other] = [sorted[position], sorted[best]];
-    if (one === undefined || other === undefined) continue;
-    const difference = one.groundDb - other.groundDb;
-    if (difference > 0 || (difference === 0 && one.order < other.order)) best = position;
+    const difference = (groundDb[position] ?? NaN) - (groundDb[best] ?? NaN);
+    const first = (places[position] ?? 0) < (places[best] ?? 0);
+    if (difference > 0 || (difference === 0 && first)) best = position;
   }
   return best;
 }
 
-function runningPowers(fieldDb: Float64Array, start: Int32Array, order: number): Float64Array {
-  const sums = new Float64Array(fieldDb.length);
+/** A column in the order of places. */
+function gathered(column: readonly number[], places: Uint32Array): Float64Array {
+  const values = new Float64Array(places.length);
+  for (let position = 0; position < places.length; position++) {
+    values[position] = column[places[position] ?? 0] ?? NaN;
+  }
+  return values;
+}
+
+/** For each signal order, sums of 10^(n E/10) that begin anew with each group. */
+function runningPowers(fieldDb: Float64Array, start: Int32Array): Float64Array[] {
+  const sums = Array.from({ length: MAX_SIGNAL_ORDER }, () => new Float64Array(fieldDb.length));
   for (let group = 0; group + 1 < start.length; group++) {
-    let sum = 0;
-    for (let position = start[group] ?? 0; position < (start[group + 1] ?? 0); position++) {
-      sum += 10 ** ((order * (fieldDb[position] ?? -Infinity)) / 10);
-      sums[position] = sum;
+    const first = start[group] ?? 0;
+    for (let position = first; position < (start[group + 1] ?? 0); position++) {
+      const power = 10 ** ((fieldDb[position] ?? -Infinity) / 10);
+      let raised = 1;
+      for (const column of sums) {
+        raised *= power;
+        column[position] = raised + (position > first ? (column[position - 1] ?? 0) : 0);
+      }
     }
   }
   return sums;

@@ -47,11 +47,10 @@ export function programmeWeighting(
   if (audioCornerHz !== null && !(audioCornerHz > 0)) {
     throw new RangeError(`audioCornerHz must be above 0, got ${audioCornerHz}`);
   }
-  const heard = (offsetHz: number): number => {
-    const f = Math.abs(offsetHz);
+  const heard = remembered((f) => {
     const audio = audioCornerHz === null ? 1 : 1 + (f / audioCornerHz) ** 4;
     return (10 ** (-selectivity.rejectionDb(f) / 10) / audio) * earWeightingPower(f);
-  };
+  });
   const reference = programme.reduce((sum, { hz, share }) => sum + share * heard(hz), 0);
   return (beatHz) => {
     const locked = beatHz < LOCKED_HZ;
@@ -85,4 +84,15 @@ export function toneWeighting(selectivity: IfSelectivity, pitchHz: number): Weig
     Math.max(earWeighting(Math.abs(beatHz - pitchHz)), earWeighting(beatHz + pitchHz)) -
     own -
     selectivity.rejectionDb(beatHz);
+}
+
+/** A function of |x| that keeps its values: the same sums and differences come up again and again. */
+function remembered(of: (x: number) => number): (x: number) => number {
+  const known = new Map<number, number>();
+  return (x) => {
+    const size = Math.abs(x);
+    const value = known.get(size) ?? of(size);
+    known.set(size, value);
+    return value;
+  };
 }

@@ -67,7 +67,7 @@ describe('assess', () => {
       }),
       { numRuns: 150, seed: 455 },
     );
-  });
+  }, 60_000);
 
   it('sums up the verdict that the plain way sums up', () => {
     fc.assert(
@@ -89,5 +89,5 @@ describe('assess', () => {
       }),
       { numRuns: 150, seed: 560 },
     );
-  });
+  }, 60_000);
 });
