@@ -1,4 +1,12 @@
 import type { Routes } from '@angular/router';
 
-/** The feature's only public file: `app.routes.ts` loads it lazily. */
-export const welcomeRoutes: Routes = [];
+import { TrialStore } from './trial-store';
+
+/** The first page: an answer before any sign-up. */
+export const welcomeRoutes: Routes = [
+  {
+    path: '',
+    providers: [TrialStore],
+    loadComponent: () => import('./welcome').then((m) => m.Welcome),
+  },
+];

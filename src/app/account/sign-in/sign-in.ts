@@ -1,4 +1,4 @@
-import { ChangeDetectionStrategy, Component, DOCUMENT, inject, input, signal } from '@angular/core';
+import { ChangeDetectionStrategy, Component, inject, input, signal } from '@angular/core';
 import { NonNullableFormBuilder, ReactiveFormsModule } from '@angular/forms';
 import { MatButtonModule } from '@angular/material/button';
 import { MatFormFieldModule } from '@angular/material/form-field';
@@ -7,13 +7,12 @@ import { Router, RouterLink } from '@angular/router';
 
 import { credentials } from '../../../../shared/contracts/session';
 import { toProblem } from '../../core/api-problem';
+import { OWN_MACHINE } from '../../core/own-machine';
 import { Session } from '../../core/session/session';
 import { needed } from '../../ui/form-problems/form-issues';
 import { FormProblems } from '../../ui/form-problems/form-problems';
 import { ProblemTextPipe } from '../../ui/form-problems/problem-text-pipe';
 import { Submission } from '../../ui/form-problems/submission';
-
-const LOOPBACK = ['localhost', '127.0.0.1', '[::1]'];
 
 /** Signs in, then goes where the user wanted to go. */
 @Component({
@@ -39,7 +38,7 @@ export class SignIn {
   readonly next = input<string>();
 
   protected readonly isPasswordShown = signal(false);
-  protected readonly isOwnMachine = LOOPBACK.includes(inject(DOCUMENT).location.hostname);
+  protected readonly isOwnMachine = inject(OWN_MACHINE);
   protected readonly form = inject(NonNullableFormBuilder).group({
     email: ['', needed($localize`Give your e-mail address.`)],
     password: ['', needed($localize`Give your password.`)],

@@ -34,6 +34,12 @@ export class SetUp implements Unsaved {
     transform: (id: string | undefined) => (id === undefined ? undefined : numberAttribute(id)),
   });
 
+  /** Type of set and IF to begin a new receiver from. */
+  readonly type = input<string>();
+  readonly ifHz = input(undefined, {
+    transform: (hz: string | undefined) => (hz === undefined ? undefined : numberAttribute(hz)),
+  });
+
   private readonly form = viewChild(ReceiverForm);
 
   constructor() {

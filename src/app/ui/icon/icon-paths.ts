@@ -14,7 +14,7 @@ export const iconPaths = {
   expand: 'm6 9 6 6 6-6',
   forward: 'M4 12h15m-6-6 6 6-6 6',
   info: 'M12 21a9 9 0 1 0 0-18 9 9 0 0 0 0 18Zm0-10v6m0-9.5v.01',
-  more: 'M12 5.5v.01M12 12v.01M12 18.5v.01',
+  more: 'M12 5a.9.9 0 1 0 .01 0ZM12 11.1a.9.9 0 1 0 .01 0ZM12 17.2a.9.9 0 1 0 .01 0Z',
   pause: 'M8 5v14M16 5v14',
   play: 'M8 5v14l11-7z',
   remove: 'M5 12h14',

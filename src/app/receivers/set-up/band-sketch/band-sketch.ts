@@ -1,14 +1,14 @@
 import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
 
 import { observeWidth } from '../../../charts/observe-width';
-import { scaleMarks } from '../../../charts/scale-marks';
 import { formatFrequency } from '../../../ui/frequency-pipe';
 import type { ReceiverFields } from '../receiver-form/controls';
-import { type SketchRow, sketchRows, sketchScale } from './sketch-layout';
+import { sketchMarks, type SketchRow, sketchRows, sketchScale } from './sketch-layout';
 
 const ROW_HEIGHT = 44;
 const TOP = 28;
 const FOOT = 30;
+const NUMERAL_GAP = 48;
 
 /** The bands, their images and the IF on one scale, drawn while the set is being typed. */
 @Component({
@@ -31,11 +31,7 @@ export class BandSketch {
   );
 
   protected readonly bars = computed(() => this.rows().map((row, at) => this.bar(row, at)));
-  protected readonly marks = computed(() => {
-    const scale = this.scale();
-    const [low = 1, high = 2] = scale.domain();
-    return scaleMarks(scale, low, high, 52, 10_000).map(({ hz, at }) => ({ at, text: hz / 1000 }));
-  });
+  protected readonly marks = computed(() => sketchMarks(this.scale(), NUMERAL_GAP));
   protected readonly ifMark = computed(() => {
     const { ifHz } = this.fields();
     if (ifHz === null || this.rows().length === 0) return null;

@@ -1,4 +1,4 @@
-import { extent, scaleLog } from 'd3';
+import { extent, type ScaleLogarithmic, scaleLog } from 'd3';
 
 import type { ReceiverFields } from '../receiver-form/controls';
 
@@ -24,4 +24,14 @@ export function sketchScale(rows: readonly SketchRow[], ifHz: number | null, wid
   const all = rows.flatMap(({ band, image }) => [...band, ...image]).concat(ifHz ?? []);
   const [low = 100_000, high = 30_000_000] = extent(all.filter((hz) => hz > 0));
   return scaleLog([low / 1.15, high * 1.15], [0, width]);
+}
+
+/** Round frequencies at a distance at which their numerals can be read. */
+export function sketchMarks(scale: ScaleLogarithmic<number, number>, gap: number) {
+  const round = scale.ticks(50).filter((hz) => /^[125]0*$/u.test(String(hz)));
+  return round.reduce<{ hz: number; at: number }[]>((kept, hz) => {
+    const at = scale(hz);
+    const last = kept.at(-1);
+    return last === undefined || at - last.at >= gap ? [...kept, { hz, at }] : kept;
+  }, []);
 }

@@ -14,15 +14,14 @@ type Band = ReceiverDraft['bands'][number];
 const held = <T>(value: T, ...validators: ValidatorFn[]) =>
   new FormControl(value, { nonNullable: true, validators });
 const number = (value: number | null, message?: string) =>
-  new FormControl(value, message === undefined ? null : needed(message));
+  held(value, ...(message === undefined ? [] : [needed(message)]));
 
 /** Needed only while the group's box "fitted" is ticked. */
 function neededWhenFitted(message: string): ValidatorFn {
   const check = needed(message);
   return (control) => (control.parent?.get('fitted')?.value === true ? check(control) : null);
 }
-const fittedNumber = (message: string) =>
-  new FormControl<number | null>(null, neededWhenFitted(message));
+const fittedNumber = (message: string) => held<number | null>(null, neededWhenFitted(message));
 
 const q = () => $localize`Give the loaded Q.`;
 
@@ -85,8 +84,8 @@ const selectivityControls = () =>
   new FormGroup({
     /** A selectivity known in another way than by two widths, carried along unchanged. */
     other: held<ReceiverDraft['selectivity'] | null>(null),
-    b6Hz: new FormControl<number | null>(null, neededWithoutOther),
-    b60Hz: new FormControl<number | null>(null, neededWithoutOther),
+    b6Hz: held<number | null>(null, neededWithoutOther),
+    b60Hz: held<number | null>(null, neededWithoutOther),
   });
 
 function neededWithoutOther(control: AbstractControl) {
@@ -101,7 +100,7 @@ export const receiverControls = () =>
     ifHz: number(null, $localize`Give the IF, for example 455 kHz.`),
     bands: new FormArray<BandControls>([bandControls()]),
     selectivity: selectivityControls(),
-    audioCornerHz: number(null),
+    audioCornerHz: number(3500),
     strayDb: strayControls(),
     ifFeedthroughDb: number(3, $localize`Give the IF feedthrough in dB, as a rule 3.`),
     signalToOscillatorDb: number(-40, $localize`Give the level in dB, for example -40.`),

@@ -1,6 +1,6 @@
 import type { FormIssue } from '../../../ui/form-problems/form-issues';
 import { formatFrequency } from '../../../ui/frequency-pipe';
-import type { ReceiverFields } from './controls';
+import type { ReceiverControls, ReceiverFields } from './controls';
 
 /** The parts of the set-up that open on demand. */
 export type Panel = 'selectivity' | 'circuits' | 'mixer' | 'filter' | 'bfo' | 'trap';
@@ -26,6 +26,15 @@ export function panelOf(path: string): Panel | undefined {
 /** The panels that hide what is wrong. */
 export const panelsOf = (issues: readonly FormIssue[]): Panel[] =>
   issues.map(({ path }) => panelOf(path)).filter((panel) => panel !== undefined);
+
+/** Whether a panel still holds what came with the type of set. */
+export function isUntouched(panel: Panel, { controls }: ReceiverControls): boolean {
+  if (panel === 'selectivity') return controls.selectivity.pristine;
+  if (panel === 'mixer') return controls.strayDb.pristine;
+  return (
+    panel === 'circuits' && controls.bands.controls.every((row) => row.controls.circuits.pristine)
+  );
+}
 
 /** What a closed panel holds, in a few words. */
 export function summaries(fields: ReceiverFields): Record<Panel, string> {

@@ -21,7 +21,7 @@ import { debounceTime, filter, map, startWith } from 'rxjs';
 import { newReceiver, type StoredReceiver } from '../../../../../shared/contracts/receiver';
 import { toProblem } from '../../../core/api-problem';
 import { Drafts } from '../../../core/drafts';
-import type { SetType } from '../../../core/set-types';
+import { type SetType, setTypes } from '../../../core/set-types';
 import { FormProblems } from '../../../ui/form-problems/form-problems';
 import { ProblemTextPipe } from '../../../ui/form-problems/problem-text-pipe';
 import { Submission } from '../../../ui/form-problems/submission';
@@ -42,7 +42,7 @@ import { receiverControls } from './controls';
 import { fieldsOf, receiverOf, writeFields } from './fields';
 import { NoticeList } from './notice-list';
 import { notices } from './notices';
-import { type Panel, panelOf, panelsOf, summaries } from './panels';
+import { isUntouched, type Panel, panelOf, panelsOf, summaries } from './panels';
 import { ReceiverDraftKeeper } from './receiver-draft';
 
 const PAUSE_MS = 400;
@@ -83,11 +83,15 @@ export class ReceiverForm implements OnInit {
   /** The receiver as it is kept; none while it is new. */
   readonly receiver = input<StoredReceiver>();
 
+  /** Id of the type of set, and the IF, that a new receiver begins from. */
+  readonly type = input<string>();
+  readonly ifHz = input<number>();
+
   readonly kept = output<StoredReceiver>();
 
   protected readonly form = receiverControls();
   protected readonly submission = new Submission(this.form, newReceiver, toProblem);
-  protected readonly type = signal<SetType | null>(null);
+  protected readonly chosenType = signal<SetType | null>(null);
   protected readonly isRestored = signal(false);
   /** What somebody else saved while this form was being filled in. */
   protected readonly conflict = signal<StoredReceiver | null>(null);
@@ -112,6 +116,7 @@ export class ReceiverForm implements OnInit {
   protected readonly notices = computed(() => notices(this.fields()));
   protected readonly summaries = computed(() => summaries(this.fields()));
   protected readonly opened = linkedSignal(() => new Set(panelsOf(this.submission.issues())));
+  protected readonly isTypeAsked = linkedSignal(() => this.receiver() === undefined);
   protected readonly isReadOnly = computed(() => this.receiver()?.editable === false);
 
   constructor() {
@@ -122,7 +127,7 @@ export class ReceiverForm implements OnInit {
         takeUntilDestroyed(),
       )
       .subscribe(() => {
-        const type = this.type();
+        const type = this.chosenType();
         if (type) applyCircuits(this.form, type);
         this.draft().write({ version: this.version(), fields: this.form.getRawValue() });
       });
@@ -131,8 +136,10 @@ export class ReceiverForm implements OnInit {
   ngOnInit(): void {
     this.showKept();
     const draft = this.draft().read();
-    if (draft === undefined || this.isReadOnly()) return;
-    if (!writeFields(this.form, draft.fields)) return;
+    if (draft === undefined || this.isReadOnly() || !writeFields(this.form, draft.fields)) {
+      this.beginFrom(this.type(), this.ifHz());
+      return;
+    }
     this.form.markAsDirty();
     this.version.set(draft.version);
     this.isRestored.set(true);
@@ -143,8 +150,15 @@ export class ReceiverForm implements OnInit {
   }
 
   protected chooseType(type: SetType | null): void {
-    this.type.set(type);
+    this.chosenType.set(type);
     if (type) applySetType(this.form, type);
+  }
+
+  protected describe(panel: Panel): string {
+    const summary = this.summaries()[panel];
+    return this.chosenType() !== null && isUntouched(panel, this.form)
+      ? $localize`${summary}:summary: (typical: change what you know)`
+      : summary;
   }
 
   protected setOpen(panel: Panel, isOpen: boolean): void {
@@ -197,8 +211,15 @@ export class ReceiverForm implements OnInit {
     this.draft().remove();
     this.isRestored.set(false);
     this.version.set(this.receiver()?.version ?? null);
-    this.type.set(null);
+    this.chosenType.set(null);
     this.showKept();
+  }
+
+  private beginFrom(typeId: string | undefined, ifHz: number | undefined): void {
+    const type = setTypes.find(({ id }) => id === typeId);
+    if (this.receiver() !== undefined || type === undefined) return;
+    this.chooseType(type);
+    if (ifHz !== undefined && Number.isFinite(ifHz)) this.form.controls.ifHz.setValue(ifHz);
   }
 
   /** Shows the receiver as it is kept, or empty fields. */

@@ -23,7 +23,7 @@ import { type SetType, setTypes } from '../../../core/set-types';
     mat-radio-group {
       display: grid;
       grid-template-columns: repeat(auto-fill, minmax(min(20rem, 100%), 1fr));
-      gap: 0 1rem;
+      gap: 0.25rem 1rem;
     }
   `,
   changeDetection: ChangeDetectionStrategy.OnPush,
