@@ -1,4 +1,4 @@
-import { change, decibels, distance, kilohertz, percent, whole } from './readings';
+import { bandUnit, change, decibels, distance, kilohertz, percent, whole } from './readings';
 
 describe('readings', () => {
   it.each([
@@ -9,6 +9,12 @@ describe('readings', () => {
     [-500, '\u22120.5'],
   ])('%i Hz reads %s kHz', (hz, text) => {
     expect(kilohertz(hz)).toBe(text);
+  });
+
+  it('reads a band in kilohertz or, from 3 MHz, in megahertz', () => {
+    expect(bandUnit(1_602_000).write(1_602_000)).toBe('1602');
+    expect(bandUnit(18_000_000).write(5_950_000)).toBe('5.95');
+    expect(bandUnit(18_000_000).unit).toBe('MHz');
   });
 
   it('shows a dash for what is missing, and a true minus', () => {

@@ -14,6 +14,14 @@ export function kilohertz(hz: number): string {
   return kept === '' ? whole : `${whole}.${kept}`;
 }
 
+const MEGAHERTZ_FROM = 3_000_000;
+
+/** The unit in which a band that ends there is read, and how a frequency is written in it. */
+export const bandUnit = (highHz: number) =>
+  highHz < MEGAHERTZ_FROM
+    ? { unit: $localize`kHz`, write: kilohertz }
+    : { unit: $localize`MHz`, write: (hz: number) => kilohertz(hz / 1000) };
+
 /** A level or ratio to a tenth of a decibel, without its unit. */
 export const tenths = (db: number): string => fixed(db, 1);
 

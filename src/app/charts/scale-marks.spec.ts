@@ -1,7 +1,8 @@
 import * as fc from 'fast-check';
 import { scaleLinear, scaleLog } from 'd3';
 
-import { scaleMarks } from './scale-marks';
+import { textWidth } from './place-labels';
+import { numerals, scaleMarks } from './scale-marks';
 
 const khz = (marks: readonly { hz: number }[]) => marks.map(({ hz }) => hz / 1000);
 
@@ -50,5 +51,34 @@ describe('scaleMarks', () => {
 
   it('has nothing to mark on an empty range', () => {
     expect(scaleMarks((hz) => hz, 5000, 5000, 10)).toEqual([]);
+  });
+});
+
+describe('numerals', () => {
+  it('stand closer on a narrow screen by another step, not by overlapping', () => {
+    const position = scaleLinear([420_000, 500_000], [0, 313]);
+    const texts = numerals(position, 420_000, 500_000, (hz) => String(hz / 1000));
+
+    expect(texts.map(({ text }) => text)).toEqual([
+      '420',
+      '430',
+      '440',
+      '450',
+      '460',
+      '470',
+      '480',
+      '490',
+      '500',
+    ]);
+  });
+
+  it('keep clear of one another however long they are', () => {
+    const position = scaleLinear([455_000, 456_000], [0, 500]);
+    const found = numerals(position, 455_000, 456_000, (hz) => (hz / 1000).toFixed(3));
+
+    expect(found.length).toBeGreaterThan(2);
+    found.slice(1).forEach(({ at, text }, index) => {
+      expect(at - (found[index]?.at ?? 0)).toBeGreaterThan(textWidth(text));
+    });
   });
 });

@@ -1,3 +1,5 @@
+import { textWidth } from './place-labels';
+
 /** Position of a frequency in CSS pixels, rising with it. */
 export type Position = (hz: number) => number;
 
@@ -7,9 +9,12 @@ export interface ScaleMark {
   readonly at: number;
 }
 
-/** Every decade, its half and its tenth, in turn: each step divides the one before. */
-function finer(step: number): number {
-  return Number(String(step)[0]) === 1 ? step / 2 : step / 5;
+/** A decade is divided into halves or into fifths, then into tenths. */
+type Parts = 2 | 5;
+
+/** The next finer step; each divides the one before. */
+function finer(step: number, parts: Parts): number {
+  return String(step).startsWith('1') ? step / parts : (step * parts) / 10;
 }
 
 function coarsest(span: number): number {
@@ -43,11 +48,44 @@ export function scaleMarks(
   finest = 100,
 ): ScaleMark[] {
   if (!(high > low)) return [];
-  let marks: number[] = [];
-  for (let step = coarsest(high - low); step >= finest; step = finer(step)) {
-    marks = divided(marks, step, position, low, high, gap);
-  }
+  const [halves = [], fifths = []] = ([2, 5] as const).map((parts) => {
+    let marks: number[] = [];
+    for (let step = coarsest(high - low); step >= finest; step = finer(step, parts)) {
+      marks = divided(marks, step, position, low, high, gap);
+    }
+    return marks;
+  });
+  // Fifths read less easily: they are taken where halves leave the scale bare.
+  const marks = fifths.length > 1.5 * halves.length ? fifths : halves;
   return marks.map((hz) => ({ hz, at: position(hz) }));
+}
+
+/** A numeral on a scale. */
+export interface Numeral extends ScaleMark {
+  readonly text: string;
+}
+
+const LEAST_GAP = 36;
+const AIR = 10;
+
+/** Numerals as close together as their texts allow. */
+export function numerals(
+  position: Position,
+  low: number,
+  high: number,
+  write: (hz: number) => string,
+  size = 12,
+): Numeral[] {
+  let gap = LEAST_GAP;
+  for (;;) {
+    const found = scaleMarks(position, low, high, gap).map((mark) => ({
+      ...mark,
+      text: write(mark.hz),
+    }));
+    const widest = Math.max(0, ...found.map(({ text }) => textWidth(text, size))) + AIR;
+    if (widest <= gap || found.length < 2) return found;
+    gap = widest;
+  }
 }
 
 /** The marks and what fits between each two of them at the next step. */

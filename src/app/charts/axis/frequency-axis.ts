@@ -1,10 +1,9 @@
 import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
 
 import { kilohertz } from '../readings';
-import { type Position, scaleMarks } from '../scale-marks';
+import { numerals, type Position, scaleMarks } from '../scale-marks';
 import { type Window } from '../zoom-window';
 
-const NUMERAL_GAP = 54;
 const TICK_GAP = 6;
 
 /** A frequency axis along the foot of a chart: fine ticks, numerals where they fit, its unit. */
@@ -30,11 +29,6 @@ export class FrequencyAxis {
   readonly length = input.required<number>();
   readonly label = input.required<string>();
 
-  protected readonly numerals = computed(() =>
-    scaleMarks(this.scale(), ...this.window(), NUMERAL_GAP).map((mark) => ({
-      ...mark,
-      text: kilohertz(mark.hz),
-    })),
-  );
+  protected readonly numerals = computed(() => numerals(this.scale(), ...this.window(), kilohertz));
   protected readonly ticks = computed(() => scaleMarks(this.scale(), ...this.window(), TICK_GAP));
 }

@@ -9,7 +9,6 @@ import {
 } from '@angular/core';
 import { type ScaleLinear } from 'd3';
 
-import { formatFrequency } from '../../ui/frequency-pipe';
 import { ChartHead } from '../chart-head/chart-head';
 import { type StationAtSite } from '../choice-chart/choice-layout';
 import { frame, NARROW } from '../frame';
@@ -17,11 +16,12 @@ import { observeWidth } from '../observe-width';
 import { Plot } from '../plot/plot';
 import { type PlotMark } from '../plot/plot-mark';
 import { RangeBars } from '../range-bars/range-bars';
-import { kilohertz } from '../readings';
-import { scaleMarks } from '../scale-marks';
+import { bandUnit } from '../readings';
+import { numerals, scaleMarks } from '../scale-marks';
 import { TwinTable } from '../twin-table/twin-table';
 import { type Window } from '../zoom-window';
 import {
+  breakthroughCurves,
   dialScale,
   heardMarks,
   type JudgedBand,
@@ -33,7 +33,7 @@ import {
 } from './strip-layout';
 import { stripColumns, stripReadout, stripRows, stripSentence } from './strip-words';
 
-const NUMERAL_GAP = 46;
+const NUMERAL_SIZE = 13;
 const TICK_GAP = 5;
 
 /** One band as a strip like a dial glass: what is heard over it, the scale, the stations under it. */
@@ -84,11 +84,9 @@ export class BandStrip {
   protected readonly x = computed(() =>
     dialScale(...this.shown(), this.frame().innerWidth, this.isLog()),
   );
+  protected readonly unit = computed(() => bandUnit(this.range().high));
   protected readonly numerals = computed(() =>
-    scaleMarks(this.x(), ...this.shown(), NUMERAL_GAP).map((mark) => ({
-      ...mark,
-      text: kilohertz(mark.hz),
-    })),
+    numerals(this.x(), ...this.shown(), this.unit().write, NUMERAL_SIZE),
   );
   protected readonly ticks = computed(() => scaleMarks(this.x(), ...this.shown(), TICK_GAP));
   protected readonly levels = computed(() =>
@@ -101,6 +99,9 @@ export class BandStrip {
     heardMarks(this.band(), this.x(), this.loudness()).sort(
       (a, b) => Number(a.response.hidden === null) - Number(b.response.hidden === null),
     ),
+  );
+  protected readonly breakthroughs = computed(() =>
+    breakthroughCurves(this.band(), this.x(), this.loudness(), this.noise()),
   );
   protected readonly wanted = computed(() => wantedMarks(this.stations(), this.x(), this.noise()));
   protected readonly marks = computed<PlotMark[]>(() => [...this.heard(), ...this.wanted()]);
@@ -136,7 +137,8 @@ export class BandStrip {
   protected readonly sentence = computed(() => stripSentence(this.band(), this.nameOf));
   protected readonly heading = computed(() => {
     const { low, high } = this.range();
-    return $localize`${this.band().name}:band:, ${kilohertz(low)}:low:–${formatFrequency(high)}:high:`;
+    const { unit, write } = this.unit();
+    return $localize`${this.band().name}:band:, ${write(low)}:low:–${write(high)}:high: ${unit}:unit:`;
   });
   protected readonly rows = computed(() => stripRows(this.band(), this.nameOf));
   private readonly byId = computed(() => new Map(this.stations().map((each) => [each.id, each])));

@@ -1,10 +1,9 @@
-import { type ScaleContinuousNumeric, scaleLinear, scaleLog, type ScaleLinear } from 'd3';
+import { line, type ScaleContinuousNumeric, scaleLinear, scaleLog, type ScaleLinear } from 'd3';
 
 import type { Assessment } from '../../../../shared/contracts/assessment';
 import { type CauseMark, causeMark } from '../cause-mark';
 import { type HeardStation, type StationAtSite, stationMark } from '../choice-chart/choice-layout';
 import { type PlacedLabel, placeLabels } from '../place-labels';
-import { kilohertz } from '../readings';
 
 export type JudgedBand = Assessment['bands'][number];
 export type JudgedResponse = JudgedBand['responses'][number];
@@ -78,6 +77,43 @@ export function heardMarks(
   });
 }
 
+/** Rejection of the IF at a dial setting, between the points of the curve. */
+function ifRejection({ rejection }: JudgedBand, dialHz: number): number {
+  const scale = scaleLinear(
+    rejection.map((point) => point.dialHz),
+    rejection.map(({ ifDb }) => ifDb),
+  );
+  return scale.clamp(true)(dialHz);
+}
+
+const MOST_CURVES = 3;
+
+/**
+ * The loudest breakthroughs along the dial: heard at every setting, each at the level that the
+ * signal circuits leave there. Where stray pick-up sets the limit, within 3 dB.
+ */
+export function breakthroughCurves(
+  band: JudgedBand,
+  x: DialScale,
+  y: ScaleLinear<number, number>,
+  noise: (hz: number) => number | null,
+): { id: string; path: string; colour: string }[] {
+  const [low = 0, high = 0] = x.domain();
+  return band.responses
+    .filter(({ m, n, hidden, dialHz }) => m === 0 && n === 1 && hidden === null && dialHz !== null)
+    .slice(0, MOST_CURVES)
+    .map((response) => {
+      const at = response.dialHz ?? 0;
+      const level = (overNoise(response) ?? 0) + ifRejection(band, at) + (noise(at) ?? 0);
+      const over = (hz: number) => level - ifRejection(band, hz) - (noise(hz) ?? 0);
+      const settings = [low, ...band.rejection.map(({ dialHz }) => dialHz), high];
+      const points = settings.filter((hz) => hz >= low && hz <= high);
+      const path = line<number>(x, (hz) => y(Math.max(0, over(hz))) - 5)(points) ?? '';
+      const { colour } = causeMark(response.cause);
+      return { id: responseMark(band.name, response), path, colour };
+    });
+}
+
 /** Stations of the band that stand over the noise, as bars hanging under the glass. */
 export function wantedMarks(
   stations: readonly StationAtSite[],
@@ -114,7 +150,7 @@ export function stripLabels(
     .slice(0, most)
     .map(({ id, x, y, response, overNoiseDb }) => ({
       id,
-      text: `${kilohertz(response.dialHz ?? 0)} ${nameOf(response.station)}`,
+      text: nameOf(response.station),
       weight: 1000 + overNoiseDb,
       spots: [
         { x, y: y - 14 },

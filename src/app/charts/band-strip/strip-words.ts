@@ -18,9 +18,12 @@ type NameOf = (station: number) => string;
 /** What a strip shows, in a sentence with its own numbers. */
 export function stripSentence(band: JudgedBand, nameOf: NameOf): string {
   const heard = band.responses.filter(({ hidden, dialHz }) => hidden === null && dialHz !== null);
-  const count = $localize`${heard.length}:count: responses rise over noise and band`;
+  const count =
+    heard.length === 1
+      ? $localize`One response rises over noise and band`
+      : $localize`${heard.length}:count: responses rise over noise and band`;
   const rest = band.total - band.responses.length;
-  const more = rest > 0 ? ' ' + $localize`${rest}:count: weaker ones are not drawn.` : '';
+  const more = rest > 0 ? $localize` The ${rest}:count: faintest are not drawn.` : '';
   const loudest = heard.reduce<JudgedResponse | undefined>(
     (best, each) =>
       (overNoise(each) ?? -999) > (best ? (overNoise(best) ?? -999) : -999) ? each : best,

@@ -82,6 +82,10 @@ export class CandidateLane {
       }))
       .filter(({ x }) => x >= 0 && x <= this.frame().innerWidth),
   );
+  protected readonly thickness = computed(() => {
+    const [first, second] = [...this.bars()].sort((a, b) => a.x - b.x);
+    return first && second ? Math.min(2.5, (second.x - first.x) * 0.5) : 2.5;
+  });
   protected readonly order = computed(() =>
     this.candidates().map(({ ifHz }) => ({ id: String(ifHz), value: ifHz })),
   );

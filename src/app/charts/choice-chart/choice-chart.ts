@@ -130,7 +130,7 @@ export class ChoiceChart {
   });
   protected readonly present = computed(() => ({
     x: this.x()(this.presentHz()),
-    isShown: this.isShown(this.presentHz()),
+    isShown: this.isShown(this.presentHz()) && this.presentHz() !== this.trialHz(),
     text: $localize`now ${kilohertz(this.presentHz())}:frequency:`,
   }));
   protected readonly trial = computed(() => ({

@@ -2,7 +2,7 @@ import { ChangeDetectionStrategy, Component, computed, input } from '@angular/co
 import { scaleLinear } from 'd3';
 
 import { observeWidth } from '../observe-width';
-import { kilohertz } from '../readings';
+import { bandUnit } from '../readings';
 
 interface Stretch {
   readonly low: number;
@@ -49,6 +49,7 @@ export class RangeBars {
 
   protected readonly width = observeWidth();
   protected readonly height = 3 * ROW;
+  private readonly unit = computed(() => bandUnit(this.band().high));
   private readonly x = computed(() => {
     const all = [this.band(), this.oscillator(), this.image()];
     const low = Math.min(...all.map((each) => each.low));
@@ -66,7 +67,7 @@ export class RangeBars {
       y: ROW * (at + 0.5),
       from: this.x()(stretch.low),
       to: this.x()(stretch.high),
-      text: `${kilohertz(stretch.low)}–${kilohertz(stretch.high)}`,
+      text: `${this.unit().write(stretch.low)}–${this.unit().write(stretch.high)}`,
     })),
   );
   private readonly overlap = computed<Stretch | null>(() => {
@@ -82,9 +83,11 @@ export class RangeBars {
   });
   protected readonly sentence = computed(() => {
     const overlap = this.overlap();
-    const image = $localize`The image lies on ${kilohertz(this.image().low)}:low: to ${kilohertz(this.image().high)}:high: kHz`;
+    const { unit, write } = this.unit();
+    const said = ({ low, high }: Stretch) =>
+      $localize`${write(low)}:low: to ${write(high)}:high: ${unit}:unit:`;
     return overlap
-      ? $localize`${image}:image:; from ${kilohertz(overlap.low)}:low: to ${kilohertz(overlap.high)}:high: kHz it falls into the band itself.`
-      : $localize`${image}:image:, clear of the band itself.`;
+      ? $localize`The image lies on ${said(this.image())}:image:; from ${said(overlap)}:overlap: it falls into the band itself.`
+      : $localize`The image lies on ${said(this.image())}:image:, clear of the band itself.`;
   });
 }

@@ -13,6 +13,8 @@ import { kilohertz, tenths } from '../../charts/readings';
 export interface ResponseRow {
   readonly id: string;
   readonly band: string;
+  /** The station, or the two that make the product. */
+  readonly stations: readonly number[];
   readonly response: JudgedResponse;
   readonly look: CauseMark;
   readonly dial: string;
@@ -48,6 +50,7 @@ function row(band: string, response: JudgedResponse): ResponseRow {
   return {
     id: responseMark(band, response),
     band,
+    stations: [response.station, response.secondStation].filter((each) => each !== undefined),
     response,
     look: causeMark(response.cause),
     dial: response.dialHz === null ? $localize`everywhere` : kilohertz(response.dialHz),

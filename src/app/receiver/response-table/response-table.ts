@@ -17,7 +17,7 @@ import { MatChipsModule } from '@angular/material/chips';
 import { type JudgedBand } from '../../charts/band-strip/strip-layout';
 import { type Cause } from '../../charts/cause-mark';
 import { Ledger } from '../ledger/ledger';
-import { causesHeard, responseRows } from './response-rows';
+import { causesHeard, type ResponseRow, responseRows } from './response-rows';
 
 const PAGE = 20;
 
@@ -62,6 +62,11 @@ export class ResponseTable {
       const [ledger] = this.openLedgers();
       if (ledger && this.worked() !== null) ledger.nativeElement.focus();
     });
+  }
+
+  protected who({ stations }: ResponseRow): string {
+    const [first = '', second] = stations.map((each) => this.nameOf()(each));
+    return second === undefined ? first : $localize`${first}:station: with ${second}:other:`;
   }
 
   protected more(): void {

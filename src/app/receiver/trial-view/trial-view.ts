@@ -99,11 +99,18 @@ export class TrialView {
   protected readonly verdict = computed(() => {
     const judged = this.store.judged.value();
     if (!judged) return [];
-    const present = this.store.present.value();
+    const present = this.store.isMoved() ? this.store.present.value() : undefined;
     return verdictSentences(judged.verdict, present, this.store.period(), this.store.nameOf);
   });
   protected readonly target = computed(() => kilohertz(this.advice()?.ifHz ?? 0));
-  protected readonly skipped = computed(() => this.store.judged.value()?.skipped.length ?? 0);
+  protected readonly onTrial = computed(() => kilohertz(this.store.trialHz()));
+  protected readonly skipped = computed(() => {
+    const counts = new Map<string, number>();
+    for (const { reason } of this.store.judged.value()?.skipped ?? []) {
+      counts.set(reason, (counts.get(reason) ?? 0) + 1);
+    }
+    return [...counts].map(([reason, count]) => ({ reason, count }));
+  });
   /** In the chart a picked response is its station. */
   protected readonly pickedStation = computed(() => {
     const [kind, , station] = this.store.picked()?.split('|') ?? [];

@@ -25,6 +25,7 @@ export class TrialStore {
   readonly period = this.inputs.period;
   readonly trialHz = this.inputs.trialHz;
   readonly presentHz = computed(() => this.setup()?.receiver.ifHz ?? 0);
+  readonly isMoved = computed(() => this.trialHz() !== this.presentHz());
   /** How far the IF can be moved. */
   readonly reach = computed(() => {
     const receiver = this.setup()?.receiver;
