@@ -29,7 +29,10 @@ export type RangeForm = ReturnType<typeof rangeForm>;
 /** Controls of a region. Paths are those of the contract. */
 export function regionForm() {
   return new FormGroup({
-    name: new FormControl('', { nonNullable: true }),
+    name: new FormControl('', {
+      nonNullable: true,
+      validators: needed($localize`Give a name.`),
+    }),
     ituRegion: new FormControl<ItuRegion | null>(
       null,
       needed($localize`Give the ITU Region: 1, 2 or 3.`),

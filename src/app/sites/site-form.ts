@@ -8,7 +8,7 @@ import { type Axis, formatCoordinate, parseCoordinate } from '../ui/place/coordi
 /** Controls of a site; coordinates are held as typed. Paths are those of the contract. */
 export function siteForm() {
   return new FormGroup({
-    name: text(),
+    name: text(needed($localize`Give a name.`)),
     latitude: text(coordinate('latitude')),
     longitude: text(coordinate('longitude')),
     ground: new FormControl<Ground | null>('average'),

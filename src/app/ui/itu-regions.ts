@@ -6,3 +6,7 @@ export const ITU_REGIONS: readonly { readonly value: ItuRegion; readonly words: 
   { value: 2, words: $localize`North and South America, Greenland` },
   { value: 3, words: $localize`Southern and eastern Asia, Australia, the Pacific` },
 ];
+
+/** What an ITU Region covers; empty before one is chosen. */
+export const ituWords = (region: unknown): string =>
+  ITU_REGIONS.find(({ value }) => value === region)?.words ?? '';

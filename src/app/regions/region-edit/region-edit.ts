@@ -12,7 +12,7 @@ import { toProblem } from '../../core/api-problem';
 import { FormProblems } from '../../ui/form-problems/form-problems';
 import { ProblemTextPipe } from '../../ui/form-problems/problem-text-pipe';
 import { Submission } from '../../ui/form-problems/submission';
-import { ITU_REGIONS } from '../../ui/itu-regions';
+import { ITU_REGIONS, ituWords } from '../../ui/itu-regions';
 import { Loading } from '../../ui/page-state/loading';
 import { ProblemNote } from '../../ui/page-state/problem-note';
 import type { Unsaved } from '../../ui/unsaved-changes-guard';
@@ -48,6 +48,7 @@ export class RegionEdit implements Unsaved {
   readonly id = input<string>();
 
   protected readonly ituRegions = ITU_REGIONS;
+  protected readonly ituWords = ituWords;
   protected readonly region = this.store.one(this.id);
   protected readonly form = regionForm();
   protected readonly submission = new Submission(this.form, regionDraft, toProblem);

@@ -6,7 +6,7 @@ import { MatInputModule } from '@angular/material/input';
 import { MatSelectModule } from '@angular/material/select';
 
 import { ProblemTextPipe } from '../../ui/form-problems/problem-text-pipe';
-import { ITU_REGIONS } from '../../ui/itu-regions';
+import { ITU_REGIONS, ituWords } from '../../ui/itu-regions';
 import { formatCoordinate } from '../../ui/place/coordinate';
 import { parsePlace } from '../../ui/place/place';
 import type { SiteForm } from '../site-form';
@@ -31,6 +31,7 @@ export class SiteFields {
   readonly form = input.required<SiteForm>();
 
   protected readonly ituRegions = ITU_REGIONS;
+  protected readonly ituWords = ituWords;
   /** A short cut that fills in the two coordinates; no field of the site itself. */
   protected readonly pair = new FormControl('', {
     nonNullable: true,

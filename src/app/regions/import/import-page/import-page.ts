@@ -13,6 +13,7 @@ import { MatStepper, MatStepperModule } from '@angular/material/stepper';
 import { RouterLink } from '@angular/router';
 import { map } from 'rxjs';
 
+import { Icon } from '../../../ui/icon/icon';
 import { Loading } from '../../../ui/page-state/loading';
 import { ProblemNote } from '../../../ui/page-state/problem-note';
 import { RegionStore } from '../../region-store';
@@ -33,6 +34,7 @@ const NARROW = '(max-width: 44rem)';
     CheckStep,
     ColumnsStep,
     FileStep,
+    Icon,
     Loading,
     MatButtonModule,
     MatStepperModule,

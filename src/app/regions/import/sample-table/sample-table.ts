@@ -16,5 +16,8 @@ export class SampleTable {
   readonly proposal = input.required<ImportProposal>();
 
   protected readonly delimiter = computed(() => delimiterWords(this.proposal().delimiter));
+  protected readonly mark = computed(() =>
+    this.proposal().decimalMark === ',' ? 'comma' : 'point',
+  );
   protected readonly rows = computed(() => this.proposal().sample.slice(0, ROWS));
 }
