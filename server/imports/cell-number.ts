@@ -12,7 +12,7 @@ const BLANKS = new Set(['', '-', '\u2013', '\u2014', 'n/a']);
 
 /** Whether a cell says nothing: empty, a dash, or "n/a". */
 export const isBlank = (cell: string): boolean =>
-  BLANKS.has(cell) || BLANKS.has(cell.trim().toLowerCase());
+  cell === '' || (!/^\d/.test(cell) && BLANKS.has(cell.trim().toLowerCase()));
 
 /** Number in a cell with the file's decimal mark, thousands marks allowed; null when it is none. */
 export function readNumber(cell: string, mark: DecimalMark): number | null {

@@ -37,5 +37,5 @@ export function readPower(cell: string, unit: ImportUnit, mark: DecimalMark): nu
   const value = readQuantity(cell, unit, mark, ['W', 'kW', 'dBW']);
   if (value === null || value < 0 || value > 100_000_000) return null;
   // Twelve digits: 0.1 kW is 100 W, not 100.00000000000001.
-  return Number(value.toPrecision(12));
+  return Number.isInteger(value) ? value : Number(value.toPrecision(12));
 }

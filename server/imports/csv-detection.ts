@@ -21,8 +21,7 @@ function score(sample: string, delimiter: string): number {
 
 function parseSample(sample: string, delimiter: string): string[][] {
   try {
-    const options = { ...csvOptions(delimiter), info: false, to: SAMPLE_ROWS };
-    return parse(sample, options);
+    return parse(sample, { ...csvOptions(delimiter), to: SAMPLE_ROWS });
   } catch {
     return []; // A quotation mark that this delimiter leaves open: not the one.
   }

@@ -1,7 +1,7 @@
 import { createReadStream } from 'node:fs';
 import { pipeline } from 'node:stream';
 
-import { CsvError, type InfoField, type Options, parse } from 'csv-parse';
+import { CsvError, type Options, parse } from 'csv-parse';
 import iconv from 'iconv-lite';
 
 import { BadListError } from './bad-list-error.ts';
@@ -19,6 +19,7 @@ export interface CsvRow {
   readonly cells: readonly string[];
 }
 
+const BREAK = /\r\n|\n|\r/g;
 const MAX_ROW_CHARACTERS = 131_072;
 export const MAX_COLUMNS = 200;
 
@@ -26,18 +27,11 @@ export const MAX_COLUMNS = 200;
 export const csvOptions = (delimiter: string): Options => ({
   delimiter,
   bom: true,
-  info: true,
   max_record_size: MAX_ROW_CHARACTERS,
   record_delimiter: ['\r\n', '\n', '\r'],
   relax_column_count: true,
   relax_quotes: true,
-  skip_empty_lines: true,
 });
-
-interface ParsedRecord {
-  readonly record: string[];
-  readonly info: InfoField;
-}
 
 /**
  * Rows of a file, the header first; rows whose cells are all blank are passed over.
@@ -47,34 +41,30 @@ export async function* csvRows(path: string, layout: CsvLayout): AsyncGenerator<
   const parser = parse(csvOptions(layout.delimiter));
   // Failures of the file reach the loop below through the parser, which the pipeline destroys.
   pipeline(createReadStream(path), iconv.decodeStream(layout.encoding), parser, () => undefined);
-  const lines = new LineCounter();
+  let line = 1;
   try {
-    for await (const { record, info } of parser as AsyncIterable<ParsedRecord>) {
-      const line = lines.next(info.lines, record);
-      checkWidth(record, line);
-      if (record.some((cell) => cell.trim() !== '')) yield { line, cells: record };
+    for await (const cells of parser as AsyncIterable<string[]>) {
+      checkWidth(cells, line);
+      if (cells.some((cell) => cell !== '' && cell.trim() !== '')) yield { line, cells };
+      line += linesOf(cells);
     }
   } catch (error) {
-    throw error instanceof CsvError ? unreadable(error, lines.last + 1) : error;
+    throw error instanceof CsvError ? unreadable(error, line) : error;
   } finally {
     parser.destroy();
   }
 }
 
 /**
- * Finds the line on which each record begins. The parser tells the line on which it ends, and counts
- * a CR LF inside quotation marks twice.
+ * Lines a row takes up in the file: one, and one for each break inside quotation marks. Counting on
+ * our own needs every row, also the empty ones, but the parser's count takes CR LF for two.
  */
-export class LineCounter {
-  last = 0;
-  #surplus = 0;
-
-  next(parserLine: number, record: readonly string[]): number {
-    const breaks = record.flatMap((cell) => cell.match(/\r\n|\n|\r/g) ?? []);
-    this.#surplus += breaks.filter((each) => each === '\r\n').length;
-    this.last = parserLine - this.#surplus;
-    return this.last - breaks.length;
+function linesOf(cells: readonly string[]): number {
+  let lines = 1;
+  for (const cell of cells) {
+    if (cell.includes('\n') || cell.includes('\r')) lines += cell.match(BREAK)?.length ?? 0;
   }
+  return lines;
 }
 
 function checkWidth(record: readonly string[], line: number): void {

@@ -18,16 +18,20 @@ interface Count {
  * rows never matters.
  */
 export class RowTally {
+  /** Counts by identity; only of what the edition lists. */
   readonly #identities = new Map<string, Count>();
   /** Fingerprints met: false in the edition only, true in this list. */
   readonly #fingerprints = new Map<string, boolean>();
+  #unlisted = 0;
   #rejected = 0;
   #duplicate = 0;
 
   know(rows: readonly KnownRow[]): void {
     for (const { identity, fingerprint } of rows) {
       this.#fingerprints.set(fingerprint, false);
-      this.#count(identity).listed += 1;
+      const count = this.#identities.get(identity);
+      if (count) count.listed += 1;
+      else this.#identities.set(identity, { listed: 1, offered: 0, same: 0 });
     }
   }
 
@@ -39,7 +43,11 @@ export class RowTally {
       return false;
     }
     this.#fingerprints.set(fingerprint, true);
-    const count = this.#count(identity);
+    const count = this.#identities.get(identity);
+    if (!count) {
+      this.#unlisted += 1;
+      return true;
+    }
     count.offered += 1;
     if (met === false) count.same += 1;
     return true;
@@ -50,7 +58,7 @@ export class RowTally {
   }
 
   get rows(): ImportCheck['rows'] {
-    const rows = { new: 0, changed: 0, same: 0 };
+    const rows = { new: this.#unlisted, changed: 0, same: 0 };
     for (const { listed, offered, same } of this.#identities.values()) {
       const changed = Math.min(offered - same, listed - same);
       rows.same += same;
@@ -59,14 +67,5 @@ export class RowTally {
     }
     const total = rows.new + rows.changed + rows.same + this.#rejected + this.#duplicate;
     return { total, ...rows, rejected: this.#rejected, duplicate: this.#duplicate };
-  }
-
-  #count(identity: string): Count {
-    let count = this.#identities.get(identity);
-    if (!count) {
-      count = { listed: 0, offered: 0, same: 0 };
-      this.#identities.set(identity, count);
-    }
-    return count;
   }
 }

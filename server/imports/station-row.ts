@@ -24,6 +24,8 @@ export type RowResult =
   | { readonly station: null; readonly faults: readonly ImportFault[] };
 
 const LENGTHS = { name: 200, callSign: 40, hours: 200, note: 1000 } as const;
+/** Breaks, tabs, other control characters and repeated spaces. */
+const UNTIDY = /\p{Cc}|\s{2}/u;
 const DECIMAL_WORDS = { '.': 'a decimal point', ',': 'a decimal comma' } as const;
 
 /** Reads the rows of one list by its matching; built once a file, called once a row. */
@@ -54,7 +56,7 @@ export class RowReader {
     const frequencyHz = this.#frequency(row, faults);
     const place = this.#place(row, faults);
     const powers = this.#powers(row, faults);
-    this.#checkNamed(row, texts, faults);
+    this.#checkNamed(row, faults);
     if (faults.length > 0 || frequencyHz === null) return { station: null, faults };
     return { station: { ...texts, frequencyHz, ...place, ...powers }, faults: [] };
   }
@@ -71,16 +73,16 @@ export class RowReader {
   }
 
   /** A station needs something to be called by, unless the list has no such column at all. */
-  #checkNamed(row: CsvRow, texts: Pick<StationRow, 'name' | 'callSign'>, faults: ImportFault[]) {
+  #checkNamed(row: CsvRow, faults: ImportFault[]): void {
     const field = this.#columns.has('name') ? 'name' : 'callSign';
-    if (!this.#columns.has(field) || texts.name !== '' || texts.callSign !== '') return;
+    if (!this.#columns.has(field)) return;
+    if (this.#cell('name', row).trim() !== '' || this.#cell('callSign', row).trim() !== '') return;
     this.#fault(row, field, 'a name or a call sign', faults);
   }
 
   #text(field: keyof typeof LENGTHS, row: CsvRow, faults: ImportFault[]): string {
-    const text = this.#cell(field, row)
-      .replace(/[\s\p{Cc}]+/gu, ' ')
-      .trim();
+    const cell = this.#cell(field, row).trim();
+    const text = UNTIDY.test(cell) ? cell.replace(/[\s\p{Cc}]+/gu, ' ') : cell;
     if (text.length <= LENGTHS[field]) return text;
     this.#fault(row, field, `at most ${LENGTHS[field]} characters`, faults);
     return '';
