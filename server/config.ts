@@ -55,15 +55,15 @@ const environment = z
   })
   .refine(({ NODE_ENV, SESSION_SECRET }) => NODE_ENV !== 'production' || SESSION_SECRET, {
     path: ['SESSION_SECRET'],
-    message: `Needed in production: at least ${MIN_SECRET_LENGTH} characters, made at random.`,
+    error: `Needed in production: at least ${MIN_SECRET_LENGTH} characters, made at random.`,
   })
   .refine(({ DEMO_CLUB, DEMO_PASSWORD }) => !DEMO_CLUB || DEMO_PASSWORD, {
     path: ['DEMO_PASSWORD'],
-    message: 'Needed with DEMO_CLUB: the password of its accounts.',
+    error: 'Needed with DEMO_CLUB: the password of its accounts.',
   })
   .refine(({ DEMO_CLUB, NODE_ENV }) => !DEMO_CLUB || NODE_ENV !== 'production', {
     path: ['DEMO_CLUB'],
-    message: 'The demo club has no place in production.',
+    error: 'The demo club has no place in production.',
   })
   .transform((settings) => ({
     ...settings,

@@ -1,5 +1,6 @@
-import { Op, type WhereOptions } from 'sequelize';
+import { Op } from 'sequelize';
 
-/** Rows whose name contains the text, whatever its case; all rows where none is asked for. */
-export const nameContains = (text: string): WhereOptions =>
-  text === '' ? {} : { name: { [Op.like]: `%${text.replace(/[\\%_]/g, '\\$&')}%` } };
+/** Matches text that contains the wanted one, whatever its case; an empty one is in every text. */
+export const containing = (wanted: string) => ({
+  [Op.like]: `%${wanted.replace(/[\\%_]/g, '\\$&')}%`,
+});

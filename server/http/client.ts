@@ -45,7 +45,10 @@ function page(file: string, isBehindTls: boolean): RequestHandler {
     });
     const nonce = randomBytes(16).toString('base64');
     pagePolicy(nonce, isBehindTls)(request, response, (error) => {
-      if (error) return next(error);
+      if (error) {
+        next(error);
+        return;
+      }
       response.set('Cache-Control', 'no-store').type('html');
       response.send(html.replace('<app-root', `<app-root ngCspNonce="${nonce}"`));
     });

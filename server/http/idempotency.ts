@@ -22,14 +22,11 @@ export class Idempotency {
   }
 
   /**
-   * Runs the work, or answers what it answered before under the same key. Key, work and answer are
+   * Handles the call, or answers what it answered before under the same key. Key, work and answer are
    * stored in one transaction: a second request with the key waits for the first at the key's row.
    */
-  async once(
-    call: Call<Access, unknown, unknown>,
-    row: Route,
-    work: () => Promise<unknown>,
-  ): Promise<unknown> {
+  async once(call: Call<Access, unknown, unknown>, row: Route): Promise<unknown> {
+    const work = () => row.handle(call);
     const key = call.request.get('Idempotency-Key');
     if (key === undefined || !call.actor) return work();
     if (key === '' || key.length > MAX_KEY_LENGTH) {
@@ -58,7 +55,7 @@ export class Idempotency {
   private first(
     name: { accountId: number; route: string; keyHash: string },
     bodyHash: string,
-    work: () => Promise<unknown>,
+    work: () => unknown,
   ): Promise<unknown> {
     return inTransaction(this.database, async () => {
       const record = await IdempotencyKeyModel.create({ ...name, bodyHash, answer: null });

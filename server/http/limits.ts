@@ -40,22 +40,25 @@ export class Limits {
     await this.spend(`register:${digest(address)}`, this.settings.LIMIT_REGISTER, HOUR);
   }
 
-  /** Counted before the password is tried, so that tries side by side are counted too. */
-  async signingIn(email: string, address: string): Promise<void> {
+  /**
+   * Tries a sign-in. It is counted before the password is tried, so that tries side by side are
+   * counted too, and given back when it succeeds: only failures use the limit up.
+   */
+  async whileSigningIn<T>(email: string, address: string, attempt: () => Promise<T>): Promise<T> {
     const { LIMIT_SIGN_IN, LIMIT_SIGN_IN_ADDRESS } = this.settings;
-    await this.spend(`sign-in-address:${digest(address)}`, LIMIT_SIGN_IN_ADDRESS, QUARTER);
-    await this.spend(`sign-in:${digest(email)}`, LIMIT_SIGN_IN, QUARTER);
-  }
-
-  /** Only failures count: a sign-in that succeeded is given back. */
-  async signedIn(email: string, address: string): Promise<void> {
+    const ofAddress = `sign-in-address:${digest(address)}`;
+    const ofAccount = `sign-in:${digest(email)}`;
+    await this.spend(ofAddress, LIMIT_SIGN_IN_ADDRESS, QUARTER);
+    await this.spend(ofAccount, LIMIT_SIGN_IN, QUARTER);
+    const outcome = await attempt();
     await this.database.query('DELETE FROM request_counters WHERE name = ?', {
-      replacements: [`sign-in:${digest(email)}`],
+      replacements: [ofAccount],
     });
     await this.database.query(
       'UPDATE request_counters SET spent = spent - 1 WHERE name = ? AND spent > 0',
-      { replacements: [`sign-in-address:${digest(address)}`] },
+      { replacements: [ofAddress] },
     );
+    return outcome;
   }
 
   async forgetOld(): Promise<void> {

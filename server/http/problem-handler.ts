@@ -1,5 +1,5 @@
 import type { ErrorRequestHandler, Request, Response } from 'express';
-import { ZodError } from 'zod';
+import * as z from 'zod';
 
 import type { Problem } from '../../shared/contracts/problem.ts';
 import { isDatabaseAway } from '../db/database-faults.ts';
@@ -36,7 +36,7 @@ function note(log: Logger, error: unknown, request: Request, response: Response,
 }
 
 function toProblem(error: unknown): Body {
-  if (error instanceof ZodError) {
+  if (error instanceof z.ZodError) {
     return {
       type: 'invalid-input',
       title: 'Some values are not valid.',

@@ -53,3 +53,7 @@ export const route = <
 >(
   row: Row<A, Body, Query>,
 ): Route => row;
+
+/** A creation by a signed-in caller from a JSON body can be repeated without creating twice. */
+export const isRepeatable = ({ method, status, access, upload }: Route): boolean =>
+  method === 'post' && status === 201 && access !== 'visitor' && !upload;

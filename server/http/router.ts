@@ -5,7 +5,7 @@ import { MethodNotAllowedError } from './errors.ts';
 import type { Idempotency } from './idempotency.ts';
 import { jsonBody } from './json-body.ts';
 import { pathId } from './path-id.ts';
-import type { Access, Call, Route } from './route.ts';
+import { type Access, type Call, isRepeatable, type Route } from './route.ts';
 
 /** What every route is guarded by, beside its own row. */
 export interface Guards {
@@ -51,8 +51,9 @@ async function answer(
     request,
     response,
   };
-  const work = async () => row.handle(call);
-  const body = isCreation(row) ? await guards.idempotency.once(call, row, work) : await work();
+  const body = isRepeatable(row)
+    ? await guards.idempotency.once(call, row)
+    : await row.handle(call);
   if (response.headersSent || row.produces) return;
   const status = row.status ?? 200;
   if (status === 201) locate(row, routes, request, response, body);
@@ -60,10 +61,6 @@ async function answer(
   if (status === 204) response.end();
   else response.json(body);
 }
-
-/** A creation by a signed-in caller from a JSON body can be repeated without creating twice. */
-const isCreation = (row: Route): boolean =>
-  row.method === 'post' && row.status === 201 && row.access !== 'visitor' && !row.upload;
 
 function locate(
   row: Route,
@@ -75,8 +72,8 @@ function locate(
   const isKept = routes.some(
     ({ method, path }) => method === 'get' && new RegExp(`^${row.path}/:[^/]+$`).test(path),
   );
-  const { id } = (body ?? {}) as { id?: unknown };
-  if (isKept && id !== undefined) response.location(`${request.path}/${String(id)}`);
+  const { id } = (body ?? {}) as { id?: number };
+  if (isKept && id !== undefined) response.location(`${request.path}/${id}`);
 }
 
 function refuse(path: string, routes: readonly Route[]): RequestHandler {

@@ -1,5 +1,5 @@
 import { problem } from '../../shared/contracts/problem.ts';
-import type { Route } from '../http/route.ts';
+import { isRepeatable, type Route } from '../http/route.ts';
 import { faultsOf } from './route-faults.ts';
 import { schemaOf } from './schema.ts';
 
@@ -26,7 +26,10 @@ export function describeApi(routes: readonly Route[], sessionCookie: string): Js
     paths,
     components: {
       schemas: { Problem: schemaOf(problem, 'output') },
-      securitySchemes: { session: { type: 'apiKey', in: 'cookie', name: sessionCookie } },
+      securitySchemes: {
+        session: { type: 'apiKey', in: 'cookie', name: sessionCookie },
+        requestToken: { type: 'apiKey', in: 'header', name: 'X-XSRF-TOKEN' },
+      },
     },
   };
 }
@@ -37,7 +40,7 @@ function operationOf(row: Route): Json {
     summary: row.summary,
     tags: [row.path.split('/')[2]],
     'x-least-role': row.access,
-    security: row.access === 'visitor' ? [{}, { session: [] }] : [{ session: [] }],
+    security: securityOf(row),
     parameters: parametersOf(row),
     ...requestBodyOf(row),
     responses: responsesOf(row),
@@ -66,18 +69,23 @@ function queryParametersOf({ query }: Route): Json[] {
 }
 
 function headersOf(row: Route): Json[] {
-  const header = (name: string, required: boolean, description: string) => ({
-    name,
-    in: 'header',
-    required,
-    description,
-    schema: { type: 'string' },
-  });
-  if (row.method === 'get') return [];
-  const token = header('X-XSRF-TOKEN', true, 'Value of the cookie XSRF-TOKEN.');
-  if (row.status !== 201 || row.access === 'visitor' || row.upload) return [token];
-  const key = 'Made anew for each creation; the same key within a day creates once.';
-  return [token, header('Idempotency-Key', false, key)];
+  if (!isRepeatable(row)) return [];
+  return [
+    {
+      name: 'Idempotency-Key',
+      in: 'header',
+      required: false,
+      description: 'Made anew for each creation; the same key within a day creates once.',
+      schema: { type: 'string', minLength: 1, maxLength: 255 },
+    },
+  ];
+}
+
+/** Ways to be let in: any one of them suffices. */
+function securityOf({ access, method }: Route): Json[] {
+  const token = method === 'get' ? {} : { requestToken: [] };
+  const signedIn = { session: [], ...token };
+  return access === 'visitor' ? [token, signedIn] : [signedIn];
 }
 
 function requestBodyOf({ body, upload }: Route): Json {

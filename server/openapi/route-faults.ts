@@ -1,4 +1,4 @@
-import type { Route } from '../http/route.ts';
+import { isRepeatable, type Route } from '../http/route.ts';
 
 const MEANING: Readonly<Record<number, string>> = {
   400: 'Some values are not valid; `issues` names them',
@@ -16,14 +16,13 @@ const MEANING: Readonly<Record<number, string>> = {
 /** Statuses of failure a route may answer, with what they mean. */
 export function faultsOf(row: Route): [status: number, meaning: string][] {
   const takesBody = Boolean(row.body) || Boolean(row.upload);
-  const isCreation = row.status === 201 && row.access !== 'visitor' && !row.upload;
   const statuses = new Set([
     ...(takesBody ? [400, 413, 415] : []),
     ...(row.query ? [400] : []),
     ...(row.access === 'visitor' ? [] : [401]),
     ...(row.method === 'get' && !['librarian', 'admin'].includes(row.access) ? [] : [403]),
     ...(row.path.includes(':') ? [404] : []),
-    ...(isCreation ? [422] : []),
+    ...(isRepeatable(row) ? [422] : []),
     ...(row.computing ? [429] : []),
     ...(row.faults ?? []),
     503,

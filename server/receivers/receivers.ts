@@ -8,7 +8,7 @@ import {
   type ReceiverQuery,
   type StoredReceiver,
 } from '../../shared/contracts/receiver.ts';
-import { nameContains } from '../db/search.ts';
+import { containing } from '../db/search.ts';
 import { inTransaction } from '../db/transaction.ts';
 import { type Actor, mayChange } from '../http/actor.ts';
 import { ConflictError, ForbiddenError, NotFoundError } from '../http/errors.ts';
@@ -36,7 +36,7 @@ export class Receivers {
 
   async list(actor: Actor, query: ReceiverQuery): Promise<Page<StoredReceiver>> {
     const { rows, count } = await ReceiverModel.findAndCountAll({
-      where: { workshopId: actor.workshopId, ...nameContains(query.search) },
+      where: { workshopId: actor.workshopId, name: containing(query.search) },
       order: ORDER[query.sort].map(([column, way]): [string, string] => [column, way]),
       limit: query.pageSize,
       offset: (query.page - 1) * query.pageSize,

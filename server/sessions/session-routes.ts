@@ -13,53 +13,49 @@ interface Verifier {
   verify(credentials: Credentials): Promise<{ id: number }>;
 }
 
-const path = '/api/session';
+const forAll = { path: '/api/session', access: 'visitor' } as const;
+const signedIn = { path: '/api/session', access: 'member' } as const;
 
 export const sessionRoutes = (
   sessions: Pick<Sessions, 'user' | 'change'>,
   door: Pick<SessionDoor, 'enter' | 'leave'>,
   accounts: Verifier,
-  limits: Pick<Limits, 'signingIn' | 'signedIn'>,
+  limits: Pick<Limits, 'whileSigningIn'>,
 ): Route[] => [
   route({
+    ...forAll,
     method: 'post',
-    path,
     summary: 'Sign in',
-    access: 'visitor',
     body: credentials,
     answer: user,
     faults: [401, 429],
     handle: async ({ body, request, response }) => {
-      const address = request.ip ?? '';
-      await limits.signingIn(body.email, address);
-      const { id } = await accounts.verify(body);
-      await limits.signedIn(body.email, address);
+      const { id } = await limits.whileSigningIn(body.email, request.ip ?? '', () =>
+        accounts.verify(body),
+      );
       return door.enter(id, request, response);
     },
   }),
   route({
+    ...signedIn,
     method: 'get',
-    path,
     summary: 'Who is signed in, and in which workshop',
-    access: 'member',
     answer: user,
     handle: ({ actor }) => sessions.user(actor),
   }),
   route({
+    ...signedIn,
     method: 'put',
-    path,
     summary: 'Go to another workshop of the account',
-    access: 'member',
     body: sessionChange,
     answer: user,
     faults: [404],
     handle: ({ actor, body }) => sessions.change(actor, body.workshopId),
   }),
   route({
+    ...forAll,
     method: 'delete',
-    path,
     summary: 'Sign out',
-    access: 'visitor',
     status: 204,
     handle: ({ request, response }) => door.leave(request, response),
   }),

@@ -9,8 +9,8 @@ export const signSession = (sessionId: string, secret: string): string =>
 /** The session a token names, or undefined if it is not one of ours. */
 export function readSession(token: string, secret: string): string | undefined {
   try {
-    const { sub } = jwt.verify(token, secret, { algorithms: [ALGORITHM] });
-    return typeof sub === 'string' ? sub : undefined;
+    const claims = jwt.verify(token, secret, { algorithms: [ALGORITHM] });
+    return typeof claims === 'string' ? undefined : claims.sub;
   } catch (error) {
     if (error instanceof jwt.JsonWebTokenError) return undefined;
     throw error;

@@ -2,7 +2,7 @@ import type { Sequelize } from 'sequelize';
 
 import type { Page, SearchQuery } from '../../shared/contracts/paging.ts';
 import type { NamedSite, StoredSite } from '../../shared/contracts/site.ts';
-import { nameContains } from '../db/search.ts';
+import { containing } from '../db/search.ts';
 import { inTransaction } from '../db/transaction.ts';
 import { type Actor, mayChange } from '../http/actor.ts';
 import { ForbiddenError, NotFoundError } from '../http/errors.ts';
@@ -19,7 +19,7 @@ export class Sites {
 
   async list(actor: Actor, { page, pageSize, search }: SearchQuery): Promise<Page<StoredSite>> {
     const { rows, count } = await SiteModel.findAndCountAll({
-      where: { workshopId: actor.workshopId, ...nameContains(search) },
+      where: { workshopId: actor.workshopId, name: containing(search) },
       order: [
         ['name', 'ASC'],
         ['id', 'ASC'],

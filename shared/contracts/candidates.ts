@@ -30,16 +30,16 @@ export const candidatesRequest = z
   })
   .refine(({ fromHz, toHz }) => toHz >= fromHz, {
     path: ['toHz'],
-    message: 'The range must end at or above where it begins.',
+    error: 'The range must end at or above where it begins.',
   })
   .refine(({ fromHz, toHz, stepHz }) => (toHz - fromHz) / stepHz < MAX_CANDIDATES, {
     path: ['stepHz'],
-    message: `Give a step that makes at most ${MAX_CANDIDATES} candidates.`,
+    error: `Give a step that makes at most ${MAX_CANDIDATES} candidates.`,
   })
   .refine((request) => (request.cases === undefined ? hasOneSource(request) : true), oneSourceIssue)
   .refine((request) => request.cases !== undefined || request.site !== undefined, {
     path: ['site'],
-    message: 'Give a site, or cases each with a site and stations.',
+    error: 'Give a site, or cases each with a site and stations.',
   })
   .refine(
     ({ cases, ...request }) =>
@@ -47,7 +47,7 @@ export const candidatesRequest = z
       [request.site, request.editionId, request.stations, request.everyChannelDb].every(
         (each) => each === undefined,
       ),
-    { path: ['cases'], message: 'Give either cases, or one site with its stations, not both.' },
+    { path: ['cases'], error: 'Give either cases, or one site with its stations, not both.' },
   );
 export type CandidatesRequest = z.output<typeof candidatesRequest>;
 export type CandidatesInput = z.input<typeof candidatesRequest>;

@@ -26,7 +26,7 @@ export const planDraft = z
   })
   .refine(({ editionId, everyChannelDb }) => (editionId === null) !== (everyChannelDb === null), {
     path: ['editionId'],
-    message: 'Give either an edition or the field assumed on every channel.',
+    error: 'Give either an edition or the field assumed on every channel.',
   });
 export type PlanDraft = z.output<typeof planDraft>;
 export type PlanInput = z.input<typeof planDraft>;

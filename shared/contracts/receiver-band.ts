@@ -37,5 +37,5 @@ export const band = z
   })
   .refine(({ lowHz, highHz }) => highHz > lowHz, {
     path: ['highHz'],
-    message: 'The band must end above where it begins.',
+    error: 'The band must end above where it begins.',
   });

@@ -17,7 +17,7 @@ const widths = z
   .strictObject({ kind: z.literal('widths'), b6Hz: spanHz, b60Hz: spanHz })
   .refine(({ b6Hz, b60Hz }) => b60Hz > b6Hz, {
     path: ['b60Hz'],
-    message: 'The width at -60 dB must be larger than the width at -6 dB.',
+    error: 'The width at -60 dB must be larger than the width at -6 dB.',
   });
 
 const transformers = z.strictObject({

@@ -16,11 +16,11 @@ export const rasterRange = z
   .strictObject({ lowHz: frequencyHz, highHz: frequencyHz, stepHz: spanHz })
   .refine(({ lowHz, highHz }) => highHz >= lowHz, {
     path: ['highHz'],
-    message: 'The raster must end at or above where it begins.',
+    error: 'The raster must end at or above where it begins.',
   })
   .refine(({ lowHz, highHz, stepHz }) => (highHz - lowHz) / stepHz <= 10_000, {
     path: ['stepHz'],
-    message: 'Give a step that makes at most 10000 channels.',
+    error: 'Give a step that makes at most 10000 channels.',
   });
 
 /** What a client sends to create a region; without a raster the ITU Region's own is taken. */

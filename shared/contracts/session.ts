@@ -11,7 +11,7 @@ export const email = z
   .transform((value) => value.toLowerCase());
 
 /** Characters as people count them: one outside the basic plane is two units of a string. */
-const characters = (text: string): number => [...text].length;
+const characters = (text: string): number => Array.from(text).length;
 
 /** What registering takes. Every character of the password matters. */
 export const accountDraft = z.strictObject({

@@ -30,7 +30,7 @@ const noiseIsKnown = {
     site.noise !== null || site.noiseFloorDb !== null,
   issue: {
     path: ['noise'],
-    message: 'Give a class of noise (city, residential, rural, quiet) or a measured noise floor.',
+    error: 'Give a class of noise (city, residential, rural, quiet) or a measured noise floor.',
   },
 };
 

@@ -43,5 +43,5 @@ export const hasOneSource = (source: StationSource): boolean =>
 
 export const oneSourceIssue = {
   path: ['stations'],
-  message: 'Give exactly one of editionId, stations and everyChannelDb.',
+  error: 'Give exactly one of editionId, stations and everyChannelDb.',
 };
