@@ -11,7 +11,7 @@ const root = fileURLToPath(new URL('../..', import.meta.url));
 export function installPackages() {
   if (isInstalled()) return;
   console.log('Installing the packages of package-lock.json (about a minute the first time).');
-  const { status, error } = spawnSync('npm', ['ci', '--include=dev'], {
+  const { status, error } = spawnSync('npm', ['ci', '--include=dev', '--loglevel=error'], {
     cwd: root,
     stdio: 'inherit',
   });

@@ -30,6 +30,7 @@ export async function start(environment: NodeJS.ProcessEnv): Promise<void> {
   for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP'] as const) {
     process.on(signal, () => void end(0));
   }
+  process.on('disconnect', () => void end(0));
   try {
     await bringUp(environment);
   } catch (error) {

@@ -6,8 +6,9 @@ import { join, resolve } from 'node:path';
 import { fileURLToPath } from 'node:url';
 
 import type { DemoSignIn } from '../../server/dev/api-process.ts';
-import { endProcess } from '../../server/dev/bound-process.ts';
+import { endProcess, exitOf } from '../../server/dev/bound-process.ts';
 import { anyFreePort } from '../../server/dev/free-port.ts';
+import { type RunningProcess, runningProcesses } from '../../server/dev/process-table.ts';
 
 const root = resolve(fileURLToPath(new URL('../..', import.meta.url)));
 const GRACE_MS = 60_000;
@@ -31,6 +32,14 @@ export class Product {
   /** The demo club's accounts: one member, one librarian, one admin. */
   get signIns(): readonly DemoSignIn[] {
     return this.whenReady().demo;
+  }
+
+  /** The processes it consists of, by the name of their program. */
+  processes(program: 'node' | 'mariadbd'): readonly RunningProcess[] {
+    const parent = this.child?.pid;
+    return runningProcesses().filter(
+      (found) => found.parentPid === parent && found.program === program,
+    );
   }
 
   /** @param settings Environment of the start beside what keeps it apart from everything else. */
@@ -58,6 +67,14 @@ export class Product {
   async stop(): Promise<void> {
     this.ready = undefined;
     if (this.child) await endProcess(this.child, GRACE_MS);
+  }
+
+  /** Kills the starter alone, as a power cut would, and waits until it is gone. */
+  async kill(): Promise<void> {
+    this.ready = undefined;
+    if (!this.child) return;
+    this.child.kill('SIGKILL');
+    await exitOf(this.child);
   }
 
   async remove(): Promise<void> {
