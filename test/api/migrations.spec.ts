@@ -44,6 +44,31 @@ describe('the migrations', () => {
   });
 });
 
+describe('the tables', () => {
+  it('hold every script, and refuse what does not fit, whatever the server is set to', async () => {
+    const { url, drop } = await freshDatabase();
+    const database = connectDatabase(url, 3, createLogger('silent'));
+    await database.query('ALTER DATABASE CHARACTER SET latin1');
+    await migrate(database, url);
+    const name = 'Ωmega 🎚 Станция';
+    const insert = (text: string) =>
+      database.query(
+        'INSERT INTO workshops (name, created_at, updated_at) VALUES (?, NOW(), NOW())',
+        {
+          replacements: [text],
+        },
+      );
+
+    await insert(name);
+
+    const rows = await database.query('SELECT name FROM workshops', { type: QueryTypes.SELECT });
+    expect(rows).toEqual([{ name }]);
+    await expect(insert('x'.repeat(161))).rejects.toThrow(/too long/);
+    await database.close();
+    await drop();
+  });
+});
+
 describe('the connector', () => {
   it('gives whole hertz, doubles, JSON, times and booleans back as they were', async () => {
     const { url, drop } = await freshDatabase();

@@ -1,6 +1,8 @@
 import type { Run } from '../migrator.ts';
 
 export async function up(run: Run): Promise<void> {
+  // A server of the user's own may be set to another character set.
+  await run('ALTER DATABASE CHARACTER SET utf8mb4 COLLATE utf8mb4_unicode_ci');
   await run(`
     CREATE TABLE workshops (
       id INT UNSIGNED NOT NULL AUTO_INCREMENT PRIMARY KEY,
