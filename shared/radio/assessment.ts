@@ -171,6 +171,7 @@ function skippedStations({ stations, fields }: AssessmentInput): SkippedStation[
   return stations.flatMap(({ id, fieldDb }) => {
     const field = byId.get(id);
     if ((fieldDb ?? field?.fieldDb ?? null) !== null) return [];
-    return [{ station: id, reason: field?.notes.join(' ') || 'No field was computed.' }];
+    const reason = field?.notes.join(' ') ?? '';
+    return [{ station: id, reason: reason === '' ? 'No field was computed.' : reason }];
   });
 }

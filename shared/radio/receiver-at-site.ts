@@ -58,8 +58,9 @@ export class WeightingTables {
     const known = this.grids.get(byTone);
     if (known !== undefined) return known;
     const { audioCornerHz, bfo } = this.receiver;
+    const pitchHz = bfo === null || bfo.pitchHz === 0 ? USUAL_PITCH_HZ : bfo.pitchHz;
     const weighting = byTone
-      ? toneWeighting(this.selectivity, bfo?.pitchHz || USUAL_PITCH_HZ)
+      ? toneWeighting(this.selectivity, pitchHz)
       : programmeWeighting(
           this.selectivity,
           audioCornerHz,

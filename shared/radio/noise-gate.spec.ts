@@ -1,0 +1,53 @@
+import * as fc from 'fast-check';
+import { describe, expect, it } from 'vitest';
+
+import { plainCase, receivers, sites, stationLists } from '../../test/support/random-cases.ts';
+import { type BandScan, type Finding, type FindingSink } from './band-scan.ts';
+import { bandScans, WeightingTables } from './receiver-at-site.ts';
+import { ifSelectivity } from './selectivity.ts';
+import { Spectrum } from './spectrum.ts';
+
+/** Keeps what is heard. */
+class Heard implements FindingSink {
+  readonly takesHidden: boolean;
+  readonly found: string[] = [];
+
+  constructor(takesHidden: boolean) {
+    this.takesHidden = takesHidden;
+  }
+
+  take({ group, m, n, dialHz, heard }: Readonly<Finding>): void {
+    if (heard > 0) this.found.push(`${group}/${m}/${n}/${dialHz}/${heard}`);
+  }
+}
+
+function heard(scan: BandScan, ifHz: number, takesHidden: boolean): string[] {
+  const sink = new Heard(takesHidden);
+  scan.scan(ifHz, { maxM: 4, maxN: 3 }, sink);
+  return sink.found.sort();
+}
+
+describe('NoiseGate', () => {
+  it('never silences what the full computation lets be heard', () => {
+    fc.assert(
+      fc.property(receivers, sites, stationLists, (receiver, site, stations) => {
+        const { input } = plainCase({
+          receiver,
+          site,
+          stations,
+          period: 'night',
+          maxM: 4,
+          maxN: 3,
+        });
+        const spectrum = new Spectrum(input.stations, input.fields);
+        const selectivity = ifSelectivity(receiver.selectivity, receiver.ifHz);
+        const tables = new WeightingTables(receiver, selectivity, site.ituRegion, 4);
+
+        for (const scan of bandScans(receiver, site, input.raster, spectrum, tables)) {
+          expect(heard(scan, receiver.ifHz, false)).toEqual(heard(scan, receiver.ifHz, true));
+        }
+      }),
+      { numRuns: 60 },
+    );
+  }, 30_000);
+});
