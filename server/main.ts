@@ -22,7 +22,10 @@ function giveUp(reason: string): never {
 
 async function main(config: Config, log: Logger): Promise<void> {
   const database = connectDatabase(config.DATABASE_URL, config.DATABASE_CONNECTIONS, log);
-  const migrations = await migrate(database, config.DATABASE_URL);
+  const migrations = await migrate(database, config.DATABASE_URL).catch((error: unknown) => {
+    if (!(error instanceof Error && 'code' in error)) throw error;
+    return giveUp(`The database named by DATABASE_URL cannot be used: ${error.message}`);
+  });
   log.info({ migrations }, 'database ready');
 
   const services = createServices(database, config, log);
@@ -38,6 +41,7 @@ async function main(config: Config, log: Logger): Promise<void> {
     stopHousekeeping();
     await drain(server);
     await services.imports.settle();
+    await services.engine.close();
     await services.passwords.close();
     await database.close();
   });
