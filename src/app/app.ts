@@ -3,7 +3,7 @@ import {
   Component,
   DestroyRef,
   effect,
-  ElementRef,
+  type ElementRef,
   inject,
   signal,
   viewChild,

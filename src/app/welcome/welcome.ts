@@ -1,18 +1,16 @@
 import { ChangeDetectionStrategy, Component, computed, inject } from '@angular/core';
 import { MatButtonModule } from '@angular/material/button';
-import { Router, RouterLink } from '@angular/router';
 
 import { noiseField } from '../../../shared/radio/noise';
 import { BandStrip } from '../charts/band-strip/band-strip';
 import { loudness } from '../charts/band-strip/strip-layout';
 import { CandidateLane } from '../charts/candidate-lane/candidate-lane';
-import { OWN_MACHINE } from '../core/own-machine';
-import { Session } from '../core/session/session';
 import { FrequencyPipe } from '../ui/frequency-pipe';
 import { Loading } from '../ui/page-state/loading';
 import { ProblemNote } from '../ui/page-state/problem-note';
 import { lane, tellingStrip } from './answer';
 import { adviceWords, betterIf, verdictWords } from './answer-words';
+import { NextStep } from './next-step/next-step';
 import { ASSUMED_FIELD_DB, siteOf } from './trial';
 import { TrialFields } from './trial-fields';
 import { TrialStore } from './trial-store';
@@ -29,8 +27,8 @@ const NOISE_BANDWIDTH_HZ = 8000;
     FrequencyPipe,
     Loading,
     MatButtonModule,
+    NextStep,
     ProblemNote,
-    RouterLink,
     TrialFields,
   ],
   templateUrl: './welcome.html',
@@ -38,11 +36,8 @@ const NOISE_BANDWIDTH_HZ = 8000;
   changeDetection: ChangeDetectionStrategy.OnPush,
 })
 export class Welcome {
-  private readonly router = inject(Router);
   protected readonly store = inject(TrialStore);
-  protected readonly session = inject(Session);
 
-  protected readonly isOwnMachine = inject(OWN_MACHINE);
   protected readonly assumedDb = ASSUMED_FIELD_DB;
   /** Everything on the page, once all of it is there. */
   protected readonly answer = computed(() => {
@@ -63,16 +58,5 @@ export class Welcome {
   protected readonly noise = computed(() => {
     const trial = this.store.trial();
     return (hz: number) => (trial ? noiseField(siteOf(trial), hz, NOISE_BANDWIDTH_HZ) : null);
-  });
-  /** Where this set can be set up and kept. */
-  protected readonly setUp = computed(() => {
-    const trial = this.store.trial();
-    const path = '/receivers/new';
-    const queryParams = trial ? { type: trial.type.id, ifHz: trial.ifHz } : {};
-    return {
-      path,
-      queryParams,
-      url: this.router.createUrlTree([path], { queryParams }).toString(),
-    };
   });
 }

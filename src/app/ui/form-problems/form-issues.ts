@@ -32,9 +32,19 @@ export function controlIssues(control: AbstractControl, path = ''): FormIssue[] 
   return [
     ...own,
     ...Object.entries(control.controls).flatMap(([key, child]) =>
-      controlIssues(child as AbstractControl, path === '' ? key : `${path}.${key}`),
+      controlIssues(child, path === '' ? key : `${path}.${key}`),
     ),
   ];
+}
+
+/** Lets every control judge itself anew: messages put on it from outside are gone then. */
+export function revalidate(control: AbstractControl): void {
+  if (control instanceof FormGroup || control instanceof FormArray) {
+    Object.values(control.controls).forEach((child) => {
+      revalidate(child as AbstractControl);
+    });
+  }
+  control.updateValueAndValidity({ onlySelf: true, emitEvent: false });
 }
 
 /** What a contract objects to, as paths of the form. */

@@ -5,7 +5,7 @@ import {
   computed,
   DOCUMENT,
   effect,
-  ElementRef,
+  type ElementRef,
   inject,
   Injector,
   input,

@@ -3,7 +3,7 @@ import type { AbstractControl } from '@angular/forms';
 import type * as z from 'zod';
 
 import type { Problem } from '../../../../shared/contracts/problem';
-import { formIssues, type FormIssue, showIssues } from './form-issues';
+import { formIssues, type FormIssue, revalidate, showIssues } from './form-issues';
 
 /** A form's way to the server: what is wrong lands on its fields, wherever it was found. */
 export class Submission<S extends z.ZodType> {
@@ -29,9 +29,12 @@ export class Submission<S extends z.ZodType> {
    */
   async send<T>(value: unknown, call: (valid: z.output<S>) => Promise<T>): Promise<T | undefined> {
     if (this.busy()) return undefined;
-    this.form.updateValueAndValidity();
+    revalidate(this.form);
     const issues = formIssues(this.form, this.schema, value);
-    if (issues.length > 0) return this.object(issues);
+    if (issues.length > 0) {
+      this.object(issues);
+      return undefined;
+    }
 
     this.busy.set(true);
     try {
@@ -39,13 +42,14 @@ export class Submission<S extends z.ZodType> {
       this.found.set([]);
       return answer;
     } catch (error) {
-      return this.object(this.issuesOf(this.toProblem(error)));
+      this.object(this.issuesOf(this.toProblem(error)));
+      return undefined;
     } finally {
       this.busy.set(false);
     }
   }
 
-  private object(issues: readonly FormIssue[]): undefined {
+  private object(issues: readonly FormIssue[]): void {
     showIssues(this.form, issues);
     this.found.set(issues);
   }

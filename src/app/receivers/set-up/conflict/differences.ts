@@ -75,7 +75,7 @@ function fieldWords(path: string): string {
 
 function valueWords(path: string, value: unknown): string {
   if (value === undefined) return '–';
-  if (typeof value !== 'number') return String(value as string | boolean);
+  if (typeof value !== 'number') return String(value);
   if (path.endsWith('Hz')) return formatFrequency(value);
   return path.includes('Db') ? `${value} dB` : String(value);
 }

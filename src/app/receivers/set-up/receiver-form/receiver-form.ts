@@ -8,11 +8,11 @@ import {
   type OnInit,
   output,
   signal,
+  viewChild,
 } from '@angular/core';
 import { takeUntilDestroyed, toSignal } from '@angular/core/rxjs-interop';
 import { ReactiveFormsModule } from '@angular/forms';
 import { MatButtonModule } from '@angular/material/button';
-import { MatExpansionModule } from '@angular/material/expansion';
 import { MatFormFieldModule } from '@angular/material/form-field';
 import { MatInputModule } from '@angular/material/input';
 import { RouterLink } from '@angular/router';
@@ -28,21 +28,15 @@ import { Submission } from '../../../ui/form-problems/submission';
 import { QuantityInput } from '../../../ui/quantity/quantity-input';
 import { BandRows } from '../band-rows/band-rows';
 import { BandSketch } from '../band-sketch/band-sketch';
-import { BfoFields } from '../bfo-fields/bfo-fields';
-import { CircuitFields } from '../circuit-fields/circuit-fields';
 import { Conflict } from '../conflict/conflict';
-import { FilterFields } from '../filter-fields/filter-fields';
-import { MixerFields } from '../mixer-fields/mixer-fields';
-import { SelectivityFields } from '../selectivity-fields/selectivity-fields';
+import { MorePanels } from '../more-panels/more-panels';
 import { SetTypeChoice } from '../set-type-choice/set-type-choice';
 import { SetUpStore } from '../set-up-store';
-import { TrapFields } from '../trap-fields/trap-fields';
 import { applyCircuits, applySetType } from './apply-set-type';
 import { receiverControls } from './controls';
 import { fieldsOf, receiverOf, writeFields } from './fields';
 import { NoticeList } from './notice-list';
 import { notices } from './notices';
-import { isUntouched, type Panel, panelOf, panelsOf, summaries } from './panels';
 import { ReceiverDraftKeeper } from './receiver-draft';
 
 const PAUSE_MS = 400;
@@ -53,24 +47,18 @@ const PAUSE_MS = 400;
   imports: [
     BandRows,
     BandSketch,
-    BfoFields,
-    CircuitFields,
     Conflict,
-    FilterFields,
     FormProblems,
     MatButtonModule,
-    MatExpansionModule,
     MatFormFieldModule,
     MatInputModule,
-    MixerFields,
+    MorePanels,
     NoticeList,
     ProblemTextPipe,
     QuantityInput,
     ReactiveFormsModule,
     RouterLink,
-    SelectivityFields,
     SetTypeChoice,
-    TrapFields,
   ],
   templateUrl: './receiver-form.html',
   styleUrl: './receiver-form.scss',
@@ -89,6 +77,8 @@ export class ReceiverForm implements OnInit {
 
   readonly kept = output<StoredReceiver>();
 
+  private readonly more = viewChild.required(MorePanels);
+
   protected readonly form = receiverControls();
   protected readonly submission = new Submission(this.form, newReceiver, toProblem);
   protected readonly chosenType = signal<SetType | null>(null);
@@ -105,17 +95,7 @@ export class ReceiverForm implements OnInit {
     ),
     { requireSync: true },
   );
-  protected readonly panels: readonly { name: Panel; title: string }[] = [
-    { name: 'selectivity', title: $localize`Selectivity and audio` },
-    { name: 'circuits', title: $localize`Tuned circuits` },
-    { name: 'mixer', title: $localize`Stray pick-up and mixer` },
-    { name: 'filter', title: $localize`Fixed filter` },
-    { name: 'bfo', title: $localize`BFO` },
-    { name: 'trap', title: $localize`Wave trap` },
-  ];
   protected readonly notices = computed(() => notices(this.fields()));
-  protected readonly summaries = computed(() => summaries(this.fields()));
-  protected readonly opened = linkedSignal(() => new Set(panelsOf(this.submission.issues())));
   protected readonly isTypeAsked = linkedSignal(() => this.receiver() === undefined);
   protected readonly isReadOnly = computed(() => this.receiver()?.editable === false);
 
@@ -154,23 +134,8 @@ export class ReceiverForm implements OnInit {
     if (type) applySetType(this.form, type);
   }
 
-  protected describe(panel: Panel): string {
-    const summary = this.summaries()[panel];
-    return this.chosenType() !== null && isUntouched(panel, this.form)
-      ? $localize`${summary}:summary: (typical: change what you know)`
-      : summary;
-  }
-
-  protected setOpen(panel: Panel, isOpen: boolean): void {
-    const panels = new Set(this.opened());
-    if (isOpen) panels.add(panel);
-    else panels.delete(panel);
-    this.opened.set(panels);
-  }
-
   protected reveal(path: string): void {
-    const panel = panelOf(path);
-    if (panel) this.setOpen(panel, true);
+    this.more().reveal(path);
   }
 
   protected async save(): Promise<void> {

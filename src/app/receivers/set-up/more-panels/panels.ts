@@ -1,6 +1,6 @@
 import type { FormIssue } from '../../../ui/form-problems/form-issues';
 import { formatFrequency } from '../../../ui/frequency-pipe';
-import type { ReceiverControls, ReceiverFields } from './controls';
+import type { ReceiverControls, ReceiverFields } from '../receiver-form/controls';
 
 /** The parts of the set-up that open on demand. */
 export type Panel = 'selectivity' | 'circuits' | 'mixer' | 'filter' | 'bfo' | 'trap';
