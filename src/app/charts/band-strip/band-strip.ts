@@ -67,8 +67,8 @@ export class BandStrip {
   protected readonly columns = stripColumns();
   private readonly isNarrow = computed(() => this.width() < NARROW);
   protected readonly frame = computed(() =>
-    frame(this.width(), STRIP_HEIGHT + 20, {
-      top: 18,
+    frame(this.width(), STRIP_HEIGHT + 28, {
+      top: 26,
       right: this.isNarrow() ? 6 : 16,
       bottom: 2,
       left: this.isNarrow() ? 26 : 36,

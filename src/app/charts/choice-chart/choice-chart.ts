@@ -102,7 +102,7 @@ export class ChoiceChart {
     stems(this.heard(), this.x(), this.y(), this.rejection(), this.trialHz()),
   );
   protected readonly labels = computed(() =>
-    stemLabels(this.stems(), this.frame().innerWidth, this.isNarrow(), []),
+    stemLabels(this.stems(), this.frame().innerWidth, this.isNarrow()),
   );
   protected readonly passband = computed(() =>
     passbandPath(this.shown(), this.x(), this.y(), this.rejection(), this.trialHz()),

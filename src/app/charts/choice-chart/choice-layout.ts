@@ -1,7 +1,6 @@
 import { line, type ScaleLinear, scaleLinear } from 'd3';
 
-import type { Box, PlacedLabel } from '../place-labels';
-import { placeLabels } from '../place-labels';
+import { type PlacedLabel, placeLabels, type Spot, textWidth } from '../place-labels';
 import { kilohertz } from '../readings';
 import { type Window } from '../zoom-window';
 
@@ -76,28 +75,42 @@ export function stems(
     });
 }
 
+/** Half the size of a stem's head with its outline. */
+const HEAD = 5;
+
+/** Over the head, else beside it, else higher up. */
+const spotsAround = (x: number, y: number, aside: number): Spot[] => [
+  { x, y: y - 14 },
+  { x: x + aside, y },
+  { x: x - aside, y },
+  { x, y: y - 28 },
+];
+
 /** Names at the heads of the strongest stems, none over another. */
 export function stemLabels(
   drawn: readonly Stem[],
   width: number,
   isNarrow: boolean,
-  taken: readonly Box[],
 ): PlacedLabel[] {
   const strongest = [...drawn]
     .sort((a, b) => b.station.fieldDb - a.station.fieldDb)
     .slice(0, isNarrow ? 8 : LABELLED);
   const requests = strongest.map(({ id, station, x, y }) => {
     const numeral = kilohertz(station.frequencyHz);
+    const text = isNarrow ? numeral : `${numeral} ${station.name}`;
     return {
       id,
-      text: isNarrow ? numeral : `${numeral} ${station.name}`,
+      text,
       weight: station.fieldDb,
-      spots: [
-        { x, y: y - 13 },
-        { x, y: y - 27 },
-      ],
+      spots: spotsAround(x, y, textWidth(text) / 2 + HEAD + 4),
     };
   });
+  const taken = drawn.map(({ x, y }) => ({
+    left: x - HEAD,
+    right: x + HEAD,
+    top: y - HEAD,
+    bottom: y + HEAD,
+  }));
   return placeLabels(requests, [0, width], taken);
 }
 

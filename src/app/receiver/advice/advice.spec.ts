@@ -80,7 +80,7 @@ describe('the advice', () => {
     const uneven = { ...between, windowHz: { low: 551_000, high: 555_740 } };
     const { text } = advise(grounds({ present: onChannel, candidates: [uneven], ranking: '' }));
 
-    expect(text).toContain('Set it to 555 kHz (from 551 to 555.7)');
+    expect(text).toContain('Set it to 555 kHz (breakthrough stays within 3 dB from 551 to 555.7)');
   });
 
   it('speaks of the whole when breakthrough is not what is gained', () => {

@@ -84,7 +84,7 @@ function target({ ifHz, windowHz }: Candidate): string {
   const round = (hz: number) => kilohertz(Math.floor(hz / 100) * 100);
   return Math.abs(below - above) <= 200
     ? $localize`${here}:frequency: ± ${round(Math.min(below, above))}:tolerance: kHz`
-    : $localize`${here}:frequency: kHz (from ${round(windowHz.low)}:low: to ${round(windowHz.high)}:high:)`;
+    : $localize`${here}:frequency: kHz (breakthrough stays within 3 dB from ${round(windowHz.low)}:low: to ${round(windowHz.high)}:high:)`;
 }
 
 function gainText({ period }: AdviceGrounds, best: Candidate, gain: number): string {

@@ -38,7 +38,7 @@ describe('the verdict in words', () => {
     const emptyDial = { dialHz: 612_000, station: 1, overNoiseDb: 29.1 };
 
     expect(words(verdict({ emptyDial }))).toContain(
-      'On an empty dial Alder is heard at 612 kHz, 29 dB over the noise.',
+      'On an empty dial Alder is heard at 612\u00a0kHz, 29 dB over the noise.',
     );
   });
 

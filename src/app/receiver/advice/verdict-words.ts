@@ -1,6 +1,7 @@
 import type { Assessment } from '../../../../shared/contracts/assessment';
 import type { Period } from '../../../../shared/radio/site';
-import { kilohertz, whole } from '../../charts/readings';
+import { whole } from '../../charts/readings';
+import { formatFrequency } from '../../ui/frequency-pipe';
 
 type Verdict = Assessment['verdict'];
 
@@ -41,5 +42,5 @@ function compared(verdict: Verdict, present: Verdict | undefined): string {
 function empty({ emptyDial }: Verdict, nameOf: (station: number) => string): string {
   if (!emptyDial) return $localize`An empty dial is silent but for the noise.`;
   const { station, dialHz, overNoiseDb } = emptyDial;
-  return $localize`On an empty dial ${nameOf(station)}:station: is heard at ${kilohertz(dialHz)}:dial: kHz, ${whole(overNoiseDb)}:level: dB over the noise.`;
+  return $localize`On an empty dial ${nameOf(station)}:station: is heard at ${formatFrequency(dialHz)}:dial:, ${whole(overNoiseDb)}:level: dB over the noise.`;
 }

@@ -30,7 +30,8 @@ const candidate: Candidate = {
   capacitanceChange: 0.0181,
   trackingCostDb: null,
 };
-const columns = candidateColumns('night');
+const withBfo = { bfo: { centreHz: 560_000, rangeHz: 6000, pitchHz: 1000 } };
+const columns = candidateColumns('night', withBfo);
 
 describe('the columns of the candidates', () => {
   it('show every term apart, as the answer gives it', () => {
@@ -51,8 +52,12 @@ describe('the columns of the candidates', () => {
     });
   });
 
+  it('speak of the BFO only where there is one', () => {
+    expect(candidateColumns('night', { bfo: null }).map(({ key }) => key)).not.toContain('bfo');
+  });
+
   it('leave out what the period was not asked for', () => {
-    const day = candidateColumns('day').find(({ key }) => key === 'change');
+    const day = candidateColumns('day', withBfo).find(({ key }) => key === 'change');
 
     expect(day?.text(candidate)).toBe('–');
   });

@@ -1,4 +1,5 @@
 import type { Candidate } from '../../../../shared/contracts/candidates';
+import type { Receiver } from '../../../../shared/radio/receiver';
 import type { Period } from '../../../../shared/radio/site';
 import { change, kilohertz, percent, tenths } from '../../charts/readings';
 
@@ -47,8 +48,17 @@ function changeText(candidate: Candidate, period: Period): string {
   return change(breakthroughChangeDb) + sigma;
 }
 
-/** Every term in its own column; ratios and changes are those of the period. */
-export const candidateColumns = (period: Period): readonly CandidateColumn[] => [
+/**
+ * Every term in its own column; ratios and changes are those of the period. A set without a BFO
+ * has none to move.
+ */
+export const candidateColumns = (
+  period: Period,
+  { bfo }: Pick<Receiver, 'bfo'>,
+): readonly CandidateColumn[] =>
+  allColumns(period).filter(({ key }) => key !== 'bfo' || bfo !== null);
+
+const allColumns = (period: Period): readonly CandidateColumn[] => [
   {
     key: 'deficit',
     label: $localize`Left to be desired, dB`,

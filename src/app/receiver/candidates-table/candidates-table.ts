@@ -3,6 +3,7 @@ import { MatButtonModule } from '@angular/material/button';
 import { MatSortModule, type Sort } from '@angular/material/sort';
 
 import type { CandidatesAnswer } from '../../../../shared/contracts/candidates';
+import type { Receiver } from '../../../../shared/radio/receiver';
 import type { Period } from '../../../../shared/radio/site';
 import { NARROW } from '../../charts/frame';
 import { observeWidth } from '../../charts/observe-width';
@@ -21,6 +22,7 @@ const FIRST = 8;
 })
 export class CandidatesTable {
   readonly answer = input.required<CandidatesAnswer>();
+  readonly receiver = input.required<Receiver>();
   readonly period = input.required<Period>();
   readonly trialHz = input.required<number>();
   readonly taken = output<number>();
@@ -30,7 +32,7 @@ export class CandidatesTable {
   private readonly isWhole = signal(false);
 
   protected readonly isNarrow = computed(() => this.width() < NARROW);
-  protected readonly columns = computed(() => candidateColumns(this.period()));
+  protected readonly columns = computed(() => candidateColumns(this.period(), this.receiver()));
   private readonly sorted = computed(() => {
     const { active, direction } = this.sort();
     return sortedCandidates(this.answer().candidates, this.columns(), active, direction);

@@ -17,8 +17,8 @@ export const planVerdicts = ({ results }: Plan): string[] =>
   );
 
 /** Every term of the candidates, for the period the plan was judged in. */
-export const planTerms = ({ results, period }: Plan): PlanTerm[] =>
-  candidateColumns(period).map(({ label, text }) => ({
+export const planTerms = ({ results, period, receiver }: Plan): PlanTerm[] =>
+  candidateColumns(period, receiver).map(({ label, text }) => ({
     label,
     present: text(results.present),
     chosen: text(results.chosen),

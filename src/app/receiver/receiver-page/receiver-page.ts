@@ -1,4 +1,11 @@
-import { ChangeDetectionStrategy, Component, computed, inject, signal } from '@angular/core';
+import {
+  ChangeDetectionStrategy,
+  Component,
+  computed,
+  inject,
+  signal,
+  ViewContainerRef,
+} from '@angular/core';
 import { MatButtonModule } from '@angular/material/button';
 import { MatDialog } from '@angular/material/dialog';
 import { RouterLink } from '@angular/router';
@@ -37,10 +44,16 @@ import { ReceiverStore } from './receiver-store';
 })
 export class ReceiverPage {
   private readonly dialog = inject(MatDialog);
+  private readonly viewContainerRef = inject(ViewContainerRef);
   protected readonly store = inject(ReceiverStore);
 
   protected readonly kept = signal<Plan | undefined>(undefined);
-  private readonly remotes = [this.store.receiver, this.store.sites, this.store.editions];
+  private readonly remotes = [
+    this.store.receiver,
+    this.store.sites,
+    this.store.editions,
+    this.store.regions,
+  ];
   protected readonly problem = computed(() =>
     this.remotes.map(({ problem }) => problem()).find((each) => each !== undefined),
   );
@@ -68,6 +81,7 @@ export class ReceiverPage {
     if (!data) return;
     const opened = this.dialog.open<KeepPlan, PlanToKeep, Plan>(KeepPlan, {
       data,
+      viewContainerRef: this.viewContainerRef,
       width: '32rem',
     });
     const kept = await firstValueFrom(opened.afterClosed());

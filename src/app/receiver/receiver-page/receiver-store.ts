@@ -7,7 +7,7 @@ import { firstValueFrom } from 'rxjs';
 import { pageOf } from '../../../../shared/contracts/paging';
 import { type Plan, plan, type PlanInput } from '../../../../shared/contracts/plan';
 import { bareReceiver, storedReceiver } from '../../../../shared/contracts/receiver';
-import { edition, region } from '../../../../shared/contracts/region';
+import { type Edition, edition, type Region, region } from '../../../../shared/contracts/region';
 import { type NamedSite, type StoredSite, storedSite } from '../../../../shared/contracts/site';
 import { defaultRaster } from '../../../../shared/radio/raster';
 import type { Period } from '../../../../shared/radio/site';
@@ -40,10 +40,7 @@ export class ReceiverStore implements TrialInputs {
     if (source?.kind !== 'edition') return undefined;
     return this.editions.value()?.items.find(({ id }) => id === source.editionId);
   });
-  private readonly region = remote(() => {
-    const listed = this.edition();
-    return listed && `/api/regions/${listed.regionId}`;
-  }, region);
+  readonly regions = remote(() => `/api/regions?pageSize=${MOST}`, pageOf(region));
 
   readonly site = computed(() => {
     const { siteId } = this.address();
@@ -61,7 +58,7 @@ export class ReceiverStore implements TrialInputs {
 
   private readonly raster = computed(() => {
     const site = this.site();
-    if (this.address().source?.kind === 'edition') return this.region.value()?.raster;
+    if (this.address().source?.kind === 'edition') return this.regionOf(this.edition())?.raster;
     return site && defaultRaster(site.ituRegion);
   });
 
@@ -101,17 +98,21 @@ export class ReceiverStore implements TrialInputs {
     return plan.parse(await firstValueFrom(this.http.post(address, draft)));
   }
 
-  /** What the address does not say and can be filled in: the first site, the newest edition. */
+  private regionOf(listed: Edition | undefined): Region | undefined {
+    return this.regions.value()?.items.find(({ id }) => id === listed?.regionId);
+  }
+
+  /** What the address does not say: the first site, and the newest list of its ITU Region. */
   private missing(): Partial<TrialAddress> {
-    const sites = this.sites.value()?.items;
     const editions = this.editions.value()?.items;
-    const first = sites?.[0];
-    if (!first || !editions) return {};
-    const source: StationSource = editions[0]
-      ? { kind: 'edition', editionId: editions[0].id }
+    const site = this.site() ?? this.sites.value()?.items[0];
+    if (!site || !editions || !this.regions.value()) return {};
+    const near = editions.find((each) => this.regionOf(each)?.ituRegion === site.ituRegion);
+    const source: StationSource = near
+      ? { kind: 'edition', editionId: near.id }
       : { kind: 'every-channel', fieldDb: ASSUMED_FIELD_DB };
     return {
-      ...(this.address().siteId === undefined ? { siteId: first.id } : {}),
+      ...(this.address().siteId === undefined ? { siteId: site.id } : {}),
       ...(this.address().source === undefined ? { source } : {}),
     };
   }
