@@ -1,3 +1,4 @@
+import compression from 'compression';
 import express, { type Express } from 'express';
 import type { Sequelize } from 'sequelize';
 
@@ -57,7 +58,7 @@ export function createApp(
 ): Express {
   const app = express();
   app.disable('x-powered-by').disable('etag').set('trust proxy', config.TRUSTED_PROXIES);
-  app.use(requestLog(log), securityHeaders(config), health(database));
+  app.use(requestLog(log), securityHeaders(config), health(database), compression());
 
   app.use('/api', noStore, xsrf(config), authentication(sessionCookie(config), services.sessions));
   const routes = withDescription(apiRoutes(services), sessionCookie(config));
