@@ -5,11 +5,12 @@ import type { Sequelize } from 'sequelize';
 import { Accounts } from './accounts/accounts.ts';
 import { Passwords } from './accounts/passwords.ts';
 import { Assessments } from './assessments/assessments.ts';
+import { Engine } from './computing/engine.ts';
+import { ListsAtSites } from './computing/lists-at-sites.ts';
 import type { Config } from './config.ts';
 import { EditionWriter } from './editions/edition-writer.ts';
 import { Editions } from './editions/editions.ts';
 import { FieldStrengths } from './field-strengths/field-strengths.ts';
-import { ListsAtSites } from './field-strengths/lists-at-sites.ts';
 import { Idempotency } from './http/idempotency.ts';
 import { Limits } from './http/limits.ts';
 import { Imports } from './imports/imports.ts';
@@ -36,7 +37,8 @@ export function createServices(database: Sequelize, config: Config, log: Logger)
   const regions = new Regions(database);
   const editions = new Editions(database, regions);
   const lists = new ListsAtSites(editions);
-  const assessments = new Assessments(lists);
+  const engine = new Engine();
+  const assessments = new Assessments(lists, engine);
   const receivers = new Receivers(database, accounts);
   const sites = new Sites(database);
   const uploads = new Uploads(join(config.DATA_DIR, 'uploads'));
@@ -55,7 +57,8 @@ export function createServices(database: Sequelize, config: Config, log: Logger)
     editions,
     uploads,
     imports: new Imports(database, regions, new EditionWriter(database), uploads, log),
-    fieldStrengths: new FieldStrengths(lists),
+    fieldStrengths: new FieldStrengths(lists, engine),
+    engine,
     assessments,
     plans: new Plans(database, { receivers, sites, editions, assessments, people: accounts }),
   };

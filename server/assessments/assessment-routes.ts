@@ -1,5 +1,6 @@
 import { assessment, assessmentRequest } from '../../shared/contracts/assessment.ts';
 import { candidatesAnswer, candidatesRequest } from '../../shared/contracts/candidates.ts';
+import { sendComputed, whenClientLeaves } from '../http/computed-answer.ts';
 import { route, type Route } from '../http/route.ts';
 import type { Assessments } from './assessments.ts';
 
@@ -13,7 +14,10 @@ export const assessmentRoutes = (assessments: Assessments): Route[] => [
     answer: assessment,
     computing: true,
     faults: [404, 429],
-    handle: ({ actor, body }) => assessments.assess(actor, body),
+    handle: async ({ actor, body, response }) => {
+      const signal = whenClientLeaves(response);
+      sendComputed(response, await assessments.assess(actor, body, signal));
+    },
   }),
   route({
     method: 'post',
@@ -24,6 +28,9 @@ export const assessmentRoutes = (assessments: Assessments): Route[] => [
     answer: candidatesAnswer,
     computing: true,
     faults: [404, 429],
-    handle: ({ actor, body }) => assessments.judgeCandidates(actor, body),
+    handle: async ({ actor, body, response }) => {
+      const signal = whenClientLeaves(response);
+      sendComputed(response, await assessments.judgeCandidates(actor, body, signal));
+    },
   }),
 ];

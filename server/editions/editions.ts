@@ -64,26 +64,23 @@ export class Editions {
     return (await this.find(actor, id)).region.raster;
   }
 
-  /** Every station of an edition as the engine computes with it, ascending by frequency. */
+  /** Every station of an edition as the engine computes with it, in the order of the list. */
   async everyStation(id: number): Promise<Station[]> {
-    const rows = await StationModel.findAll({
-      attributes: [
-        'id',
-        'name',
-        'frequencyHz',
-        'latitude',
-        'longitude',
-        'powerDayW',
-        'powerNightW',
-      ],
-      where: { editionId: id },
-      order: [
-        ['frequencyHz', 'ASC'],
-        ['id', 'ASC'],
-      ],
-      raw: true,
-    });
-    return rows.map((row) => ({ ...row, fieldDb: null }));
+    const stations: Station[] = [];
+    let after = 0;
+    for (;;) {
+      // Some thousands at a time: reading a long list must not hold up other requests.
+      const rows = await StationModel.findAll({
+        attributes: [...COMPUTED_WITH],
+        where: { editionId: id, id: { [Op.gt]: after } },
+        order: [['id', 'ASC']],
+        limit: READ_AT_ONCE,
+        raw: true,
+      });
+      for (const row of rows) stations.push(toComputedWith(row));
+      if (rows.length < READ_AT_ONCE) return stations;
+      after = rows.at(-1)?.id ?? after;
+    }
   }
 
   /** The edition with the region it belongs to; another workshop's is not found. */
@@ -94,6 +91,28 @@ export class Editions {
     return { row, region };
   }
 }
+
+const READ_AT_ONCE = 5000;
+const COMPUTED_WITH = [
+  'id',
+  'name',
+  'frequencyHz',
+  'latitude',
+  'longitude',
+  'powerDayW',
+  'powerNightW',
+] as const;
+
+const toComputedWith = (row: StationModel): Station => ({
+  id: row.id,
+  name: row.name,
+  frequencyHz: row.frequencyHz,
+  latitude: row.latitude,
+  longitude: row.longitude,
+  powerDayW: row.powerDayW,
+  powerNightW: row.powerNightW,
+  fieldDb: null,
+});
 
 async function page(
   regions: ReadonlyMap<number, Region>,

@@ -2,6 +2,7 @@ import {
   fieldStrengthsAnswer,
   fieldStrengthsRequest,
 } from '../../shared/contracts/field-strengths.ts';
+import { sendComputed, whenClientLeaves } from '../http/computed-answer.ts';
 import { route, type Route } from '../http/route.ts';
 import type { FieldStrengths } from './field-strengths.ts';
 
@@ -15,6 +16,9 @@ export const fieldStrengthRoutes = (fieldStrengths: Pick<FieldStrengths, 'comput
     answer: fieldStrengthsAnswer,
     computing: true,
     faults: [404, 429],
-    handle: ({ actor, body }) => fieldStrengths.compute(actor, body),
+    handle: async ({ actor, body, response }) => {
+      const signal = whenClientLeaves(response);
+      sendComputed(response, await fieldStrengths.compute(actor, body, signal));
+    },
   }),
 ];

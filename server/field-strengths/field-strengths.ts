@@ -1,28 +1,25 @@
-import type {
-  FieldStrengthsAnswer,
-  FieldStrengthsRequest,
-} from '../../shared/contracts/field-strengths.ts';
+import type { FieldStrengthsRequest } from '../../shared/contracts/field-strengths.ts';
+import type { Computed, Engine } from '../computing/engine.ts';
+import type { Tasks } from '../computing/engine-tasks.ts';
+import type { ListsAtSites } from '../computing/lists-at-sites.ts';
 import type { Actor } from '../http/actor.ts';
-import type { ListsAtSites } from './lists-at-sites.ts';
 
 /** Answers how strong each station of a list is at a site. */
 export class FieldStrengths {
   private readonly lists: Pick<ListsAtSites, 'find'>;
+  private readonly engine: Pick<Engine, 'run'>;
 
-  constructor(lists: Pick<ListsAtSites, 'find'>) {
+  constructor(lists: Pick<ListsAtSites, 'find'>, engine: Pick<Engine, 'run'>) {
     this.lists = lists;
+    this.engine = engine;
   }
 
   async compute(
     actor: Actor | undefined,
     request: FieldStrengthsRequest,
-  ): Promise<FieldStrengthsAnswer> {
+    signal?: AbortSignal,
+  ): Promise<Computed<Tasks['fieldStrengths']['answers']>> {
     const list = await this.lists.find(actor, request);
-    const fields = list.fields(request.period).map((field, index) => ({
-      ...field,
-      name: list.stations[index]?.name ?? '',
-      frequencyHz: list.stations[index]?.frequencyHz ?? 0,
-    }));
-    return { fields };
+    return this.engine.run('fieldStrengths', { list, period: request.period }, signal);
   }
 }

@@ -6,13 +6,14 @@ import type { SiteDraft } from '../../shared/contracts/site.ts';
 import type { Assessment } from '../../shared/radio/assessment.ts';
 import type { Candidates } from '../../shared/radio/candidates.ts';
 import type { Period } from '../../shared/radio/site.ts';
+import type { Computed } from '../computing/engine.ts';
 import type { Actor } from '../http/actor.ts';
 import { InvalidError } from '../http/errors.ts';
 
 /** What judges receivers. */
 export interface Judge {
-  assess(actor: Actor, request: AssessmentRequest): Promise<Assessment>;
-  judgeCandidates(actor: Actor, request: CandidatesRequest): Promise<Candidates>;
+  assess(actor: Actor, request: AssessmentRequest): Promise<Computed<Assessment>>;
+  judgeCandidates(actor: Actor, request: CandidatesRequest): Promise<Computed<Candidates>>;
 }
 
 /** What a plan is judged from. */
@@ -31,7 +32,7 @@ export async function judgePlan(
   const { ifHz } = draft;
   const source = sourceOf(draft);
   const realigned = realign(receiver, ifHz);
-  const { present, candidates } = await judge.judgeCandidates(actor, {
+  const judged = await judge.judgeCandidates(actor, {
     receiver,
     site,
     ...source,
@@ -40,9 +41,10 @@ export async function judgePlan(
     toHz: ifHz,
     stepHz: 1,
   });
+  const { present, candidates } = judged.read();
   const verdict = async (period: Period) => {
     const request = assessmentRequest.parse({ receiver: realigned, site, ...source, period });
-    return (await judge.assess(actor, request)).verdict;
+    return (await judge.assess(actor, request)).read().verdict;
   };
   return planResults.parse({
     present,

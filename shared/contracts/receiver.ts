@@ -13,8 +13,11 @@ import {
   spanHz,
 } from './quantities.ts';
 
+/** Width of an IF amplifier; a bound also on what judging it costs. */
+const ifWidthHz = spanHz.max(1_000_000, 'Give a width of 1 MHz or less.');
+
 const widths = z
-  .strictObject({ kind: z.literal('widths'), b6Hz: spanHz, b60Hz: spanHz })
+  .strictObject({ kind: z.literal('widths'), b6Hz: ifWidthHz, b60Hz: ifWidthHz })
   .refine(({ b6Hz, b60Hz }) => b60Hz > b6Hz, {
     path: ['b60Hz'],
     error: 'The width at -60 dB must be larger than the width at -6 dB.',

@@ -170,6 +170,18 @@ describe('POST /api/if-candidates', () => {
     expect(ranking).not.toBe('');
   });
 
+  it('says where an oscillator below the signal would reach zero', async () => {
+    const receiver = sentReceiver({ ifRange: 0.5, bands: bands({ oscillator: 'below' }) });
+    const request = asked({ receiver, fromHz: 540_000, toHz: 560_000, stepHz: 10_000 });
+
+    const { body } = await visitor.post('/api/if-candidates', request).expect(200);
+
+    const { candidates } = candidatesAnswer.parse(body);
+    const within = candidates.filter(({ reachable }) => reachable.ok).map(({ ifHz }) => ifHz);
+    expect(within).toEqual([540_000]);
+    expect(candidates[1]?.reachable.reason).toContain('would reach zero');
+  });
+
   it('takes several cases, each from its own source', async () => {
     const cases = [
       { site: SITE, editionId },
@@ -188,13 +200,6 @@ describe('POST /api/if-candidates', () => {
     ['toHz', { toHz: 400_000 }],
     ['site', { site: undefined }],
     ['cases', { cases: [{ site: BARE_SITE, everyChannelDb: 60 }] }],
-    [
-      'toHz',
-      {
-        toHz: 560_000,
-        receiver: sentReceiver({ bands: bands({ oscillator: 'below' }) }),
-      },
-    ],
     [
       'cases.0.site.latitude',
       {

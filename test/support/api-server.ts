@@ -74,6 +74,7 @@ export async function startApiServer(
       server.closeAllConnections();
       await new Promise((resolve) => server.close(resolve));
       await services.imports.settle();
+      await services.engine.close();
       await services.passwords.close();
       await database.close();
       await drop();

@@ -77,10 +77,9 @@ export async function importList(
 export async function rowsOf(server: ApiServer, tableAndCondition: string): Promise<number> {
   const connection = await createConnection(server.databaseUrl);
   try {
-    const [row] = (await connection.query(`SELECT COUNT(*) AS n FROM ${tableAndCondition}`)) as [
-      { n: bigint },
-    ];
-    return Number(row.n);
+    const sql = `SELECT COUNT(*) AS n FROM ${tableAndCondition}`;
+    const [row] = await connection.query<{ n: bigint }[]>(sql);
+    return Number(row?.n);
   } finally {
     await connection.end();
   }

@@ -28,6 +28,15 @@ export class BoundedCache<T> {
     this.load += weight;
   }
 
+  /** What is kept under the key, made where it is not. */
+  remember(key: string, weight: number, make: () => T): T {
+    const found = this.get(key);
+    if (found !== undefined) return found;
+    const value = make();
+    this.set(key, value, weight);
+    return value;
+  }
+
   private forget(key: string): void {
     this.load -= this.kept.get(key)?.weight ?? 0;
     this.kept.delete(key);

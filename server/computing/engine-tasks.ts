@@ -1,0 +1,100 @@
+import {
+  type Assessment,
+  type AssessmentInput,
+  assess as assessReceiver,
+} from '../../shared/radio/assessment.ts';
+import {
+  type Candidates,
+  type CandidatesInput,
+  judgeCandidates as judge,
+} from '../../shared/radio/candidates.ts';
+import {
+  type FieldStrength,
+  fieldStrengths as compute,
+} from '../../shared/radio/field-strength.ts';
+import type { Period, Site } from '../../shared/radio/site.ts';
+import type { RasterRange, Station } from '../../shared/radio/station.ts';
+import { BoundedCache } from './bounded-cache.ts';
+import { type StationColumns, unpackNames, unpackStations } from './station-columns.ts';
+
+/** The stations of a request and the site they are received at. */
+export interface ListAtSite {
+  readonly site: Site;
+  readonly raster: readonly RasterRange[];
+  readonly columns: StationColumns;
+  /** Names an edition, whose stations never change; null for a list that was sent. */
+  readonly editionId: number | null;
+}
+
+type FromList = 'site' | 'stations' | 'fields' | 'raster';
+
+/** What each computation takes and answers. */
+export interface Tasks {
+  assess: {
+    takes: { readonly list: ListAtSite; readonly ask: Omit<AssessmentInput, FromList> };
+    answers: Assessment;
+  };
+  judgeCandidates: {
+    takes: { readonly lists: readonly ListAtSite[]; readonly ask: Omit<CandidatesInput, 'cases'> };
+    answers: Candidates;
+  };
+  fieldStrengths: {
+    takes: { readonly list: ListAtSite; readonly period: Period };
+    answers: { readonly fields: readonly (FieldStrength & Named)[] };
+  };
+}
+
+interface Named {
+  readonly name: string;
+  readonly frequencyHz: number;
+}
+
+const KEPT_STATIONS = 300_000;
+const KEPT_FIELDS = 600_000;
+
+/** This thread's own: any other can make the same again. */
+const unpacked = new BoundedCache<Station[]>(KEPT_STATIONS);
+const computed = new BoundedCache<FieldStrength[]>(KEPT_FIELDS);
+
+export function assess({ list, ask }: Tasks['assess']['takes']): Assessment {
+  const stations = stationsOf(list);
+  const fields = fieldsOf(list, ask.period);
+  return assessReceiver({ ...ask, site: list.site, raster: list.raster, stations, fields });
+}
+
+export function judgeCandidates({ lists, ask }: Tasks['judgeCandidates']['takes']): Candidates {
+  const cases = lists.map((list) => ({
+    site: list.site,
+    raster: list.raster,
+    stations: stationsOf(list),
+    fields: Object.fromEntries(ask.periods.map((period) => [period, fieldsOf(list, period)])),
+  }));
+  return judge({ ...ask, cases });
+}
+
+export function fieldStrengths({
+  list,
+  period,
+}: Tasks['fieldStrengths']['takes']): Tasks['fieldStrengths']['answers'] {
+  const stations = stationsOf(list);
+  const names = unpackNames(list.columns);
+  const fields = fieldsOf(list, period).map((field, index) => ({
+    ...field,
+    name: names[index] ?? '',
+    frequencyHz: stations[index]?.frequencyHz ?? 0,
+  }));
+  return { fields };
+}
+
+function stationsOf({ editionId, columns }: ListAtSite): Station[] {
+  if (editionId === null) return unpackStations(columns);
+  return unpacked.remember(String(editionId), columns.count, () => unpackStations(columns));
+}
+
+function fieldsOf(list: ListAtSite, period: Period): FieldStrength[] {
+  const { editionId, site, columns } = list;
+  const make = () => compute(site, stationsOf(list), period);
+  if (editionId === null) return make();
+  const key = [editionId, site.latitude, site.longitude, site.ground, period].join();
+  return computed.remember(key, columns.count, make);
+}

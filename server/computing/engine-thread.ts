@@ -1,0 +1,21 @@
+import * as tasks from './engine-tasks.ts';
+
+/** A computation, and where it says that it has begun. */
+export interface Order {
+  readonly task: unknown;
+  readonly begun: Int32Array;
+}
+
+const encoder = new TextEncoder();
+
+/** Runs a computation and answers it as JSON, so that the event loop need not write it out. */
+function answered(compute: (task: never) => unknown) {
+  return ({ task, begun }: Order): Uint8Array => {
+    Atomics.store(begun, 0, 1);
+    return encoder.encode(JSON.stringify(compute(task as never)));
+  };
+}
+
+export const assess = answered(tasks.assess);
+export const judgeCandidates = answered(tasks.judgeCandidates);
+export const fieldStrengths = answered(tasks.fieldStrengths);
