@@ -10,6 +10,7 @@ import { NoiseGate } from './noise-gate.ts';
 import { mixerLevel, signalOrderLevel } from './product-levels.ts';
 import type { Receiver } from './receiver.ts';
 import { StillSettings } from './still-settings.ts';
+import { tuningOf } from './tuning.ts';
 
 /** Field at which `signalToOscillatorDb` is stated, dB(uV/m). */
 const REFERENCE_FIELD_DB = 80;
@@ -59,6 +60,8 @@ export class BandScan {
   private readonly still: StillSettings;
   private readonly gate: NoiseGate;
   private readonly settings: DialSettings;
+  /** IF for which the rows of the dial are tuned. */
+  private alignedHz = NaN;
   /** Loss of the terms that do not follow the dial, for each group. */
   private readonly fixedDb: Float64Array;
   private readonly finding: Finding = {
@@ -107,7 +110,7 @@ export class BandScan {
     const { settings } = this;
     const { hz } = this.dial.spectrum;
     const levelDb = this.productLevelDb(m, n);
-    const gate = sink.takesHidden ? null : this.gate.forProduct(n, levelDb);
+    const gate = sink.takesHidden || this.dial.isTracked ? null : this.gate.forProduct(n, levelDb);
     const [lowest, highest] = settings.stationsWithin(m, n, meeting);
     for (let group = this.dial.spectrum.firstFrom(lowest); group < hz.length; group++) {
       const stationHz = hz[group] ?? NaN;
@@ -145,6 +148,7 @@ export class BandScan {
 
   /** The part of `scan` that does not move with the dial: m = 0. */
   scanBreakthrough(ifHz: number, maxN: number, sink: FindingSink): void {
+    this.moveTo(ifHz);
     const { spectrum, reachHz } = this.dial;
     for (let n = 1; n <= maxN; n++) {
       const levelDb = this.productLevelDb(0, n);
@@ -160,9 +164,12 @@ export class BandScan {
     }
   }
 
-  /** Forgets what depends on where the circuits are tuned. */
-  retuned(): void {
+  /** Aligns the set to an IF: with tracking data the signal circuits move a little. */
+  private moveTo(ifHz: number): void {
+    if (this.dial.band.tracking === null || this.alignedHz === ifHz) return;
+    this.dial.retune(tuningOf(this.dial.band, this.receiver.ifHz, ifHz).tuning);
     this.still.forget();
+    this.alignedHz = ifHz;
   }
 
   /** What the mixer adds to `n g`: `H_m - H_h + K_n + (n - 1)(r - 80)`. */

@@ -23,6 +23,7 @@ import { type IfSelectivity, ifSelectivity } from './selectivity.ts';
 import type { Period, Site } from './site.ts';
 import { Spectrum } from './spectrum.ts';
 import type { RasterRange, Station } from './station.ts';
+import { trackingCost } from './tracking-cost.ts';
 import type { FrequencySpan } from './tuning-spans.ts';
 
 /** Most candidates judged at once. */
@@ -155,7 +156,7 @@ class Bench {
       intermodulation: worstIntermodulation(judgement),
       bfoShiftHz: ifHz - receiver.ifHz,
       capacitanceChange: capacitanceChange(receiver.ifHz, ifHz),
-      trackingCostDb: null,
+      trackingCostDb: trackingCost(receiver, ifHz),
     };
   }
 

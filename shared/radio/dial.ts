@@ -11,6 +11,7 @@ import { assumedWantedField, protectionRatio, tuningTolerance } from './service-
 import type { Site } from './site.ts';
 import { lowerBound, type Spectrum } from './spectrum.ts';
 import type { RasterRange } from './station.ts';
+import type { Tuning } from './tuning.ts';
 import type { WeightingTable } from './weighting-table.ts';
 
 /** A station is usable from here above the noise, decibels. */
@@ -60,6 +61,7 @@ export class Dial {
   /** What the front end loses at the setting itself. */
   readonly ownLossDb: Float64Array;
   private readonly parts: DialParts;
+  private tuning: Tuning | null = null;
   /** Power of the band itself; NaN: not yet asked. */
   private readonly bandPowers: Float64Array;
   /** Level up to which a station elsewhere is hidden; NaN: not yet asked. */
@@ -105,10 +107,21 @@ export class Dial {
     return this.vacant;
   }
 
-  /** Moves the signal circuits of a row to where tracking leaves them. */
-  tune(row: number, tunedHz: number): void {
+  /** Moves the signal circuits of all rows to where a tuning leaves them; null: to the dial. */
+  retune(tuning: Tuning | null): void {
+    this.tuning = tuning;
+    for (let row = 0; row < this.vacant; row++) this.tune(row);
+  }
+
+  /** Whether the signal circuits stand elsewhere than the dial shows. */
+  get isTracked(): boolean {
+    return this.tuning !== null;
+  }
+
+  private tune(row: number): void {
     const hz = this.hz[row] ?? NaN;
     const { frontEnd } = this.parts;
+    const tunedHz = this.tuning === null ? hz : this.tuning(hz);
     this.tunedHz[row] = tunedHz;
     this.ownLossDb[row] = frontEnd.circuitsDb(hz, tunedHz) + frontEnd.fixedDb(hz);
   }
@@ -222,7 +235,7 @@ export class Dial {
     this.bandPowers[row] = NaN;
     this.hiddenDbs[row] = NaN;
     this.tableOf[row] = this.tableNumber(tuningTolerance(band, hz));
-    this.tune(row, hz);
+    this.tune(row);
   }
 
   private tableNumber(toleranceHz: number): number {

@@ -6,6 +6,7 @@
 import type { FrontEnd } from './front-end.ts';
 import type { Band, Receiver } from './receiver.ts';
 import { imageFrequency } from './superheterodyne.ts';
+import { tuningOf } from './tuning.ts';
 
 /** Both ends and 39 settings evenly between. */
 const POINTS = 41;
@@ -35,13 +36,15 @@ export function rejectionCurve(
   frontEnd: FrontEnd,
   band: Band,
 ): RejectionPoint[] {
+  const { tuning } = tuningOf(band, ifHz, ifHz);
   return Array.from({ length: POINTS }, (_, index) => {
     const dialHz = band.lowHz + ((band.highHz - band.lowHz) * index) / (POINTS - 1);
+    const tunedHz = tuning === null ? dialHz : tuning(dialHz);
     const imageHz = Math.max(LOWEST_HZ, imageFrequency(dialHz, ifHz, band.oscillator));
     return {
       dialHz: Math.round(dialHz),
-      imageDb: Math.min(frontEnd.rejectionDb(imageHz, dialHz), strayDb?.image ?? Infinity),
-      ifDb: Math.min(frontEnd.rejectionDb(ifHz, dialHz), strayDb?.if ?? Infinity),
+      imageDb: Math.min(frontEnd.rejectionDb(imageHz, dialHz, tunedHz), strayDb?.image ?? Infinity),
+      ifDb: Math.min(frontEnd.rejectionDb(ifHz, dialHz, tunedHz), strayDb?.if ?? Infinity),
     };
   });
 }

@@ -105,7 +105,7 @@ describe('designTracking', () => {
         const { curve } = trackedDesign({
           ...base,
           ifHz: base.ifHz * 1.01,
-          fixedPadderF: Number(padderF),
+          fixedPadderF: padderF,
         });
         const signedIfHz = (band.oscillator === 'above' ? 1.01 : -1.01) * band.ifHz;
 

@@ -7,6 +7,7 @@ import type { Receiver } from './receiver.ts';
 import { type IfSelectivity, shapeFactorWarning } from './selectivity.ts';
 import type { Period, Site } from './site.ts';
 import type { Spectrum } from './spectrum.ts';
+import { tuningOf } from './tuning.ts';
 
 /** Something the user should know about the input; `path` names the field. */
 export interface Warning {
@@ -68,6 +69,7 @@ function receiverWarnings({ receiver, selectivity }: WarningInput): Warning[] {
 
 function bandWarnings({ receiver, site, maxM }: WarningInput): Warning[] {
   return receiver.bands.flatMap((band, index) => [
+    ...trackingWarning(receiver, index),
     ...when(
       band.oscillatorHarmonic > maxM,
       `bands.${index}.oscillatorHarmonic`,
@@ -81,6 +83,16 @@ function bandWarnings({ receiver, site, maxM }: WarningInput): Warning[] {
       () => 'The noise model begins at 300 kHz; below, it is extrapolated.',
     ),
   ]);
+}
+
+function trackingWarning({ ifHz, bands }: Receiver, index: number): Warning[] {
+  const band = bands[index];
+  const refused = band === undefined ? null : tuningOf(band, ifHz, ifHz).refused;
+  return when(
+    refused !== null,
+    `bands.${index}.tracking`,
+    () => `${refused} Tracking is left out on this band.`,
+  );
 }
 
 function siteWarnings({ site, period, spectrum, receiver }: WarningInput): Warning[] {
