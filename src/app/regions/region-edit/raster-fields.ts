@@ -28,6 +28,10 @@ import { addRange, type RegionForm, removeRange } from '../region-form';
 export class RasterFields {
   readonly form = input.required<RegionForm>();
 
+  protected nameOf(index: number): string {
+    return $localize`Range ${index + 1}:number:`;
+  }
+
   protected add(): void {
     addRange(this.form());
   }

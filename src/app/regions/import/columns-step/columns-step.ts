@@ -53,6 +53,14 @@ export class ColumnsStep {
     () => this.submission.isBusy() || this.list.state()?.state === 'checking',
   );
 
+  protected fieldLabel(header: string): string {
+    return $localize`What ${header}:column: holds`;
+  }
+
+  protected unitLabel(header: string): string {
+    return $localize`Unit of ${header}:column:`;
+  }
+
   protected async check(): Promise<void> {
     const { label, date } = this.list.state() ?? {};
     const kept = { ...(label ? { label } : {}), ...(date ? { date } : {}) };

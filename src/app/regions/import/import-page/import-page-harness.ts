@@ -1,0 +1,39 @@
+import { ComponentHarness } from '@angular/cdk/testing';
+import { MatButtonHarness } from '@angular/material/button/testing';
+import { MatInputHarness } from '@angular/material/input/testing';
+import { MatNativeSelectHarness } from '@angular/material/input/testing';
+import { MatStepperHarness } from '@angular/material/stepper/testing';
+
+/** The guided import as a person works with it. */
+export class ImportPageHarness extends ComponentHarness {
+  static readonly hostSelector = 'app-import-page';
+
+  /** Name of the step that is open. */
+  async step(): Promise<string> {
+    const stepper = await this.locatorFor(MatStepperHarness)();
+    const [open] = await stepper.getSteps({ selected: true });
+    return (await open?.getLabel()) ?? '';
+  }
+
+  async goTo(step: string): Promise<void> {
+    const stepper = await this.locatorFor(MatStepperHarness)();
+    await stepper.selectStep({ label: step });
+  }
+
+  async text(): Promise<string> {
+    return (await this.host()).text();
+  }
+
+  async choose(select: string, option: string): Promise<void> {
+    const named = MatNativeSelectHarness.with({ selector: `[aria-label="${select}"]` });
+    await (await this.locatorFor(named)()).selectOptions({ text: option });
+  }
+
+  async type(label: string, text: string): Promise<void> {
+    await (await this.locatorFor(MatInputHarness.with({ label }))()).setValue(text);
+  }
+
+  async press(text: string): Promise<void> {
+    await (await this.locatorFor(MatButtonHarness.with({ text }))()).click();
+  }
+}
