@@ -3,16 +3,14 @@
  *
  * @module radio/front-end
  */
-import type { Band, Receiver, TunedCircuit } from './receiver.ts';
+import { aerialLoss, type FixedLoss } from './aerial.ts';
+import type { Band, Receiver, Trap, TunedCircuit } from './receiver.ts';
 import { trapFrequency, trapLoss } from './trap.ts';
 import { circuitRejection, detuning } from './tuned-circuit.ts';
 
-/** Loss against frequency of something that does not follow the dial, decibels. */
-export interface FixedTerm {
+/** Something that does not follow the dial, by name. */
+interface FixedTerm extends FixedLoss {
   readonly term: 'aerial' | 'trap';
-  readonly lossDb: (frequencyHz: number) => number;
-  /** Frequency at which the loss is greatest; on either side of it, it falls. */
-  readonly greatestAtHz: number;
 }
 
 /** One line of the rejection. */
@@ -50,7 +48,7 @@ export class FrontEnd {
         throw new RangeError(`Q must be above 0, got ${qLow}, ${qHigh}`);
     }
     this.band = band;
-    this.fixed = fixedTerms(receiver);
+    this.fixed = fixedTerms(receiver, band);
     this.leastQs = Float64Array.from(band.circuits, ({ qLow, qHigh }) => Math.min(qLow, qHigh));
     this.qs = Float64Array.from(band.circuits, ({ qLow }) => qLow);
     this.slopes = Float64Array.from(
@@ -89,11 +87,7 @@ export class FrontEnd {
   /** The most that the terms which do not follow the dial lose at any setting of the band. */
   get greatestFixedDb(): number {
     const { lowHz, highHz } = this.band;
-    return this.fixed.reduce(
-      (sum, { lossDb, greatestAtHz }) =>
-        sum + lossDb(Math.min(highHz, Math.max(lowHz, greatestAtHz))),
-      0,
-    );
+    return this.fixed.reduce((sum, { greatestDb }) => sum + greatestDb(lowHz, highHz), 0);
   }
 
   /**
@@ -148,13 +142,20 @@ export function qAt(
   return qLow + ((qHigh - qLow) * (tunedHz - lowHz)) / (highHz - lowHz);
 }
 
-function fixedTerms({ trap }: Receiver): FixedTerm[] {
-  if (trap === null) return [];
+function fixedTerms({ aerial, trap }: Receiver, band: Band): FixedTerm[] {
+  const loss = aerialLoss(aerial, band);
   return [
-    {
-      term: 'trap',
-      lossDb: (hz) => trapLoss(trap, hz),
-      greatestAtHz: trapFrequency(trap),
-    },
+    ...(loss === null ? [] : [{ term: 'aerial' as const, ...loss }]),
+    ...(trap === null ? [] : [{ term: 'trap' as const, ...fixedTrapLoss(trap) }]),
   ];
+}
+
+/** A trap's loss has one peak, at its resonance. */
+function fixedTrapLoss(trap: Trap): FixedLoss {
+  const resonanceHz = trapFrequency(trap);
+  const lossDb = (hz: number): number => trapLoss(trap, hz);
+  return {
+    lossDb,
+    greatestDb: (lowHz, highHz) => lossDb(Math.min(highHz, Math.max(lowHz, resonanceHz))),
+  };
 }

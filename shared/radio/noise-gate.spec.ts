@@ -4,6 +4,7 @@ import { describe, expect, it } from 'vitest';
 import { plainCase, receivers, sites, stationLists } from '../../test/support/random-cases.ts';
 import { type BandScan, type Finding, type FindingSink } from './band-scan.ts';
 import { bandScans, WeightingTables } from './receiver-at-site.ts';
+import type { Aerial } from './receiver.ts';
 import { ifSelectivity } from './selectivity.ts';
 import { Spectrum } from './spectrum.ts';
 
@@ -27,10 +28,17 @@ function heard(scan: BandScan, ifHz: number, takesHidden: boolean): string[] {
   return sink.found.sort();
 }
 
+const aerials = fc.constantFrom<Aerial | null>(
+  null,
+  { kind: 'loop' },
+  { kind: 'primary', resonanceHz: 380_000, q: 30 },
+);
+
 describe('NoiseGate', () => {
   it('never silences what the full computation lets be heard', () => {
     fc.assert(
-      fc.property(receivers, sites, stationLists, (receiver, site, stations) => {
+      fc.property(receivers, aerials, sites, stationLists, (drawn, aerial, site, stations) => {
+        const receiver = { ...drawn, aerial };
         const { input } = plainCase({
           receiver,
           site,

@@ -3,6 +3,7 @@
  *
  * @module radio/warnings
  */
+import { primaryRefusal } from './aerial.ts';
 import type { Receiver } from './receiver.ts';
 import { type IfSelectivity, shapeFactorWarning } from './selectivity.ts';
 import type { Period, Site } from './site.ts';
@@ -70,6 +71,11 @@ function receiverWarnings({ receiver, selectivity }: WarningInput): Warning[] {
 function bandWarnings({ receiver, site, maxM }: WarningInput): Warning[] {
   return receiver.bands.flatMap((band, index) => [
     ...trackingWarning(receiver, index),
+    ...when(
+      primaryRefusal(receiver.aerial, band) !== null,
+      'aerial',
+      () => `${band.name}: ${primaryRefusal(receiver.aerial, band) ?? ''}`,
+    ),
     ...when(
       band.oscillatorHarmonic > maxM,
       `bands.${index}.oscillatorHarmonic`,
