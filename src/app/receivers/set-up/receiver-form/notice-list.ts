@@ -8,14 +8,16 @@ import type { Notice } from './notices';
   selector: 'app-notice-list',
   imports: [Icon],
   template: `
-    <ul role="status">
-      @for (notice of notices(); track notice.text) {
-        <li [class]="notice.kind">
-          <app-icon [name]="notice.kind === 'error' ? 'warning' : 'info'" />
-          {{ notice.text }}
-        </li>
-      }
-    </ul>
+    <div role="status">
+      <ul>
+        @for (notice of notices(); track notice.text) {
+          <li [class]="notice.kind">
+            <app-icon [name]="notice.kind === 'error' ? 'warning' : 'info'" />
+            {{ notice.text }}
+          </li>
+        }
+      </ul>
+    </div>
   `,
   styles: `
     ul {
