@@ -53,9 +53,9 @@ describe('csvRows', () => {
     await expect(reading).rejects.toThrow('A quotation mark opened on or after line 3');
   });
 
-  it('tells when the file cannot be read at all', async () => {
+  it('tells when the file is no longer there', async () => {
     const missing = csvRows(join(folder, 'none.csv'), { encoding: 'UTF-8', delimiter: ',' });
 
-    await expect(missing.next()).rejects.toThrow('ENOENT');
+    await expect(missing.next()).rejects.toThrow('The uploaded file is no longer there.');
   });
 });

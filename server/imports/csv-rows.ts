@@ -49,7 +49,7 @@ export async function* csvRows(path: string, layout: CsvLayout): AsyncGenerator<
       line += linesOf(cells);
     }
   } catch (error) {
-    throw error instanceof CsvError ? unreadable(error, line) : error;
+    throw refusal(error, line);
   } finally {
     parser.destroy();
   }
@@ -72,6 +72,12 @@ function checkWidth(record: readonly string[], line: number): void {
   throw new BadListError(
     `Line ${line} has ${record.length} columns; a list may have at most ${MAX_COLUMNS}.`,
   );
+}
+
+function refusal(error: unknown, line: number): unknown {
+  if (error instanceof CsvError) return unreadable(error, line);
+  if ((error as NodeJS.ErrnoException).code !== 'ENOENT') return error;
+  return new BadListError('The uploaded file is no longer there. Upload it again.');
 }
 
 function unreadable(error: CsvError, line: number): BadListError {

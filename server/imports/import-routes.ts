@@ -9,6 +9,7 @@ import {
   importProposal,
   importState,
 } from '../../shared/contracts/list-import.ts';
+import { pageOf, pageQuery } from '../../shared/contracts/paging.ts';
 import { route, type Route } from '../http/route.ts';
 import type { Imports } from './imports.ts';
 import { csvWriter } from './list-rejects.ts';
@@ -18,6 +19,16 @@ const list = '/api/regions/:id/imports';
 const one = `${list}/:importId` as const;
 
 export const importRoutes = (imports: Imports, uploads: Uploads): Route[] => [
+  route({
+    method: 'get',
+    path: list,
+    summary: 'The imports of a region, the latest first, without their faults',
+    access: 'member',
+    query: pageQuery,
+    answer: pageOf(importState),
+    faults: [404],
+    handle: ({ actor, id, query }) => imports.list(actor, id(), query),
+  }),
   route({
     method: 'post',
     path: list,

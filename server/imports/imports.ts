@@ -10,6 +10,7 @@ import type {
   ImportProposal,
   ImportState,
 } from '../../shared/contracts/list-import.ts';
+import type { Page, PageQuery } from '../../shared/contracts/paging.ts';
 import type { Region } from '../../shared/contracts/region.ts';
 import { inTransaction } from '../db/transaction.ts';
 import type { Actor } from '../http/actor.ts';
@@ -103,6 +104,23 @@ export class Imports {
       await this.uploads.remove(file.storedName);
       throw error;
     }
+  }
+
+  /** The imports of a region, the latest first. */
+  async list(
+    actor: Actor,
+    regionId: number,
+    { page, pageSize }: PageQuery,
+  ): Promise<Page<ImportState>> {
+    await this.regions.get(actor, regionId);
+    await failExpired();
+    const { rows, count } = await ImportModel.findAndCountAll({
+      where: { regionId },
+      order: [['id', 'DESC']],
+      limit: pageSize,
+      offset: (page - 1) * pageSize,
+    });
+    return { items: rows.map((row) => ({ ...toState(row), faults: [] })), total: count };
   }
 
   async state(actor: Actor, regionId: number, id: number): Promise<ImportState> {

@@ -1,4 +1,4 @@
-import { readdirSync } from 'node:fs';
+import { readdirSync, rmSync } from 'node:fs';
 import { join } from 'node:path';
 
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
@@ -13,7 +13,6 @@ import {
   HEADER,
   importList,
   rowsOf,
-  sendList,
   settled,
   upload,
 } from '../support/lists.ts';
@@ -337,38 +336,34 @@ describe('DELETE of an import', () => {
   });
 });
 
-describe('who may import', () => {
-  it('is decided by role and workshop', async () => {
+describe('GET of a region’s imports', () => {
+  it('lists them, the latest first', async () => {
     const regionId = await addRegion(librarian);
-    const { path } = await upload(librarian, regionId, cleanList(1));
-    const stranger = await server.newcomer();
-    const visitor = await server.visitor();
+    const first = await upload(librarian, regionId, cleanList(1));
+    const second = await upload(librarian, regionId, cleanList(2));
+    await librarian.delete(first.path).expect(204);
 
-    await stranger.get(path).expect(404);
-    await stranger.put(path, { label: 'x' }).expect(404);
-    await stranger.post(`${path}/commit`).expect(404);
-    await stranger.delete(path).expect(404);
-    await sendList(stranger, regionId, cleanList(1)).expect(404);
-    await visitor.get(path).expect(401);
-    const otherRegion = await addRegion(librarian);
-    await librarian
-      .get(`/api/regions/${otherRegion}/imports/${path.split('/').at(-1)}`)
-      .expect(404);
+    const { body } = await librarian.get(`/api/regions/${regionId}/imports`).expect(200);
+
+    expect(body).toMatchObject({
+      total: 2,
+      items: [
+        { id: second.id, state: 'uploaded' },
+        { id: first.id, state: 'cancelled' },
+      ],
+    });
   });
+});
 
-  it('lets a member read and nothing else', async () => {
-    const member = await server.newcomer();
-    const regionId = await addRegion(member);
-    const editionId = await importList(member, regionId, cleanList(3));
-    const { path } = await upload(member, regionId, cleanList(1));
-    const { body: session } = await member.get('/api/session').expect(200);
-    await server.sql(`UPDATE memberships SET role = 'member' WHERE account_id = ${session.id}`);
+describe('a file that went away', () => {
+  it('is asked for again', async () => {
+    const { path } = await upload(librarian, await addRegion(librarian), cleanList(1));
+    await librarian.put(path, { label: 'List' }).expect(200);
+    const folder = join(server.dataFolder, 'uploads');
+    for (const name of readdirSync(folder)) rmSync(join(folder, name));
 
-    await member.get(path).expect(200);
-    await member.get(`/api/editions/${editionId}/stations`).expect(200);
-    await sendList(member, regionId, cleanList(1)).expect(403);
-    await member.put(path, { label: 'x' }).expect(403);
-    await member.post(`${path}/commit`).expect(403);
-    await member.delete(path).expect(403);
+    const { body } = await librarian.put(path, { label: 'List' }).expect(400);
+
+    expect(body.title).toBe('The uploaded file is no longer there. Upload it again.');
   });
 });
