@@ -218,8 +218,8 @@ describe('refusals', () => {
   });
 
   it('refuses orders beyond the model and a limit of 0', () => {
-    expect(refused({}, { maxM: 6 })).toThrow(/m must be 0 to 5/);
-    expect(refused({}, { maxN: 4 })).toThrow(/n must be 1 to 3/);
+    expect(refused({}, { maxM: 6 })).toThrow(/maxM must be 0 to 5/);
+    expect(refused({}, { maxN: 4 })).toThrow(/maxN must be 1 to 3/);
     expect(refused({}, { limit: 0 })).toThrow(/limit/);
   });
 

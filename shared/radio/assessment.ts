@@ -3,7 +3,8 @@
  *
  * @module radio/assessment
  */
-import type { BandScan, Finding, FindingSink } from './band-scan.ts';
+import type { BandScan } from './band-scan.ts';
+import type { Finding, FindingSink } from './finding.ts';
 import { Deficit } from './deficit.ts';
 import { type DialTotal, DialTotals } from './dial-totals.ts';
 import type { FieldStrength } from './field-strength.ts';
@@ -20,6 +21,7 @@ import { type RejectionPoint, rejectionCurve } from './rejection-curve.ts';
 import type { Response } from './response.ts';
 import { ResponseSelection } from './response-selection.ts';
 import { buildResponse } from './responses.ts';
+import { secondOscillatorHarmonics } from './second-conversion.ts';
 import { ifSelectivity } from './selectivity.ts';
 import type { Period, Site } from './site.ts';
 import { Spectrum } from './spectrum.ts';
@@ -66,6 +68,8 @@ export interface BandAssessment {
   readonly imageHz: FrequencySpan;
   readonly rejection: readonly RejectionPoint[];
   readonly harmonics: readonly HarmonicPoint[];
+  /** Harmonics of the second oscillator, where there is a second conversion. */
+  readonly secondOscillator: readonly HarmonicPoint[];
   readonly totals: readonly DialTotal[];
   /** Number of responses before `limit`. */
   readonly total: number;
@@ -145,6 +149,7 @@ function assessBand(
     imageHz: imageSpan(band, receiver.ifHz),
     rejection: rejectionCurve(receiver, scan.frontEnd, band),
     harmonics: ifHarmonics(receiver.ifHz, band.lowHz, band.highHz),
+    secondOscillator: secondOscillatorHarmonics(receiver, band.lowHz, band.highHz),
     totals: totals.totals(),
     total: selection.total + everywhere.length,
     responses: [...responses, ...everywhere].slice(0, limit),

@@ -7,50 +7,22 @@ import type { Dial } from './dial.ts';
 import { DialSettings, type Meeting, MEETINGS } from './dial-settings.ts';
 import type { FrontEnd } from './front-end.ts';
 import { NoiseGate } from './noise-gate.ts';
-import { mixerLevel, signalOrderLevel } from './product-levels.ts';
+import {
+  MAX_OSCILLATOR_ORDER,
+  MAX_SIGNAL_ORDER,
+  mixerLevel,
+  signalOrderLevel,
+} from './product-levels.ts';
 import type { Receiver } from './receiver.ts';
+import { secondImage } from './second-conversion.ts';
+import { SIGNAL_PATH, type SignalPath } from './signal-path.ts';
 import { StillSettings } from './still-settings.ts';
+import type { Finding, FindingSink, Orders, Product } from './finding.ts';
+import { sideSign } from './superheterodyne.ts';
 import { tuningOf } from './tuning.ts';
 
 /** Field at which `signalToOscillatorDb` is stated, dB(uV/m). */
 const REFERENCE_FIELD_DB = 80;
-
-/**
- * A product of all stations on one frequency at one dial setting. The scan lends the same object
- * again and again: take what you need, keep nothing of it.
- */
-export interface Finding {
-  /** Group of the spectrum. */
-  group: number;
-  /** Position of its strongest station. */
-  strongest: number;
-  m: number;
-  n: number;
-  /** Row of the dial. */
-  row: number;
-  dialHz: number;
-  beatHz: number;
-  /** A station of field E interferes with `n E + shiftDb`, weighted `+ weightingDb`. */
-  shiftDb: number;
-  weightingDb: number;
-  /** How many stations of the group are heard: the strongest ones. */
-  heard: number;
-  /** Sum of their weighted powers. */
-  heardPower: number;
-}
-
-/** Who takes the findings of a scan. */
-export interface FindingSink {
-  /** Whether findings of which no station is heard are wanted, too. */
-  readonly takesHidden: boolean;
-  take(finding: Readonly<Finding>): void;
-}
-
-/** The orders up to which products are looked for. */
-export interface Orders {
-  readonly maxM: number;
-  readonly maxN: number;
-}
 
 /** One band of a receiver over the stations of a site. */
 export class BandScan {
@@ -64,11 +36,14 @@ export class BandScan {
   private alignedHz = NaN;
   /** Loss of the terms that do not follow the dial, for each group. */
   private readonly fixedDb: Float64Array;
+  /** `productLevelDb` of (m, n) at 4 m + n. */
+  private readonly levels: Float64Array;
   private readonly finding: Finding = {
     group: 0,
     strongest: 0,
     m: 0,
     n: 0,
+    path: SIGNAL_PATH.first,
     row: 0,
     dialHz: 0,
     beatHz: 0,
@@ -83,9 +58,12 @@ export class BandScan {
     this.dial = dial;
     this.frontEnd = frontEnd;
     this.fixedDb = dial.spectrum.hz.map((hz) => frontEnd.fixedDb(hz));
+    this.levels = this.productLevels();
     this.settings = new DialSettings(dial);
     this.gate = new NoiseGate(dial, frontEnd, this.fixedDb, receiver.strayDb?.image ?? Infinity);
-    this.still = new StillSettings(dial, (group, n, row) => this.shiftDb(group, 0, n, row));
+    this.still = new StillSettings(dial, (group, n, row) =>
+      this.shiftDb({ group, m: 0, n, path: SIGNAL_PATH.first }, row),
+    );
   }
 
   /**
@@ -97,12 +75,34 @@ export class BandScan {
    * @throws {RangeError} If an order is out of range.
    */
   scan(ifHz: number, { maxM, maxN }: Orders, sink: FindingSink): void {
+    checkOrders(maxM, maxN);
     this.scanBreakthrough(ifHz, maxN, sink);
     this.settings.moveTo(ifHz);
     for (let n = 1; n <= maxN; n++) {
       for (let m = 1; m <= maxM; m++) {
         for (const meeting of MEETINGS) this.scanMeeting(m, n, meeting, sink);
       }
+    }
+    if (maxM >= this.dial.band.oscillatorHarmonic) this.scanSecondImage(ifHz, sink);
+  }
+
+  /** A station 2 IF2 from the dial, which the first IF rejects and the second mixer takes. */
+  private scanSecondImage(ifHz: number, sink: FindingSink): void {
+    const { settings, dial } = this;
+    const { secondConversion } = this.receiver;
+    if (secondConversion === null) return;
+    const { band, spectrum } = dial;
+    const heardHz = secondImage(ifHz, secondConversion);
+    const offset = sideSign(band.oscillator) * Math.sign(heardHz) > 0 ? 1 : -1;
+    const meeting = { signal: 1, offset } as const;
+    const path = SIGNAL_PATH.secondImage;
+    settings.moveTo(ifHz, Math.abs(heardHz));
+    const m = band.oscillatorHarmonic;
+    const [lowest, highest] = settings.stationsWithin(m, 1, meeting);
+    for (let group = spectrum.firstFrom(lowest); group < spectrum.hz.length; group++) {
+      const stationHz = spectrum.hz[group] ?? NaN;
+      if (stationHz > highest) return;
+      this.judgeAll(settings.settle(stationHz, m, 1, meeting), { group, m, n: 1, path }, sink);
     }
   }
 
@@ -126,41 +126,38 @@ export class BandScan {
         if (gate !== null && this.gate.isSilent(gate, group, n, solution)) continue;
         found = settings.settle(stationHz, m, n, meeting);
       }
-      this.judgeAll(found, group, m, n, levelDb, sink);
+      this.judgeAll(found, { group, m, n, path: SIGNAL_PATH.first }, sink);
     }
   }
 
-  private judgeAll(
-    found: number,
-    group: number,
-    m: number,
-    n: number,
-    levelDb: number,
-    sink: FindingSink,
-  ): void {
+  private judgeAll(found: number, product: Product, sink: FindingSink): void {
     const { settings } = this;
     for (let index = 0; index < found; index++) {
       const row = settings.row[index] ?? 0;
       if (row === this.dial.vacant) this.dial.lend(settings.solutionHz[index] ?? NaN);
-      this.judge(group, m, n, row, settings.beatHz[index] ?? NaN, levelDb, sink);
+      this.judge(product, row, settings.beatHz[index] ?? NaN, sink);
     }
   }
 
   /** The part of `scan` that does not move with the dial: m = 0. */
   scanBreakthrough(ifHz: number, maxN: number, sink: FindingSink): void {
     this.moveTo(ifHz);
+    for (let n = 1; n <= maxN; n++) this.scanStill(ifHz, n, SIGNAL_PATH.first, sink);
+    const { secondConversion } = this.receiver;
+    if (secondConversion === null) return;
+    this.scanStill(secondConversion.ifHz, 1, SIGNAL_PATH.secondIf, sink);
+  }
+
+  private scanStill(ifHz: number, n: number, path: SignalPath, sink: FindingSink): void {
     const { spectrum, reachHz } = this.dial;
-    for (let n = 1; n <= maxN; n++) {
-      const levelDb = this.productLevelDb(0, n);
-      const from = spectrum.firstFrom((ifHz - reachHz) / n);
-      for (let group = from; group < spectrum.hz.length; group++) {
-        const offset = n * (spectrum.hz[group] ?? NaN) - ifHz;
-        if (offset > reachHz) break;
-        const beatHz = Math.abs(offset);
-        if (beatHz > reachHz) continue;
-        const row = this.still.worstRow(group, n, beatHz);
-        if (row >= 0) this.judge(group, 0, n, row, beatHz, levelDb, sink);
-      }
+    const from = spectrum.firstFrom((ifHz - reachHz) / n);
+    for (let group = from; group < spectrum.hz.length; group++) {
+      const offset = n * (spectrum.hz[group] ?? NaN) - ifHz;
+      if (offset > reachHz) return;
+      const beatHz = Math.abs(offset);
+      if (beatHz > reachHz) continue;
+      const row = this.still.worstRow(group, n, beatHz);
+      if (row >= 0) this.judge({ group, m: 0, n, path }, row, beatHz, sink);
     }
   }
 
@@ -182,35 +179,43 @@ export class BandScan {
     );
   }
 
-  /** What a product adds to n times the field of a station, stray pick-up included. */
-  shiftDb(group: number, m: number, n: number, row: number): number {
-    return this.shift(group, m, n, row, this.productLevelDb(m, n));
+  private productLevels(): Float64Array {
+    const levels = new Float64Array(4 * (MAX_OSCILLATOR_ORDER + 1)).fill(NaN);
+    for (let m = 0; m <= MAX_OSCILLATOR_ORDER; m++) {
+      for (let n = 1; n <= MAX_SIGNAL_ORDER; n++) levels[4 * m + n] = this.productLevelDb(m, n);
+    }
+    return levels;
   }
 
-  private shift(group: number, m: number, n: number, row: number, levelDb: number): number {
+  /** What the first IF takes from a signal that only the second mixer brings to the second IF. */
+  firstIfLossDb(path: SignalPath): number {
+    const { secondConversion } = this.receiver;
+    if (path !== SIGNAL_PATH.secondImage || secondConversion === null) return 0;
+    return this.dial.ifRejectionDb(2 * secondConversion.ifHz);
+  }
+
+  /**
+   * What a product adds to n times the field of a station, stray pick-up included. What comes past
+   * the circuits still has to pass the first IF.
+   */
+  shiftDb({ group, m, n, path }: Product, row: number): number {
     const { dial } = this;
     const rejection =
       this.frontEnd.circuitsDb(dial.spectrum.hz[group] ?? NaN, dial.tunedHz[row] ?? NaN) +
       (this.fixedDb[group] ?? 0) -
       (dial.ownLossDb[row] ?? 0);
-    const shift = levelDb - n * rejection;
+    const shift = (this.levels[m * 4 + n] ?? NaN) - n * rejection;
     const { strayDb } = this.receiver;
-    if (n > 1 || strayDb === null) return shift;
-    return Math.max(shift, m === 0 ? -strayDb.if : -strayDb.image);
+    const past = n > 1 || strayDb === null ? -Infinity : m === 0 ? -strayDb.if : -strayDb.image;
+    const reaching = Math.max(shift, past);
+    return path === SIGNAL_PATH.secondImage ? reaching - this.firstIfLossDb(path) : reaching;
   }
 
-  private judge(
-    group: number,
-    m: number,
-    n: number,
-    row: number,
-    beatHz: number,
-    levelDb: number,
-    sink: FindingSink,
-  ): void {
+  private judge(product: Product, row: number, beatHz: number, sink: FindingSink): void {
     const { dial, finding } = this;
+    const { group, m, n, path } = product;
     const strongest = dial.spectrum.start[group] ?? 0;
-    const shiftDb = this.shift(group, m, n, row, levelDb);
+    const shiftDb = this.shiftDb(product, row);
     const weightingDb = dial.weightingDb(row, beatHz);
     const topDb = n * (dial.spectrum.fieldDb[strongest] ?? NaN) + shiftDb + weightingDb;
     const silent = topDb <= dial.hiddenByNoiseDb(row);
@@ -222,6 +227,7 @@ export class BandScan {
     finding.strongest = strongest;
     finding.m = m;
     finding.n = n;
+    finding.path = path;
     finding.row = row;
     finding.dialHz = dial.hz[row] ?? NaN;
     finding.beatHz = beatHz;
@@ -249,5 +255,14 @@ export class BandScan {
       if (near && position < end) hiddenDb = dial.hiddenDb(row, group, position);
     }
     return position - first;
+  }
+}
+
+function checkOrders(maxM: number, maxN: number): void {
+  if (!Number.isInteger(maxM) || maxM < 0 || maxM > MAX_OSCILLATOR_ORDER) {
+    throw new RangeError(`maxM must be 0 to ${MAX_OSCILLATOR_ORDER}, got ${maxM}`);
+  }
+  if (!Number.isInteger(maxN) || maxN < 1 || maxN > MAX_SIGNAL_ORDER) {
+    throw new RangeError(`maxN must be 1 to ${MAX_SIGNAL_ORDER}, got ${maxN}`);
   }
 }

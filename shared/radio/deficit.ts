@@ -3,7 +3,8 @@
  *
  * @module radio/deficit
  */
-import type { BandScan, Finding, FindingSink } from './band-scan.ts';
+import type { BandScan } from './band-scan.ts';
+import type { Finding, FindingSink } from './finding.ts';
 import type { Dial } from './dial.ts';
 
 /** Kinds of response that are told apart. */

@@ -74,9 +74,14 @@ export class DialSettings {
     this.solutionHz = new Float64Array(most);
   }
 
-  /** Moves to an IF, hertz. */
-  moveTo(ifHz: number): void {
-    this.ifHz = ifHz;
+  /**
+   * Moves to an IF.
+   *
+   * @param ifHz The IF by which the oscillator stands beside the signal, hertz.
+   * @param heardHz Frequency at which the mixer's output is heard, hertz; the IF as a rule.
+   */
+  moveTo(ifHz: number, heardHz = ifHz): void {
+    this.ifHz = heardHz;
     this.signedIfHz = sideSign(this.dial.band.oscillator) * ifHz;
   }
 

@@ -3,7 +3,7 @@
  *
  * @module radio/dial-totals
  */
-import type { Finding, FindingSink } from './band-scan.ts';
+import type { Finding, FindingSink } from './finding.ts';
 import type { Dial } from './dial.ts';
 import { type Grade, grade } from './grades.ts';
 

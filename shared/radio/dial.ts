@@ -7,6 +7,7 @@ import { type FrontEnd } from './front-end.ts';
 import { noiseField } from './noise.ts';
 import { rasterChannels } from './raster.ts';
 import type { Band } from './receiver.ts';
+import type { IfSelectivity } from './selectivity.ts';
 import { assumedWantedField, protectionRatio, tuningTolerance } from './service-figures.ts';
 import type { Site } from './site.ts';
 import { lowerBound, type Spectrum } from './spectrum.ts';
@@ -26,8 +27,7 @@ export interface DialParts {
   readonly raster: readonly RasterRange[];
   readonly spectrum: Spectrum;
   readonly frontEnd: FrontEnd;
-  readonly b6Hz: number;
-  readonly b60Hz: number;
+  readonly selectivity: IfSelectivity;
   /** The weighting for a tuning tolerance. */
   readonly weightingFor: (toleranceHz: number) => WeightingTable;
 }
@@ -75,7 +75,7 @@ export class Dial {
     this.parts = parts;
     this.band = band;
     this.spectrum = spectrum;
-    this.reachHz = parts.b60Hz / 2;
+    this.reachHz = parts.selectivity.b60Hz / 2;
     this.protectionDb = protectionRatio(band.service, site.ituRegion);
     const channels = rasterChannels(raster, band.lowHz, band.highHz);
     const from = spectrum.firstFrom(band.lowHz);
@@ -124,6 +124,11 @@ export class Dial {
     const tunedHz = this.tuning === null ? hz : this.tuning(hz);
     this.tunedHz[row] = tunedHz;
     this.ownLossDb[row] = frontEnd.circuitsDb(hz, tunedHz) + frontEnd.fixedDb(hz);
+  }
+
+  /** Rejection of the IF at a distance from its centre, decibels. */
+  ifRejectionDb(offsetHz: number): number {
+    return this.parts.selectivity.rejectionDb(offsetHz);
   }
 
   /** Number of the row's weighting table, and how many tables there are. */
@@ -223,8 +228,8 @@ export class Dial {
   }
 
   private fill(row: number, hz: number, group: number): void {
-    const { band, site, b6Hz, spectrum } = this.parts;
-    const noiseDb = noiseField(site, hz, b6Hz);
+    const { band, site, selectivity, spectrum } = this.parts;
+    const noiseDb = noiseField(site, hz, selectivity.b6Hz);
     const strongest = group < 0 ? -1 : (spectrum.wanted[group] ?? -1);
     const groundDb = spectrum.groundDb[strongest] ?? -Infinity;
     const usable = groundDb >= noiseDb + USABLE_OVER_NOISE_DB;

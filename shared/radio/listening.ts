@@ -3,7 +3,8 @@
  *
  * @module radio/listening
  */
-import type { BandScan, Finding, FindingSink, Orders } from './band-scan.ts';
+import type { BandScan } from './band-scan.ts';
+import type { Finding, FindingSink, Orders } from './finding.ts';
 import { Deficit, isBefore, type Kind, type Worst } from './deficit.ts';
 import { intermodulatingPairs, type StrongStation, strongestStations } from './intermodulation.ts';
 import type { Spectrum } from './spectrum.ts';

@@ -2,7 +2,8 @@ import * as fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 
 import { plainCase, receivers, sites, stationLists } from '../../test/support/random-cases.ts';
-import { type BandScan, type Finding, type FindingSink } from './band-scan.ts';
+import { type BandScan } from './band-scan.ts';
+import type { Finding, FindingSink } from './finding.ts';
 import { bandScans, WeightingTables } from './receiver-at-site.ts';
 import type { Aerial } from './receiver.ts';
 import { ifSelectivity } from './selectivity.ts';

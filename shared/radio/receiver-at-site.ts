@@ -90,12 +90,12 @@ export function bandScans(
   spectrum: Spectrum,
   tables: WeightingTables,
 ): BandScan[] {
-  const { b6Hz, b60Hz } = tables.selectivity;
+  const { selectivity } = tables;
   return receiver.bands.map((band) => {
     const frontEnd = new FrontEnd(receiver, band);
     const weightingFor = (toleranceHz: number): WeightingTable =>
       tables.table(band.service, toleranceHz);
-    const dial = new Dial({ band, site, raster, spectrum, frontEnd, b6Hz, b60Hz, weightingFor });
+    const dial = new Dial({ band, site, raster, spectrum, frontEnd, selectivity, weightingFor });
     return new BandScan(receiver, dial, frontEnd);
   });
 }

@@ -3,9 +3,10 @@
  *
  * @module radio/response-selection
  */
-import type { Finding, FindingSink } from './band-scan.ts';
+import type { Finding, FindingSink } from './finding.ts';
 import type { Dial } from './dial.ts';
 import { type Grade, ratioBelow } from './grades.ts';
+import type { SignalPath } from './signal-path.ts';
 
 /** A response that is to be answered. */
 export interface Selected {
@@ -13,6 +14,7 @@ export interface Selected {
   readonly position: number;
   readonly m: number;
   readonly n: number;
+  readonly path: SignalPath;
   readonly row: number;
   readonly dialHz: number;
   readonly beatHz: number;
@@ -32,8 +34,8 @@ export class ResponseSelection implements FindingSink {
   private readonly dial: Dial;
   private readonly limit: number;
   private readonly ratioBelowDb: number;
-  /** Ratio, dial setting, position, m, n, row and beat of each response held. */
-  private readonly columns: number[][] = [[], [], [], [], [], [], []];
+  /** Ratio, dial setting, position, m, n, row, beat and path of each response held. */
+  private readonly columns: number[][] = [[], [], [], [], [], [], [], []];
   private held = 0;
   /** Responses with a larger ratio than this are beyond the limit already. */
   private cutDb = Infinity;
@@ -83,12 +85,17 @@ export class ResponseSelection implements FindingSink {
         n: this.value(4, index),
         row: this.value(5, index),
         beatHz: this.value(6, index),
+        path: this.value(7, index) as SignalPath,
       }));
   }
 
-  private hold({ dialHz, m, n, row, beatHz }: Finding, position: number, ratioDb: number): void {
+  private hold(
+    { dialHz, m, n, row, beatHz, path }: Finding,
+    position: number,
+    ratioDb: number,
+  ): void {
     if (this.held === 2 * this.limit) this.prune();
-    const values = [ratioDb, dialHz, position, m, n, row, beatHz];
+    const values = [ratioDb, dialHz, position, m, n, row, beatHz, path];
     this.columns.forEach((column, index) => column.push(values[index] ?? NaN));
     this.held++;
   }

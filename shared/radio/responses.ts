@@ -11,6 +11,7 @@ import type { Receiver } from './receiver.ts';
 import type { Hidden, LedgerEntry, LedgerTerm, Response } from './response.ts';
 import type { Selected } from './response-selection.ts';
 import type { Period } from './site.ts';
+import { SIGNAL_PATH } from './signal-path.ts';
 import { sideSign } from './superheterodyne.ts';
 import { ratioUncertainty } from './uncertainty.ts';
 
@@ -31,13 +32,14 @@ export interface ResponseContext {
 export function buildResponse(context: ResponseContext, selected: Selected): Response {
   const { dial } = context.scan;
   const { spectrum, band } = dial;
-  const { position, m, n, beatHz, dialHz } = selected;
+  const { position, m, n, path, beatHz, dialHz } = selected;
   const row = selected.row === dial.vacant ? dial.lend(dialHz) : selected.row;
   const levels = levelsOf(context, { ...selected, row });
   const wanted = dial.wanted[row] ?? -1;
   return {
     station: spectrum.ids[position] ?? -1,
-    cause: causeOf(m, n, band.oscillatorHarmonic),
+    cause:
+      path === SIGNAL_PATH.secondImage ? 'second-image' : causeOf(m, n, band.oscillatorHarmonic),
     name: nameOf(context, selected),
     m,
     n,
@@ -76,9 +78,10 @@ interface Levels {
 function levelsOf({ scan, period }: ResponseContext, selected: Selected): Levels {
   const { dial } = scan;
   const { spectrum } = dial;
-  const { position, m, n, row, beatHz } = selected;
+  const { position, m, n, path, row, beatHz } = selected;
   const group = spectrum.groupOf(position);
-  const interferenceDb = n * (spectrum.fieldDb[position] ?? NaN) + scan.shiftDb(group, m, n, row);
+  const interferenceDb =
+    n * (spectrum.fieldDb[position] ?? NaN) + scan.shiftDb({ group, m, n, path }, row);
   const weightingDb = dial.weightingDb(row, beatHz);
   const wantedDb = dial.wantedDb[row] ?? NaN;
   const ratioDb = wantedDb - (interferenceDb + weightingDb);
@@ -111,7 +114,12 @@ function hiddenUnder(levelDb: number, up: { noise: number; band: number }): Hidd
   return levelDb <= up.band ? 'band' : null;
 }
 
-function nameOf({ scan, receiver }: ResponseContext, { position, m, n, dialHz }: Selected): string {
+function nameOf(
+  { scan, receiver }: ResponseContext,
+  { position, m, n, path, dialHz }: Selected,
+): string {
+  if (path === SIGNAL_PATH.secondImage) return 'second image';
+  if (path === SIGNAL_PATH.secondIf) return 'breakthrough of the second IF';
   const { band, spectrum } = scan.dial;
   const signal = n * (spectrum.hz[spectrum.groupOf(position)] ?? NaN);
   const signedIf = sideSign(band.oscillator) * receiver.ifHz;
@@ -128,7 +136,7 @@ function nameOf({ scan, receiver }: ResponseContext, { position, m, n, dialHz }:
 
 function ledgerOf(
   { scan, receiver }: ResponseContext,
-  { position, m, n, row, dialHz }: Selected,
+  { position, m, n, path, row, dialHz }: Selected,
   levels: Levels,
 ): LedgerEntry[] {
   const { dial, frontEnd } = scan;
@@ -138,6 +146,7 @@ function ledgerOf(
   const lines = frontEnd.lines(stationHz, dialHz, dial.tunedHz[row] ?? NaN);
   const reachesMixer = fieldDb - lines.reduce((sum, { lossDb }) => sum + lossDb, 0);
   const stray = receiver.strayDb === null || n > 1 ? null : receiver.strayDb;
+  const firstIfDb = scan.firstIfLossDb(path);
   const relativeDb = receiver.signalToOscillatorDb + reachesMixer - 80;
   const entries: (readonly [LedgerTerm, number | null])[] = [
     ['field', fieldDb],
@@ -145,7 +154,11 @@ function ledgerOf(
     ['mixer', mixerLevel(m, band.oscillatorHarmonic, receiver.ifFeedthroughDb)],
     ['signal-order', n > 1 ? signalOrderLevel(n) : null],
     ['signal-level', n > 1 ? (n - 1) * relativeDb : null],
-    ['stray-limit', stray === null ? null : fieldDb - (m === 0 ? stray.if : stray.image)],
+    ['second-conversion', path === SIGNAL_PATH.secondImage ? -firstIfDb : null],
+    [
+      'stray-limit',
+      stray === null ? null : fieldDb - firstIfDb - (m === 0 ? stray.if : stray.image),
+    ],
     ['interference', levels.interferenceDb],
     ['weighting', levels.weightingDb],
     ['weighted-interference', levels.interferenceDb + levels.weightingDb],

@@ -5,6 +5,7 @@
  */
 import { primaryRefusal } from './aerial.ts';
 import type { Receiver } from './receiver.ts';
+import { secondConversionWarning } from './second-conversion.ts';
 import { type IfSelectivity, shapeFactorWarning } from './selectivity.ts';
 import type { Period, Site } from './site.ts';
 import type { Spectrum } from './spectrum.ts';
@@ -48,6 +49,7 @@ export function warningsOf(input: WarningInput): Warning[] {
 function receiverWarnings({ receiver, selectivity }: WarningInput): Warning[] {
   const { ifHz, bands, strayDb, fixedFilter } = receiver;
   const inside = bands.find(({ lowHz, highHz }) => ifHz >= lowHz && ifHz <= highHz);
+  const second = secondConversionWarning(receiver, selectivity.b6Hz / 2);
   const shape = shapeFactorWarning(selectivity, fixedFilter);
   return [
     ...when(
@@ -57,6 +59,7 @@ function receiverWarnings({ receiver, selectivity }: WarningInput): Warning[] {
         `The IF lies inside the band ${inside?.name ?? ''}: the set cannot be used near ` +
         `${ifHz / 1000} kHz.`,
     ),
+    ...when(second !== null, 'secondConversion', () => second ?? ''),
     ...when(shape !== null, 'selectivity', () => shape ?? ''),
     ...when(
       strayDb?.if === ASSUMED_STRAY_DB && strayDb.image === ASSUMED_STRAY_DB,
