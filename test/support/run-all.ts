@@ -1,11 +1,10 @@
-import { mkdtempSync, rmSync } from 'node:fs';
-import { tmpdir } from 'node:os';
-import { join, resolve } from 'node:path';
+import { resolve } from 'node:path';
 import { fileURLToPath } from 'node:url';
 
 import { CHROMIUM, ensurePrograms, MARIADB } from '../../server/dev/programs.ts';
 import { add, closingLine, NOTHING } from './counts.ts';
 import { runGate } from './gate.ts';
+import { makeScratch, removeScratch } from './scratch.ts';
 import { StepRunner } from './step.ts';
 import { requireSuites, runSuites } from './suites.ts';
 
@@ -28,10 +27,10 @@ export interface Run {
  * tests write goes to one folder, which is removed whatever happens.
  */
 export async function runAll({ gate, suites }: Run): Promise<void> {
-  const scratch = mkdtempSync(join(tmpdir(), 'fallow-test-'));
+  const scratch = makeScratch();
   const runner = new StepRunner(root, testEnvironment(scratch));
-  const leave = (code: number): never => {
-    rmSync(scratch, { recursive: true, force: true });
+  const leave = async (code: number): Promise<never> => {
+    await removeScratch(scratch);
     process.exit(code);
   };
   for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP'] as const) {
@@ -46,11 +45,11 @@ export async function runAll({ gate, suites }: Run): Promise<void> {
     const checked = gate ? await runGate(runner, say) : NOTHING;
     const total = add(checked, await runSuites(runner, suites, scratch, say));
     say(`\n${closingLine(total)}`);
-    leave(total.failed === 0 ? 0 : 1);
+    await leave(total.failed === 0 ? 0 : 1);
   } catch (error) {
     say(error instanceof Error ? error.message : String(error));
     say(`\n${closingLine({ ...NOTHING, failed: 1 })}`);
-    leave(1);
+    await leave(1);
   }
 }
 

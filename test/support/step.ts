@@ -2,6 +2,9 @@ import { endProcess, exitOf, spawnBound } from '../../server/dev/bound-process.t
 
 const GRACE_MS = 15_000;
 
+/** What follows a step is not to happen once the run was stopped: the process ends instead. */
+const FOREVER = new Promise<never>(() => undefined);
+
 /** One program of the gate: what it is called, and how it is run. */
 export interface Step {
   readonly name: string;
@@ -18,6 +21,7 @@ export interface Finished {
 
 /** Runs steps from the root of the checkout, and ends the one that runs when told to stop. */
 export class StepRunner {
+  private isStopping = false;
   private readonly running = new Set<() => Promise<void>>();
   private readonly root: string;
   private readonly environment: NodeJS.ProcessEnv;
@@ -43,11 +47,13 @@ export class StepRunner {
     }
     await exitOf(child);
     this.running.delete(stop);
+    if (this.isStopping) await FOREVER;
     const seconds = (performance.now() - began) / 1000;
     return { exitCode: child.exitCode ?? 1, output: output.join(''), seconds };
   }
 
   async stop(): Promise<void> {
+    this.isStopping = true;
     await Promise.all([...this.running].map((stop) => stop()));
   }
 }
