@@ -40,7 +40,7 @@ async function main(config: Config, log: Logger): Promise<void> {
   stopOnSignal(log, async () => {
     stopHousekeeping();
     await drain(server);
-    await services.imports.settle();
+    await services.commits.settle();
     await services.engine.close();
     await services.passwords.close();
     await database.close();

@@ -13,6 +13,7 @@ import { Editions } from './editions/editions.ts';
 import { FieldStrengths } from './field-strengths/field-strengths.ts';
 import { Idempotency } from './http/idempotency.ts';
 import { Limits } from './http/limits.ts';
+import { Commits } from './imports/commits.ts';
 import { Imports } from './imports/imports.ts';
 import { Uploads } from './imports/uploads.ts';
 import type { Logger } from './logger.ts';
@@ -37,11 +38,13 @@ export function createServices(database: Sequelize, config: Config, log: Logger)
   const regions = new Regions(database);
   const editions = new Editions(database, regions);
   const lists = new ListsAtSites(editions);
+  const uploads = new Uploads(join(config.DATA_DIR, 'uploads'));
+  const editionWriter = new EditionWriter(database);
+  const commits = new Commits(database, editionWriter, uploads, log);
   const engine = new Engine();
   const assessments = new Assessments(lists, engine);
   const receivers = new Receivers(database, accounts);
   const sites = new Sites(database);
-  const uploads = new Uploads(join(config.DATA_DIR, 'uploads'));
   return {
     idempotency: new Idempotency(database),
     limits: new Limits(database, config),
@@ -56,7 +59,8 @@ export function createServices(database: Sequelize, config: Config, log: Logger)
     regions,
     editions,
     uploads,
-    imports: new Imports(database, regions, new EditionWriter(database), uploads, log),
+    imports: new Imports(database, regions, editionWriter, uploads, commits),
+    commits,
     fieldStrengths: new FieldStrengths(lists, engine),
     engine,
     assessments,

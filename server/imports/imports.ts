@@ -1,4 +1,3 @@
-import { AsyncLocalStorage } from 'node:async_hooks';
 import { randomUUID } from 'node:crypto';
 import { parse } from 'node:path';
 
@@ -15,26 +14,16 @@ import type { Region } from '../../shared/contracts/region.ts';
 import { inTransaction } from '../db/transaction.ts';
 import type { Actor } from '../http/actor.ts';
 import { ConflictError, NotFoundError } from '../http/errors.ts';
-import type { Logger } from '../logger.ts';
 import { askedColumns } from './asked-columns.ts';
-import {
-  cancel,
-  claimCheck,
-  claimCommit,
-  dropCheck,
-  dropCommit,
-  failCommit,
-  failExpired,
-  finishCheck,
-  undo,
-} from './import-claims.ts';
+import { cancel, claimCheck, dropCheck, failExpired, finishCheck, undo } from './import-claims.ts';
 import { ImportModel } from './import-model.ts';
 import { toProposal, toState } from './import-answers.ts';
 import { checkList } from './list-check.ts';
 import { inspectList, type ListReading } from './list-inspection.ts';
 import { rejectedRows } from './list-rejects.ts';
 import { type KnownRow, RowTally } from './row-tally.ts';
-import { ImportLost, type ListWriter, storeList } from './store-list.ts';
+import { busy } from './import-busy.ts';
+import type { Commits } from './commits.ts';
 import type { ReceivedFile, Uploads } from './uploads.ts';
 
 /** What the imports need of the regions. */
@@ -43,7 +32,7 @@ interface RegionRegister {
 }
 
 /** What the imports need of the editions. */
-interface EditionStore extends ListWriter {
+interface EditionStore {
   latest(regionId: number): Promise<number | null>;
   marks(editionId: number): AsyncIterable<readonly KnownRow[]>;
   remove(editionId: number): Promise<void>;
@@ -58,23 +47,20 @@ export class Imports {
   private readonly regions: RegionRegister;
   private readonly editions: EditionStore;
   private readonly uploads: Uploads;
-  private readonly log: Logger;
-  /** Runs a job outside the request that began it, and outside that request's transaction. */
-  private readonly apart = AsyncLocalStorage.snapshot();
-  private readonly jobs = new Set<Promise<void>>();
+  private readonly commits: Pick<Commits, 'begin'>;
 
   constructor(
     database: Sequelize,
     regions: RegionRegister,
     editions: EditionStore,
     uploads: Uploads,
-    log: Logger,
+    commits: Pick<Commits, 'begin'>,
   ) {
     this.database = database;
     this.regions = regions;
     this.editions = editions;
     this.uploads = uploads;
-    this.log = log;
+    this.commits = commits;
     ImportModel.register(database);
   }
 
@@ -159,23 +145,7 @@ export class Imports {
 
   /** Begins to store the list; the job goes on when the request is over. */
   async commit(actor: Actor, regionId: number, id: number): Promise<ImportState> {
-    const row = await this.find(actor, regionId, id);
-    const { counts } = row;
-    if (counts && counts.new + counts.changed + counts.same === 0) {
-      throw new ConflictError(
-        'No row of the list can be stored. Mend the file and upload it again.',
-      );
-    }
-    const worker = randomUUID();
-    if (!(await claimCommit(id, regionId, worker))) throw await this.whyNotCommitted(row);
-    if ((await this.editions.latest(regionId)) !== row.baseEditionId) {
-      await dropCommit(id, worker);
-      throw new ConflictError(
-        'Another edition was stored or undone since this list was checked. Check it again.',
-        'edition-changed',
-      );
-    }
-    this.begin(row, worker);
+    await this.commits.begin(await this.find(actor, regionId, id));
     return this.state(actor, regionId, id);
   }
 
@@ -225,11 +195,6 @@ export class Imports {
     });
   }
 
-  /** Waits for the jobs of this process: a stop lets them finish. */
-  async settle(): Promise<void> {
-    await Promise.all(this.jobs);
-  }
-
   private async find(actor: Actor, regionId: number, id: number): Promise<ImportModel> {
     await this.regions.get(actor, regionId);
     await failExpired();
@@ -248,45 +213,6 @@ export class Imports {
     return { ...found, baseEditionId };
   }
 
-  private begin(row: ImportModel, worker: string): void {
-    const order = {
-      id: row.id,
-      worker,
-      path: this.uploads.path(row.storedName),
-      reading: row.reading,
-      total: row.counts?.total ?? 1,
-      edition: {
-        regionId: row.regionId,
-        label: row.label ?? row.fileName,
-        date: row.date ?? '',
-        source: row.fileName,
-      },
-    };
-    const job = this.apart(() => storeList(this.database, this.editions, order))
-      .catch((error: unknown) => this.fail(row.id, worker, error))
-      .finally(() => this.jobs.delete(job));
-    this.jobs.add(job);
-  }
-
-  private async fail(id: number, worker: string, error: unknown): Promise<void> {
-    if (error instanceof ImportLost) return;
-    this.log.error({ error, importId: id }, 'import failed');
-    const reason = 'The list could not be stored, and nothing of it was. Commit it again.';
-    // A database that is away cannot be told; the lease ends by itself.
-    await failCommit(id, worker, reason).catch(() => undefined);
-  }
-
-  private async whyNotCommitted(before: ImportModel): Promise<ConflictError> {
-    const row = (await ImportModel.findByPk(before.id)) ?? before;
-    const isNext = row.state === 'ready' || row.state === 'failed';
-    if (isNext && row.counts) {
-      return new ConflictError('Another list is being stored in this region. Wait for it.');
-    }
-    return isNext || row.state === 'uploaded'
-      ? new ConflictError('Check the list first: say how its columns are to be read.')
-      : busy(row);
-  }
-
   private async today(): Promise<string> {
     const [row] = await this.database.query<{ today: string }>(
       "SELECT DATE_FORMAT(NOW(), '%Y-%m-%d') AS today",
@@ -295,14 +221,3 @@ export class Imports {
     return row?.today ?? '';
   }
 }
-
-const WORDS: Readonly<Partial<Record<ImportState['state'], string>>> = {
-  checking: 'is being checked',
-  committing: 'is being stored',
-  committed: 'has been stored',
-  cancelled: 'was cancelled',
-  undone: 'was undone',
-};
-
-const busy = ({ state }: ImportModel): ConflictError =>
-  new ConflictError(`This import ${WORDS[state] ?? 'has changed'}.`);

@@ -88,7 +88,7 @@ describe('storing a list', () => {
     });
 
     await librarian.post(`${path}/commit`).expect(202);
-    await server.services.imports.settle();
+    await server.services.commits.settle();
 
     expect(seen?.state).toBe('committing');
     expect((await librarian.get(path)).body).toMatchObject({ state: 'cancelled', editionId: null });
@@ -125,7 +125,7 @@ describe('storing a list', () => {
 
     const statuses = answers.map(({ status }) => status).sort();
     expect(statuses).toEqual([202, 409, 409]);
-    await server.services.imports.settle();
+    await server.services.commits.settle();
     expect(await rowsOf(server, `editions WHERE region_id = ${first.regionId}`)).toBe(1);
   });
 

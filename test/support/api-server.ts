@@ -73,7 +73,7 @@ export async function startApiServer(
     close: async () => {
       server.closeAllConnections();
       await new Promise((resolve) => server.close(resolve));
-      await services.imports.settle();
+      await services.commits.settle();
       await services.engine.close();
       await services.passwords.close();
       await database.close();
