@@ -1,6 +1,6 @@
 import { TestKey } from '@angular/cdk/testing';
 import { TestbedHarnessEnvironment } from '@angular/cdk/testing/testbed';
-import { Component, signal } from '@angular/core';
+import { ChangeDetectionStrategy, Component, signal } from '@angular/core';
 import { TestBed } from '@angular/core/testing';
 import { MatButtonHarness } from '@angular/material/button/testing';
 
@@ -61,6 +61,7 @@ const band: JudgedBand = {
       (working)="worked.set($event)"
     />
   `,
+  changeDetection: ChangeDetectionStrategy.OnPush,
 })
 class Page {
   readonly band = band;

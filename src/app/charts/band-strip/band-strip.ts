@@ -15,11 +15,13 @@ import { frame, NARROW } from '../frame';
 import { observeWidth } from '../observe-width';
 import { Plot } from '../plot/plot';
 import { type PlotMark } from '../plot/plot-mark';
+import { PlotLabels } from '../plot/plot-labels';
 import { RangeBars } from '../range-bars/range-bars';
 import { bandUnit } from '../readings';
-import { numerals, scaleMarks } from '../scale-marks';
 import { TwinTable } from '../twin-table/twin-table';
 import { type Window } from '../zoom-window';
+import { DialGlass } from './dial-glass';
+import { HeardMarks } from './heard-marks';
 import {
   breakthroughCurves,
   dialScale,
@@ -33,15 +35,12 @@ import {
 } from './strip-layout';
 import { stripColumns, stripReadout, stripRows, stripSentence } from './strip-words';
 
-const NUMERAL_SIZE = 13;
-const TICK_GAP = 5;
-
 /** One band as a strip like a dial glass: what is heard over it, the scale, the stations under it. */
 @Component({
   selector: 'app-band-strip',
   templateUrl: './band-strip.html',
   styleUrl: './band-strip.scss',
-  imports: [ChartHead, Plot, RangeBars, TwinTable],
+  imports: [ChartHead, DialGlass, HeardMarks, Plot, PlotLabels, RangeBars, TwinTable],
   changeDetection: ChangeDetectionStrategy.OnPush,
 })
 export class BandStrip {
@@ -78,17 +77,13 @@ export class BandStrip {
     const { low, high } = this.range();
     return dialScale(low, high, this.frame().innerWidth, this.isLog());
   });
-  private readonly shown = computed<Window>(
+  protected readonly shown = computed<Window>(
     () => this.window() ?? [this.range().low, this.range().high],
   );
   protected readonly x = computed(() =>
     dialScale(...this.shown(), this.frame().innerWidth, this.isLog()),
   );
-  protected readonly unit = computed(() => bandUnit(this.range().high));
-  protected readonly numerals = computed(() =>
-    numerals(this.x(), ...this.shown(), this.unit().write, NUMERAL_SIZE),
-  );
-  protected readonly ticks = computed(() => scaleMarks(this.x(), ...this.shown(), TICK_GAP));
+  private readonly unit = computed(() => bandUnit(this.range().high));
   protected readonly levels = computed(() =>
     this.loudness()
       .ticks(3)

@@ -33,7 +33,7 @@ export interface WantedMark {
 
 /** Id of a response among the marks of every chart and table. */
 export const responseMark = (band: string, each: JudgedResponse): string =>
-  ['response', band, each.station, each.secondStation ?? '', each.m, each.n, each.dialHz].join('|');
+  ['response', each.station, each.secondStation ?? '', each.m, each.n, each.dialHz, band].join('|');
 
 /** How far a response stands over the noise as it is heard; null where no level is known. */
 export function overNoise({ interferenceDb, weightingDb, noiseDb }: JudgedResponse): number | null {
@@ -86,6 +86,13 @@ function ifRejection({ rejection }: JudgedBand, dialHz: number): number {
   return scale.clamp(true)(dialHz);
 }
 
+/** The level of a breakthrough along the dial, as a path. */
+export interface BreakthroughCurve {
+  readonly id: string;
+  readonly path: string;
+  readonly colour: string;
+}
+
 const MOST_CURVES = 3;
 
 /**
@@ -97,7 +104,7 @@ export function breakthroughCurves(
   x: DialScale,
   y: ScaleLinear<number, number>,
   noise: (hz: number) => number | null,
-): { id: string; path: string; colour: string }[] {
+): BreakthroughCurve[] {
   const [low = 0, high = 0] = x.domain();
   return band.responses
     .filter(({ m, n, hidden, dialHz }) => m === 0 && n === 1 && hidden === null && dialHz !== null)

@@ -1,6 +1,6 @@
 import { TestKey } from '@angular/cdk/testing';
 import { TestbedHarnessEnvironment } from '@angular/cdk/testing/testbed';
-import { Component, signal } from '@angular/core';
+import { ChangeDetectionStrategy, Component, signal } from '@angular/core';
 import { TestBed } from '@angular/core/testing';
 import { MatButtonHarness } from '@angular/material/button/testing';
 
@@ -21,7 +21,7 @@ const stations = Array.from({ length: 20 }, (_, at) => ({
   imports: [ChoiceChart],
   template: `
     <app-choice-chart
-      description="Twenty stations."
+      [description]="description"
       [stations]="stations"
       [range]="{ low: 420000, high: 490000 }"
       [reach]="{ low: 428000, high: 482000 }"
@@ -33,8 +33,10 @@ const stations = Array.from({ length: 20 }, (_, at) => ({
       (settled)="settled.set(trialHz())"
     />
   `,
+  changeDetection: ChangeDetectionStrategy.OnPush,
 })
 class Page {
+  readonly description = 'Twenty stations.';
   readonly stations = stations;
   readonly trialHz = signal(455_000);
   readonly picked = signal<string | null>(null);

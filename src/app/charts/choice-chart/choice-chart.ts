@@ -16,10 +16,12 @@ import { ChartHead } from '../chart-head/chart-head';
 import { frame, NARROW } from '../frame';
 import { observeWidth } from '../observe-width';
 import { Plot } from '../plot/plot';
+import { PlotLabels } from '../plot/plot-labels';
 import { type Readout } from '../plot/plot-mark';
 import { distance, field, kilohertz, tenths } from '../readings';
 import { TwinTable } from '../twin-table/twin-table';
 import { type Window } from '../zoom-window';
+import { ChoiceGround, type DrawnStretch } from './choice-ground';
 import {
   type HeardStation,
   levelScale,
@@ -29,6 +31,7 @@ import {
   stemLabels,
   stems,
 } from './choice-layout';
+import { ChoiceStems } from './choice-stems';
 import { IfMarker } from './if-marker';
 
 const FIELD_HEIGHT = 300;
@@ -44,7 +47,17 @@ export interface Stretch {
   selector: 'app-choice-chart',
   templateUrl: './choice-chart.html',
   styleUrl: './choice-chart.scss',
-  imports: [ChartHead, FrequencyAxis, IfMarker, LevelAxis, Plot, TwinTable],
+  imports: [
+    ChartHead,
+    ChoiceGround,
+    ChoiceStems,
+    FrequencyAxis,
+    IfMarker,
+    LevelAxis,
+    Plot,
+    PlotLabels,
+    TwinTable,
+  ],
   changeDetection: ChangeDetectionStrategy.OnPush,
 })
 export class ChoiceChart {
@@ -191,7 +204,7 @@ export class ChoiceChart {
     return hz >= low && hz <= high;
   }
 
-  private stretch({ low, high }: Stretch): { x: number; width: number } {
+  private stretch({ low, high }: Stretch): DrawnStretch {
     const width = this.frame().innerWidth;
     const from = Math.min(Math.max(this.x()(low), 0), width);
     const to = Math.min(Math.max(this.x()(high), 0), width);

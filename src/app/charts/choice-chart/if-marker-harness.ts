@@ -1,4 +1,4 @@
-import { ComponentHarness, type ModifierKeys, TestKey } from '@angular/cdk/testing';
+import { ComponentHarness, type ModifierKeys, type TestKey } from '@angular/cdk/testing';
 
 /** The marker of the IF on trial. */
 export class IfMarkerHarness extends ComponentHarness {

@@ -1,4 +1,4 @@
-import { ComponentHarness, TestKey } from '@angular/cdk/testing';
+import { ComponentHarness, type TestKey } from '@angular/cdk/testing';
 
 /** A plot as its reader meets it: keys, readout, and what is said. */
 export class PlotHarness extends ComponentHarness {

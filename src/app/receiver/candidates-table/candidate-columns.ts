@@ -59,6 +59,13 @@ export const candidateColumns = (
   allColumns(period).filter(({ key }) => key !== 'bfo' || bfo !== null);
 
 const allColumns = (period: Period): readonly CandidateColumn[] => [
+  ...heardColumns(period),
+  ...frequencyColumns,
+  ...effortColumns,
+];
+
+/** What is heard with the candidate. */
+const heardColumns = (period: Period): readonly CandidateColumn[] => [
   {
     key: 'deficit',
     label: $localize`Left to be desired, dB`,
@@ -74,6 +81,10 @@ const allColumns = (period: Period): readonly CandidateColumn[] => [
   ratio('breakthrough', $localize`Worst breakthrough, ratio dB`, period),
   ratio('image', $localize`Worst image, ratio dB`, period),
   ratio('products', $localize`Worst product, ratio dB`, period),
+];
+
+/** Where the candidate and its harmonics lie. */
+const frequencyColumns: readonly CandidateColumn[] = [
   {
     key: 'harmonic',
     label: $localize`Nearest harmonic whistle, kHz`,
@@ -104,6 +115,10 @@ const allColumns = (period: Period): readonly CandidateColumn[] => [
     text: ({ windowHz }) =>
       windowHz ? `${kilohertz(windowHz.low)} – ${kilohertz(windowHz.high)}` : NOTHING,
   },
+];
+
+/** What must move with it, and what that costs. */
+const effortColumns: readonly CandidateColumn[] = [
   {
     key: 'bfo',
     label: $localize`BFO moves, kHz`,

@@ -11,12 +11,12 @@ import {
   viewChildren,
 } from '@angular/core';
 import { MatButtonModule } from '@angular/material/button';
-import { MatCheckboxModule } from '@angular/material/checkbox';
-import { MatChipsModule } from '@angular/material/chips';
 
 import { type JudgedBand } from '../../charts/band-strip/strip-layout';
 import { type Cause } from '../../charts/cause-mark';
+import { CauseSign } from '../../charts/cause-sign';
 import { Ledger } from '../ledger/ledger';
+import { ResponseFilter } from './response-filter';
 import { causesHeard, type ResponseRow, responseRows } from './response-rows';
 
 const PAGE = 20;
@@ -26,7 +26,7 @@ const PAGE = 20;
   selector: 'app-response-table',
   templateUrl: './response-table.html',
   styleUrl: './response-table.scss',
-  imports: [Ledger, MatButtonModule, MatCheckboxModule, MatChipsModule],
+  imports: [CauseSign, Ledger, MatButtonModule, ResponseFilter],
   changeDetection: ChangeDetectionStrategy.OnPush,
 })
 export class ResponseTable {

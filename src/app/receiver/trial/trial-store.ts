@@ -5,6 +5,7 @@ import type { Period } from '../../../../shared/radio/site';
 import { candidateRange, reachOf } from './candidate-range';
 import { latestAnswer } from './latest-answer';
 import { sourceFields } from './station-source';
+import { noiseAt } from './surroundings';
 import { TrialApi } from './trial-api';
 import { TrialInputs, type TrialSetup } from './trial-inputs';
 
@@ -114,6 +115,11 @@ export class TrialStore {
     ].find((each) => each?.ifHz === trialHz);
   });
 
+  /** Noise in the set's bandwidth against the frequency, dB(µV/m). */
+  readonly noise = computed<(hz: number) => number | null>(() => {
+    const setup = this.setup();
+    return setup ? noiseAt(setup.site, setup.receiver) : () => null;
+  });
   readonly stations = computed(() =>
     (this.fields.value()?.fields ?? []).map(({ station, ...each }) => ({ id: station, ...each })),
   );

@@ -1,0 +1,39 @@
+import { ChangeDetectionStrategy, Component, computed, inject, input } from '@angular/core';
+import { MatButtonModule } from '@angular/material/button';
+
+import { kilohertz } from '../../charts/readings';
+import { TrialStore } from '../trial/trial-store';
+import { type Advice } from './advice';
+import { Caution } from './caution';
+import { verdictSentences } from './verdict-words';
+
+/** What to do about the IF, and what the set is like with the IF on trial. */
+@Component({
+  selector: 'app-advice-panel',
+  templateUrl: './advice-panel.html',
+  styleUrl: './advice-panel.scss',
+  imports: [Caution, MatButtonModule],
+  changeDetection: ChangeDetectionStrategy.OnPush,
+  host: { 'aria-live': 'polite' },
+})
+export class AdvicePanel {
+  protected readonly store = inject(TrialStore);
+
+  readonly advice = input.required<Advice>();
+
+  protected readonly verdict = computed(() => {
+    const judged = this.store.judged.value();
+    if (!judged) return [];
+    const present = this.store.isMoved() ? this.store.present.value() : undefined;
+    return verdictSentences(judged.verdict, present, this.store.period(), this.store.nameOf);
+  });
+  protected readonly target = computed(() => kilohertz(this.advice().ifHz));
+  protected readonly onTrial = computed(() => kilohertz(this.store.trialHz()));
+  protected readonly skipped = computed(() => {
+    const counts = new Map<string, number>();
+    for (const { reason } of this.store.judged.value()?.skipped ?? []) {
+      counts.set(reason, (counts.get(reason) ?? 0) + 1);
+    }
+    return [...counts].map(([reason, count]) => ({ reason, count }));
+  });
+}
