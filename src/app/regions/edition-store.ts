@@ -9,6 +9,11 @@ import {
 } from '../../../shared/contracts/region';
 import { remote } from '../core/remote';
 
+/** Stations found, and what was searched for. */
+interface StationPage extends Page<ListedStation> {
+  readonly search: string;
+}
+
 const addressOf = (id: string) => `/api/editions/${encodeURIComponent(id)}`;
 
 /** Editions and their stations. Both are read in an injection context. */
@@ -25,8 +30,11 @@ export class EditionStore {
       const asked = new URLSearchParams({ page: `${page}`, pageSize: `${pageSize}`, search });
       return `${addressOf(id())}/stations?${asked.toString()}`;
     }, pageOf(listedStation));
-    const value = linkedSignal<Page<ListedStation> | undefined, Page<ListedStation> | undefined>({
-      source: page.value,
+    const value = linkedSignal<StationPage | undefined, StationPage | undefined>({
+      source: () => {
+        const found = page.value();
+        return found && { ...found, search: query().search };
+      },
       computation: (next, previous) => next ?? previous?.value,
     });
     return { ...page, value: value.asReadonly() };
