@@ -1,14 +1,14 @@
 import { TestbedHarnessEnvironment } from '@angular/cdk/testing/testbed';
 import { provideHttpClient } from '@angular/common/http';
 import { HttpTestingController, provideHttpClientTesting } from '@angular/common/http/testing';
-import { Component } from '@angular/core';
+import { ChangeDetectionStrategy, Component } from '@angular/core';
 import { TestBed } from '@angular/core/testing';
 import { provideRouter } from '@angular/router';
 
 import { App } from './app';
 import { AppHarness } from './app-harness';
 
-@Component({ template: 'a page' })
+@Component({ template: '', changeDetection: ChangeDetectionStrategy.OnPush })
 class Page {}
 
 const membership = (id: number, name: string, role: string) => ({ id, name, role });

@@ -111,7 +111,8 @@ describe('the signed-in guard', () => {
     const entered = enter('/receivers/3?if=455000');
     calls.expectOne('/api/session').flush(null, unauthorised);
 
-    const tree = TestBed.inject(Router).parseUrl('/sign-in?next=%2Freceivers%2F3%3Fif%3D455000');
-    expect(String(await entered)).toBe(String(tree));
+    expect(await entered).toEqual(
+      TestBed.inject(Router).parseUrl('/sign-in?next=%2Freceivers%2F3%3Fif%3D455000'),
+    );
   });
 });

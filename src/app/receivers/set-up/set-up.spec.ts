@@ -1,7 +1,7 @@
 import { TestbedHarnessEnvironment } from '@angular/cdk/testing/testbed';
 import { provideHttpClient } from '@angular/common/http';
 import { HttpTestingController, provideHttpClientTesting } from '@angular/common/http/testing';
-import { Component, signal } from '@angular/core';
+import { ChangeDetectionStrategy, Component, signal } from '@angular/core';
 import { TestBed } from '@angular/core/testing';
 import { MatButtonHarness } from '@angular/material/button/testing';
 import { MatExpansionPanelHarness } from '@angular/material/expansion/testing';
@@ -20,7 +20,7 @@ import { ConflictHarness } from './conflict/conflict-harness';
 import { SetUp } from './set-up';
 import { SetUpStore } from './set-up-store';
 
-@Component({ template: '' })
+@Component({ template: '', changeDetection: ChangeDetectionStrategy.OnPush })
 class Elsewhere {}
 
 const kestrel: StoredReceiver = {

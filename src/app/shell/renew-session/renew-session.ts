@@ -7,6 +7,7 @@ import { MatInputModule } from '@angular/material/input';
 
 import { toProblem } from '../../core/api-problem';
 import { Session } from '../../core/session/session';
+import { formFieldDefaults } from '../../ui/form-field-defaults';
 
 /** Signs the same user in again over the page, so that nothing typed there is lost. */
 @Component({
@@ -18,7 +19,9 @@ import { Session } from '../../core/session/session';
     MatInputModule,
     ReactiveFormsModule,
   ],
+  providers: [formFieldDefaults],
   templateUrl: './renew-session.html',
+  styleUrl: './renew-session.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,
 })
 export class RenewSession {

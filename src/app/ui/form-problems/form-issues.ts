@@ -41,7 +41,7 @@ export function controlIssues(control: AbstractControl, path = ''): FormIssue[] 
 export function revalidate(control: AbstractControl): void {
   if (control instanceof FormGroup || control instanceof FormArray) {
     Object.values(control.controls).forEach((child) => {
-      revalidate(child as AbstractControl);
+      revalidate(child);
     });
   }
   control.updateValueAndValidity({ onlySelf: true, emitEvent: false });

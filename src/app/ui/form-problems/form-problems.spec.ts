@@ -1,5 +1,5 @@
 import { TestbedHarnessEnvironment } from '@angular/cdk/testing/testbed';
-import { Component, signal } from '@angular/core';
+import { ChangeDetectionStrategy, Component, signal } from '@angular/core';
 import { TestBed } from '@angular/core/testing';
 
 import type { FormIssue } from './form-issues';
@@ -10,9 +10,10 @@ import { FormProblemsHarness } from './form-problems-harness';
   imports: [FormProblems],
   template: `
     <app-form-problems [issues]="issues()" (follow)="followed.set($event)" />
-    <input id="bands.0.lowHz" aria-label="From" />
-    <div id="bands.1"><button type="button">Remove</button></div>
+    <input id="bands.0.lowHz" i18n-aria-label aria-label="From" />
+    <div id="bands.1"><button type="button" i18n>Remove</button></div>
   `,
+  changeDetection: ChangeDetectionStrategy.OnPush,
 })
 class Page {
   readonly issues = signal<readonly FormIssue[]>([]);

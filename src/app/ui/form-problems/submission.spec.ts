@@ -9,7 +9,7 @@ const schema = z.object({
   name: z.string(),
   range: z
     .object({ low: z.number(), high: z.number() })
-    .refine(({ low, high }) => high > low, { path: ['high'], message: 'Must end higher.' }),
+    .refine(({ low, high }) => high > low, { path: ['high'], error: 'Must end higher.' }),
 });
 const valid = { name: 'A', range: { low: 1, high: 2 } };
 

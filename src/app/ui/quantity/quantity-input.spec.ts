@@ -1,5 +1,5 @@
 import { TestbedHarnessEnvironment } from '@angular/cdk/testing/testbed';
-import { Component } from '@angular/core';
+import { ChangeDetectionStrategy, Component } from '@angular/core';
 import { TestBed } from '@angular/core/testing';
 import { FormControl } from '@angular/forms';
 import { MatFormFieldHarness } from '@angular/material/form-field/testing';
@@ -14,8 +14,10 @@ import { QuantityInput } from './quantity-input';
     quantity="frequency"
     path="ifHz"
     label="IF"
+    i18n-label
     [control]="control"
   />`,
+  changeDetection: ChangeDetectionStrategy.OnPush,
 })
 class Page {
   readonly control = new FormControl<number | null>(455_000, needed('Give the IF.'));

@@ -7,7 +7,8 @@ export interface Difference {
   readonly theirs: string;
 }
 
-type Leaves = Map<string, unknown>;
+type Leaf = string | number | boolean;
+type Leaves = Map<string, Leaf>;
 
 /** Where two receivers differ, field by field. */
 export function differences(mine: object, theirs: object): Difference[] {
@@ -25,7 +26,7 @@ export function differences(mine: object, theirs: object): Difference[] {
 /** Every single value under its path; what is not given has no path. */
 function leaves(value: unknown, path = ''): Leaves {
   if (value === null || value === undefined) return new Map();
-  if (typeof value !== 'object') return new Map([[path, value]]);
+  if (typeof value !== 'object') return new Map([[path, value as Leaf]]);
   return new Map(
     Object.entries(value).flatMap(([key, part]) => [
       ...leaves(part, path === '' ? key : `${path}.${key}`),
@@ -73,7 +74,7 @@ function fieldWords(path: string): string {
     .replace(/^, /u, '');
 }
 
-function valueWords(path: string, value: unknown): string {
+function valueWords(path: string, value: Leaf | undefined): string {
   if (value === undefined) return '–';
   if (typeof value !== 'number') return String(value);
   if (path.endsWith('Hz')) return formatFrequency(value);
