@@ -70,7 +70,7 @@ export interface Candidate {
   readonly harmonics: readonly HarmonicOnChannel[];
   /** Pairs of strong stations that make the IF between them, where there are most. */
   readonly intermodulation: { readonly count: number; readonly nearestBeatHz: number | null };
-  /** How far the beat oscillator must follow. */
+  /** How far a beat oscillator must follow: the change of the IF. */
   readonly bfoShiftHz: number;
   /** Change of every IF capacitance, as a fraction. */
   readonly capacitanceChange: number;
@@ -97,8 +97,8 @@ export interface Candidates {
  *
  * @example
  *   judgeCandidates({ receiver, cases: [{ site, stations, fields: { night }, raster }],
- *     periods: ['night'], fromHz: 545_000, toHz: 565_000, stepHz: 500, maxM: 3, maxN: 2 })
- *     .candidates[0]?.ifHz; // 555000
+ *     periods: ['night'], fromHz: 551_000, toHz: 560_000, stepHz: 500, maxM: 3, maxN: 2 })
+ *     .candidates[0]?.ifHz; // 555000, midway between strong stations on 550 and 560 kHz
  */
 export function judgeCandidates(input: CandidatesInput): Candidates {
   const { receiver } = input;

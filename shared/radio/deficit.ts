@@ -54,6 +54,7 @@ export class Deficit implements FindingSink {
   }
 
   take(finding: Readonly<Finding>): void {
+    // Worst figures, the loudest on an empty dial and the power sums all pass over what is hidden.
     if (finding.heard === 0) return;
     const { dial } = this;
     const { m, n, row, strongest } = finding;
@@ -81,7 +82,8 @@ export class Deficit implements FindingSink {
 
   /**
    * The deficit: decibels missing to the protection ratio, summed over the usable stations, and
-   * once for the worst breakthrough at an empty setting.
+   * once for the worst breakthrough at an empty setting. A breakthrough counts at the setting at
+   * which it is judged and at no other, though it is heard at all of them.
    *
    * @param kind Counts only this kind of response; left out: all of them.
    */

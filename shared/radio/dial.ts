@@ -232,6 +232,8 @@ export class Dial {
     const noiseDb = noiseField(site, hz, selectivity.b6Hz);
     const strongest = group < 0 ? -1 : (spectrum.wanted[group] ?? -1);
     const groundDb = spectrum.groundDb[strongest] ?? -Infinity;
+    // Where the strongest is too weak to be usable nobody listens to it: the wanted field is assumed,
+    // there is no wanted station, and what is listed here counts as the band.
     const usable = groundDb >= noiseDb + USABLE_OVER_NOISE_DB;
     this.hz[row] = hz;
     this.noiseDb[row] = noiseDb;

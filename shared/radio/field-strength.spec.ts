@@ -1,8 +1,9 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 
-import { FIELD_NOTES, fieldStrengths } from './field-strength.ts';
-import type { Period, Site } from './site.ts';
+import { FIELD_NOTES, FieldsAtSite, fieldStrengths } from './field-strength.ts';
+import { sunTimes } from './path.ts';
+import type { ReceptionTime, Site } from './site.ts';
 import type { Station } from './station.ts';
 
 const site: Site = {
@@ -27,8 +28,8 @@ const station: Station = {
   fieldDb: null,
 };
 
-function fieldOf(changes: Partial<Station>, at: Partial<Site> = {}, period: Period = 'day') {
-  const [field] = fieldStrengths({ ...site, ...at }, [{ ...station, ...changes }], period);
+function fieldOf(changes: Partial<Station>, at: Partial<Site> = {}, time: ReceptionTime = 'day') {
+  const [field] = fieldStrengths({ ...site, ...at }, [{ ...station, ...changes }], time);
   if (!field) throw new Error('one station, one field');
   return field;
 }
@@ -165,5 +166,84 @@ describe('fieldStrengths', () => {
     const strong = fieldOf({ powerNightW: 500 }, {}, 'night');
 
     expect(level(strong.fieldDb) - level(weak.fieldDb)).toBeCloseTo(10, 9);
+  });
+});
+
+describe('fieldStrengths at a moment', () => {
+  /** 500 km to the north: by night the sky wave rules. */
+  const far: Partial<Station> = { latitude: 48.5, powerDayW: 1000, powerNightW: 1000 };
+  const { sunrise, sunset } = sunTimes(
+    { latitude: 46.25, longitude: -20 },
+    new Date('2026-03-20T13:00:00Z'),
+  );
+  const at = (from: Date | null, minutes: number) => new Date(Number(from) + minutes * 60_000);
+
+  it('is the day at noon and the night at midnight', () => {
+    expect(fieldOf({}, {}, new Date('2026-03-20T13:20:00Z'))).toEqual(fieldOf({}));
+    expect(fieldOf({}, {}, new Date('2026-03-20T01:20:00Z'))).toEqual(fieldOf({}, {}, 'night'));
+  });
+
+  it('fades the sky wave 12 dB in the first hour of sun, and says so', () => {
+    const night = fieldOf(far, {}, 'night');
+    const morning = fieldOf(far, {}, at(sunrise, 60));
+
+    expect(level(night.skyDb) - level(morning.skyDb)).toBeCloseTo(12.04, 1);
+    expect(morning.notes).toEqual([FIELD_NOTES.criticalHours]);
+    expect(fieldOf(far, {}, at(sunset, -60)).skyDb).toBeCloseTo(level(morning.skyDb), 0);
+    expect(fieldOf(far, {}, at(sunrise, 121)).skyDb).toBeNull();
+    expect(fieldOf(far, {}, at(sunset, 1))).toEqual(night);
+  });
+
+  it('has no step where the power does not change', () => {
+    for (let minute = -10; minute < 130; minute++) {
+      const [now, next] = [minute, minute + 1].map((each) =>
+        level(fieldOf(far, {}, at(sunrise, each)).fieldDb),
+      );
+
+      expect(Math.abs((now ?? NaN) - (next ?? NaN))).toBeLessThan(2);
+    }
+  });
+
+  it('takes the power by the sun at the station, not at the site', () => {
+    // Sunrise in the east, still dark at the site 30 degrees to the west.
+    const east = { longitude: 10, powerDayW: 1000, powerNightW: 0 };
+
+    expect(fieldOf(east, {}, new Date('2026-03-20T06:00:00Z')).fieldDb).not.toBeNull();
+    expect(fieldOf(east, {}, new Date('2026-03-20T05:00:00Z')).notes).toEqual([FIELD_NOTES.silent]);
+  });
+
+  it('holds in the polar day and the polar night', () => {
+    const north = { ...far, latitude: 80 };
+    const here = { latitude: 75 };
+
+    expect(fieldOf(north, here, new Date('2026-06-21T00:00:00Z')).skyDb).toBeNull();
+    expect(fieldOf(north, here, new Date('2026-12-21T12:00:00Z'))).toEqual(
+      fieldOf(north, here, 'night'),
+    );
+  });
+
+  it('does without a place where both powers are the same, and says what lacks where not', () => {
+    const nowhere = { latitude: null, powerDayW: 5, powerNightW: 5 };
+    const time = new Date('2026-03-20T12:00:00Z');
+
+    expect(fieldOf(nowhere, {}, time).notes).toEqual([FIELD_NOTES.noStationPlace]);
+    expect(fieldOf({ ...nowhere, powerNightW: 0 }, {}, time).fieldDb).toBeNull();
+  });
+
+  it('answers for many moments what it answers for each', () => {
+    const fields = new FieldsAtSite(site, [{ ...station, ...far }, station]);
+    for (let hour = 0; hour < 24; hour++) {
+      const time = new Date(Date.UTC(2026, 2, 20, hour, 30));
+      const levels = (of: readonly { fieldDb: number | null }[]) =>
+        of.map(({ fieldDb }) => level(fieldDb).toFixed(6));
+
+      expect(levels(fields.at(time))).toEqual(
+        levels(fieldStrengths(site, [{ ...station, ...far }, station], time)),
+      );
+    }
+  });
+
+  it('refuses what is no moment', () => {
+    expect(() => fieldOf({}, {}, new Date(NaN))).toThrow(RangeError);
   });
 });

@@ -3,18 +3,13 @@
  *
  * @module radio/field-strength
  */
-import { GROUNDS } from './ground.ts';
-import { groundWave, LEAST_DISTANCE_M } from './ground-wave.ts';
-import { type Place, pathLength, pathMiddle } from './path.ts';
-import type { Ground, Period, Site } from './site.ts';
-import {
-  geomagneticLatitude,
-  SKY_WAVE_MAX_LATITUDE,
-  SKY_WAVE_RANGE_HZ,
-  skyWave,
-} from './sky-wave.ts';
+import { LEAST_DISTANCE_M } from './ground-wave.ts';
+import type { Place } from './path.ts';
+import type { Period, ReceptionTime, Site } from './site.ts';
+import { SKY_WAVE_MAX_LATITUDE, SKY_WAVE_RANGE_HZ } from './sky-wave.ts';
 import type { Station } from './station.ts';
-import { type Decibels, decibels, hertz, type Metres, powerSum } from './units.ts';
+import { GroundWaves, hasSkyWave, StationPath } from './station-path.ts';
+import { decibels, powerSum } from './units.ts';
 
 /** Field of one station at the site; null where it could not be computed, with the reason noted. */
 export interface FieldStrength {
@@ -42,115 +37,121 @@ export const FIELD_NOTES = {
     'There is no sky-wave model here below 150 and above 1710 kHz: this is the ground wave alone.',
   skyWaveExtrapolated: 'The sky wave below 535 kHz is extrapolated from the medium-wave formula.',
   skyWaveLatitude: 'The path runs beyond 60 degrees of geomagnetic latitude; it is taken as 60.',
+  criticalHours:
+    'The sun is up at the middle of the path for less than two hours: what is left of the sky wave is estimated.',
 } as const;
-
-/** What all stations of one request share. */
-interface Reception {
-  readonly place: Place | null;
-  readonly ground: Ground | null;
-  readonly period: Period;
-  readonly groundWaves: Map<number, (distance: Metres) => Decibels>;
-}
 
 /**
  * Field strength of stations at a site.
  *
  * By day the ground wave with the power by day; at night the powers of ground and sky wave added,
- * with the power at night. A station whose field is given passes through. A station that is silent,
- * or lacks what is needed, has no field and says why; nothing is ever NaN.
+ * with the power at night. At a moment the sun decides: at the station for the power, at the middle
+ * of the path for the sky wave, which fades over the two hours after sunrise and before sunset. A
+ * station whose field is given passes through. A station that is silent, or lacks what is needed,
+ * has no field and says why; nothing is ever NaN.
  *
  * Rough by nature: ground wave 10 dB at 50 km with the ground's conductivity, sky wave 8 dB from
  * night to night, directional aerials not considered.
  *
  * @param site The receiving site; place and ground are needed for stations without a given field.
  * @param stations The stations; frequencies in whole hertz, powers as e.m.r.p. in watts.
- * @param period Day or night.
+ * @param time Day or night for all, or a moment.
  * @returns One result for each station, in their order.
- * @throws {RangeError} If a frequency is not whole or a place is not on the earth.
+ * @throws {RangeError} If a frequency is not whole, a place is not on the earth or the moment is no
+ *   valid date.
  * @example
  *   // A station of 10 kW on 1 MHz, 50 km away over average ground, by day:
  *   fieldStrengths(site, [station], 'day')[0].fieldDb; // 67.03
  */
-export function fieldStrengths(
+export const fieldStrengths = (
   site: Site,
   stations: readonly Station[],
-  period: Period,
-): FieldStrength[] {
-  const reception: Reception = {
-    place: placeOf(site),
-    ground: site.ground,
-    period,
-    groundWaves: new Map(),
-  };
-  return stations.map((station) => fieldStrength(reception, station));
+  time: ReceptionTime,
+): FieldStrength[] => new FieldsAtSite(site, stations).at(time);
+
+/** Fields of stations at a site for several times: what does not change is worked out once. */
+export class FieldsAtSite {
+  private readonly place: Place | null;
+  private readonly groundWaves: GroundWaves | null;
+  private readonly stations: readonly Station[];
+  private readonly paths: readonly (StationPath | null)[];
+
+  /** Takes what `fieldStrengths` takes, and throws what it throws. */
+  constructor(site: Site, stations: readonly Station[]) {
+    const place = placeOf(site);
+    this.place = place;
+    this.groundWaves = site.ground === null ? null : new GroundWaves(site.ground);
+    this.stations = stations;
+    this.paths = stations.map((station) => {
+      const from = placeOf(station);
+      return place && from ? new StationPath(from, place) : null;
+    });
+  }
+
+  /** The fields at a time, as `fieldStrengths` gives them. */
+  at(time: ReceptionTime): FieldStrength[] {
+    return this.stations.map((station, index) =>
+      this.fieldOf(station, this.paths[index] ?? null, time),
+    );
+  }
+
+  private fieldOf(station: Station, path: StationPath | null, time: ReceptionTime): FieldStrength {
+    const distanceM = path?.distance ?? null;
+    const without = { station: station.id, distanceM, groundDb: null, skyDb: null };
+    if (station.fieldDb !== null) {
+      return { ...without, fieldDb: station.fieldDb, notes: [FIELD_NOTES.given] };
+    }
+    const power = powerOf(station, path, time);
+    if (power === 0) return { ...without, fieldDb: null, notes: [FIELD_NOTES.silent] };
+    if (!path || !this.groundWaves || power === null) {
+      const places = { from: placeOf(station), to: this.place };
+      return { ...without, fieldDb: null, notes: missing(this.groundWaves, places, power) };
+    }
+    const powerDb = 10 * Math.log10(power / 1000);
+    const ground = this.groundWaves.field(station.frequencyHz, path.distance);
+    const groundDb = decibels(ground + powerDb);
+    const sky = hasSkyWave(station.frequencyHz) ? path.sky(time) : null;
+    const skyDb = sky === null ? null : decibels(sky + powerDb);
+    const fieldDb = skyDb === null ? groundDb : powerSum(groundDb, skyDb);
+    return { ...without, groundDb, skyDb, fieldDb, notes: notesOn(station, path, time) };
+  }
 }
 
-function fieldStrength(reception: Reception, station: Station): FieldStrength {
-  const { place, ground, period } = reception;
-  const from = placeOf(station);
-  const power = period === 'day' ? station.powerDayW : station.powerNightW;
-  const distance = place !== null && from !== null ? pathLength(place, from) : null;
-  const without = { station: station.id, distanceM: distance, groundDb: null, skyDb: null };
-
-  if (station.fieldDb !== null) {
-    return { ...without, fieldDb: station.fieldDb, notes: [FIELD_NOTES.given] };
-  }
-  if (power === 0) return { ...without, fieldDb: null, notes: [FIELD_NOTES.silent] };
-  if (!place || !from || !ground || distance === null || power === null) {
-    return { ...without, fieldDb: null, notes: missing(place, ground, from, power) };
-  }
-  const notes: string[] = distance < LEAST_DISTANCE_M ? [FIELD_NOTES.near] : [];
-  const powerDb = 10 * Math.log10(power / 1000);
-  const groundDb = decibels(groundWaveOf(reception, ground, station)(distance) + powerDb);
-  const sky = skyWaveOf(station, period, distance, pathMiddle(place, from), notes);
-  const skyDb = sky === null ? null : decibels(sky + powerDb);
-  const fieldDb = skyDb === null ? groundDb : powerSum(groundDb, skyDb);
-  return { station: station.id, distanceM: distance, groundDb, skyDb, fieldDb, notes };
+/** Power in watts at a time, null if not given; without a path, what both periods agree in. */
+function powerOf(station: Station, path: StationPath | null, time: ReceptionTime): number | null {
+  const { powerDayW, powerNightW } = station;
+  if (powerDayW === powerNightW) return powerDayW;
+  const period: Period | undefined = time instanceof Date ? path?.periodAtStation(time) : time;
+  if (period === undefined) return null;
+  return period === 'day' ? powerDayW : powerNightW;
 }
 
-function groundWaveOf(
-  { groundWaves }: Reception,
-  ground: Ground,
-  { frequencyHz }: Station,
-): (distance: Metres) => Decibels {
-  const known = groundWaves.get(frequencyHz);
-  if (known) return known;
-  const wave = groundWave(hertz(frequencyHz), GROUNDS[ground]);
-  groundWaves.set(frequencyHz, wave);
-  return wave;
-}
-
-/** Sky wave of 1 kW, or null by day and where there is no model; adds what is to be said of it. */
-function skyWaveOf(
-  { frequencyHz }: Station,
-  period: Period,
-  distance: Metres,
-  middle: Place,
-  notes: string[],
-): Decibels | null {
-  const { low, high, extrapolatedBelow } = SKY_WAVE_RANGE_HZ;
-  if (frequencyHz < low || frequencyHz > high) {
-    notes.push(FIELD_NOTES.noSkyWave);
-    return null;
+/** What is to be said of a field that was computed. */
+function notesOn({ frequencyHz }: Station, path: StationPath, time: ReceptionTime): string[] {
+  const notes: string[] = path.distance < LEAST_DISTANCE_M ? [FIELD_NOTES.near] : [];
+  if (!hasSkyWave(frequencyHz)) return [...notes, FIELD_NOTES.noSkyWave];
+  const fade = path.skyFade(time);
+  if (fade === -Infinity) return notes;
+  if (fade < 0) notes.push(FIELD_NOTES.criticalHours);
+  if (frequencyHz < SKY_WAVE_RANGE_HZ.extrapolatedBelow) {
+    notes.push(FIELD_NOTES.skyWaveExtrapolated);
   }
-  if (period === 'day') return null;
-  if (frequencyHz < extrapolatedBelow) notes.push(FIELD_NOTES.skyWaveExtrapolated);
-  const latitude = geomagneticLatitude(middle);
-  if (Math.abs(latitude) > SKY_WAVE_MAX_LATITUDE) notes.push(FIELD_NOTES.skyWaveLatitude);
-  return skyWave(distance, latitude);
+  if (Math.abs(path.geomagneticLatitude) > SKY_WAVE_MAX_LATITUDE) {
+    notes.push(FIELD_NOTES.skyWaveLatitude);
+  }
+  return notes;
 }
 
 function missing(
-  place: Place | null,
-  ground: Ground | null,
-  from: Place | null,
+  groundWaves: GroundWaves | null,
+  { from, to }: { readonly from: Place | null; readonly to: Place | null },
   power: number | null,
 ): string[] {
   const notes: string[] = [];
   if (from === null) notes.push(FIELD_NOTES.noStationPlace);
   if (power === null) notes.push(FIELD_NOTES.noPower);
-  if (place === null) notes.push(FIELD_NOTES.noSitePlace);
-  if (ground === null) notes.push(FIELD_NOTES.noGround);
+  if (to === null) notes.push(FIELD_NOTES.noSitePlace);
+  if (groundWaves === null) notes.push(FIELD_NOTES.noGround);
   return notes;
 }
 

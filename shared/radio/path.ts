@@ -4,7 +4,7 @@
  * @module radio/path
  */
 import geodesy from 'geographiclib-geodesic';
-import { getTimes } from 'suncalc';
+import { getPosition, getTimes } from 'suncalc';
 
 import { type Metres, metres } from './units.ts';
 
@@ -81,6 +81,18 @@ export function sunTimes(place: Place, date: Date): SunTimes {
   const polar = times.alwaysUp ? 'day' : times.alwaysDown ? 'night' : null;
   return { sunrise: times.sunrise, sunset: times.sunset, polar };
 }
+
+/**
+ * Altitude of the middle of the sun's disc above the horizon, refraction counted in.
+ *
+ * @param place The place.
+ * @param at The moment.
+ * @returns Altitude, degrees; negative below the horizon.
+ * @example
+ *   sunAltitude({ latitude: 0, longitude: 0 }, new Date('2026-03-20T12:07:00Z')); // 89.9
+ */
+export const sunAltitude = ({ latitude, longitude }: Place, at: Date): number =>
+  getPosition(at, latitude, longitude).altitude;
 
 function direction({ latitude, longitude }: Place): [number, number, number] {
   const across = Math.cos(latitude * DEGREE);

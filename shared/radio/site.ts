@@ -16,6 +16,9 @@ export type ItuRegion = 1 | 2 | 3;
 /** Time of day for which powers and propagation are taken. */
 export type Period = 'day' | 'night';
 
+/** When something is received: everywhere by day, everywhere at night, or at a moment. */
+export type ReceptionTime = Period | Date;
+
 /** A receiving site. What is null was not given; each computation says what it needs. */
 export interface Site {
   readonly latitude: number | null;

@@ -1,7 +1,7 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 
-import { geomagneticLatitude, skyWave } from './sky-wave.ts';
+import { criticalHoursFade, geomagneticLatitude, skyWave } from './sky-wave.ts';
 import { metres } from './units.ts';
 
 describe('skyWave', () => {
@@ -54,6 +54,26 @@ describe('geomagneticLatitude', () => {
 
         expect(here + there).toBeCloseTo(0, 5);
         expect(Math.abs(here)).toBeLessThanOrEqual(90);
+      }),
+    );
+  });
+});
+
+describe('criticalHoursFade', () => {
+  it('begins with the night, is -12 dB after an hour and ends in nothing', () => {
+    expect(criticalHoursFade(0)).toBeCloseTo(0, 12);
+    expect(criticalHoursFade(1)).toBeCloseTo(-12.04, 2);
+    expect(criticalHoursFade(2)).toBe(-Infinity);
+    expect(criticalHoursFade(Infinity)).toBe(-Infinity);
+  });
+
+  it('only ever falls', () => {
+    const hours = fc.double({ min: 0, max: 2.5, noNaN: true });
+    fc.assert(
+      fc.property(hours, hours, (a, b) => {
+        expect(criticalHoursFade(Math.max(a, b))).toBeLessThanOrEqual(
+          criticalHoursFade(Math.min(a, b)),
+        );
       }),
     );
   });

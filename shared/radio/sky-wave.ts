@@ -9,6 +9,9 @@ import { type Decibels, decibels, type Metres } from './units.ts';
 /** Frequencies for which the formula is used, hertz; it was made for 535 to 1705 kHz. */
 export const SKY_WAVE_RANGE_HZ = { low: 150_000, high: 1_710_000, extrapolatedBelow: 535_000 };
 
+/** Critical hours: so long after sunrise and before sunset the sky wave still counts. */
+export const CRITICAL_HOURS = 2;
+
 /** Geomagnetic latitude, degrees north or south, up to which the formula is evaluated. */
 export const SKY_WAVE_MAX_LATITUDE = 60;
 
@@ -45,6 +48,26 @@ export function skyWave(
   const loss = (2 * Math.PI + 4.95 * tangent ** 2) * Math.sqrt(slantKm / 1000);
   const median = 97.5 - 20 * Math.log10(slantKm) - loss + KILOWATT_DB;
   return decibels(percentOfNights === 50 ? median : median + tenPercentGain(latitude));
+}
+
+/**
+ * What is left of the night's sky wave while the sun is up at the middle of the path:
+ * `80 log10 cos(pi h / 4)`, h hours after sunrise or before sunset, whichever is less.
+ *
+ * 0 dB at sunrise and sunset, -2.8 dB after half an hour, -12 dB after one hour, nothing from two
+ * hours on, with a smooth beginning and no step at the end. A model of our own: the two hours are
+ * the critical hours of 47 CFR 73.14, the shape is from memory of measured sunrises, which scatter
+ * by 10 dB, and not from a published formula.
+ *
+ * @param hoursOfSun How long the sun has been or will still be up, hours, whichever is less; 0 when
+ *   it is down.
+ * @returns Level relative to the night, dB; `-Infinity` where nothing is left.
+ * @example
+ *   criticalHoursFade(1); // -12.04
+ */
+export function criticalHoursFade(hoursOfSun: number): Decibels {
+  if (hoursOfSun >= CRITICAL_HOURS) return decibels(-Infinity);
+  return decibels(80 * Math.log10(Math.cos((Math.PI * hoursOfSun) / (2 * CRITICAL_HOURS))));
 }
 
 /**

@@ -32,7 +32,7 @@ describe('nearestPreferred', () => {
         const nearest = nearestPreferred(value, 'E24');
 
         expect(nearestPreferred(nearest, 'E24')).toBe(nearest);
-        expect(Math.abs(nearest / value - 1)).toBeLessThan(0.06);
+        expect(Math.abs(nearest / value - 1)).toBeLessThan(0.061);
       }),
     );
   });

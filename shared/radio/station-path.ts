@@ -1,0 +1,89 @@
+/**
+ * The path from a station to the receiving site, and what 1 kW makes of it.
+ *
+ * @module radio/station-path
+ */
+import { GROUNDS } from './ground.ts';
+import { groundWave } from './ground-wave.ts';
+import { type Place, pathLength, pathMiddle } from './path.ts';
+import type { Ground, Period, ReceptionTime } from './site.ts';
+import { criticalHoursFade, geomagneticLatitude, SKY_WAVE_RANGE_HZ, skyWave } from './sky-wave.ts';
+import { Sunlight } from './sunlight.ts';
+import { type Decibels, decibels, hertz, type Metres } from './units.ts';
+
+/** Ground waves at one site: stations that share a frequency share the work. */
+export class GroundWaves {
+  private readonly ground: Ground;
+  private readonly byFrequency = new Map<number, (distance: Metres) => Decibels>();
+
+  constructor(ground: Ground) {
+    this.ground = ground;
+  }
+
+  /** Field of the ground wave of 1 kW, dB(uV/m). */
+  field(frequencyHz: number, distance: Metres): Decibels {
+    let wave = this.byFrequency.get(frequencyHz);
+    if (!wave) {
+      wave = groundWave(hertz(frequencyHz), GROUNDS[this.ground]);
+      this.byFrequency.set(frequencyHz, wave);
+    }
+    return wave(distance);
+  }
+}
+
+/** One path. Works out what is asked for when it is first asked for, and keeps it. */
+export class StationPath {
+  readonly distance: Metres;
+  private readonly from: Place;
+  private readonly to: Place;
+  private middlePlace: Place | undefined;
+  private nightSky: Decibels | undefined;
+  private readonly suns: { station?: Sunlight; middle?: Sunlight } = {};
+
+  /**
+   * @param from Place of the station.
+   * @param to Place of the site.
+   * @throws {RangeError} If a place is not on the earth.
+   */
+  constructor(from: Place, to: Place) {
+    this.from = from;
+    this.to = to;
+    this.distance = pathLength(to, from);
+  }
+
+  /** Geomagnetic latitude of the middle, degrees. */
+  get geomagneticLatitude(): number {
+    return geomagneticLatitude(this.middle);
+  }
+
+  /** Sky wave of 1 kW at a time, dB(uV/m); null when there is none. */
+  sky(time: ReceptionTime): Decibels | null {
+    const fade = this.skyFade(time);
+    if (fade === -Infinity) return null;
+    this.nightSky ??= skyWave(this.distance, this.geomagneticLatitude);
+    return decibels(this.nightSky + fade);
+  }
+
+  /** The sky wave at a time relative to the night: 0 at night, `-Infinity` by day, dB. */
+  skyFade(time: ReceptionTime): Decibels {
+    if (time === 'night') return decibels(0);
+    if (time === 'day') return decibels(-Infinity);
+    this.suns.middle ??= new Sunlight(this.middle);
+    return criticalHoursFade(this.suns.middle.hours(time));
+  }
+
+  /** Day or night at the station, by which its power goes. */
+  periodAtStation(time: ReceptionTime): Period {
+    if (!(time instanceof Date)) return time;
+    this.suns.station ??= new Sunlight(this.from);
+    return this.suns.station.hours(time) > 0 ? 'day' : 'night';
+  }
+
+  private get middle(): Place {
+    return (this.middlePlace ??= pathMiddle(this.to, this.from));
+  }
+}
+
+/** Whether there is a model of the sky wave on a frequency, hertz. */
+export const hasSkyWave = (frequencyHz: number): boolean =>
+  frequencyHz >= SKY_WAVE_RANGE_HZ.low && frequencyHz <= SKY_WAVE_RANGE_HZ.high;
