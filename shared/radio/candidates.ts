@@ -98,7 +98,7 @@ export interface Candidates {
  * @example
  *   judgeCandidates({ receiver, cases: [{ site, stations, fields: { night }, raster }],
  *     periods: ['night'], fromHz: 551_000, toHz: 560_000, stepHz: 500, maxM: 3, maxN: 2 })
- *     .candidates[0]?.ifHz; // 555000, midway between strong stations on 550 and 560 kHz
+ *     .candidates[0]?.ifHz; // 554500 between strong stations on 550 and 560 kHz
  */
 export function judgeCandidates(input: CandidatesInput): Candidates {
   const { receiver } = input;
