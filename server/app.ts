@@ -28,12 +28,13 @@ import type { Services } from './services.ts';
 import { sessionCookie } from './sessions/session-door.ts';
 import { sessionRoutes } from './sessions/session-routes.ts';
 import { siteRoutes } from './sites/site-routes.ts';
+import { trackingRoutes } from './tracking/tracking-routes.ts';
 import { workshopRoutes } from './workshops/workshop-routes.ts';
 
 /** Every operation of the API. A resource is mounted by adding its rows here. */
 export function apiRoutes(services: Services): Route[] {
   const { accounts, door, limits, members, receivers, sessions, sites, workshops } = services;
-  const { assessments, editions, fieldStrengths, imports, regions, uploads } = services;
+  const { assessments, editions, engine, fieldStrengths, imports, regions, uploads } = services;
   return [
     ...accountRoutes(accounts, door, limits),
     ...sessionRoutes(sessions, door, accounts, limits),
@@ -45,6 +46,7 @@ export function apiRoutes(services: Services): Route[] {
     ...importRoutes(imports, uploads),
     ...fieldStrengthRoutes(fieldStrengths),
     ...assessmentRoutes(assessments),
+    ...trackingRoutes(engine),
     ...planRoutes(services.plans),
   ];
 }

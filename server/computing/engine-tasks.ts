@@ -14,6 +14,7 @@ import {
 } from '../../shared/radio/field-strength.ts';
 import type { Period, Site } from '../../shared/radio/site.ts';
 import type { RasterRange, Station } from '../../shared/radio/station.ts';
+import type { Tracking, TrackingInput } from '../../shared/radio/tracking.ts';
 import { BoundedCache } from './bounded-cache.ts';
 import { type StationColumns, unpackNames, unpackStations } from './station-columns.ts';
 
@@ -42,6 +43,7 @@ export interface Tasks {
     takes: { readonly list: ListAtSite; readonly period: Period };
     answers: { readonly fields: readonly (FieldStrength & Named)[] };
   };
+  designTracking: { takes: TrackingInput; answers: Tracking };
 }
 
 interface Named {

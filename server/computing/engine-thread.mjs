@@ -1,7 +1,7 @@
 import { tsImport } from 'tsx/esm/api';
 
 // A thread does not inherit the loader that lets Node.js run TypeScript.
-export const { assess, judgeCandidates, fieldStrengths } = await tsImport(
+export const { assess, judgeCandidates, fieldStrengths, designTracking } = await tsImport(
   './engine-thread.ts',
   import.meta.url,
 );

@@ -1,19 +1,7 @@
 import * as z from 'zod';
 
 import { decibelsValue, frequencyHz, nameText, qValue, spanHz } from './quantities.ts';
-
-const farads = z.number().min(0).max(1e-3, 'Give a capacitance of 1 mF or less.');
-
-/** Body of the tracking design without what the band itself gives. */
-export const trackingDesign = z.strictObject({
-  gangMinF: farads,
-  gangMaxF: farads,
-  strayF: farads.default(0),
-  trimmer: z.enum(['gang', 'coil']),
-  points: z.union([z.tuple([frequencyHz, frequencyHz, frequencyHz]), z.literal('best')]),
-  fixedPadderF: farads.optional(),
-  alignHz: z.tuple([frequencyHz, frequencyHz]).optional(),
-});
+import { checkDesign, trackingDesign } from './tracking.ts';
 
 const circuit = z.strictObject({ qLow: qValue, qHigh: qValue });
 
@@ -38,4 +26,7 @@ export const band = z
   .refine(({ lowHz, highHz }) => highHz > lowHz, {
     path: ['highHz'],
     error: 'The band must end above where it begins.',
+  })
+  .superRefine((each, context) => {
+    if (each.tracking !== null) checkDesign(each.tracking, each, context, ['tracking']);
   });
