@@ -11,6 +11,7 @@ export interface DebianProgram {
 
 export const MARIADB: DebianProgram = { program: 'mariadbd', package: 'mariadb-server' };
 export const CHROMIUM: DebianProgram = { program: 'chromium', package: 'chromium' };
+export const NGSPICE: DebianProgram = { program: 'ngspice', package: 'ngspice' };
 
 /** Where ordinary users of Debian have no path to, though they may run what is there. */
 const SYSTEM_FOLDERS = ['/usr/local/sbin', '/usr/sbin', '/sbin', '/usr/bin', '/bin'];

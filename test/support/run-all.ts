@@ -1,7 +1,7 @@
 import { resolve } from 'node:path';
 import { fileURLToPath } from 'node:url';
 
-import { CHROMIUM, ensurePrograms, MARIADB } from '../../server/dev/programs.ts';
+import { CHROMIUM, ensurePrograms, MARIADB, NGSPICE } from '../../server/dev/programs.ts';
 import { add, closingLine, NOTHING } from './counts.ts';
 import { runGate } from './gate.ts';
 import { makeScratch, removeScratch } from './scratch.ts';
@@ -42,6 +42,7 @@ export async function runAll({ gate, suites }: Run): Promise<void> {
   try {
     requireSuites(suites);
     ensurePrograms([MARIADB, CHROMIUM], say);
+    ensureSimulator();
     const checked = gate ? await runGate(runner, say) : NOTHING;
     const total = add(checked, await runSuites(runner, suites, scratch, say));
     say(`\n${closingLine(total)}`);
@@ -50,6 +51,15 @@ export async function runAll({ gate, suites }: Run): Promise<void> {
     say(error instanceof Error ? error.message : String(error));
     say(`\n${closingLine({ ...NOTHING, failed: 1 })}`);
     await leave(1);
+  }
+}
+
+/** Without the circuit simulator the rest can still be tested; what it would check says so itself. */
+function ensureSimulator(): void {
+  try {
+    ensurePrograms([NGSPICE], say);
+  } catch (error) {
+    say(error instanceof Error ? error.message : String(error));
   }
 }
 
