@@ -12,8 +12,9 @@ import {
   type FieldStrength,
   fieldStrengths as compute,
 } from '../../shared/radio/field-strength.ts';
-import type { Period, Site } from '../../shared/radio/site.ts';
+import type { Period, ReceptionTime, Site } from '../../shared/radio/site.ts';
 import type { RasterRange, Station } from '../../shared/radio/station.ts';
+import { periodAt } from '../../shared/radio/sunlight.ts';
 import type { Tracking, TrackingInput } from '../../shared/radio/tracking.ts';
 import { BoundedCache } from './bounded-cache.ts';
 import { type StationColumns, unpackNames, unpackStations } from './station-columns.ts';
@@ -32,7 +33,11 @@ type FromList = 'site' | 'stations' | 'fields' | 'raster';
 /** What each computation takes and answers. */
 export interface Tasks {
   assess: {
-    takes: { readonly list: ListAtSite; readonly ask: Omit<AssessmentInput, FromList> };
+    takes: {
+      readonly list: ListAtSite;
+      readonly time: ReceptionTime;
+      readonly ask: Omit<AssessmentInput, FromList | 'period'>;
+    };
     answers: Assessment;
   };
   judgeCandidates: {
@@ -40,7 +45,7 @@ export interface Tasks {
     answers: Candidates;
   };
   fieldStrengths: {
-    takes: { readonly list: ListAtSite; readonly period: Period };
+    takes: { readonly list: ListAtSite; readonly time: ReceptionTime };
     answers: { readonly fields: readonly (FieldStrength & Named)[] };
   };
   designTracking: { takes: TrackingInput; answers: Tracking };
@@ -58,10 +63,11 @@ const KEPT_FIELDS = 600_000;
 const unpacked = new BoundedCache<Station[]>(KEPT_STATIONS);
 const computed = new BoundedCache<FieldStrength[]>(KEPT_FIELDS);
 
-export function assess({ list, ask }: Tasks['assess']['takes']): Assessment {
+export function assess({ list, time, ask }: Tasks['assess']['takes']): Assessment {
+  const { site, raster } = list;
   const stations = stationsOf(list);
-  const fields = fieldsOf(list, ask.period);
-  return assessReceiver({ ...ask, site: list.site, raster: list.raster, stations, fields });
+  const fields = fieldsOf(list, time);
+  return assessReceiver({ ...ask, site, raster, stations, fields, period: periodOf(site, time) });
 }
 
 export function judgeCandidates({ lists, ask }: Tasks['judgeCandidates']['takes']): Candidates {
@@ -76,11 +82,11 @@ export function judgeCandidates({ lists, ask }: Tasks['judgeCandidates']['takes'
 
 export function fieldStrengths({
   list,
-  period,
+  time,
 }: Tasks['fieldStrengths']['takes']): Tasks['fieldStrengths']['answers'] {
   const stations = stationsOf(list);
   const names = unpackNames(list.columns);
-  const fields = fieldsOf(list, period).map((field, index) => ({
+  const fields = fieldsOf(list, time).map((field, index) => ({
     ...field,
     name: names[index] ?? '',
     frequencyHz: stations[index]?.frequencyHz ?? 0,
@@ -93,10 +99,18 @@ function stationsOf({ editionId, columns }: ListAtSite): Station[] {
   return unpacked.remember(String(editionId), columns.count, () => unpackStations(columns));
 }
 
-function fieldsOf(list: ListAtSite, period: Period): FieldStrength[] {
+function fieldsOf(list: ListAtSite, time: ReceptionTime): FieldStrength[] {
   const { editionId, site, columns } = list;
-  const make = () => compute(site, stationsOf(list), period);
+  const make = () => compute(site, stationsOf(list), time);
   if (editionId === null) return make();
-  const key = [editionId, site.latitude, site.longitude, site.ground, period].join();
+  const when = time instanceof Date ? time.toISOString() : time;
+  const key = [editionId, site.latitude, site.longitude, site.ground, when].join();
   return computed.remember(key, columns.count, make);
+}
+
+/** Day or night at the site; one without a place has fields given, the same at any time. */
+function periodOf({ latitude, longitude }: Site, time: ReceptionTime): Period {
+  if (!(time instanceof Date)) return time;
+  if (latitude === null || longitude === null) return 'night';
+  return periodAt({ latitude, longitude }, time);
 }

@@ -45,14 +45,15 @@ const receiver = receiverDraft.parse({
 
 const task = (count: number): Tasks['assess']['takes'] => ({
   list: listOf(count),
-  ask: { receiver, period: 'night', maxM: 3, maxN: 2, leaveOutBetterThan: null, limit: 10_000 },
+  time: 'night',
+  ask: { receiver, maxM: 3, maxN: 2, leaveOutBetterThan: null, limit: 10_000 },
 });
 
 describe('Engine', () => {
   it('computes in a thread and answers JSON that can be read', async () => {
     engine = new Engine();
 
-    const answer = await engine.run('fieldStrengths', { list: listOf(3), period: 'day' });
+    const answer = await engine.run('fieldStrengths', { list: listOf(3), time: 'day' });
 
     expect(new TextDecoder().decode(answer.json)).toBe(JSON.stringify(answer.read()));
     expect(answer.read().fields[2]).toMatchObject({ station: 2, name: 'Station 2', fieldDb: 62 });

@@ -7,7 +7,7 @@ import type { Tasks } from './engine-tasks.ts';
 import type { Order } from './engine-thread.ts';
 
 const MAX_WAITING = 200;
-const LIMIT_MS = 20_000;
+const LIMIT_MS = 30_000;
 
 /** An answer of the engine as JSON text; typed, so that what needs it as an object may read it. */
 export interface Computed<T> {

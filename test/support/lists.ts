@@ -54,7 +54,7 @@ export async function upload(
 export async function settled(client: ApiClient, path: string) {
   const state = async () => importState.parse((await client.get(path).expect(200)).body);
   const isSettled = async () => (await state()).state !== 'committing';
-  await vi.waitUntil(isSettled, { timeout: 20_000, interval: 20 });
+  await vi.waitUntil(isSettled, { timeout: 60_000, interval: 20 });
   return state();
 }
 
