@@ -3,7 +3,7 @@ import { createServer, type Server } from 'node:net';
 import { afterEach, beforeEach, describe, expect, it } from 'vitest';
 
 import { anyFreePort, firstFreePort, isFree } from './free-port.ts';
-import { readStartSettings } from './start-settings.ts';
+import { choosePort, readStartSettings } from './start-settings.ts';
 
 const HOST = '127.0.0.1';
 
@@ -33,14 +33,14 @@ describe('ports', () => {
   });
 
   it('a taken port that was asked for by name is named, with another to try', async () => {
-    const reading = readStartSettings({ PORT: String(taken) }, '/', () => undefined);
+    const choosing = choosePort({ host: HOST, port: taken }, () => undefined);
 
-    await expect(reading).rejects.toThrow(`Port ${taken} on 127.0.0.1 is taken. Name another`);
+    await expect(choosing).rejects.toThrow(`Port ${taken} on 127.0.0.1 is taken. Name another`);
   });
 
-  it('a PORT that is no port is refused with what would be right', async () => {
-    const reading = readStartSettings({ PORT: '70000' }, '/', () => undefined);
+  it('a PORT that is no port is refused with what would be right', () => {
+    const reading = () => readStartSettings({ PORT: '70000' }, '/');
 
-    await expect(reading).rejects.toThrow('PORT must be a whole number from 1 to 65535');
+    expect(reading).toThrow('PORT must be a whole number from 1 to 65535, got "70000"');
   });
 });

@@ -10,7 +10,7 @@ import { afterEach, beforeEach, describe, expect, it } from 'vitest';
 import { endProcess, exitOf } from './bound-process.ts';
 import type { PrivateDatabase } from './database-folder.ts';
 import { anyFreePort } from './free-port.ts';
-import { databaseUrl, launchMariaDB } from './private-mariadb.ts';
+import { databaseUrl, launchMariaDB, launchOnFreePort } from './private-mariadb.ts';
 
 describe('a private MariaDB', () => {
   const servers: ChildProcess[] = [];
@@ -70,6 +70,17 @@ describe('a private MariaDB', () => {
 
     await expect(launch()).rejects.toThrow(/did not start on port \d+[^]*already in use/);
 
+    holder.close();
+  });
+
+  it('is started on the next port when the one wanted is taken', async () => {
+    const holder = createServer();
+    await new Promise<void>((resolve) => holder.listen(port, '127.0.0.1', resolve));
+
+    const { child, port: chosen } = await launchOnFreePort(database, port);
+    servers.push(child);
+
+    expect(chosen).toBeGreaterThan(port);
     holder.close();
   });
 

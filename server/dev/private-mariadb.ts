@@ -14,6 +14,7 @@ import {
   prepareFolder,
   type PrivateDatabase,
 } from './database-folder.ts';
+import { firstFreePort } from './free-port.ts';
 import { findProgram, MARIADB } from './programs.ts';
 
 const HOST = '127.0.0.1';
@@ -25,6 +26,26 @@ export const DATABASE_GRACE_MS = 60_000;
 /** Address under which the API reaches the private server. */
 export function databaseUrl({ password }: PrivateDatabase, port: number): string {
   return `mariadb://${DATABASE_USER}:${password}@${HOST}:${port}/${DATABASE_NAME}`;
+}
+
+/** Somebody else listens where the server was to listen. */
+class PortTakenError extends Error {}
+
+/**
+ * Starts a MariaDB of our own on the first free port at or after the one wanted. A port that was
+ * free a moment ago may be taken when the server comes to it: then the next one is tried.
+ */
+export async function launchOnFreePort(
+  database: PrivateDatabase,
+  wanted: number,
+): Promise<{ readonly child: ChildProcess; readonly port: number }> {
+  const port = await firstFreePort(HOST, wanted);
+  try {
+    return { child: await launchMariaDB(database, port), port };
+  } catch (error) {
+    if (error instanceof PortTakenError) return launchOnFreePort(database, port + 1);
+    throw error;
+  }
 }
 
 /**
@@ -82,7 +103,9 @@ async function untilReady(child: ChildProcess, database: PrivateDatabase, port: 
     if (error instanceof Error) throw error;
     if (!isRunning(child)) break;
   }
-  throw new Error(`MariaDB did not start on port ${port}. ${logEnd(database.folder)}`);
+  const log = logEnd(database.folder);
+  const Reason = log.includes('Address already in use') ? PortTakenError : Error;
+  throw new Reason(`MariaDB did not start on port ${port}. ${log}`);
 }
 
 /** A greeting alone may come from another server on that port: the process and password must fit. */

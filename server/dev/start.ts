@@ -4,17 +4,14 @@ import { fileURLToPath } from 'node:url';
 
 import { type DemoSignIn, launchApi } from './api-process.ts';
 import { buildClient } from './client-build.ts';
-import { firstFreePort } from './free-port.ts';
-import { DATABASE_GRACE_MS, databaseUrl, launchMariaDB } from './private-mariadb.ts';
 import { ensurePrograms, MARIADB } from './programs.ts';
 import { keepSecret } from './secret.ts';
-import { readStartSettings, type StartSettings } from './start-settings.ts';
-import { Supervisor } from './supervisor.ts';
+import { ownDatabase } from './start-database.ts';
+import { choosePort, readStartSettings, type StartSettings } from './start-settings.ts';
+import { Supervisor, type Ward } from './supervisor.ts';
 
 const root = resolve(fileURLToPath(new URL('../..', import.meta.url)));
 
-/** Away from 3306, where a MariaDB of the machine's own may be. */
-const DATABASE_PORT = 33_060;
 const API_GRACE_MS = 15_000;
 
 const say = (line: string): void => {
@@ -40,23 +37,24 @@ export async function start(environment: NodeJS.ProcessEnv): Promise<void> {
 
 async function bringUp(environment: NodeJS.ProcessEnv): Promise<void> {
   const began = performance.now();
-  const settings = await readStartSettings(environment, root, say);
+  const settings = readStartSettings(environment, root);
   mkdirSync(settings.dataFolder, { recursive: true, mode: 0o700 });
   if (settings.databaseUrl === undefined) ensurePrograms([MARIADB], say);
   const client = buildClient(root, say);
   running.push(client.stop);
   const [database] = await Promise.all([ensureDatabase(settings), client.done]);
+  const port = await choosePort(settings, say);
   const apiEnvironment = {
     ...environment,
     ...keptSecrets(environment, settings.dataFolder),
     HOST: settings.host,
-    PORT: String(settings.port),
+    PORT: String(port),
     DATABASE_URL: database,
     DATA_DIR: settings.dataFolder,
     CLIENT_DIR: client.folder,
   };
   const demo = await startApi(settings, apiEnvironment);
-  announce(settings, demo, performance.now() - began);
+  announce(addressOf(settings.host, port), demo, performance.now() - began);
 }
 
 /** Secrets of this installation, unless the environment brings its own. */
@@ -78,21 +76,9 @@ async function ensureDatabase(settings: StartSettings): Promise<string> {
     say('Using the database named by DATABASE_URL.');
     return settings.databaseUrl;
   }
-  const port = await firstFreePort('127.0.0.1', DATABASE_PORT);
-  const database = {
-    folder: join(settings.dataFolder, 'mariadb'),
-    password: keepSecret(settings.dataFolder, 'database-password'),
-    rights: 'own database',
-    durable: true,
-  } as const;
-  const ward = {
-    name: 'MariaDB',
-    launch: () => launchMariaDB(database, port),
-    graceMs: DATABASE_GRACE_MS,
-  };
-  await supervise(new Supervisor(ward, say, fail));
-  say(`MariaDB runs on 127.0.0.1:${port}, its data in ${database.folder}.`);
-  return databaseUrl(database, port);
+  const { ward, url } = ownDatabase(settings.dataFolder, say);
+  await supervise(ward);
+  return url();
 }
 
 async function startApi(settings: StartSettings, environment: NodeJS.ProcessEnv) {
@@ -102,21 +88,23 @@ async function startApi(settings: StartSettings, environment: NodeJS.ProcessEnv)
     launchApi({ root, logFile, environment }, (message) => {
       demo = message.demo ?? [];
     });
-  await supervise(
-    new Supervisor({ name: 'The API server', launch, graceMs: API_GRACE_MS }, say, fail),
-  );
+  await supervise({ name: 'The API server', launch, graceMs: API_GRACE_MS });
   say(`The server logs to ${logFile}.`);
   return demo;
 }
 
-async function supervise(supervisor: Supervisor): Promise<void> {
+async function supervise(ward: Ward): Promise<void> {
+  const supervisor = new Supervisor(ward, say, fail);
   running.push(() => supervisor.stop());
   await supervisor.start();
 }
 
-function announce(settings: StartSettings, demo: readonly DemoSignIn[], tookMs: number): void {
-  const isLoopback = ['127.0.0.1', '::1', '0.0.0.0'].includes(settings.host);
-  const url = `http://${isLoopback ? 'localhost' : settings.host}:${settings.port}`;
+function addressOf(host: string, port: number): string {
+  const isHere = ['127.0.0.1', '::1', '0.0.0.0', '::'].includes(host);
+  return `http://${isHere ? 'localhost' : host}:${port}`;
+}
+
+function announce(url: string, demo: readonly DemoSignIn[], tookMs: number): void {
   say(`Ready after ${(tookMs / 1000).toFixed(1)} s.`);
   say('');
   say(`  Fallow is at ${url}`);

@@ -6,7 +6,7 @@ import type { TestProject } from 'vitest/node';
 
 import { endProcess } from '../../server/dev/bound-process.ts';
 import { anyFreePort } from '../../server/dev/free-port.ts';
-import { databaseUrl, launchMariaDB } from '../../server/dev/private-mariadb.ts';
+import { databaseUrl, launchOnFreePort } from '../../server/dev/private-mariadb.ts';
 import { keepSecret } from '../../server/dev/secret.ts';
 
 declare module 'vitest' {
@@ -25,8 +25,7 @@ export default async function setup(project: TestProject): Promise<() => Promise
     rights: 'whole server',
     durable: false,
   } as const;
-  const port = await anyFreePort('127.0.0.1');
-  const child = await launchMariaDB(database, port);
+  const { child, port } = await launchOnFreePort(database, await anyFreePort('127.0.0.1'));
   project.provide('databaseServer', databaseUrl(database, port));
   return async () => {
     await endProcess(child, 10_000);
