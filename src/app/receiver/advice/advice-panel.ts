@@ -2,6 +2,7 @@ import { ChangeDetectionStrategy, Component, computed, inject, input } from '@an
 import { MatButtonModule } from '@angular/material/button';
 
 import { kilohertz } from '../../charts/readings';
+import { Icon } from '../../ui/icon/icon';
 import { TrialStore } from '../trial/trial-store';
 import { type Advice } from './advice';
 import { Caution } from './caution';
@@ -12,7 +13,7 @@ import { verdictSentences } from './verdict-words';
   selector: 'app-advice-panel',
   templateUrl: './advice-panel.html',
   styleUrl: './advice-panel.scss',
-  imports: [Caution, MatButtonModule],
+  imports: [Caution, Icon, MatButtonModule],
   changeDetection: ChangeDetectionStrategy.OnPush,
   host: { 'aria-live': 'polite' },
 })
@@ -28,6 +29,8 @@ export class AdvicePanel {
     return verdictSentences(judged.verdict, present, this.store.period(), this.store.nameOf);
   });
   protected readonly target = computed(() => kilohertz(this.advice().ifHz));
+  /** What should be known about the set and the site as they were given. */
+  protected readonly warnings = computed(() => this.store.judged.value()?.warnings ?? []);
   protected readonly onTrial = computed(() => kilohertz(this.store.trialHz()));
   protected readonly skipped = computed(() => {
     const counts = new Map<string, number>();

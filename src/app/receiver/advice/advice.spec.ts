@@ -95,7 +95,7 @@ describe('the advice', () => {
     const answer = { present: harmless, candidates: [candidate({ ifHz: 555_000 })], ranking: '' };
 
     expect(advise(grounds(answer)).text).toBe(
-      'Leave it where it is, on 560 kHz: no station of this list is harmed by the set.',
+      'Leave it where it is, on 560 kHz: the set harms no station from there.',
     );
   });
 

@@ -50,7 +50,7 @@ function stay({ ifHz }: Candidate, reason: string): Advice {
 
 function whyStay({ deficitDb }: Candidate): string {
   return deficitDb < LEAST_GAIN_DB
-    ? $localize`no station of this list is harmed by the set.`
+    ? $localize`the set harms no station from there.`
     : $localize`no IF within reach leaves ${LEAST_GAIN_DB}:gain: dB less to be desired.`;
 }
 
