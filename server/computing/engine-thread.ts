@@ -1,5 +1,5 @@
 import * as tasks from './engine-tasks.ts';
-import { designTracking } from './tracking-task.ts';
+import * as tracking from './tracking-task.ts';
 
 /** A computation, and where it says that it has begun. */
 export interface Order {
@@ -20,4 +20,4 @@ function answered(compute: (task: never) => unknown) {
 export const assess = answered(tasks.assess);
 export const judgeCandidates = answered(tasks.judgeCandidates);
 export const fieldStrengths = answered(tasks.fieldStrengths);
-export const designTracking = answered(designTracking);
+export const designTracking = answered(tracking.designTracking);
