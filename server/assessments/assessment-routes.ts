@@ -8,7 +8,7 @@ export const assessmentRoutes = (assessments: Assessments): Route[] => [
   route({
     method: 'post',
     path: '/api/assessments',
-    summary: 'Judge a receiver at a site against stations, by day or by night',
+    summary: 'Judge a receiver at a site against stations, by day, by night or at a moment',
     access: 'visitor',
     body: assessmentRequest,
     answer: assessment,

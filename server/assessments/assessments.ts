@@ -1,5 +1,6 @@
 import type { AssessmentRequest } from '../../shared/contracts/assessment.ts';
 import type { CandidatesRequest } from '../../shared/contracts/candidates.ts';
+import { receptionTimeOf } from '../../shared/contracts/quantities.ts';
 import type { Assessment } from '../../shared/radio/assessment.ts';
 import type { Candidates } from '../../shared/radio/candidates.ts';
 import type { Computed, Engine } from '../computing/engine.ts';
@@ -28,9 +29,10 @@ export class Assessments {
   ): Promise<Computed<Assessment>> {
     refuseNotYet(request);
     const list = await this.lists.find(actor, request);
-    const { receiver, period, maxM, maxN, leaveOutBetterThan, limit } = request;
-    const ask = { receiver, period, maxM, maxN, leaveOutBetterThan, limit };
-    return this.engine.run('assess', { list, ask }, signal);
+    const { receiver, maxM, maxN, leaveOutBetterThan, limit } = request;
+    const ask = { receiver, maxM, maxN, leaveOutBetterThan, limit };
+    const time = receptionTimeOf(request.period);
+    return this.engine.run('assess', { list, time, ask }, signal);
   }
 
   async judgeCandidates(

@@ -1,4 +1,5 @@
 import type { FieldStrengthsRequest } from '../../shared/contracts/field-strengths.ts';
+import { receptionTimeOf } from '../../shared/contracts/quantities.ts';
 import type { Computed, Engine } from '../computing/engine.ts';
 import type { Tasks } from '../computing/engine-tasks.ts';
 import type { ListsAtSites } from '../computing/lists-at-sites.ts';
@@ -20,6 +21,7 @@ export class FieldStrengths {
     signal?: AbortSignal,
   ): Promise<Computed<Tasks['fieldStrengths']['answers']>> {
     const list = await this.lists.find(actor, request);
-    return this.engine.run('fieldStrengths', { list, period: request.period }, signal);
+    const time = receptionTimeOf(request.period);
+    return this.engine.run('fieldStrengths', { list, time }, signal);
   }
 }

@@ -1,6 +1,6 @@
 import * as z from 'zod';
 
-import { period } from './quantities.ts';
+import { receptionTime } from './quantities.ts';
 import { receiverDraft } from './receiver.ts';
 import { site } from './site.ts';
 import { hasOneSource, oneSourceIssue, stationSourceFields } from './station.ts';
@@ -24,13 +24,13 @@ export const cause = z.enum([
   'second-image',
 ]);
 
-/** What to judge: a receiver at a site against stations, by day or by night. */
+/** What to judge: a receiver at a site against stations, by day, by night or at a moment. */
 export const assessmentRequest = z
   .strictObject({
     receiver: receiverDraft,
     site,
     ...stationSourceFields,
-    period: period.default('night'),
+    period: receptionTime.default('night'),
     maxM: z.int().min(0).max(5, 'Give an oscillator order from 0 to 5.').default(3),
     maxN: z.int().min(1).max(3, 'Give a signal order from 1 to 3.').default(2),
     leaveOutBetterThan: grade.exclude(['hidden']).nullable().default('slightly-annoying'),

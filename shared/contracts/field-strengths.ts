@@ -1,12 +1,12 @@
 import * as z from 'zod';
 
-import { period } from './quantities.ts';
+import { receptionTime } from './quantities.ts';
 import { site } from './site.ts';
 import { hasOneSource, oneSourceIssue, stationSourceFields } from './station.ts';
 
 /** At which site, and from which stations, the field is asked for. */
 export const fieldStrengthsRequest = z
-  .strictObject({ site, ...stationSourceFields, period: period.default('night') })
+  .strictObject({ site, ...stationSourceFields, period: receptionTime.default('night') })
   .refine(hasOneSource, oneSourceIssue);
 export type FieldStrengthsRequest = z.output<typeof fieldStrengthsRequest>;
 export type FieldStrengthsInput = z.input<typeof fieldStrengthsRequest>;

@@ -66,3 +66,23 @@ export const noteText = z
 export const ituRegion = z.literal([1, 2, 3], 'Give the ITU Region: 1, 2 or 3.');
 
 export const period = z.enum(['day', 'night'], 'Give "day" or "night".');
+
+/** A moment: ISO 8601 with an offset from UTC, in the years the sun's place is known well for. */
+export const instant = z.iso
+  .datetime({
+    offset: true,
+    abort: true,
+    error: 'Give a date and time with an offset, like 2026-12-21T18:30:00Z.',
+  })
+  .refine((text) => text >= '1900' && text < '2101', 'Give a year from 1900 to 2100.');
+
+/** Day or night everywhere, or a moment, when the sun decides. */
+export const receptionTime = z.union(
+  [period, instant],
+  'Give "day", "night" or a date and time with an offset, like 2026-12-21T18:30:00Z.',
+);
+export type ReceptionTimeAsked = z.output<typeof receptionTime>;
+
+/** The time that was asked for, as the engine takes it. */
+export const receptionTimeOf = (asked: ReceptionTimeAsked): 'day' | 'night' | Date =>
+  asked === 'day' || asked === 'night' ? asked : new Date(asked);

@@ -121,7 +121,7 @@ export class FieldsAtSite {
 function powerOf(station: Station, path: StationPath | null, time: ReceptionTime): number | null {
   const { powerDayW, powerNightW } = station;
   if (powerDayW === powerNightW) return powerDayW;
-  const period: Period | undefined = time instanceof Date ? path?.periodAtStation(time) : time;
+  const period: Period | undefined = typeof time === 'string' ? time : path?.periodAtStation(time);
   if (period === undefined) return null;
   return period === 'day' ? powerDayW : powerNightW;
 }

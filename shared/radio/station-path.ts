@@ -74,7 +74,7 @@ export class StationPath {
 
   /** Day or night at the station, by which its power goes. */
   periodAtStation(time: ReceptionTime): Period {
-    if (!(time instanceof Date)) return time;
+    if (typeof time === 'string') return time;
     this.suns.station ??= new Sunlight(this.from);
     return this.suns.station.hours(time) > 0 ? 'day' : 'night';
   }

@@ -58,10 +58,7 @@ describe('Sunlight', () => {
     for (let hour = 0; hour < 72; hour++) {
       const at = new Date(Date.UTC(2026, 3, 1, hour));
 
-      expect(Math.min(2, sun.hours(at))).toBeCloseTo(
-        Math.min(2, new Sunlight(place).hours(at)),
-        9,
-      );
+      expect(Math.min(2, sun.hours(at))).toBeCloseTo(Math.min(2, new Sunlight(place).hours(at)), 9);
     }
   });
 

@@ -82,7 +82,9 @@ function hoursBetween(events: readonly SunEvent[], at: number): number | null {
 function eventsAround(place: Place, around: Date): SunEvent[] {
   return [-1, 0, 1]
     .flatMap((day): SunEvent[] => {
-      const { sunrise, sunset } = sunTimes(place, new Date(around.getTime() + day * DAY_MS));
+      // eslint-disable-next-line no-restricted-globals -- a moment that was given, not the clock's
+      const date = new Date(around.getTime() + day * DAY_MS);
+      const { sunrise, sunset } = sunTimes(place, date);
       return [
         ...(sunrise ? [{ at: sunrise.getTime(), begins: 'day' } as const] : []),
         ...(sunset ? [{ at: sunset.getTime(), begins: 'night' } as const] : []),

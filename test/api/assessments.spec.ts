@@ -243,4 +243,60 @@ describe('POST /api/field-strengths', () => {
 
     expect(fieldStrengthsAnswer.parse(body).fields).toHaveLength(300);
   });
+
+  describe('at a moment', () => {
+    const stations = [
+      {
+        frequencyHz: 1_000_000,
+        latitude: 54,
+        longitude: 8,
+        powerDayW: 10_000,
+        powerNightW: 10_000,
+      },
+    ];
+    const fieldAt = async (period: string) => {
+      const { body } = await visitor
+        .post('/api/field-strengths', { site: SITE, stations, period })
+        .expect(200);
+      return fieldStrengthsAnswer.parse(body).fields[0];
+    };
+
+    it('is day at noon, night at midnight and between the two at sunrise', async () => {
+      const [morning, day, night] = [
+        await fieldAt('2026-03-20T07:00:00+01:00'),
+        await fieldAt('day'),
+        await fieldAt('night'),
+      ];
+
+      expect(await fieldAt('2026-03-20T12:00:00Z')).toEqual(day);
+      expect(await fieldAt('2026-03-20T23:30:00+01:00')).toEqual(night);
+      expect(morning?.fieldDb).toBeLessThan(night?.fieldDb ?? NaN);
+      expect(morning?.fieldDb).toBeGreaterThan(day?.fieldDb ?? NaN);
+    });
+
+    it('judges a receiver at a moment as by day or at night', async () => {
+      const judged = async (period: string) => {
+        const request = asked({ site: SITE, stations, period, leaveOutBetterThan: null });
+        return (await visitor.post('/api/assessments', request).expect(200)).body;
+      };
+
+      expect(await judged('2026-03-20T12:00:00Z')).toEqual(await judged('day'));
+      expect(await judged('2026-12-21T22:00:00Z')).toEqual(await judged('night'));
+    });
+
+    it.each([
+      'noon',
+      '2026-03-20',
+      '2026-03-20T12:00:00',
+      '2026-02-30T12:00:00Z',
+      '9999-01-01T00:00:00Z',
+      5,
+    ])('refuses %s as a time', async (period) => {
+      const { body } = await visitor
+        .post('/api/field-strengths', { site: SITE, stations, period })
+        .expect(400);
+
+      expect(body.issues).toMatchObject([{ path: 'period' }]);
+    });
+  });
 });
