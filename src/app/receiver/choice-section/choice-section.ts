@@ -53,9 +53,11 @@ export class ChoiceSection {
   protected readonly rejection = computed(() => {
     return passband(this.receiver(), this.store.trialHz());
   });
-  protected readonly sentence = computed(() =>
-    choiceSentence(this.store.stations(), this.range(), this.rejection(), this.store.trialHz()),
-  );
+  protected readonly sentence = computed(() => {
+    if (!this.store.fields.value()) return '';
+    const [stations, trialHz] = [this.store.stations(), this.store.trialHz()];
+    return choiceSentence(stations, this.range(), this.rejection(), trialHz);
+  });
   protected readonly candidateMarks = computed(() =>
     (this.store.candidates.value()?.candidates ?? []).map(({ ifHz, deficitDb, reachable }) => ({
       ifHz,
