@@ -50,7 +50,8 @@ export function problemOf(
   status: number,
   title: string,
   issues: Problem['issues'] = [],
+  type = 'refused',
 ): HttpErrorResponse {
-  const error: Problem = { type: 'refused', title, status, instance: 'a1', issues };
+  const error: Problem = { type, title, status, instance: 'a1', issues };
   return new HttpErrorResponse({ status, error });
 }

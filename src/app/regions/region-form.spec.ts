@@ -50,7 +50,7 @@ describe('regionForm', () => {
   it('objects to a range that is upside down', () => {
     const form = regionForm();
     const raster = [{ lowHz: 1_602_000, highHz: 531_000, stepHz: 9_000 }];
-    fill(form, { id: 1, editable: true, editions: 0, name: 'Westmark', ituRegion: 1, raster });
+    fill(form, { name: 'Westmark', ituRegion: 1, raster });
 
     const issues = formIssues(form, regionDraft, form.getRawValue());
 

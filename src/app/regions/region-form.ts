@@ -1,13 +1,12 @@
 import { FormArray, FormControl, FormGroup } from '@angular/forms';
+import * as z from 'zod';
 
-import type { Region } from '../../../shared/contracts/region';
 import { defaultRaster } from '../../../shared/radio/raster';
 import type { ItuRegion } from '../../../shared/radio/site';
-import type { RasterRange } from '../../../shared/radio/station';
 import { needed } from '../ui/form-problems/form-issues';
 
 /** Controls of one range of a raster. */
-export function rangeForm(range?: RasterRange) {
+export function rangeForm(range?: RegionTyped['raster'][number]) {
   return new FormGroup({
     lowHz: new FormControl<number | null>(
       range?.lowHz ?? null,
@@ -43,8 +42,22 @@ export function regionForm() {
 
 export type RegionForm = ReturnType<typeof regionForm>;
 
-/** Shows a stored region. */
-export function fill(form: RegionForm, { name, ituRegion, raster }: Region): void {
+/** What can be typed into the form, valid or not. */
+export const regionTyped = z.object({
+  name: z.string(),
+  ituRegion: z.literal([1, 2, 3]).nullable(),
+  raster: z.array(
+    z.object({
+      lowHz: z.number().nullable(),
+      highHz: z.number().nullable(),
+      stepHz: z.number().nullable(),
+    }),
+  ),
+});
+type RegionTyped = z.infer<typeof regionTyped>;
+
+/** Shows a stored region, or what was typed before. */
+export function fill(form: RegionForm, { name, ituRegion, raster }: RegionTyped): void {
   form.reset({ name, ituRegion });
   showRaster(form, raster);
 }
@@ -68,7 +81,7 @@ export function removeRange(form: RegionForm, index: number): void {
   form.controls.raster.markAsDirty();
 }
 
-function showRaster(form: RegionForm, raster: readonly RasterRange[]): void {
+function showRaster(form: RegionForm, raster: RegionTyped['raster']): void {
   form.controls.raster.clear();
   for (const range of raster) form.controls.raster.push(rangeForm(range));
 }

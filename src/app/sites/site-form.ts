@@ -1,5 +1,7 @@
 import { type AbstractControl, FormControl, FormGroup, type ValidatorFn } from '@angular/forms';
 
+import * as z from 'zod';
+
 import { namedSite, type NamedSiteInput, type StoredSite } from '../../../shared/contracts/site';
 import type { Ground, ItuRegion, NoiseClass } from '../../../shared/radio/site';
 import { needed } from '../ui/form-problems/form-issues';
@@ -23,6 +25,18 @@ export function siteForm() {
 }
 
 export type SiteForm = ReturnType<typeof siteForm>;
+
+/** What can be typed into the form, valid or not. */
+export const siteTyped = z.object({
+  name: z.string(),
+  latitude: z.string(),
+  longitude: z.string(),
+  ground: z.enum(['sea', 'wet', 'average', 'dry', 'poor']).nullable(),
+  noise: z.enum(['city', 'residential', 'rural', 'quiet']).nullable(),
+  indoors: z.boolean(),
+  noiseFloorDb: z.number().nullable(),
+  ituRegion: z.literal([1, 2, 3]).nullable(),
+});
 
 /** What the form says, to be checked by the contract. */
 export function draftOf(form: SiteForm): Record<keyof NamedSiteInput, unknown> {

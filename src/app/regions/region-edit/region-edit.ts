@@ -1,4 +1,4 @@
-import { ChangeDetectionStrategy, Component, effect, inject, input } from '@angular/core';
+import { ChangeDetectionStrategy, Component, computed, effect, inject, input } from '@angular/core';
 import { takeUntilDestroyed } from '@angular/core/rxjs-interop';
 import { ReactiveFormsModule } from '@angular/forms';
 import { MatButtonModule } from '@angular/material/button';
@@ -9,6 +9,8 @@ import { Router, RouterLink } from '@angular/router';
 
 import { regionDraft } from '../../../../shared/contracts/region';
 import { toProblem } from '../../core/api-problem';
+import { FormDraft } from '../../core/form-draft';
+import { DraftNote } from '../../ui/draft-note/draft-note';
 import { FormProblems } from '../../ui/form-problems/form-problems';
 import { ProblemTextPipe } from '../../ui/form-problems/problem-text-pipe';
 import { Submission } from '../../ui/form-problems/submission';
@@ -16,7 +18,7 @@ import { ITU_REGIONS, ituWords } from '../../ui/itu-regions';
 import { Loading } from '../../ui/page-state/loading';
 import { ProblemNote } from '../../ui/page-state/problem-note';
 import type { Unsaved } from '../../ui/unsaved-changes-guard';
-import { fill, proposeRaster, regionForm } from '../region-form';
+import { fill, proposeRaster, regionForm, regionTyped } from '../region-form';
 import { RegionStore } from '../region-store';
 import { RasterFields } from './raster-fields';
 
@@ -24,6 +26,7 @@ import { RasterFields } from './raster-fields';
 @Component({
   selector: 'app-region-edit',
   imports: [
+    DraftNote,
     FormProblems,
     Loading,
     MatButtonModule,
@@ -53,10 +56,24 @@ export class RegionEdit implements Unsaved {
   protected readonly form = regionForm();
   protected readonly submission = new Submission(this.form, regionDraft, toProblem);
 
+  protected readonly isReady = computed(
+    () => this.id() === undefined || this.region.value() !== undefined,
+  );
+  protected readonly draft = new FormDraft({
+    form: this.form,
+    name: () => `region.${this.id() ?? 'new'}`,
+    shape: regionTyped,
+    show: (typed) => {
+      fill(this.form, typed);
+      this.form.controls.raster.markAsDirty();
+    },
+  });
+
   constructor() {
     effect(() => {
-      const region = this.region.value();
-      if (region) fill(this.form, region);
+      if (!this.isReady()) return;
+      this.showStored();
+      this.draft.restore();
     });
     this.form.controls.ituRegion.valueChanges.pipe(takeUntilDestroyed()).subscribe(() => {
       if (this.form.controls.ituRegion.dirty) proposeRaster(this.form);
@@ -67,12 +84,22 @@ export class RegionEdit implements Unsaved {
     return this.form.dirty;
   }
 
+  protected discardDraft(): void {
+    this.draft.remove();
+    this.showStored();
+  }
+
   protected async save(): Promise<void> {
     const saved = await this.submission.send(this.form.getRawValue(), (valid) =>
       this.store.save(valid, this.id()),
     );
     if (!saved) return;
-    this.form.markAsPristine();
+    this.draft.remove();
     await this.router.navigate(['/regions', saved.id]);
+  }
+
+  /** A new region is shown as the form begins. */
+  private showStored(): void {
+    fill(this.form, this.region.value() ?? { name: '', ituRegion: null, raster: [] });
   }
 }

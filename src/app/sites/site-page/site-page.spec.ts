@@ -25,6 +25,10 @@ const STORED = {
   ituRegion: 1,
 };
 
+afterEach(() => {
+  localStorage.clear();
+});
+
 async function open(url: string, stored: object = STORED) {
   const server = new FakeServer()
     .on('GET /api/sites?pageSize=500', () => ({ items: [stored], total: 1 }))
@@ -124,6 +128,22 @@ describe('SitePage', () => {
 
     expect(await page.textIn('Name')).toBe('Signal Hill');
     expect(await page.buttons()).toEqual(['Back to the sites']);
+  });
+
+  it('brings back what was typed and not saved, until it is discarded', async () => {
+    const first = await open('/sites/3');
+    await first.page.type('Name', 'Signal Hall');
+    await vi.waitFor(() => {
+      expect(localStorage.length).toBe(1);
+    });
+    TestBed.resetTestingModule();
+
+    const { page } = await open('/sites/3');
+    expect(await page.textIn('Name')).toBe('Signal Hall');
+    await page.press('Discard it');
+
+    expect(await page.textIn('Name')).toBe('Signal Hill');
+    expect(localStorage.length).toBe(0);
   });
 
   it('deletes only after asking', async () => {

@@ -13,13 +13,15 @@ import { Router, RouterLink } from '@angular/router';
 
 import type { Problem } from '../../../../shared/contracts/problem';
 import { toProblem } from '../../core/api-problem';
+import { FormDraft } from '../../core/form-draft';
 import { Confirm } from '../../ui/confirm/confirm';
+import { DraftNote } from '../../ui/draft-note/draft-note';
 import { FormProblems } from '../../ui/form-problems/form-problems';
 import { Submission } from '../../ui/form-problems/submission';
 import { Loading } from '../../ui/page-state/loading';
 import { ProblemNote } from '../../ui/page-state/problem-note';
 import type { Unsaved } from '../../ui/unsaved-changes-guard';
-import { draftOf, fill, siteForm, siteToSave } from '../site-form';
+import { draftOf, fill, siteForm, siteToSave, siteTyped } from '../site-form';
 import { SiteStore } from '../site-store';
 import { SiteFields } from './site-fields';
 
@@ -27,6 +29,7 @@ import { SiteFields } from './site-fields';
 @Component({
   selector: 'app-site-page',
   imports: [
+    DraftNote,
     FormProblems,
     Loading,
     MatButtonModule,
@@ -57,10 +60,20 @@ export class SitePage implements Unsaved {
   protected readonly refusal = signal<Problem | null>(null);
   protected readonly submission = new Submission(this.form, siteToSave, toProblem);
 
+  protected readonly draft = new FormDraft({
+    form: this.form,
+    name: () => `site.${this.id() ?? 'new'}`,
+    shape: siteTyped,
+    show: (typed) => {
+      this.form.setValue(typed);
+    },
+  });
+
   constructor() {
     effect(() => {
-      const site = this.site.value();
-      if (site) fill(this.form, site);
+      if (!this.isReady()) return;
+      this.showStored();
+      if (this.isEditable()) this.draft.restore();
     });
   }
 
@@ -91,8 +104,20 @@ export class SitePage implements Unsaved {
     }
   }
 
+  protected discardDraft(): void {
+    this.draft.remove();
+    this.showStored();
+  }
+
+  /** A new site is shown as the form begins. */
+  private showStored(): void {
+    const site = this.site.value();
+    if (site) fill(this.form, site);
+    else this.form.reset(siteForm().getRawValue());
+  }
+
   private async leave(): Promise<void> {
-    this.form.markAsPristine();
+    this.draft.remove();
     await this.router.navigate(['/sites']);
   }
 }

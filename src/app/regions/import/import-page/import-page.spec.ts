@@ -156,6 +156,23 @@ describe('ImportPage', () => {
     expect(await page.step()).toBe('Result');
   });
 
+  it('counts anew where another edition came in between', async () => {
+    const list = new FakeImport();
+    list.state = 'ready';
+    list.label = 'vale';
+    list.columns = MATCHED;
+    list.server.on(`POST ${IMPORT}/commit`, () =>
+      problemOf(409, 'Check it again.', [], 'edition-changed'),
+    );
+    const { page } = await open('/regions/1/import/7?step=store', list);
+
+    await page.press('Store the edition');
+
+    expect(list.server.sent(`PUT ${IMPORT}`)).toHaveLength(1);
+    expect(await page.step()).toBe('Store');
+    expect(await page.text()).toContain('The counts are new now');
+  });
+
   it('undoes a stored import only after asking', async () => {
     const list = new FakeImport();
     list.state = 'committed';

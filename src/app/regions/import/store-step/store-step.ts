@@ -5,7 +5,8 @@ import { MatFormFieldModule } from '@angular/material/form-field';
 import { MatInputModule } from '@angular/material/input';
 import { MatProgressBarModule } from '@angular/material/progress-bar';
 
-import { importMatching } from '../../../../../shared/contracts/list-import';
+import { type ImportMatching, importMatching } from '../../../../../shared/contracts/list-import';
+import type { Problem } from '../../../../../shared/contracts/problem';
 import { nameText } from '../../../../../shared/contracts/quantities';
 import { toProblem } from '../../../core/api-problem';
 import { FormProblems } from '../../../ui/form-problems/form-problems';
@@ -16,6 +17,15 @@ import { RowCounts } from '../row-counts/row-counts';
 import { StepHeading } from '../step-heading';
 
 const named = importMatching.required({ columns: true, date: true }).extend({ label: nameText });
+
+const EDITION_CHANGED = 'edition-changed';
+
+function storeProblem(error: unknown): Problem {
+  const problem = toProblem(error);
+  if (problem.type !== EDITION_CHANGED) return problem;
+  const title = $localize`Another edition was stored or undone since this list was checked. The counts are new now: store it if they are right.`;
+  return { ...problem, title };
+}
 
 /** Fourth step: what the edition is called, and storing it. */
 @Component({
@@ -44,7 +54,7 @@ export class StoreStep {
     label: new FormControl(this.list.state()?.label ?? '', { nonNullable: true }),
     date: new FormControl(this.list.state()?.date ?? '', { nonNullable: true }),
   });
-  protected readonly submission = new Submission(this.form, named, toProblem);
+  protected readonly submission = new Submission(this.form, named, storeProblem);
 
   protected async store(): Promise<void> {
     const columns = this.list.state()?.proposal.columns;
@@ -52,7 +62,7 @@ export class StoreStep {
       const { label, date } = this.list.state() ?? {};
       // The name goes with the check: another name is checked again, by the same columns.
       if (matching.label !== label || matching.date !== date) await this.list.check(matching);
-      await this.list.commit();
+      await this.commit(matching);
     });
   }
 
@@ -60,5 +70,15 @@ export class StoreStep {
     await this.list.remove().catch(() => {
       this.list.refresh();
     });
+  }
+
+  /** Where another edition came in between, the counts are made anew before one decides again. */
+  private async commit(matching: ImportMatching): Promise<void> {
+    try {
+      await this.list.commit();
+    } catch (error) {
+      if (toProblem(error).type === EDITION_CHANGED) await this.list.check(matching);
+      throw error;
+    }
   }
 }
