@@ -29,6 +29,7 @@ import { sessionCookie } from './sessions/session-door.ts';
 import { sessionRoutes } from './sessions/session-routes.ts';
 import { siteRoutes } from './sites/site-routes.ts';
 import { trackingRoutes } from './tracking/tracking-routes.ts';
+import { whistleRoutes } from './whistles/whistle-routes.ts';
 import { workshopRoutes } from './workshops/workshop-routes.ts';
 
 /** Every operation of the API. A resource is mounted by adding its rows here. */
@@ -47,6 +48,7 @@ export function apiRoutes(services: Services): Route[] {
     ...fieldStrengthRoutes(fieldStrengths),
     ...assessmentRoutes(assessments),
     ...trackingRoutes(engine),
+    ...whistleRoutes(services.whistles),
     ...planRoutes(services.plans),
   ];
 }

@@ -23,6 +23,7 @@ import { Regions } from './regions/regions.ts';
 import { SessionDoor } from './sessions/session-door.ts';
 import { Sessions } from './sessions/sessions.ts';
 import { Sites } from './sites/sites.ts';
+import { Whistles } from './whistles/whistles.ts';
 import { Members } from './workshops/members.ts';
 import { Workshops } from './workshops/workshops.ts';
 
@@ -62,6 +63,7 @@ export function createServices(database: Sequelize, config: Config, log: Logger)
     imports: new Imports(database, regions, editionWriter, uploads, commits),
     commits,
     fieldStrengths: new FieldStrengths(lists, engine),
+    whistles: new Whistles(lists, engine),
     engine,
     assessments,
     plans: new Plans(database, { receivers, sites, editions, assessments, people: accounts }),

@@ -4,6 +4,10 @@ import {
   assess as assessReceiver,
 } from '../../shared/radio/assessment.ts';
 import {
+  breakthroughHours as hoursOfBreakthrough,
+  type BreakthroughHours,
+} from '../../shared/radio/breakthrough-hours.ts';
+import {
   type Candidates,
   type CandidatesInput,
   judgeCandidates as judge,
@@ -16,6 +20,11 @@ import type { Period, ReceptionTime, Site } from '../../shared/radio/site.ts';
 import type { RasterRange, Station } from '../../shared/radio/station.ts';
 import { periodAt } from '../../shared/radio/sunlight.ts';
 import type { Tracking, TrackingInput } from '../../shared/radio/tracking.ts';
+import {
+  whistleCauses,
+  type WhistleInput,
+  type Whistles,
+} from '../../shared/radio/whistle-causes.ts';
 import { BoundedCache } from './bounded-cache.ts';
 import { type StationColumns, unpackNames, unpackStations } from './station-columns.ts';
 
@@ -44,16 +53,37 @@ export interface Tasks {
     takes: { readonly lists: readonly ListAtSite[]; readonly ask: Omit<CandidatesInput, 'cases'> };
     answers: Candidates;
   };
+  breakthroughHours: {
+    takes: {
+      readonly list: ListAtSite;
+      readonly receiver: AssessmentInput['receiver'];
+      readonly times: readonly Date[];
+    };
+    answers: BreakthroughHours;
+  };
   fieldStrengths: {
     takes: { readonly list: ListAtSite; readonly time: ReceptionTime };
     answers: { readonly fields: readonly (FieldStrength & Named)[] };
   };
   designTracking: { takes: TrackingInput; answers: Tracking };
+  explainWhistle: {
+    takes: {
+      readonly list: ListAtSite;
+      readonly time: ReceptionTime;
+      readonly ask: Omit<WhistleInput, FromList>;
+    };
+    answers: Whistles & { readonly skipped: readonly Skipped[] };
+  };
 }
 
 interface Named {
   readonly name: string;
   readonly frequencyHz: number;
+}
+
+interface Skipped {
+  readonly station: number;
+  readonly reason: string;
 }
 
 const KEPT_STATIONS = 300_000;
@@ -80,6 +110,15 @@ export function judgeCandidates({ lists, ask }: Tasks['judgeCandidates']['takes'
   return judge({ ...ask, cases });
 }
 
+export function breakthroughHours({
+  list,
+  receiver,
+  times,
+}: Tasks['breakthroughHours']['takes']): BreakthroughHours {
+  const { site, raster } = list;
+  return hoursOfBreakthrough({ receiver, site, raster, times, stations: stationsOf(list) });
+}
+
 export function fieldStrengths({
   list,
   time,
@@ -92,6 +131,22 @@ export function fieldStrengths({
     frequencyHz: stations[index]?.frequencyHz ?? 0,
   }));
   return { fields };
+}
+
+export function explainWhistle({
+  list,
+  time,
+  ask,
+}: Tasks['explainWhistle']['takes']): Tasks['explainWhistle']['answers'] {
+  const { site, raster } = list;
+  const fields = fieldsOf(list, time);
+  const skipped = fields
+    .filter(({ fieldDb }) => fieldDb === null)
+    .map(({ station, notes }) => ({ station, reason: notes.join(' ') }));
+  return {
+    ...whistleCauses({ ...ask, site, raster, stations: stationsOf(list), fields }),
+    skipped,
+  };
 }
 
 function stationsOf({ editionId, columns }: ListAtSite): Station[] {
