@@ -1,4 +1,8 @@
 import { assessment, assessmentRequest } from '../../shared/contracts/assessment.ts';
+import {
+  breakthroughHoursAnswer,
+  breakthroughHoursRequest,
+} from '../../shared/contracts/breakthrough-hours.ts';
 import { candidatesAnswer, candidatesRequest } from '../../shared/contracts/candidates.ts';
 import { sendComputed, whenClientLeaves } from '../http/computed-answer.ts';
 import { route, type Route } from '../http/route.ts';
@@ -17,6 +21,20 @@ export const assessmentRoutes = (assessments: Assessments): Route[] => [
     handle: async ({ actor, body, response }) => {
       const signal = whenClientLeaves(response);
       sendComputed(response, await assessments.assess(actor, body, signal));
+    },
+  }),
+  route({
+    method: 'post',
+    path: '/api/breakthrough-hours',
+    summary: 'Worst breakthrough and image in every half-hour of a day (UTC)',
+    access: 'visitor',
+    body: breakthroughHoursRequest,
+    answer: breakthroughHoursAnswer,
+    computing: true,
+    faults: [404, 429],
+    handle: async ({ actor, body, response }) => {
+      const signal = whenClientLeaves(response);
+      sendComputed(response, await assessments.breakthroughHours(actor, body, signal));
     },
   }),
   route({

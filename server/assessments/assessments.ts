@@ -1,7 +1,12 @@
 import type { AssessmentRequest } from '../../shared/contracts/assessment.ts';
+import {
+  type BreakthroughHoursRequest,
+  halfHoursOf,
+} from '../../shared/contracts/breakthrough-hours.ts';
 import type { CandidatesRequest } from '../../shared/contracts/candidates.ts';
 import { receptionTimeOf } from '../../shared/contracts/quantities.ts';
 import type { Assessment } from '../../shared/radio/assessment.ts';
+import type { BreakthroughHours } from '../../shared/radio/breakthrough-hours.ts';
 import type { Candidates } from '../../shared/radio/candidates.ts';
 import type { Computed, Engine } from '../computing/engine.ts';
 import type { ListAtSite } from '../computing/engine-tasks.ts';
@@ -33,6 +38,18 @@ export class Assessments {
     const ask = { receiver, maxM, maxN, leaveOutBetterThan, limit };
     const time = receptionTimeOf(request.period);
     return this.engine.run('assess', { list, time, ask }, signal);
+  }
+
+  async breakthroughHours(
+    actor: Actor | undefined,
+    request: BreakthroughHoursRequest,
+    signal?: AbortSignal,
+  ): Promise<Computed<BreakthroughHours>> {
+    refuseNotYet(request);
+    const list = await this.lists.find(actor, request);
+    const { receiver, date } = request;
+    const task = { list, receiver, times: halfHoursOf(date) };
+    return this.engine.run('breakthroughHours', task, signal);
   }
 
   async judgeCandidates(
