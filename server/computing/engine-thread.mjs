@@ -1,5 +1,11 @@
 import { tsImport } from 'tsx/esm/api';
 
 // A thread does not inherit the loader that lets Node.js run TypeScript.
-export const { assess, judgeCandidates, breakthroughHours, fieldStrengths, designTracking } =
-  await tsImport('./engine-thread.ts', import.meta.url);
+export const {
+  assess,
+  judgeCandidates,
+  breakthroughHours,
+  fieldStrengths,
+  designTracking,
+  explainWhistle,
+} = await tsImport('./engine-thread.ts', import.meta.url);

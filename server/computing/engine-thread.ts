@@ -22,3 +22,4 @@ export const judgeCandidates = answered(tasks.judgeCandidates);
 export const breakthroughHours = answered(tasks.breakthroughHours);
 export const fieldStrengths = answered(tasks.fieldStrengths);
 export const designTracking = answered(tracking.designTracking);
+export const explainWhistle = answered(tasks.explainWhistle);
