@@ -1,3 +1,4 @@
+import { receptionTimeOf } from '../../shared/contracts/quantities.ts';
 import type { WhistlesRequest } from '../../shared/contracts/whistles.ts';
 import type { Computed, Engine } from '../computing/engine.ts';
 import type { Tasks } from '../computing/engine-tasks.ts';
@@ -20,8 +21,9 @@ export class Whistles {
     signal?: AbortSignal,
   ): Promise<Computed<Tasks['explainWhistle']['answers']>> {
     const list = await this.lists.find(actor, request);
-    const { receiver, period, dialHz, pitchHz = null, pitchSlope = null } = request;
+    const { receiver, dialHz, pitchHz = null, pitchSlope = null } = request;
     const ask = { receiver, dialHz, pitchHz, pitchSlope };
-    return this.engine.run('explainWhistle', { list, time: period, ask }, signal);
+    const time = receptionTimeOf(request.period);
+    return this.engine.run('explainWhistle', { list, time, ask }, signal);
   }
 }

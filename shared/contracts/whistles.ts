@@ -2,7 +2,7 @@ import * as z from 'zod';
 
 import type { Whistles as RadioWhistles } from '../radio/whistle-causes.ts';
 import { cause } from './assessment.ts';
-import { frequencyHz, period } from './quantities.ts';
+import { frequencyHz, receptionTime } from './quantities.ts';
 import { receiverDraft } from './receiver.ts';
 import { site } from './site.ts';
 import { hasOneSource, oneSourceIssue, stationSourceFields } from './station.ts';
@@ -13,7 +13,7 @@ export const whistlesRequest = z
     receiver: receiverDraft,
     site,
     ...stationSourceFields,
-    period: period.default('night'),
+    period: receptionTime.default('night'),
     dialHz: frequencyHz,
     pitchHz: z.number().min(0).max(20_000, 'Give a pitch of 20 kHz or less.').nullish(),
     /** Hertz of pitch per hertz of dial; its sign does not matter. */

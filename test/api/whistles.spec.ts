@@ -62,6 +62,12 @@ describe('POST /api/whistles', () => {
     await visitor.post('/api/whistles', request).expect(401);
   });
 
+  it('takes day, night and a moment', async () => {
+    for (const period of ['day', 'night', '2026-12-21T18:30:00Z']) {
+      expect((await explained({ period })).causes.length).toBeGreaterThan(0);
+    }
+  });
+
   it('says which stations could not be computed', async () => {
     const stations = [{ frequencyHz: 900_000, latitude: 50, longitude: 8 }];
 
@@ -74,6 +80,7 @@ describe('POST /api/whistles', () => {
   it.each<[string, object]>([
     ['dialHz', { dialHz: 300_000 }],
     ['dialHz', { dialHz: undefined }],
+    ['period', { period: 'dusk' }],
     ['pitchHz', { pitchHz: -1 }],
     ['pitchSlope', { pitchSlope: 'fast' }],
     ['stations', { stations: undefined }],
