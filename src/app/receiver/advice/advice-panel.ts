@@ -29,8 +29,15 @@ export class AdvicePanel {
     return verdictSentences(judged.verdict, present, this.store.period(), this.store.nameOf);
   });
   protected readonly target = computed(() => kilohertz(this.advice().ifHz));
-  /** What should be known about the set and the site as they were given. */
-  protected readonly warnings = computed(() => this.store.judged.value()?.warnings ?? []);
+  private readonly warnings = computed(() => this.store.judged.value()?.warnings ?? []);
+  /** What should be looked at in the set-up. */
+  protected readonly ofReceiver = computed(() =>
+    this.warnings().filter(({ path }) => path.startsWith('receiver')),
+  );
+  /** Where the models are carried beyond what they are known for. */
+  protected readonly ofModels = computed(() =>
+    this.warnings().filter(({ path }) => !path.startsWith('receiver')),
+  );
   protected readonly onTrial = computed(() => kilohertz(this.store.trialHz()));
   protected readonly skipped = computed(() => {
     const counts = new Map<string, number>();
