@@ -37,7 +37,7 @@ export class Assessments {
     const { receiver, maxM, maxN, leaveOutBetterThan, limit } = request;
     const ask = { receiver, maxM, maxN, leaveOutBetterThan, limit };
     const time = receptionTimeOf(request.period);
-    return this.engine.run('assess', { list, time, ask }, signal);
+    return this.engine.run('assess', { list, time, skyWave: request.skyWave, ask }, signal);
   }
 
   async breakthroughHours(

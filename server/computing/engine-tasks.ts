@@ -17,6 +17,7 @@ import {
   fieldStrengths as compute,
 } from '../../shared/radio/field-strength.ts';
 import type { Period, ReceptionTime, Site } from '../../shared/radio/site.ts';
+import { type SkyWaveChoice, USUAL_SKY_WAVE } from '../../shared/radio/sky-wave.ts';
 import type { RasterRange, Station } from '../../shared/radio/station.ts';
 import { periodAt } from '../../shared/radio/sunlight.ts';
 import type { Tracking, TrackingInput } from '../../shared/radio/tracking.ts';
@@ -45,6 +46,7 @@ export interface Tasks {
     takes: {
       readonly list: ListAtSite;
       readonly time: ReceptionTime;
+      readonly skyWave: SkyWaveChoice;
       readonly ask: Omit<AssessmentInput, FromList | 'period'>;
     };
     answers: Assessment;
@@ -62,7 +64,11 @@ export interface Tasks {
     answers: BreakthroughHours;
   };
   fieldStrengths: {
-    takes: { readonly list: ListAtSite; readonly time: ReceptionTime };
+    takes: {
+      readonly list: ListAtSite;
+      readonly time: ReceptionTime;
+      readonly skyWave: SkyWaveChoice;
+    };
     answers: { readonly fields: readonly (FieldStrength & Named)[] };
   };
   designTracking: { takes: TrackingInput; answers: Tracking };
@@ -93,10 +99,10 @@ const KEPT_FIELDS = 600_000;
 const unpacked = new BoundedCache<Station[]>(KEPT_STATIONS);
 const computed = new BoundedCache<FieldStrength[]>(KEPT_FIELDS);
 
-export function assess({ list, time, ask }: Tasks['assess']['takes']): Assessment {
+export function assess({ list, time, skyWave, ask }: Tasks['assess']['takes']): Assessment {
   const { site, raster } = list;
   const stations = stationsOf(list);
-  const fields = fieldsOf(list, time);
+  const fields = fieldsOf(list, time, skyWave);
   return assessReceiver({ ...ask, site, raster, stations, fields, period: periodOf(site, time) });
 }
 
@@ -122,10 +128,11 @@ export function breakthroughHours({
 export function fieldStrengths({
   list,
   time,
+  skyWave,
 }: Tasks['fieldStrengths']['takes']): Tasks['fieldStrengths']['answers'] {
   const stations = stationsOf(list);
   const names = unpackNames(list.columns);
-  const fields = fieldsOf(list, time).map((field, index) => ({
+  const fields = fieldsOf(list, time, skyWave).map((field, index) => ({
     ...field,
     name: names[index] ?? '',
     frequencyHz: stations[index]?.frequencyHz ?? 0,
@@ -154,12 +161,17 @@ function stationsOf({ editionId, columns }: ListAtSite): Station[] {
   return unpacked.remember(String(editionId), columns.count, () => unpackStations(columns));
 }
 
-function fieldsOf(list: ListAtSite, time: ReceptionTime): FieldStrength[] {
+function fieldsOf(
+  list: ListAtSite,
+  time: ReceptionTime,
+  skyWave: SkyWaveChoice = USUAL_SKY_WAVE,
+): FieldStrength[] {
   const { editionId, site, columns } = list;
-  const make = () => compute(site, stationsOf(list), time);
+  const make = () => compute(site, stationsOf(list), time, skyWave);
   if (editionId === null) return make();
   const when = time instanceof Date ? time.toISOString() : time;
-  const key = [editionId, site.latitude, site.longitude, site.ground, when].join();
+  const { form, nights } = skyWave;
+  const key = [editionId, site.latitude, site.longitude, site.ground, when, form, nights].join();
   return computed.remember(key, columns.count, make);
 }
 

@@ -2,6 +2,7 @@ import { afterEach, describe, expect, it } from 'vitest';
 
 import { receiverDraft } from '../../shared/contracts/receiver.ts';
 import { defaultRaster } from '../../shared/radio/raster.ts';
+import { USUAL_SKY_WAVE } from '../../shared/radio/sky-wave.ts';
 import type { Station } from '../../shared/radio/station.ts';
 import { Engine } from './engine.ts';
 import type { ListAtSite, Tasks } from './engine-tasks.ts';
@@ -46,6 +47,7 @@ const receiver = receiverDraft.parse({
 const task = (count: number): Tasks['assess']['takes'] => ({
   list: listOf(count),
   time: 'night',
+  skyWave: USUAL_SKY_WAVE,
   ask: { receiver, maxM: 3, maxN: 2, leaveOutBetterThan: null, limit: 10_000 },
 });
 
@@ -53,7 +55,11 @@ describe('Engine', () => {
   it('computes in a thread and answers JSON that can be read', async () => {
     engine = new Engine();
 
-    const answer = await engine.run('fieldStrengths', { list: listOf(3), time: 'day' });
+    const answer = await engine.run('fieldStrengths', {
+      list: listOf(3),
+      time: 'day',
+      skyWave: USUAL_SKY_WAVE,
+    });
 
     expect(new TextDecoder().decode(answer.json)).toBe(JSON.stringify(answer.read()));
     expect(answer.read().fields[2]).toMatchObject({ station: 2, name: 'Station 2', fieldDb: 62 });

@@ -3,6 +3,7 @@ import * as z from 'zod';
 import { receptionTime } from './quantities.ts';
 import { receiverDraft } from './receiver.ts';
 import { site } from './site.ts';
+import { skyWaveChoice } from './sky-wave.ts';
 import { hasOneSource, oneSourceIssue, stationSourceFields } from './station.ts';
 
 export const grade = z.enum([
@@ -31,6 +32,7 @@ export const assessmentRequest = z
     site,
     ...stationSourceFields,
     period: receptionTime.default('night'),
+    skyWave: skyWaveChoice,
     maxM: z.int().min(0).max(5, 'Give an oscillator order from 0 to 5.').default(3),
     maxN: z.int().min(1).max(3, 'Give a signal order from 1 to 3.').default(2),
     leaveOutBetterThan: grade.exclude(['hidden']).nullable().default('slightly-annoying'),

@@ -2,11 +2,17 @@ import * as z from 'zod';
 
 import { receptionTime } from './quantities.ts';
 import { site } from './site.ts';
+import { skyWaveChoice } from './sky-wave.ts';
 import { hasOneSource, oneSourceIssue, stationSourceFields } from './station.ts';
 
 /** At which site, and from which stations, the field is asked for. */
 export const fieldStrengthsRequest = z
-  .strictObject({ site, ...stationSourceFields, period: receptionTime.default('night') })
+  .strictObject({
+    site,
+    ...stationSourceFields,
+    period: receptionTime.default('night'),
+    skyWave: skyWaveChoice,
+  })
   .refine(hasOneSource, oneSourceIssue);
 export type FieldStrengthsRequest = z.output<typeof fieldStrengthsRequest>;
 export type FieldStrengthsInput = z.input<typeof fieldStrengthsRequest>;

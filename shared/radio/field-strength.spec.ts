@@ -247,3 +247,28 @@ describe('fieldStrengths at a moment', () => {
     expect(() => fieldOf({}, {}, new Date(NaN))).toThrow(RangeError);
   });
 });
+
+describe('fieldStrengths with another sky wave', () => {
+  const stations = [{ ...station, latitude: 52 }];
+  const skyOf = (form: 'cfr-73-190' | 'itu-r-p1147', nights: 50 | 10) =>
+    fieldStrengths(site, stations, 'night', { form, nights })[0];
+
+  it('is stronger in a tenth of the nights and weaker in the north by ITU-R P.1147', () => {
+    const usual = skyOf('cfr-73-190', 50);
+
+    expect(usual).toEqual(fieldStrengths(site, stations, 'night')[0]);
+    expect(skyOf('cfr-73-190', 10)?.skyDb).toBeGreaterThan(level(usual?.skyDb ?? null) + 5.9);
+    expect(skyOf('itu-r-p1147', 50)?.skyDb).toBeLessThan(level(usual?.skyDb ?? null) - 1);
+    expect(skyOf('itu-r-p1147', 10)?.groundDb).toBe(usual?.groundDb);
+  });
+
+  it('says what was chosen, where there is a sky wave', () => {
+    const choice = { form: 'itu-r-p1147', nights: 10 } as const;
+
+    expect(skyOf('itu-r-p1147', 10)?.notes).toEqual([
+      FIELD_NOTES.skyWaveP1147,
+      FIELD_NOTES.skyWaveTenth,
+    ]);
+    expect(fieldStrengths(site, stations, 'day', choice)[0]?.notes).toEqual([]);
+  });
+});

@@ -6,7 +6,12 @@
 import { LEAST_DISTANCE_M } from './ground-wave.ts';
 import type { Place } from './path.ts';
 import type { Period, ReceptionTime, Site } from './site.ts';
-import { SKY_WAVE_MAX_LATITUDE, SKY_WAVE_RANGE_HZ } from './sky-wave.ts';
+import {
+  SKY_WAVE_MAX_LATITUDE,
+  SKY_WAVE_RANGE_HZ,
+  type SkyWaveChoice,
+  USUAL_SKY_WAVE,
+} from './sky-wave.ts';
 import type { Station } from './station.ts';
 import { GroundWaves, hasSkyWave, StationPath } from './station-path.ts';
 import { decibels, powerSum } from './units.ts';
@@ -37,6 +42,8 @@ export const FIELD_NOTES = {
     'There is no sky-wave model here below 150 and above 1710 kHz: this is the ground wave alone.',
   skyWaveExtrapolated: 'The sky wave below 535 kHz is extrapolated from the medium-wave formula.',
   skyWaveLatitude: 'The path runs beyond 60 degrees of geomagnetic latitude; it is taken as 60.',
+  skyWaveP1147: 'The sky wave is computed by the form of ITU-R P.1147.',
+  skyWaveTenth: 'The sky wave is that which is exceeded in 10 % of the nights.',
   criticalHours:
     'The sun is up at the middle of the path for less than two hours: what is left of the sky wave is estimated.',
 } as const;
@@ -56,6 +63,7 @@ export const FIELD_NOTES = {
  * @param site The receiving site; place and ground are needed for stations without a given field.
  * @param stations The stations; frequencies in whole hertz, powers as e.m.r.p. in watts.
  * @param time Day or night for all, or a moment.
+ * @param choice Which sky wave; left out, the median by 47 CFR 73.190.
  * @returns One result for each station, in their order.
  * @throws {RangeError} If a frequency is not whole, a place is not on the earth or the moment is no
  *   valid date.
@@ -67,7 +75,8 @@ export const fieldStrengths = (
   site: Site,
   stations: readonly Station[],
   time: ReceptionTime,
-): FieldStrength[] => new FieldsAtSite(site, stations).at(time);
+  choice: SkyWaveChoice = USUAL_SKY_WAVE,
+): FieldStrength[] => new FieldsAtSite(site, stations, choice).at(time);
 
 /** Fields of stations at a site for several times: what does not change is worked out once. */
 export class FieldsAtSite {
@@ -75,17 +84,19 @@ export class FieldsAtSite {
   private readonly groundWaves: GroundWaves | null;
   private readonly stations: readonly Station[];
   private readonly paths: readonly (StationPath | null)[];
+  private readonly choiceNotes: readonly string[];
 
   /** Takes what `fieldStrengths` takes, and throws what it throws. */
-  constructor(site: Site, stations: readonly Station[]) {
+  constructor(site: Site, stations: readonly Station[], choice: SkyWaveChoice = USUAL_SKY_WAVE) {
     const place = placeOf(site);
     this.place = place;
     this.groundWaves = site.ground === null ? null : new GroundWaves(site.ground);
     this.stations = stations;
     this.paths = stations.map((station) => {
       const from = placeOf(station);
-      return place && from ? new StationPath(from, place) : null;
+      return place && from ? new StationPath(from, place, choice) : null;
     });
+    this.choiceNotes = notesOnChoice(choice);
   }
 
   /** The fields at a time, as `fieldStrengths` gives them. */
@@ -113,7 +124,9 @@ export class FieldsAtSite {
     const sky = hasSkyWave(station.frequencyHz) ? path.sky(time) : null;
     const skyDb = sky === null ? null : decibels(sky + powerDb);
     const fieldDb = skyDb === null ? groundDb : powerSum(groundDb, skyDb);
-    return { ...without, groundDb, skyDb, fieldDb, notes: notesOn(station, path, time) };
+    const notes = notesOn(station, path, time);
+    if (skyDb !== null) notes.push(...this.choiceNotes);
+    return { ...without, groundDb, skyDb, fieldDb, notes };
   }
 }
 
@@ -125,6 +138,12 @@ function powerOf(station: Station, path: StationPath | null, time: ReceptionTime
   if (period === undefined) return null;
   return period === 'day' ? powerDayW : powerNightW;
 }
+
+/** What is to be said of a sky wave that is not the usual one. */
+const notesOnChoice = ({ form, nights }: SkyWaveChoice): string[] => [
+  ...(form === 'itu-r-p1147' ? [FIELD_NOTES.skyWaveP1147] : []),
+  ...(nights === 10 ? [FIELD_NOTES.skyWaveTenth] : []),
+];
 
 /** What is to be said of a field that was computed. */
 function notesOn({ frequencyHz }: Station, path: StationPath, time: ReceptionTime): string[] {

@@ -34,6 +34,16 @@ describe('skyWave', () => {
       6, 6, 6, 8, 10, 10,
     ]);
   });
+
+  it('is 0.44 dB and 2 sin phi weaker by ITU-R P.1147', () => {
+    const weaker = (phi: number) =>
+      skyWave(metres(800_000), phi) - skyWave(metres(800_000), phi, 50, 'itu-r-p1147');
+
+    expect(weaker(0)).toBeCloseTo(0.4424, 3);
+    expect(weaker(30)).toBeCloseTo(1.4424, 3);
+    expect(weaker(-30)).toBeCloseTo(-0.5576, 3);
+    expect(weaker(80)).toBeCloseTo(weaker(60), 9);
+  });
 });
 
 describe('geomagneticLatitude', () => {

@@ -9,6 +9,19 @@ import { type Decibels, decibels, type Metres } from './units.ts';
 /** Frequencies for which the formula is used, hertz; it was made for 535 to 1705 kHz. */
 export const SKY_WAVE_RANGE_HZ = { low: 150_000, high: 1_710_000, extrapolatedBelow: 535_000 };
 
+/** Published forms of the sky-wave formula. */
+export type SkyWaveForm = 'cfr-73-190' | 'itu-r-p1147';
+
+/** Which sky wave is computed. */
+export interface SkyWaveChoice {
+  readonly form: SkyWaveForm;
+  /** Share of the nights in which the field is exceeded, percent. */
+  readonly nights: 50 | 10;
+}
+
+/** What is computed where nobody chooses: the median by 47 CFR 73.190. */
+export const USUAL_SKY_WAVE: SkyWaveChoice = { form: 'cfr-73-190', nights: 50 };
+
 /** Critical hours: so long after sunrise and before sunset the sky wave still counts. */
 export const CRITICAL_HOURS = 2;
 
@@ -20,19 +33,23 @@ const DEGREE = Math.PI / 180;
 const KILOWATT_DB = 20 * Math.log10(3);
 
 /**
- * Median field of the sky wave of 1 kW e.m.r.p., about six hours after sunset.
+ * Field of the sky wave of 1 kW e.m.r.p., about six hours after sunset.
  *
- *     Fc = 97.5 - 20 log10 D - (2 pi + 4.95 tan^2 phi) sqrt(D / 1000),  D = sqrt(40000 + d^2) km
+ *     Fc = C - 20 log10 D - (2 pi + 4.95 tan^2 phi) sqrt(D / 1000),  D = sqrt(40000 + d^2) km
  *
- * for 100 mV/m at 1 km; 1 kW e.m.r.p. is 9.54 dB more. Beyond 60 degrees the latitude is taken
- * as 60. Exceeded in 10 % of the nights: 6 dB more below 40 degrees, `0.2 |phi| - 2` up to 60, 10
- * beyond. Single nights differ by 8 dB and more.
+ * By 47 CFR 73.190 C is 97.5 for 100 mV/m at 1 km, and 9.54 dB more for 1 kW e.m.r.p.; by ITU-R
+ * P.1147 it is 106.6 - 2 sin phi for 1 kW, phi north positive. The two differ by 2 dB or so. Beyond
+ * 60 degrees the latitude is taken as 60. Exceeded in 10 % of the nights: 6 dB more below 40
+ * degrees, `0.2 |phi| - 2` up to 60, 10 beyond; the same is added to either form. Single nights
+ * differ by 8 dB and more.
  *
- * Source: 47 CFR 73.190, Engineering charts and related formulas, formulas 1 and 2.
+ * Source: 47 CFR 73.190, Engineering charts and related formulas, formulas 1 and 2; the constant of
+ * ITU-R P.1147 from memory of it, not re-read.
  *
  * @param distance Distance, metres.
  * @param geomagneticLatitude Geomagnetic latitude of the middle of the path, degrees.
- * @param percentOfNights Share of the nights in which the field is exceeded: 50 or 10.
+ * @param nights Share of the nights in which the field is exceeded, percent: 50 or 10.
+ * @param form Published form of the formula.
  * @returns Field, dB(uV/m).
  * @example
  *   skyWave(metres(1_329_018), 46.3138); // 30.9 (21.358 for 100 mV/m at 1 km)
@@ -40,14 +57,18 @@ const KILOWATT_DB = 20 * Math.log10(3);
 export function skyWave(
   distance: Metres,
   geomagneticLatitude: number,
-  percentOfNights: 50 | 10 = 50,
+  nights: SkyWaveChoice['nights'] = USUAL_SKY_WAVE.nights,
+  form: SkyWaveForm = USUAL_SKY_WAVE.form,
 ): Decibels {
   const latitude = Math.abs(geomagneticLatitude);
-  const tangent = Math.tan(Math.min(latitude, SKY_WAVE_MAX_LATITUDE) * DEGREE);
+  const within = Math.min(latitude, SKY_WAVE_MAX_LATITUDE) * DEGREE;
+  const tangent = Math.tan(within);
+  const northward = Math.sign(geomagneticLatitude) * Math.sin(within);
+  const constant = form === 'itu-r-p1147' ? 106.6 - 2 * northward : 97.5 + KILOWATT_DB;
   const slantKm = Math.hypot(200, distance / 1000);
   const loss = (2 * Math.PI + 4.95 * tangent ** 2) * Math.sqrt(slantKm / 1000);
-  const median = 97.5 - 20 * Math.log10(slantKm) - loss + KILOWATT_DB;
-  return decibels(percentOfNights === 50 ? median : median + tenPercentGain(latitude));
+  const median = constant - 20 * Math.log10(slantKm) - loss;
+  return decibels(nights === 50 ? median : median + tenPercentGain(latitude));
 }
 
 /**

@@ -7,7 +7,13 @@ import { GROUNDS } from './ground.ts';
 import { groundWave } from './ground-wave.ts';
 import { type Place, pathLength, pathMiddle } from './path.ts';
 import type { Ground, Period, ReceptionTime } from './site.ts';
-import { criticalHoursFade, geomagneticLatitude, SKY_WAVE_RANGE_HZ, skyWave } from './sky-wave.ts';
+import {
+  criticalHoursFade,
+  geomagneticLatitude,
+  SKY_WAVE_RANGE_HZ,
+  skyWave,
+  type SkyWaveChoice,
+} from './sky-wave.ts';
 import { Sunlight } from './sunlight.ts';
 import { type Decibels, decibels, hertz, type Metres } from './units.ts';
 
@@ -36,6 +42,7 @@ export class StationPath {
   readonly distance: Metres;
   private readonly from: Place;
   private readonly to: Place;
+  private readonly choice: SkyWaveChoice;
   private middlePlace: Place | undefined;
   private nightSky: Decibels | undefined;
   private readonly suns: { station?: Sunlight; middle?: Sunlight } = {};
@@ -43,11 +50,13 @@ export class StationPath {
   /**
    * @param from Place of the station.
    * @param to Place of the site.
+   * @param choice Which sky wave.
    * @throws {RangeError} If a place is not on the earth.
    */
-  constructor(from: Place, to: Place) {
+  constructor(from: Place, to: Place, choice: SkyWaveChoice) {
     this.from = from;
     this.to = to;
+    this.choice = choice;
     this.distance = pathLength(to, from);
   }
 
@@ -60,7 +69,8 @@ export class StationPath {
   sky(time: ReceptionTime): Decibels | null {
     const fade = this.skyFade(time);
     if (fade === -Infinity) return null;
-    this.nightSky ??= skyWave(this.distance, this.geomagneticLatitude);
+    const { nights, form } = this.choice;
+    this.nightSky ??= skyWave(this.distance, this.geomagneticLatitude, nights, form);
     return decibels(this.nightSky + fade);
   }
 

@@ -299,4 +299,24 @@ describe('POST /api/field-strengths', () => {
       expect(body.issues).toMatchObject([{ path: 'period' }]);
     });
   });
+
+  it('computes the sky wave that was asked for, and says so', async () => {
+    const stations = [{ frequencyHz: 1_000_000, latitude: 54, longitude: 8, powerNightW: 10_000 }];
+    const field = async (skyWave?: object) => {
+      const request = { site: SITE, stations, skyWave };
+      const { body } = await visitor.post('/api/field-strengths', request).expect(200);
+      return fieldStrengthsAnswer.parse(body).fields[0];
+    };
+    const [usual, tenth] = [await field(), await field({ nights: 10 })];
+
+    expect(await field({ form: 'cfr-73-190', nights: 50 })).toEqual(usual);
+    expect(tenth?.skyDb).toBeGreaterThan((usual?.skyDb ?? NaN) + 5.9);
+    expect(tenth?.notes.join(' ')).toContain('10 %');
+    expect((await field({ form: 'itu-r-p1147' }))?.notes.join(' ')).toContain('P.1147');
+
+    const request = { site: SITE, stations, skyWave: { nights: 20 } };
+    const { body } = await visitor.post('/api/field-strengths', request).expect(400);
+    expect(body.issues).toMatchObject([{ path: 'skyWave.nights' }]);
+    await visitor.post('/api/assessments', asked({ skyWave: { nights: 10 } })).expect(200);
+  });
 });
