@@ -49,7 +49,9 @@ function worstDb(sweep: readonly Phasor[], lossDb: (point: Phasor) => number): n
 
 it('has ngspice, without which the formulas are not checked against a simulator', ({ skip }) => {
   if (!hasNgspice && !process.env['CI']) {
-    skip('ngspice is missing: apt-get install ngspice. Nothing was checked against it.');
+    const note = 'ngspice is missing (apt-get install ngspice): nothing was checked against it.';
+    console.warn(note);
+    skip(note);
   }
   expect(hasNgspice).toBe(true);
 });
