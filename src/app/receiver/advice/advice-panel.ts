@@ -8,6 +8,9 @@ import { type Advice } from './advice';
 import { Caution } from './caution';
 import { verdictSentences } from './verdict-words';
 
+/** A warning that names the site or the stations is about what the models know of them. */
+const isOfSurroundings = (path: string): boolean => /^(site|stations)\b/.test(path);
+
 /** What to do about the IF, and what the set is like with the IF on trial. */
 @Component({
   selector: 'app-advice-panel',
@@ -32,11 +35,11 @@ export class AdvicePanel {
   private readonly warnings = computed(() => this.store.judged.value()?.warnings ?? []);
   /** What should be looked at in the set-up. */
   protected readonly ofReceiver = computed(() =>
-    this.warnings().filter(({ path }) => path.startsWith('receiver')),
+    this.warnings().filter(({ path }) => !isOfSurroundings(path)),
   );
   /** Where the models are carried beyond what they are known for. */
   protected readonly ofModels = computed(() =>
-    this.warnings().filter(({ path }) => !path.startsWith('receiver')),
+    this.warnings().filter(({ path }) => isOfSurroundings(path)),
   );
   protected readonly onTrial = computed(() => kilohertz(this.store.trialHz()));
   protected readonly skipped = computed(() => {
