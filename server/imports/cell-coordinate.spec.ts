@@ -15,6 +15,10 @@ describe('readCoordinate', () => {
     ['011-15-00 E', 'longitude', 11.25],
     ['11:15', 'longitude', 11.25],
     ['-11d15m', 'longitude', -11.25],
+    ['48d30m36s', 'latitude', 48.51],
+    ['48D30M36S', 'latitude', 48.51],
+    ['48d30m36s S', 'latitude', -48.51],
+    ['48d30m36S', 'latitude', -48.51],
     ['0', 'latitude', 0],
     ['180', 'longitude', 180],
   ] as const)('reads %s as a %s of %d', (cell, axis, degrees) => {

@@ -8,6 +8,8 @@ const HEMISPHERES: Readonly<Record<Axis, Readonly<Record<string, 1 | -1>>>> = {
   latitude: { N: 1, S: -1 },
   longitude: { E: 1, W: -1 },
 };
+/** The last letter of "48d12m30s" means seconds, not the south; that of "48d12m30S" the south. */
+const MARK_OF_SECONDS = /(?:(m\s*[\d.,]+)s|(M\s*[\d.,]+)S)(?=\s*[NSEWnsew]?$)/;
 
 /**
  * Decimal degrees, north and east positive; null when the cell is no coordinate of this axis.
@@ -24,7 +26,8 @@ export function readCoordinate(
 ): number | null {
   const plain = unit === 'dms' ? null : readNumber(cell, mark);
   if (plain !== null) return Math.abs(plain) <= LIMITS[axis] ? plain : null;
-  const { body, sign } = splitHemisphere(cell.trim().replace('\u2212', '-'), axis);
+  const text = cell.trim().replace('\u2212', '-').replace(MARK_OF_SECONDS, '$1$2');
+  const { body, sign } = splitHemisphere(text, axis);
   if (sign === null) return null;
   const magnitude = readMagnitude(body, unit, mark);
   if (magnitude === null || magnitude > LIMITS[axis]) return null;

@@ -17,6 +17,9 @@ const GUESSES: Readonly<Record<string, string>> = {
   'windows-1250': 'windows-1250',
 };
 
+const EMPTY =
+  'The file is empty: give a list with a line of column headers and a line for each station.';
+
 /**
  * Encoding of a text file: a byte order mark, else UTF-8 if every byte of the file obeys it, else a
  * guess. The guess is only offered: the sample shows people whether it is right.
@@ -24,7 +27,7 @@ const GUESSES: Readonly<Record<string, string>> = {
  */
 export async function detectEncoding(path: string): Promise<string> {
   const head = await readHead(path);
-  if (head.length === 0) throw new BadListError('The file is empty.');
+  if (head.length === 0) throw new BadListError(EMPTY);
   const kind = foreignKind(head);
   if (kind !== null) {
     throw new BadListError(`This is ${kind}, not a CSV file. Export or unpack the list as CSV.`);

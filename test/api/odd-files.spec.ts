@@ -25,7 +25,7 @@ const wide = Array.from({ length: 10_000 }, (_, index) => `c${index}`).join(',')
 
 describe('an odd file', () => {
   it.each<[string, string | Buffer, string]>([
-    ['empty', '', 'The file is empty.'],
+    ['empty', '', 'The file is empty: give a list'],
     ['only blanks', ' \n\n \n', 'The file holds no text but blanks.'],
     ['a header alone', `${HEADER}\n`, 'The file has a header and no rows'],
     ['a PDF', '%PDF-1.7\n1 0 obj', 'This is a PDF document, not a CSV file.'],
