@@ -15,6 +15,17 @@ const station = fc.record({
   fieldDb: quantity,
 });
 
+const EMPTY = {
+  id: 0,
+  name: '',
+  frequencyHz: 1000,
+  latitude: null,
+  longitude: null,
+  powerDayW: null,
+  powerNightW: null,
+  fieldDb: null,
+};
+
 describe('packStations', () => {
   it('keeps every station exactly, the names apart', () => {
     fc.assert(
@@ -25,5 +36,17 @@ describe('packStations', () => {
         expect(unpackNames(columns)).toEqual(stations.map(({ name }) => name));
       }),
     );
+  });
+
+  it('keeps path and pattern of those that have any', () => {
+    const plain = { ...EMPTY, id: 1 };
+    const patternDb = Array.from({ length: 36 }, (_, index) => 5 - index);
+    const path = [{ ground: 'sea' as const, lengthM: 5 }];
+    const stations = [plain, { ...plain, id: 2, path, patternDb }, { ...plain, patternDb }];
+    const [first, second, third] = unpackStations(packStations(stations));
+
+    expect(first).toEqual(plain);
+    expect(second).toMatchObject({ path, patternDb });
+    expect(third).toMatchObject({ path: null, patternDb });
   });
 });

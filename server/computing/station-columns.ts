@@ -10,7 +10,11 @@ export interface StationColumns {
   readonly numbers: Float64Array;
   /** The stations' names as JSON in UTF-8: only some answers want them. */
   readonly names: Uint8Array;
+  /** Path and pattern of the few stations that have any, by their index, as JSON in UTF-8. */
+  readonly details: Uint8Array;
 }
+
+type Details = Pick<Station, 'path' | 'patternDb'>;
 
 const NAMES = [
   'id',
@@ -30,14 +34,18 @@ export function packStations(stations: readonly Station[]): StationColumns {
       numbers[at * count + index] = station[column] ?? NaN;
     });
   });
-  const text = new TextEncoder().encode(JSON.stringify(stations.map(({ name }) => name)));
-  const names = new Uint8Array(new SharedArrayBuffer(text.length));
-  names.set(text);
-  return { count, numbers, names };
+  const names = packJson(stations.map(({ name }) => name));
+  return { count, numbers, names, details: packJson(Object.fromEntries(detailed(stations))) };
 }
 
+const detailed = (stations: readonly Station[]): [number, Details][] =>
+  stations.flatMap(({ path = null, patternDb = null }, index): [number, Details][] =>
+    (path ?? patternDb) ? [[index, { path, patternDb }]] : [],
+  );
+
 /** The stations, with their names left out. */
-export function unpackStations({ count, numbers }: StationColumns): Station[] {
+export function unpackStations({ count, numbers, details }: StationColumns): Station[] {
+  const detailOf = unpackJson(details) as Record<number, Details>;
   const columns = NAMES.map((_, at) => numbers.subarray(at * count, (at + 1) * count));
   const [id, frequency, latitude, longitude, day, night, field] = columns;
   const given = (column: Float64Array | undefined, index: number): number | null => {
@@ -53,10 +61,20 @@ export function unpackStations({ count, numbers }: StationColumns): Station[] {
     powerDayW: given(day, index),
     powerNightW: given(night, index),
     fieldDb: given(field, index),
+    ...detailOf[index],
   }));
 }
 
 /** The names alone, in the stations' order. */
-export const unpackNames = ({ names }: StationColumns): string[] =>
+export const unpackNames = ({ names }: StationColumns): string[] => unpackJson(names) as string[];
+
+function packJson(value: unknown): Uint8Array {
+  const text = new TextEncoder().encode(JSON.stringify(value));
+  const shared = new Uint8Array(new SharedArrayBuffer(text.length));
+  shared.set(text);
+  return shared;
+}
+
+const unpackJson = (text: Uint8Array): unknown =>
   // A decoder refuses shared memory, hence the copy.
-  JSON.parse(new TextDecoder().decode(names.slice())) as string[];
+  JSON.parse(new TextDecoder().decode(text.slice()));

@@ -9,13 +9,15 @@ import {
   resourceId,
 } from './quantities.ts';
 
+export const groundClass = z.enum(
+  ['sea', 'wet', 'average', 'dry', 'poor'],
+  'Give sea, wet, average, dry or poor.',
+);
+
 const siteFields = {
   latitude: latitude.nullable().default(null),
   longitude: longitude.nullable().default(null),
-  ground: z
-    .enum(['sea', 'wet', 'average', 'dry', 'poor'], 'Give sea, wet, average, dry or poor.')
-    .nullable()
-    .default(null),
+  ground: groundClass.nullable().default(null),
   noise: z
     .enum(['city', 'residential', 'rural', 'quiet'], 'Give city, residential, rural or quiet.')
     .nullable()

@@ -1,5 +1,6 @@
 import * as z from 'zod';
 
+import { groundClass } from './site.ts';
 import {
   decibelsValue,
   frequencyHz,
@@ -9,6 +10,15 @@ import {
   powerW,
   resourceId,
 } from './quantities.ts';
+
+/** A stretch of uniform ground on the way from a station to the site. */
+const pathSection = z.strictObject({
+  ground: groundClass,
+  lengthM: z
+    .number('Give a length in metres.')
+    .min(1, 'Give a length of 1 m or more.')
+    .max(20_100_000, 'Give a length of half the way round the earth at most.'),
+});
 
 /** A station sent along with a computation. What is missing is said in the answer's `skipped`. */
 export const sentStation = z.strictObject({
@@ -20,6 +30,19 @@ export const sentStation = z.strictObject({
   powerNightW: powerW.nullable().default(null),
   /** Field at the site, dB(uV/m); no propagation is computed then. */
   fieldDb: decibelsValue.nullable().default(null),
+  /** Grounds from the station to the site, in order; left out: the site's ground all the way. */
+  path: z
+    .array(pathSection)
+    .min(1, 'Give a section of the path at least, or leave it out.')
+    .max(50, 'Give at most 50 sections.')
+    .nullable()
+    .default(null),
+  /** Gain of the aerial relative to the power, dB, every 10 degrees clockwise from north. */
+  patternDb: z
+    .array(decibelsValue)
+    .length(36, 'Give 36 gains, one every 10 degrees from north.')
+    .nullable()
+    .default(null),
 });
 export type SentStation = z.output<typeof sentStation>;
 

@@ -272,3 +272,64 @@ describe('fieldStrengths with another sky wave', () => {
     expect(fieldStrengths(site, stations, 'day', choice)[0]?.notes).toEqual([]);
   });
 });
+
+describe('fieldStrengths over sections and with a pattern', () => {
+  const land = fieldOf({});
+
+  it('is the plain field over one section of the same ground', () => {
+    const path = [{ ground: 'average' as const, lengthM: level(land.distanceM) }];
+    const field = fieldOf({ path }, { ground: null });
+
+    expect(field.fieldDb).toBeCloseTo(level(land.fieldDb), 9);
+    expect(field.notes).toEqual([FIELD_NOTES.mixedPath]);
+  });
+
+  it('is stronger the more sea there is, and does not mind the direction', () => {
+    const half = level(land.distanceM) / 2;
+    const mixed = (...grounds: ('sea' | 'average')[]) =>
+      level(fieldOf({ path: grounds.map((ground) => ({ ground, lengthM: half })) }).fieldDb);
+
+    expect(mixed('sea', 'average')).toBeCloseTo(mixed('average', 'sea'), 9);
+    expect(mixed('sea', 'average')).toBeGreaterThan(mixed('average', 'average'));
+    expect(mixed('sea', 'sea')).toBeGreaterThan(mixed('sea', 'average'));
+  });
+
+  it('scales sections to the distance and says so, also at the site itself', () => {
+    const path = [{ ground: 'average' as const, lengthM: 1000 }];
+    const field = fieldOf({ path });
+
+    expect(field.fieldDb).toBeCloseTo(level(land.fieldDb), 9);
+    expect(field.notes).toContain(FIELD_NOTES.scaledPath);
+    expect(fieldOf({ path, latitude: 44 }).fieldDb).toBeCloseTo(
+      level(fieldOf({ latitude: 44 }).fieldDb),
+      9,
+    );
+  });
+
+  it('adds the gain of the aerial towards the site to ground and sky wave', () => {
+    // The site lies due south of the station.
+    const patternDb = Array.from({ length: 36 }, (_, index) => (index === 18 ? 3 : -40));
+    const [plain, beamed] = [fieldOf({}, {}, 'night'), fieldOf({ patternDb }, {}, 'night')];
+
+    expect(level(beamed.groundDb) - level(plain.groundDb)).toBeCloseTo(3, 6);
+    expect(level(beamed.skyDb) - level(plain.skyDb)).toBeCloseTo(3, 6);
+    expect(beamed.notes).toEqual([FIELD_NOTES.pattern]);
+    const away = fieldOf({ patternDb, latitude: 43.55 }, {}, 'night');
+    expect(level(away.groundDb)).toBeLessThan(level(plain.groundDb) - 30);
+  });
+
+  it('is a number from pole to pole, opposite and on the spot', () => {
+    const patternDb = Array<number>(36).fill(-3);
+    const path = [{ ground: 'sea' as const, lengthM: 1 }];
+    for (const [latitude, longitude] of [
+      [90, 0],
+      [-90, 0],
+      [-44, 160],
+      [44, -20],
+    ]) {
+      const field = fieldOf({ latitude: latitude!, longitude: longitude!, patternDb, path });
+
+      expect(Number.isFinite(field.fieldDb)).toBe(true);
+    }
+  });
+});

@@ -3,9 +3,11 @@
  *
  * @module radio/field-strength
  */
+import { patternGain } from './directional-pattern.ts';
 import { LEAST_DISTANCE_M } from './ground-wave.ts';
+import { type PathSection, totalLength } from './mixed-path.ts';
 import type { Place } from './path.ts';
-import type { Period, ReceptionTime, Site } from './site.ts';
+import type { Ground, Period, ReceptionTime, Site } from './site.ts';
 import {
   SKY_WAVE_MAX_LATITUDE,
   SKY_WAVE_RANGE_HZ,
@@ -14,7 +16,7 @@ import {
 } from './sky-wave.ts';
 import type { Station } from './station.ts';
 import { GroundWaves, hasSkyWave, StationPath } from './station-path.ts';
-import { decibels, powerSum } from './units.ts';
+import { type Decibels, decibels, powerSum } from './units.ts';
 
 /** Field of one station at the site; null where it could not be computed, with the reason noted. */
 export interface FieldStrength {
@@ -42,6 +44,9 @@ export const FIELD_NOTES = {
     'There is no sky-wave model here below 150 and above 1710 kHz: this is the ground wave alone.',
   skyWaveExtrapolated: 'The sky wave below 535 kHz is extrapolated from the medium-wave formula.',
   skyWaveLatitude: 'The path runs beyond 60 degrees of geomagnetic latitude; it is taken as 60.',
+  mixedPath: 'The ground wave runs over several kinds of ground, by Millington.',
+  scaledPath: 'The sections of the path do not add up to the distance; they were scaled to it.',
+  pattern: 'The directional pattern of the aerial is counted in.',
   skyWaveP1147: 'The sky wave is computed by the form of ITU-R P.1147.',
   skyWaveTenth: 'The sky wave is that which is exceeded in 10 % of the nights.',
   criticalHours:
@@ -58,7 +63,8 @@ export const FIELD_NOTES = {
  * has no field and says why; nothing is ever NaN.
  *
  * Rough by nature: ground wave 10 dB at 50 km with the ground's conductivity, sky wave 8 dB from
- * night to night, directional aerials not considered.
+ * night to night. A directional pattern counts for ground and sky wave alike. Over sections of
+ * different ground the ground wave goes by Millington, and the sections are scaled to the distance.
  *
  * @param site The receiving site; place and ground are needed for stations without a given field.
  * @param stations The stations; frequencies in whole hertz, powers as e.m.r.p. in watts.
@@ -81,7 +87,8 @@ export const fieldStrengths = (
 /** Fields of stations at a site for several times: what does not change is worked out once. */
 export class FieldsAtSite {
   private readonly place: Place | null;
-  private readonly groundWaves: GroundWaves | null;
+  private readonly ground: Ground | null;
+  private readonly groundWaves = new GroundWaves();
   private readonly stations: readonly Station[];
   private readonly paths: readonly (StationPath | null)[];
   private readonly choiceNotes: readonly string[];
@@ -90,7 +97,7 @@ export class FieldsAtSite {
   constructor(site: Site, stations: readonly Station[], choice: SkyWaveChoice = USUAL_SKY_WAVE) {
     const place = placeOf(site);
     this.place = place;
-    this.groundWaves = site.ground === null ? null : new GroundWaves(site.ground);
+    this.ground = site.ground;
     this.stations = stations;
     this.paths = stations.map((station) => {
       const from = placeOf(station);
@@ -114,12 +121,13 @@ export class FieldsAtSite {
     }
     const power = powerOf(station, path, time);
     if (power === 0) return { ...without, fieldDb: null, notes: [FIELD_NOTES.silent] };
-    if (!path || !this.groundWaves || power === null) {
+    const ground = this.groundWave(station, path);
+    if (!path || ground === null || power === null) {
       const places = { from: placeOf(station), to: this.place };
-      return { ...without, fieldDb: null, notes: missing(this.groundWaves, places, power) };
+      const grounds = station.path ?? this.ground;
+      return { ...without, fieldDb: null, notes: missing(grounds, places, power) };
     }
-    const powerDb = 10 * Math.log10(power / 1000);
-    const ground = this.groundWaves.field(station.frequencyHz, path.distance);
+    const powerDb = 10 * Math.log10(power / 1000) + gainOf(station, path);
     const groundDb = decibels(ground + powerDb);
     const sky = hasSkyWave(station.frequencyHz) ? path.sky(time) : null;
     const skyDb = sky === null ? null : decibels(sky + powerDb);
@@ -128,7 +136,19 @@ export class FieldsAtSite {
     if (skyDb !== null) notes.push(...this.choiceNotes);
     return { ...without, groundDb, skyDb, fieldDb, notes };
   }
+
+  /** Ground wave of 1 kW; null where a place or the ground is not known. */
+  private groundWave(station: Station, path: StationPath | null): Decibels | null {
+    if (!path) return null;
+    const { frequencyHz } = station;
+    if (station.path) return this.groundWaves.fieldOver(station.path, frequencyHz, path.distance);
+    if (this.ground === null) return null;
+    return this.groundWaves.field(this.ground, frequencyHz, path.distance);
+  }
 }
+
+const gainOf = ({ patternDb }: Station, path: StationPath): number =>
+  patternDb ? patternGain(patternDb, path.bearing) : 0;
 
 /** Power in watts at a time, null if not given; without a path, what both periods agree in. */
 function powerOf(station: Station, path: StationPath | null, time: ReceptionTime): number | null {
@@ -146,8 +166,11 @@ const notesOnChoice = ({ form, nights }: SkyWaveChoice): string[] => [
 ];
 
 /** What is to be said of a field that was computed. */
-function notesOn({ frequencyHz }: Station, path: StationPath, time: ReceptionTime): string[] {
+function notesOn(station: Station, path: StationPath, time: ReceptionTime): string[] {
+  const { frequencyHz } = station;
   const notes: string[] = path.distance < LEAST_DISTANCE_M ? [FIELD_NOTES.near] : [];
+  if (station.path) notes.push(...notesOnSections(station.path, path));
+  if (station.patternDb) notes.push(FIELD_NOTES.pattern);
   if (!hasSkyWave(frequencyHz)) return [...notes, FIELD_NOTES.noSkyWave];
   const fade = path.skyFade(time);
   if (fade === -Infinity) return notes;
@@ -161,8 +184,14 @@ function notesOn({ frequencyHz }: Station, path: StationPath, time: ReceptionTim
   return notes;
 }
 
+/** Sections that miss the distance by more than rounding are told of. */
+function notesOnSections(sections: readonly PathSection[], { distance }: StationPath): string[] {
+  const off = Math.abs(totalLength(sections) / distance - 1);
+  return off < 0.01 ? [FIELD_NOTES.mixedPath] : [FIELD_NOTES.mixedPath, FIELD_NOTES.scaledPath];
+}
+
 function missing(
-  groundWaves: GroundWaves | null,
+  ground: Ground | readonly PathSection[] | null,
   { from, to }: { readonly from: Place | null; readonly to: Place | null },
   power: number | null,
 ): string[] {
@@ -170,7 +199,7 @@ function missing(
   if (from === null) notes.push(FIELD_NOTES.noStationPlace);
   if (power === null) notes.push(FIELD_NOTES.noPower);
   if (to === null) notes.push(FIELD_NOTES.noSitePlace);
-  if (groundWaves === null) notes.push(FIELD_NOTES.noGround);
+  if (ground === null) notes.push(FIELD_NOTES.noGround);
   return notes;
 }
 

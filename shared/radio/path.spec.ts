@@ -1,7 +1,7 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 
-import { pathLength, pathMiddle, sunTimes } from './path.ts';
+import { pathBearing, pathLength, pathMiddle, sunTimes } from './path.ts';
 
 const anyPlace = fc.record({
   latitude: fc.double({ min: -90, max: 90, noNaN: true }),
@@ -112,5 +112,27 @@ describe('sunTimes', () => {
       sunset: null,
       polar,
     });
+  });
+});
+
+describe('pathBearing', () => {
+  const origin = { latitude: 0, longitude: 0 };
+
+  it.each([
+    [1, 0, 0],
+    [0, 1, 90],
+    [-1, 0, 180],
+    [0, -1, -90],
+  ])('towards %d, %d is %d degrees', (latitude, longitude, bearing) => {
+    expect(pathBearing(origin, { latitude, longitude })).toBeCloseTo(bearing, 9);
+  });
+
+  it('is a number for any two places, and refused beyond a pole', () => {
+    fc.assert(
+      fc.property(anyPlace, anyPlace, (a, b) => {
+        expect(Math.abs(pathBearing(a, b))).toBeLessThanOrEqual(180);
+      }),
+    );
+    expect(() => pathBearing({ latitude: 91, longitude: 0 }, origin)).toThrow(RangeError);
   });
 });

@@ -22,7 +22,7 @@ export interface SunTimes {
 }
 
 const DEGREE = Math.PI / 180;
-const { WGS84, DISTANCE } = geodesy.Geodesic;
+const { WGS84, DISTANCE, AZIMUTH } = geodesy.Geodesic;
 
 /**
  * Length of the shortest path between two places on the WGS84 ellipsoid.
@@ -44,6 +44,25 @@ export function pathLength(from: Place, to: Place): Metres {
   const { s12 } = WGS84.Inverse(from.latitude, from.longitude, to.latitude, to.longitude, DISTANCE);
   // GeographicLib answers NaN for a latitude beyond a pole; metres() refuses it.
   return metres(s12 ?? NaN);
+}
+
+/**
+ * Bearing of the shortest path where it begins, on the WGS84 ellipsoid.
+ *
+ * Source: as `pathLength`. From a pole it counts from the given meridian; where the places coincide
+ * or are opposite, one of the many.
+ *
+ * @param from Where it begins; latitude -90 to 90.
+ * @param to Where it ends; latitude -90 to 90.
+ * @returns Degrees clockwise from true north, -180 to 180.
+ * @throws {RangeError} If a latitude is beyond a pole or a number is not finite.
+ * @example
+ *   pathBearing({ latitude: 0, longitude: 0 }, { latitude: 0, longitude: 5 }); // 90
+ */
+export function pathBearing(from: Place, to: Place): number {
+  const { azi1 } = WGS84.Inverse(from.latitude, from.longitude, to.latitude, to.longitude, AZIMUTH);
+  if (azi1 === undefined || Number.isNaN(azi1)) throw new RangeError('place: not on the earth');
+  return azi1;
 }
 
 /**

@@ -4,8 +4,9 @@
  * @module radio/station-path
  */
 import { GROUNDS } from './ground.ts';
-import { groundWave } from './ground-wave.ts';
-import { type Place, pathLength, pathMiddle } from './path.ts';
+import { groundWave, LEAST_DISTANCE_M } from './ground-wave.ts';
+import { millington, type PathSection, scaledTo } from './mixed-path.ts';
+import { type Place, pathBearing, pathLength, pathMiddle } from './path.ts';
 import type { Ground, Period, ReceptionTime } from './site.ts';
 import {
   criticalHoursFade,
@@ -15,25 +16,29 @@ import {
   type SkyWaveChoice,
 } from './sky-wave.ts';
 import { Sunlight } from './sunlight.ts';
-import { type Decibels, decibels, hertz, type Metres } from './units.ts';
+import { type Decibels, decibels, hertz, type Metres, metres } from './units.ts';
 
-/** Ground waves at one site: stations that share a frequency share the work. */
+/** Ground waves: stations that share a frequency and a ground share the work. */
 export class GroundWaves {
-  private readonly ground: Ground;
-  private readonly byFrequency = new Map<number, (distance: Metres) => Decibels>();
+  private readonly waves = new Map<string, (distance: Metres) => Decibels>();
 
-  constructor(ground: Ground) {
-    this.ground = ground;
-  }
-
-  /** Field of the ground wave of 1 kW, dB(uV/m). */
-  field(frequencyHz: number, distance: Metres): Decibels {
-    let wave = this.byFrequency.get(frequencyHz);
+  /** Field of the ground wave of 1 kW over uniform ground, dB(uV/m). */
+  field(ground: Ground, frequencyHz: number, distance: Metres): Decibels {
+    const key = `${ground}/${frequencyHz}`;
+    let wave = this.waves.get(key);
     if (!wave) {
-      wave = groundWave(hertz(frequencyHz), GROUNDS[this.ground]);
-      this.byFrequency.set(frequencyHz, wave);
+      wave = groundWave(hertz(frequencyHz), GROUNDS[ground]);
+      this.waves.set(key, wave);
     }
     return wave(distance);
+  }
+
+  /** Field of the ground wave of 1 kW over sections, drawn to the distance, dB(uV/m). */
+  fieldOver(sections: readonly PathSection[], frequencyHz: number, distance: Metres): Decibels {
+    const length = metres(Math.max(distance, LEAST_DISTANCE_M));
+    return millington(scaledTo(sections, length), (ground, reached) =>
+      this.field(ground, frequencyHz, reached),
+    );
   }
 }
 
@@ -43,6 +48,7 @@ export class StationPath {
   private readonly from: Place;
   private readonly to: Place;
   private readonly choice: SkyWaveChoice;
+  private towards: number | undefined;
   private middlePlace: Place | undefined;
   private nightSky: Decibels | undefined;
   private readonly suns: { station?: Sunlight; middle?: Sunlight } = {};
@@ -63,6 +69,11 @@ export class StationPath {
   /** Geomagnetic latitude of the middle, degrees. */
   get geomagneticLatitude(): number {
     return geomagneticLatitude(this.middle);
+  }
+
+  /** Bearing of the site from the station, degrees from north. */
+  get bearing(): number {
+    return (this.towards ??= pathBearing(this.from, this.to));
   }
 
   /** Sky wave of 1 kW at a time, dB(uV/m); null when there is none. */

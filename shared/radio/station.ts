@@ -4,6 +4,8 @@
  * @module radio/station
  */
 
+import type { PathSection } from './mixed-path.ts';
+
 /** One station. What is null was not given. */
 export interface Station {
   /** Index in the list that was sent, or the station's id in an edition. */
@@ -18,6 +20,10 @@ export interface Station {
   readonly powerNightW: number | null;
   /** Field at the site, dB(uV/m), when it is known; nothing is computed then. */
   readonly fieldDb: number | null;
+  /** Grounds of the path from the station to the site; otherwise the site's throughout. */
+  readonly path?: readonly PathSection[] | null;
+  /** Gains of the aerial, dB, every 10 degrees from north; otherwise the same all round. */
+  readonly patternDb?: readonly number[] | null;
 }
 
 /** A part of the spectrum divided into equal channels. */

@@ -319,4 +319,38 @@ describe('POST /api/field-strengths', () => {
     expect(body.issues).toMatchObject([{ path: 'skyWave.nights' }]);
     await visitor.post('/api/assessments', asked({ skyWave: { nights: 10 } })).expect(200);
   });
+
+  it('takes the grounds of the path and the pattern of the aerial along', async () => {
+    const plain = { frequencyHz: 1_000_000, latitude: 51, longitude: 8, powerDayW: 10_000 };
+    const patternDb = Array<number>(36).fill(-6);
+    const path = [
+      { ground: 'sea', lengthM: 50_000 },
+      { ground: 'average', lengthM: 50_000 },
+    ];
+    const stations = [plain, { ...plain, patternDb }, { ...plain, path }];
+
+    const { body } = await visitor
+      .post('/api/field-strengths', { site: SITE, stations, period: 'day' })
+      .expect(200);
+
+    const [first, beamed, mixed] = fieldStrengthsAnswer.parse(body).fields;
+    expect(beamed?.fieldDb).toBeCloseTo((first?.fieldDb ?? NaN) - 6, 9);
+    expect(mixed?.notes.join(' ')).toContain('Millington');
+    expect(mixed?.fieldDb).not.toBeCloseTo(first?.fieldDb ?? NaN, 1);
+  });
+
+  it.each([
+    ['stations.0.patternDb', { patternDb: [0, 0, 0] }],
+    ['stations.0.path', { path: [] }],
+    ['stations.0.path.0.lengthM', { path: [{ ground: 'sea', lengthM: 0 }] }],
+    ['stations.0.path.0.ground', { path: [{ ground: 'ice', lengthM: 10 }] }],
+  ])('names %s when it is wrong', async (path, change) => {
+    const stations = [{ frequencyHz: 1_000_000, fieldDb: 60, ...change }];
+
+    const { body } = await visitor
+      .post('/api/field-strengths', { site: SITE, stations })
+      .expect(400);
+
+    expect(body.issues).toMatchObject([{ path }]);
+  });
 });
