@@ -50,6 +50,7 @@ export class StationPath {
   private readonly choice: SkyWaveChoice;
   private towards: number | undefined;
   private middlePlace: Place | undefined;
+  private magnetic: number | undefined;
   private nightSky: Decibels | undefined;
   private readonly suns: { station?: Sunlight; middle?: Sunlight } = {};
 
@@ -68,7 +69,7 @@ export class StationPath {
 
   /** Geomagnetic latitude of the middle, degrees. */
   get geomagneticLatitude(): number {
-    return geomagneticLatitude(this.middle);
+    return (this.magnetic ??= geomagneticLatitude(this.middle));
   }
 
   /** Bearing of the site from the station, degrees from north. */

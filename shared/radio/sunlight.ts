@@ -28,7 +28,8 @@ interface SunEvent {
  */
 export class Sunlight {
   private readonly place: Place;
-  private known: { readonly around: Date; readonly events: readonly SunEvent[] } | undefined;
+  /** The solar day last asked about, where the sun rises and sets on it. */
+  private known: SunnyDay | undefined;
 
   /** @param place The place. */
   constructor(place: Place) {
@@ -51,21 +52,32 @@ export class Sunlight {
    */
   hours(at: Date): number {
     if (Number.isNaN(at.getTime())) throw new RangeError('time: not a valid date');
-    const { known } = this;
-    if (known && Math.abs(at.getTime() - known.around.getTime()) <= DAY_MS / 2) {
-      return hoursBetween(known.events, at.getTime()) ?? this.polarHours(known.around);
-    }
+    const time = at.getTime();
+    if (this.known && isOnDay(this.known, time)) return hoursOnDay(this.known, time);
     const altitude = sunAltitude(this.place, at);
     if (altitude < SURELY_DOWN) return 0;
     if (altitude > SURELY_DAY) return Infinity;
-    this.known = { around: at, events: eventsAround(this.place, at) };
-    return hoursBetween(this.known.events, at.getTime()) ?? this.polarHours(at);
-  }
-
-  private polarHours(around: Date): number {
-    return sunTimes(this.place, around).polar === 'night' ? 0 : Infinity;
+    const { sunrise, sunset, polar } = sunTimes(this.place, at);
+    if (sunrise && sunset) {
+      this.known = { rise: sunrise.getTime(), set: sunset.getTime() };
+      return hoursOnDay(this.known, time);
+    }
+    // Where the polar day or night begins or ends, the days beside it count.
+    const polarHours = polar === 'night' ? 0 : Infinity;
+    return hoursBetween(eventsAround(this.place, at), time) ?? polarHours;
   }
 }
+
+interface SunnyDay {
+  readonly rise: number;
+  readonly set: number;
+}
+
+const isOnDay = ({ rise, set }: SunnyDay, time: number): boolean =>
+  Math.abs(time - (rise + set) / 2) <= DAY_MS / 2;
+
+const hoursOnDay = ({ rise, set }: SunnyDay, time: number): number =>
+  Math.max(0, Math.min(time - rise, set - time)) / HOUR_MS;
 
 /** Null when the sun neither rises nor sets on these days. */
 function hoursBetween(events: readonly SunEvent[], at: number): number | null {
