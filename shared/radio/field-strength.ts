@@ -114,18 +114,16 @@ export class FieldsAtSite {
   }
 
   private fieldOf(station: Station, path: StationPath | null, time: ReceptionTime): FieldStrength {
-    const distanceM = path?.distance ?? null;
-    const without = { station: station.id, distanceM, groundDb: null, skyDb: null };
     if (station.fieldDb !== null) {
-      return { ...without, fieldDb: station.fieldDb, notes: [FIELD_NOTES.given] };
+      return withoutWaves(station, path, station.fieldDb, [FIELD_NOTES.given]);
     }
     const power = powerOf(station, path, time);
-    if (power === 0) return { ...without, fieldDb: null, notes: [FIELD_NOTES.silent] };
+    if (power === 0) return withoutWaves(station, path, null, [FIELD_NOTES.silent]);
     const ground = this.groundWave(station, path);
     if (!path || ground === null || power === null) {
       const places = { from: placeOf(station), to: this.place };
-      const grounds = station.path ?? this.ground;
-      return { ...without, fieldDb: null, notes: missing(grounds, places, power) };
+      const notes = missing(station.path ?? this.ground, places, power);
+      return withoutWaves(station, path, null, notes);
     }
     const powerDb = 10 * Math.log10(power / 1000) + gainOf(station, path);
     const groundDb = decibels(ground + powerDb);
@@ -134,7 +132,7 @@ export class FieldsAtSite {
     const fieldDb = skyDb === null ? groundDb : powerSum(groundDb, skyDb);
     const notes = notesOn(station, path, time);
     if (skyDb !== null) notes.push(...this.choiceNotes);
-    return { ...without, groundDb, skyDb, fieldDb, notes };
+    return { station: station.id, distanceM: path.distance, groundDb, skyDb, fieldDb, notes };
   }
 
   /** Ground wave of 1 kW; null where a place or the ground is not known. */
@@ -146,6 +144,21 @@ export class FieldsAtSite {
     return this.groundWaves.field(this.ground, frequencyHz, path.distance);
   }
 }
+
+/** A field that was given, or none. */
+const withoutWaves = (
+  { id }: Station,
+  path: StationPath | null,
+  fieldDb: number | null,
+  notes: string[],
+): FieldStrength => ({
+  station: id,
+  distanceM: path?.distance ?? null,
+  groundDb: null,
+  skyDb: null,
+  fieldDb,
+  notes,
+});
 
 const gainOf = ({ patternDb }: Station, path: StationPath): number =>
   patternDb ? patternGain(patternDb, path.bearing) : 0;

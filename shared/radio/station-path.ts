@@ -52,7 +52,8 @@ export class StationPath {
   private middlePlace: Place | undefined;
   private magnetic: number | undefined;
   private nightSky: Decibels | undefined;
-  private readonly suns: { station?: Sunlight; middle?: Sunlight } = {};
+  private sunAtStation: Sunlight | undefined;
+  private sunAtMiddle: Sunlight | undefined;
 
   /**
    * @param from Place of the station.
@@ -90,15 +91,15 @@ export class StationPath {
   skyFade(time: ReceptionTime): Decibels {
     if (time === 'night') return decibels(0);
     if (time === 'day') return decibels(-Infinity);
-    this.suns.middle ??= new Sunlight(this.middle);
-    return criticalHoursFade(this.suns.middle.hours(time));
+    this.sunAtMiddle ??= new Sunlight(this.middle);
+    return criticalHoursFade(this.sunAtMiddle.hours(time));
   }
 
   /** Day or night at the station, by which its power goes. */
   periodAtStation(time: ReceptionTime): Period {
     if (typeof time === 'string') return time;
-    this.suns.station ??= new Sunlight(this.from);
-    return this.suns.station.hours(time) > 0 ? 'day' : 'night';
+    this.sunAtStation ??= new Sunlight(this.from);
+    return this.sunAtStation.hours(time) > 0 ? 'day' : 'night';
   }
 
   private get middle(): Place {

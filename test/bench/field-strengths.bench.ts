@@ -38,7 +38,7 @@ function stationsOn(frequencyHz: (index: number) => number, count: number): Stat
 
 function distances(stations: readonly Station[]): number {
   const { WGS84, DISTANCE } = geodesy.Geodesic;
-  const { latitude: here = 0, longitude: there = 0 } = SITE;
+  const { latitude: here, longitude: there } = SITE;
   return stations.reduce((sum, { latitude, longitude }) => {
     const { s12 } = WGS84.Inverse(here ?? 0, there ?? 0, latitude ?? 0, longitude ?? 0, DISTANCE);
     return sum + (s12 ?? 0);
