@@ -31,7 +31,7 @@ export default defineConfig({
           include: ['test/e2e/**/*.spec.ts'],
           globalSetup: 'test/support/product-setup.ts',
           fileParallelism: false,
-          testTimeout: 60_000,
+          testTimeout: 120_000,
           hookTimeout: 120_000,
         },
       },

@@ -37,7 +37,7 @@ export async function openPage(browser: Browser, baseURL: string, screen = DESK)
     colorScheme: screen.scheme,
     reducedMotion: 'reduce',
   });
-  context.setDefaultTimeout(10_000);
+  context.setDefaultTimeout(30_000);
   return context.newPage();
 }
 
