@@ -1,14 +1,16 @@
 import { describe, expect, it } from 'vitest';
 
 import propagation from '../../datasets/reference/propagation.json' with { type: 'json' };
+import { groundWave } from '../../shared/radio/ground-wave.ts';
 import { locator, locatorCentre } from '../../shared/radio/locator.ts';
+import { millington } from '../../shared/radio/mixed-path.ts';
 import { noiseField } from '../../shared/radio/noise.ts';
 import { pathLength, sunTimes } from '../../shared/radio/path.ts';
-import type { NoiseClass } from '../../shared/radio/site.ts';
+import type { Ground, NoiseClass } from '../../shared/radio/site.ts';
 import { skyWave } from '../../shared/radio/sky-wave.ts';
-import { metres } from '../../shared/radio/units.ts';
+import { hertz, type Metres, metres } from '../../shared/radio/units.ts';
 
-const { skyWave: sky, noise, distance, locators, sun } = propagation;
+const { skyWave: sky, skyWaveP1147, mixedPath, noise, distance, locators, sun } = propagation;
 
 /** The rule speaks of 100 mV/m at 1 km, the engine of 1 kW e.m.r.p.: 300 mV/m. */
 const KILOWATT_DB = 20 * Math.log10(3);
@@ -23,6 +25,30 @@ describe(`sky wave: ${sky.source} [${sky.mark}]`, () => {
       expect(Math.abs(field - fieldDb)).toBeLessThan(0.0002);
     },
   );
+});
+
+describe(`sky wave, the other form: ${skyWaveP1147.source} [${skyWaveP1147.mark}]`, () => {
+  it.each(skyWaveP1147.checks)(
+    '$distanceM m, $geomagneticLatitude degrees: $fieldDb',
+    ({ distanceM, geomagneticLatitude, fieldDb }) => {
+      const field = skyWave(metres(distanceM), geomagneticLatitude, 50, 'itu-r-p1147');
+
+      expect(Math.abs(field - fieldDb)).toBeLessThan(0.0002);
+    },
+  );
+});
+
+describe(`mixed path: ${mixedPath.source} [${mixedPath.mark}]`, () => {
+  const sea = groundWave(hertz(1_000_000), { permittivity: 80, conductivity: 1 });
+  const land = groundWave(hertz(1_000_000), { permittivity: 15, conductivity: 0.001 });
+  const over = (ground: Ground, distance: Metres) =>
+    ground === 'sea' ? sea(distance) : land(distance);
+
+  it.each(mixedPath.checks)('half land, half sea, $halfM m each: $fieldDb', (check) => {
+    const path = (['dry', 'sea'] as const).map((ground) => ({ ground, lengthM: check.halfM }));
+
+    expect(Math.abs(millington(path, over) - check.fieldDb)).toBeLessThan(mixedPath.toleranceDb);
+  });
 });
 
 describe(`noise: ${noise.source} [${noise.mark}]`, () => {
