@@ -1,5 +1,5 @@
+import { designTracking as design } from '../../shared/radio/tracking.ts';
 import * as tasks from './engine-tasks.ts';
-import * as tracking from './tracking-task.ts';
 
 /** A computation, and where it says that it has begun. */
 export interface Order {
@@ -21,5 +21,5 @@ export const assess = answered(tasks.assess);
 export const judgeCandidates = answered(tasks.judgeCandidates);
 export const breakthroughHours = answered(tasks.breakthroughHours);
 export const fieldStrengths = answered(tasks.fieldStrengths);
-export const designTracking = answered(tracking.designTracking);
+export const designTracking = answered(design);
 export const explainWhistle = answered(tasks.explainWhistle);

@@ -136,6 +136,15 @@ describe('designTracking', () => {
     expect(design.refused?.reason).toMatch(/stray/);
   });
 
+  it('refuses points from which the oscillator does not reach the end of the band', () => {
+    const gang = { gangMinF: 1e-14, gangMaxF: 1e-9 };
+    const band = { lowHz: 460e3, highHz: 1600e3, oscillator: 'below' as const, ...gang };
+    const design = designTracking({ ...MEDIUM_WAVE, ...band });
+
+    expect(design.refused?.reason).toMatch(/both ends/);
+    expect(design.errors).toEqual([]);
+  });
+
   it.each([
     [{ lowHz: 0 }, /lowHz/],
     [{ highHz: 1 }, /highHz/],
@@ -168,6 +177,32 @@ describe('bestTrackingPoints', () => {
 
         expect(worst(bestTrackingPoints(band))).toBeLessThanOrEqual(worst(points) + 0.01);
       }),
+    );
+  });
+
+  it('stand in order inside any band, however small the error, and leave it finite', () => {
+    const narrow = fc.record({
+      lowHz: fc.integer({ min: 1_001, max: 5_000_000 }),
+      width: fc.double({ min: 1e-5, max: 3, noNaN: true }),
+      ifShare: fc.double({ min: 1e-6, max: 0.999, noNaN: true }),
+      below: fc.boolean(),
+    });
+    fc.assert(
+      fc.property(narrow, ({ lowHz, width, ifShare, below }) => {
+        const highHz = lowHz + Math.max(1, Math.round(lowHz * width));
+        const ifHz = Math.max(1, Math.floor((lowHz - 1) * ifShare));
+        const band = { lowHz, highHz, signedIfHz: below ? -ifHz : ifHz };
+        const points = bestTrackingPoints(band);
+        const curve = curveOf(trackingConstants(points, band.signedIfHz));
+
+        const edges = [lowHz, ...points, highHz];
+        expect(edges).toEqual(edges.toSorted((a, b) => a - b));
+        expect(new Set(points).size).toBe(3);
+        for (const hz of [...edges, (lowHz + highHz) / 2]) {
+          expect(trackingError(curve, band.signedIfHz, hz)).toSatisfy(Number.isFinite);
+        }
+      }),
+      { numRuns: 300 },
     );
   });
 });

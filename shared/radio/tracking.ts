@@ -121,12 +121,12 @@ export function trackedDesign(input: TrackingInput): TrackedDesign {
   const gang = { minF: input.gangMinF, maxF: input.gangMaxF };
   const plain = plainCircuit(input.lowHz + shift, input.highHz + shift, gang);
   const { padded, pointsHz } = paddedOf(input, plain, points, shift);
-  const refused = refusal(plain, padded, input);
   // The curve follows from the points alone, whatever the parts; kept parts have their own.
   const curve =
     input.fixedPadderF === undefined
       ? curveOf(trackingConstants(points, band.signedIfHz))
       : signalCurve(curveOfParts(plain, padded), above);
+  const refused = refusal(plain, padded, input) ?? unreached(band, curve);
   return { refused, plain, padded, pointsHz, curve };
 }
 
@@ -174,6 +174,12 @@ function refusal(
     return 'The trimmer would have to be smaller than the stray capacitance.';
   }
   return null;
+}
+
+/** The oscillator rises with the signal circuits: where both ends are reached, so is all between. */
+function unreached({ lowHz, highHz }: TrackedBand, { oscillatorHz }: TrackingCurve): string | null {
+  if (Number.isFinite(oscillatorHz(lowHz)) && Number.isFinite(oscillatorHz(highHz))) return null;
+  return 'With these points the oscillator does not reach both ends of the band.';
 }
 
 function errorsOver(

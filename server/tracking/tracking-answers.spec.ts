@@ -2,7 +2,7 @@ import * as fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 
 import { trackingAnswer, trackingRequest } from '../../shared/contracts/tracking.ts';
-import { designTracking } from './tracking-task.ts';
+import { designTracking } from '../../shared/radio/tracking.ts';
 
 const hz = fc.oneof(
   fc.integer({ min: 100_000, max: 2_000_000 }),
@@ -50,7 +50,7 @@ describe('designTracking', () => {
 
         expect(trackingAnswer.safeParse(designTracking(data)).error).toBeUndefined();
       }),
-      { seed: 20_261_201, numRuns: 150 },
+      { seed: 20_261_201, numRuns: 600 },
     );
   });
 });
