@@ -26,7 +26,8 @@ export const assessmentRoutes = (assessments: Assessments): Route[] => [
   route({
     method: 'post',
     path: '/api/breakthrough-hours',
-    summary: 'Worst breakthrough and image in every half-hour of a day (UTC)',
+    summary:
+      'Worst breakthrough and image in every half-hour of a day (UTC); above 20000 stations every hour',
     access: 'visitor',
     body: breakthroughHoursRequest,
     answer: breakthroughHoursAnswer,

@@ -1,7 +1,7 @@
 import type { AssessmentRequest } from '../../shared/contracts/assessment.ts';
 import {
   type BreakthroughHoursRequest,
-  halfHoursOf,
+  momentsOf,
 } from '../../shared/contracts/breakthrough-hours.ts';
 import type { CandidatesRequest } from '../../shared/contracts/candidates.ts';
 import { receptionTimeOf } from '../../shared/contracts/quantities.ts';
@@ -48,7 +48,7 @@ export class Assessments {
     refuseNotYet(request);
     const list = await this.lists.find(actor, request);
     const { receiver, date } = request;
-    const task = { list, receiver, times: halfHoursOf(date) };
+    const task = { list, receiver, times: momentsOf(date, list.columns.count) };
     return this.engine.run('breakthroughHours', task, signal);
   }
 

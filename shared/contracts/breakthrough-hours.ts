@@ -5,7 +5,7 @@ import { receiverDraft } from './receiver.ts';
 import { site } from './site.ts';
 import { hasOneSource, oneSourceIssue, stationSourceFields } from './station.ts';
 
-/** A receiver at a site through one day, 0 to 24 hours UTC, every half-hour. */
+/** A receiver at a site through one day, 0 to 24 hours UTC. */
 export const breakthroughHoursRequest = z
   .strictObject({
     receiver: receiverDraft,
@@ -32,7 +32,7 @@ const heardAtHour = z
 
 const moment = z.iso.datetime({ offset: true });
 
-/** When the breakthrough rises and falls: the first half-hour by which it has happened. */
+/** When the breakthrough rises and falls: the first moment by which it has happened. */
 export const breakthroughHoursAnswer = z.object({
   hours: z.array(z.object({ at: moment, breakthrough: heardAtHour, image: heardAtHour })),
   rises: z.array(moment),
@@ -40,11 +40,13 @@ export const breakthroughHoursAnswer = z.object({
 });
 export type BreakthroughHoursAnswer = z.infer<typeof breakthroughHoursAnswer>;
 
-const HALF_HOURS = 48;
+const LONG_LIST = 20_000;
+const HOUR_MS = 3_600_000;
 
-/** The half-hours of the day that was asked for. */
-export const halfHoursOf = (date: string): Date[] =>
-  Array.from(
-    { length: HALF_HOURS },
-    (_, index) => new Date(Date.parse(`${date}T00:00:00Z`) + index * 1_800_000),
-  );
+/** The half-hours of a day, or its hours for a long list, which takes its time. */
+export function momentsOf(date: string, stations: number): Date[] {
+  const stepMs = stations > LONG_LIST ? HOUR_MS : HOUR_MS / 2;
+  const begin = Date.parse(`${date}T00:00:00Z`);
+  const count = (24 * HOUR_MS) / stepMs;
+  return Array.from({ length: count }, (_, index) => new Date(begin + index * stepMs));
+}

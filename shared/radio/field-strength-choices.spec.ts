@@ -1,3 +1,4 @@
+import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 
 import { FIELD_NOTES, FieldsAtSite, fieldStrengths } from './field-strength.ts';
@@ -108,6 +109,29 @@ describe('fieldStrengths at a moment', () => {
         levels(fieldStrengths(site, [{ ...station, ...far }, station], time)),
       );
     }
+  });
+
+  it('is a number at any moment and place, and never above the night', () => {
+    const latitude = fc.oneof(
+      fc.constantFrom(-90, 90),
+      fc.double({ min: -90, max: 90, noNaN: true }),
+    );
+    const longitude = fc.double({ min: -180, max: 180, noNaN: true });
+    const place = fc.record({ latitude, longitude });
+    const date = fc.date({
+      min: new Date('1900-01-01'),
+      max: new Date('2100-12-31'),
+      noInvalidDate: true,
+    });
+    fc.assert(
+      fc.property(place, place, date, (from, to, time) => {
+        const even = { ...from, powerDayW: 1000, powerNightW: 1000 };
+        const field = fieldOf(even, to, time);
+
+        expect(Number.isFinite(field.fieldDb)).toBe(true);
+        expect(level(field.fieldDb)).toBeLessThanOrEqual(level(fieldOf(even, to, 'night').fieldDb));
+      }),
+    );
   });
 
   it('refuses what is no moment', () => {
