@@ -1,4 +1,5 @@
 import { receiverDraft, type ReceiverInput } from '../../../../shared/contracts/receiver';
+import { outOfReach } from '../../../../shared/radio/if-reach';
 import { candidateRange, reachOf } from './candidate-range';
 
 const receiver = (changes: Partial<ReceiverInput>) =>
@@ -37,6 +38,28 @@ describe('the reach of the IF', () => {
 
     expect(reachOf(receiver({ fixedFilter }))).toEqual({ low: 453_500, high: 456_500 });
   });
+
+  it('ends where the BFO can no longer follow', () => {
+    const bfo = { centreHz: 455_000, rangeHz: 6000, pitchHz: 1000 };
+
+    expect(reachOf(receiver({ bfo }))).toEqual({ low: 449_000, high: 461_000 });
+  });
+
+  it('ends below a band whose oscillator runs below the signal', () => {
+    const bands = [{ name: 'MW', lowHz: 460_000, highHz: 1_600_000, oscillator: 'below' } as const];
+
+    expect(reachOf(receiver({ bands })).high).toBe(459_999);
+  });
+
+  it.each([448_999, 449_000, 461_000, 461_001])(
+    'is the reach the engine tells of at %i Hz',
+    (hz) => {
+      const set = receiver({ bfo: { centreHz: 455_000, rangeHz: 6000, pitchHz: 1000 } });
+      const { low, high } = reachOf(set);
+
+      expect(hz >= low && hz <= high).toBe(outOfReach(set, hz) === null);
+    },
+  );
 
   it('always holds the present IF', () => {
     const fixedFilter = { kind: 'crystal', centreHz: 465_000, widthHz: 1000 } as const;

@@ -1,5 +1,11 @@
 import type { Receiver } from '../../../../shared/radio/receiver';
 
+/** A stretch of frequencies, hertz. */
+interface Stretch {
+  readonly low: number;
+  readonly high: number;
+}
+
 /** Which candidates are asked for, hertz. */
 export interface CandidateRange {
   readonly fromHz: number;
@@ -14,17 +20,24 @@ const LEAST_HZ = 1000;
 /** A set whose cans hardly move still shows what lies next to its IF. */
 const LEAST_REACH = 0.02;
 
-/** How far the IF of a set can be moved: by its cans, or inside its fixed filter. */
-export function reachOf({ ifHz, ifRange, fixedFilter }: Receiver): { low: number; high: number } {
-  const cans = { low: ifHz * (1 - ifRange), high: ifHz * (1 + ifRange) };
-  const low = fixedFilter
-    ? Math.max(cans.low, fixedFilter.centreHz - fixedFilter.widthHz / 2)
-    : cans.low;
-  const high = fixedFilter
-    ? Math.min(cans.high, fixedFilter.centreHz + fixedFilter.widthHz / 2)
-    : cans.high;
+/** How far the IF of a set can be moved: by its cans, inside its fixed filter, with its BFO. */
+export function reachOf({ ifHz, ifRange, fixedFilter, bfo, bands }: Receiver): Stretch {
+  const limits: Stretch[] = [{ low: ifHz * (1 - ifRange), high: ifHz * (1 + ifRange) }];
+  if (fixedFilter) limits.push(around(fixedFilter.centreHz, fixedFilter.widthHz / 2));
+  if (bfo) limits.push(around(ifHz, bfo.rangeHz));
+  for (const { oscillator, lowHz } of bands) {
+    // An oscillator below the signal must not come to a stop.
+    if (oscillator === 'below') limits.push({ low: 0, high: lowHz - 1 });
+  }
+  const low = Math.max(...limits.map((each) => each.low));
+  const high = Math.min(...limits.map((each) => each.high));
   return { low: Math.min(Math.ceil(low), ifHz), high: Math.max(Math.floor(high), ifHz) };
 }
+
+const around = (middle: number, half: number): Stretch => ({
+  low: middle - half,
+  high: middle + half,
+});
 
 /** Candidates on round frequencies from one end of the cans' range to the other. */
 export function candidateRange({ ifHz, ifRange }: Receiver): CandidateRange {
