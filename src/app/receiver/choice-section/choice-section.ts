@@ -35,7 +35,7 @@ export class ChoiceSection {
   readonly bestHz = input.required<number | null>();
 
   protected readonly window = signal<Window | null>(null);
-  /** Grows to hold an IF typed beyond it, and stays still while the marker is dragged. */
+  /** Grows to hold an IF typed beyond it; shrinks again only when the marker has been let go. */
   protected readonly range = linkedSignal<{ base: Stretch; trialHz: number }, Stretch>({
     source: () => ({ base: shownAround(this.receiver()), trialHz: this.store.trialHz() }),
     computation: ({ base, trialHz }, previous) => {
@@ -70,4 +70,11 @@ export class ChoiceSection {
     const [kind, station] = this.store.picked()?.split('|') ?? [];
     return kind === 'response' ? stationMark(Number(station)) : this.store.picked();
   });
+
+  protected settle(): void {
+    const usual = shownAround(this.receiver());
+    const trialHz = this.store.trialHz();
+    if (trialHz >= usual.low && trialHz <= usual.high) this.range.set(usual);
+    this.store.settle();
+  }
 }
