@@ -1,5 +1,5 @@
 import type { ChildProcess } from 'node:child_process';
-import { closeSync, openSync, readFileSync, statSync } from 'node:fs';
+import { closeSync, fstatSync, openSync, readFileSync, statSync } from 'node:fs';
 import { join } from 'node:path';
 
 import { exitOf, spawnBound } from './bound-process.ts';
@@ -28,13 +28,14 @@ export interface ApiLaunch {
 
 /**
  * Starts the API and waits until it listens.
- * @throws {Error} With the end of its log, when it ends before that.
+ * @throws {Error} With what it logged last, when it ends before that.
  */
 export async function launchApi(
   { root, logFile, environment }: ApiLaunch,
   onListening: (message: Listening) => void,
 ): Promise<ChildProcess> {
   const log = openLog(logFile);
+  const begun = fstatSync(log).size;
   const main = join(root, 'server/main.ts');
   const child = spawnBound(process.execPath, ['--import', 'tsx', main], {
     cwd: root,
@@ -49,7 +50,9 @@ export async function launchApi(
   });
   const first = await Promise.race([listening, exitOf(child)]);
   if (typeof first === 'string') {
-    throw new Error(`The API server ended (${first}). The end of ${logFile}:\n${logEnd(logFile)}`);
+    throw new Error(
+      `The API server ended (${first}). The end of ${logFile}:\n${logEnd(logFile, begun)}`,
+    );
   }
   onListening(first);
   return child;
@@ -67,6 +70,8 @@ function openLog(path: string): number {
   return openSync(path, size > LARGEST_LOG_BYTES ? 'w' : 'a', 0o600);
 }
 
-function logEnd(path: string): string {
-  return readFileSync(path, 'utf8').trimEnd().split('\n').slice(-20).join('\n');
+/** The last lines of a log; those of earlier starts would only mislead. */
+function logEnd(path: string, begun: number): string {
+  const ours = readFileSync(path).subarray(begun).toString('utf8');
+  return ours.trimEnd().split('\n').slice(-20).join('\n');
 }
