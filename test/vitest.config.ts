@@ -9,6 +9,7 @@ export default defineConfig({
   root,
   test: {
     root,
+    setupFiles: ['test/support/property-seed.ts'],
     projects: [
       {
         extends: true,
