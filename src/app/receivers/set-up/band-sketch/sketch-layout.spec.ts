@@ -19,6 +19,14 @@ describe('the sketch of the bands', () => {
     expect(sketchRows(fieldsOf('above', null))).toEqual([]);
   });
 
+  it.each([0, -455_000])(
+    'leaves out what has no place on its scale, like an IF of %i Hz',
+    (ifHz) => {
+      expect(sketchRows({ ...fieldsOf('above'), ifHz })).toEqual([]);
+      expect(sketchRows(fieldsOf('above', ifHz))).toEqual([]);
+    },
+  );
+
   it('has room for the IF as well, and numerals that do not touch', () => {
     const scale = sketchScale(sketchRows(fieldsOf('above')), 110_000, 400);
     const marks = sketchMarks(scale, 48);

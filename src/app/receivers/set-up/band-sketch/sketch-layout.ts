@@ -12,12 +12,15 @@ export interface SketchRow {
 /** Bands that are complete, each with the range its images come from. */
 export function sketchRows({ ifHz, bands }: ReceiverFields): SketchRow[] {
   return bands.flatMap(({ name, lowHz, highHz, oscillator }) => {
-    if (ifHz === null || lowHz === null || highHz === null || highHz <= lowHz) return [];
+    if (!isDrawable(ifHz) || !isDrawable(lowHz) || highHz === null || highHz <= lowHz) return [];
     const away = oscillator === 'above' ? 2 * ifHz : -2 * ifHz;
     const image = [Math.abs(lowHz + away), Math.abs(highHz + away)].sort((a, b) => a - b);
     return [{ name, band: [lowHz, highHz], image: [image[0] ?? 0, image[1] ?? 0] }];
   });
 }
+
+/** Whether a frequency, as typed so far, has a place on a logarithmic scale. */
+const isDrawable = (hz: number | null): hz is number => hz !== null && hz > 0;
 
 /** A logarithmic scale that has room for everything the sketch shows. */
 export function sketchScale(rows: readonly SketchRow[], ifHz: number | null, width: number) {
