@@ -84,13 +84,21 @@ const selectivityControls = () =>
   new FormGroup({
     /** A selectivity known in another way than by two widths, carried along unchanged. */
     other: held<ReceiverDraft['selectivity'] | null>(null),
-    b6Hz: held<number | null>(null, neededWithoutOther),
-    b60Hz: held<number | null>(null, neededWithoutOther),
+    b6Hz: held<number | null>(
+      null,
+      neededWithoutOther($localize`Give the width at −6 dB, for example 6 kHz.`),
+    ),
+    b60Hz: held<number | null>(
+      null,
+      neededWithoutOther($localize`Give the width at −60 dB, for example 22 kHz.`),
+    ),
   });
 
-function neededWithoutOther(control: AbstractControl) {
-  const other: unknown = control.parent?.get('other')?.value;
-  return other == null ? needed($localize`Give the width in kHz.`)(control) : null;
+function neededWithoutOther(text: string) {
+  return (control: AbstractControl) => {
+    const other: unknown = control.parent?.get('other')?.value;
+    return other == null ? needed(text)(control) : null;
+  };
 }
 
 /** Every field of a receiver's set-up, in the order of the page. */
