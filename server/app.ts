@@ -5,6 +5,7 @@ import type { Sequelize } from 'sequelize';
 import { accountRoutes } from './accounts/account-routes.ts';
 import { assessmentRoutes } from './assessments/assessment-routes.ts';
 import type { Config } from './config.ts';
+import { cureRoutes } from './cures/cure-routes.ts';
 import { editionRoutes } from './editions/edition-routes.ts';
 import { fieldStrengthRoutes } from './field-strengths/field-strength-routes.ts';
 import { authentication } from './http/authentication.ts';
@@ -47,6 +48,7 @@ export function apiRoutes(services: Services): Route[] {
     ...importRoutes(imports, uploads),
     ...fieldStrengthRoutes(fieldStrengths),
     ...assessmentRoutes(assessments),
+    ...cureRoutes(services.cures),
     ...trackingRoutes(engine),
     ...whistleRoutes(services.whistles),
     ...planRoutes(services.plans),

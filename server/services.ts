@@ -8,6 +8,7 @@ import { Assessments } from './assessments/assessments.ts';
 import { Engine } from './computing/engine.ts';
 import { ListsAtSites } from './computing/lists-at-sites.ts';
 import type { Config } from './config.ts';
+import { Cures } from './cures/cures.ts';
 import { EditionWriter } from './editions/edition-writer.ts';
 import { Editions } from './editions/editions.ts';
 import { FieldStrengths } from './field-strengths/field-strengths.ts';
@@ -63,6 +64,7 @@ export function createServices(database: Sequelize, config: Config, log: Logger)
     imports: new Imports(database, regions, editionWriter, uploads, commits),
     commits,
     fieldStrengths: new FieldStrengths(lists, engine),
+    cures: new Cures(lists, engine),
     whistles: new Whistles(lists, engine),
     engine,
     assessments,

@@ -8,10 +8,13 @@ import {
   type BreakthroughHours,
 } from '../../shared/radio/breakthrough-hours.ts';
 import {
+  type CandidateCase,
   type Candidates,
   type CandidatesInput,
   judgeCandidates as judge,
 } from '../../shared/radio/candidates.ts';
+import type { CuresInput } from '../../shared/radio/cure-bench.ts';
+import { type Cures, findCures as findAllCures } from '../../shared/radio/cures.ts';
 import {
   type FieldStrength,
   fieldStrengths as compute,
@@ -54,6 +57,10 @@ export interface Tasks {
   judgeCandidates: {
     takes: { readonly lists: readonly ListAtSite[]; readonly ask: Omit<CandidatesInput, 'cases'> };
     answers: Candidates;
+  };
+  findCures: {
+    takes: { readonly list: ListAtSite; readonly ask: Omit<CuresInput, FromList> };
+    answers: Cures;
   };
   breakthroughHours: {
     takes: {
@@ -107,13 +114,11 @@ export function assess({ list, time, skyWave, ask }: Tasks['assess']['takes']): 
 }
 
 export function judgeCandidates({ lists, ask }: Tasks['judgeCandidates']['takes']): Candidates {
-  const cases = lists.map((list) => ({
-    site: list.site,
-    raster: list.raster,
-    stations: stationsOf(list),
-    fields: Object.fromEntries(ask.periods.map((period) => [period, fieldsOf(list, period)])),
-  }));
-  return judge({ ...ask, cases });
+  return judge({ ...ask, cases: lists.map((list) => caseOf(list, ask.periods)) });
+}
+
+export function findCures({ list, ask }: Tasks['findCures']['takes']): Cures {
+  return findAllCures({ ...ask, ...caseOf(list, ask.periods) });
 }
 
 export function breakthroughHours({
@@ -153,6 +158,15 @@ export function explainWhistle({
   return {
     ...whistleCauses({ ...ask, site, raster, stations: stationsOf(list), fields }),
     skipped,
+  };
+}
+
+function caseOf(list: ListAtSite, periods: readonly Period[]): CandidateCase {
+  return {
+    site: list.site,
+    raster: list.raster,
+    stations: stationsOf(list),
+    fields: Object.fromEntries(periods.map((period) => [period, fieldsOf(list, period)])),
   };
 }
 

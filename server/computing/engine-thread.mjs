@@ -4,6 +4,7 @@ import { tsImport } from 'tsx/esm/api';
 export const {
   assess,
   judgeCandidates,
+  findCures,
   breakthroughHours,
   fieldStrengths,
   designTracking,

@@ -19,6 +19,7 @@ function answered(compute: (task: never) => unknown) {
 
 export const assess = answered(tasks.assess);
 export const judgeCandidates = answered(tasks.judgeCandidates);
+export const findCures = answered(tasks.findCures);
 export const breakthroughHours = answered(tasks.breakthroughHours);
 export const fieldStrengths = answered(tasks.fieldStrengths);
 export const designTracking = answered(design);

@@ -3,12 +3,8 @@
  *
  * @module radio/whistle-test
  */
+import { CAUTION } from './caution.ts';
 import type { UnwantedCarrier, WhistleSource } from './whistle-cause.ts';
-
-const CAUTION =
-  'Caution: high tension, and in some sets mains on the chassis. Use an isolation transformer, ' +
-  'one hand and insulated tools, discharge the capacitors and measure; follow local codes and ' +
-  'licensed practice.';
 
 /** Whether the test touches the set. */
 const TOUCHES: Readonly<Record<WhistleSource, boolean>> = {
