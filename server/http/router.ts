@@ -5,6 +5,7 @@ import { MethodNotAllowedError } from './errors.ts';
 import type { Idempotency } from './idempotency.ts';
 import { jsonBody } from './json-body.ts';
 import { pathId } from './path-id.ts';
+import { plainWords } from './plain-words.ts';
 import { type Access, type Call, isRepeatable, type Route } from './route.ts';
 
 /** What every route is guarded by, beside its own row. */
@@ -45,8 +46,8 @@ async function answer(
 ): Promise<void> {
   const call: Call<Access, unknown, unknown> = {
     actor: actorOf(request),
-    body: row.body?.parse(request.body),
-    query: row.query?.parse(request.query),
+    body: row.body?.parse(request.body, { error: plainWords }),
+    query: row.query?.parse(request.query, { error: plainWords }),
     id: (name = 'id') => pathId(request, name),
     request,
     response,
