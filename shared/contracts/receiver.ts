@@ -115,9 +115,9 @@ export type ReceiverInput = z.input<typeof receiverDraft>;
 /** A receiver, whole: exactly what the engine computes with. */
 export type ReceiverDraft = z.output<typeof receiverDraft>;
 
-/** What a client sends to store a receiver: it needs a name. */
+/** What a client sends to store a receiver. Lists need something to show for one without a name. */
 export const newReceiver = z
-  .strictObject({ ...receiverFields, name: nameText })
+  .strictObject({ ...receiverFields, name: nameText.default('Unnamed receiver') })
   .superRefine(checkOscillators);
 
 /** A receiver without what the server decides about it, which parsing leaves out. */

@@ -54,7 +54,7 @@ describe('GET /api/openapi.json', () => {
   it('tells what may be left out of a receiver, and what an answer always has', () => {
     const text = JSON.stringify(description.paths['/api/receivers']?.['post']);
 
-    expect(text).toContain('"required":["name","ifHz","selectivity","bands"]');
+    expect(text).toContain('"required":["ifHz","selectivity","bands"]');
     expect(text).toContain('"additionalProperties":false');
   });
 });

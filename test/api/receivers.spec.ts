@@ -29,6 +29,14 @@ describe('POST /api/receivers', () => {
     await person.get(`/api/receivers/${body.id}`).expect(200, body);
   });
 
+  it('calls a receiver that comes without a name unnamed', async () => {
+    const { name: _name, ...nameless } = sentReceiver();
+
+    const { body } = await person.post('/api/receivers', nameless).expect(201);
+
+    expect(body.name).toBe('Unnamed receiver');
+  });
+
   it.each([
     ['ifHz', { ifHz: 0 }],
     ['ifHz', { ifHz: -455_000 }],
