@@ -7,15 +7,12 @@ import type { CandidatesRequest } from '../../shared/contracts/candidates.ts';
 import { receptionTimeOf } from '../../shared/contracts/quantities.ts';
 import type { Assessment } from '../../shared/radio/assessment.ts';
 import type { BreakthroughHours } from '../../shared/radio/breakthrough-hours.ts';
-import type { Candidates } from '../../shared/radio/candidates.ts';
+import { CANDIDATE_ORDERS, type Candidates } from '../../shared/radio/candidates.ts';
 import type { Computed, Engine } from '../computing/engine.ts';
 import type { ListAtSite } from '../computing/engine-tasks.ts';
 import type { ListRequest, ListsAtSites } from '../computing/lists-at-sites.ts';
 import type { Actor } from '../http/actor.ts';
 import { refuseNotYet } from './not-yet.ts';
-
-/** Orders of products that candidates are judged by. */
-const CANDIDATE_ORDERS = { maxM: 3, maxN: 2 } as const;
 
 /** Judges receivers; stores nothing. */
 export class Assessments {

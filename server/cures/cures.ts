@@ -1,11 +1,9 @@
 import type { CuresRequest } from '../../shared/contracts/cures.ts';
+import { CANDIDATE_ORDERS } from '../../shared/radio/candidates.ts';
 import type { Cures as AllCures } from '../../shared/radio/cures.ts';
 import type { Computed, Engine } from '../computing/engine.ts';
 import type { ListsAtSites } from '../computing/lists-at-sites.ts';
 import type { Actor } from '../http/actor.ts';
-
-/** The orders that candidates for the IF are judged by, too. */
-const ORDERS = { maxM: 3, maxN: 2 } as const;
 
 /** Answers what can be done about what a receiver lets through. */
 export class Cures {
@@ -24,6 +22,10 @@ export class Cures {
   ): Promise<Computed<AllCures>> {
     const list = await this.lists.find(actor, request);
     const { receiver, periods } = request;
-    return this.engine.run('findCures', { list, ask: { receiver, periods, ...ORDERS } }, signal);
+    return this.engine.run(
+      'findCures',
+      { list, ask: { receiver, periods, ...CANDIDATE_ORDERS } },
+      signal,
+    );
   }
 }

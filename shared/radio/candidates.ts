@@ -29,6 +29,9 @@ import type { FrequencySpan } from './tuning-spans.ts';
 /** Most candidates judged at once. */
 export const MAX_CANDIDATES = 400;
 
+/** Orders of products that candidates are judged by, as assessments are unless asked otherwise. */
+export const CANDIDATE_ORDERS = { maxM: 3, maxN: 2 } as const;
+
 /** One site with its list and raster. */
 export interface CandidateCase {
   readonly site: Site;

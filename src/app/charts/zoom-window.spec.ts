@@ -1,6 +1,6 @@
 import { scaleLinear, scaleLog } from 'd3';
 
-import { MOST_ZOOM, panned, showing, windowBetween, zoomed } from './zoom-window';
+import { MOST_ZOOM, showing, windowBetween, zoomed } from './zoom-window';
 
 const scale = scaleLinear([0, 1000], [0, 500]);
 
@@ -13,8 +13,8 @@ describe('a zoom window', () => {
 
   it('never leaves the whole range, and never shows more than it', () => {
     expect(zoomed(scale, [250, 750], 0.1)).toEqual([0, 1000]);
-    expect(panned(scale, [600, 900], 1)).toEqual([700, 1000]);
-    expect(panned(scale, [100, 400], -1)).toEqual([0, 300]);
+    expect(zoomed(scale, [900, 1000], 0.5)).toEqual([800, 1000]);
+    expect(zoomed(scale, [0, 100], 0.5)).toEqual([0, 200]);
   });
 
   it('goes no closer than the limit', () => {

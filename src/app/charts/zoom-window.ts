@@ -36,13 +36,6 @@ export function zoomed(scale: WholeScale, window: Window, factor: number, about?
   return fitted(scale, fixed - (fixed - from) / factor, fixed + (to - fixed) / factor);
 }
 
-/** The window moved by a share of its width; positive to the right. */
-export function panned(scale: WholeScale, window: Window, share: number): Window {
-  const [from, to] = [scale(window[0]), scale(window[1])];
-  const shift = (to - from) * share;
-  return fitted(scale, from + shift, to + shift);
-}
-
 /** The window someone typed, brought into the whole range; ends may come in either order. */
 export function windowBetween(scale: WholeScale, one: number, other: number): Window {
   const { domain } = ends(scale);
