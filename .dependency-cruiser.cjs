@@ -18,8 +18,21 @@ module.exports = {
     {
       name: 'path-takes-two-packages',
       severity: 'error',
-      from: { path: '^shared/radio/path\\.ts$' },
+      from: { path: '^shared/radio/propagation/path\\.ts$' },
       to: { pathNot: ['^shared/radio/', 'node_modules/(geographiclib-geodesic|suncalc)/'] },
+    },
+    {
+      name: 'engine-physics-first',
+      comment: 'What a wave and a circuit do is computed without asking what is judged by it.',
+      severity: 'error',
+      from: {
+        path: '^shared/radio/(mathematics|propagation|channels|circuits|mixing|tracking|hearing)/',
+        pathNot: '\\.spec\\.ts$',
+      },
+      to: {
+        path: '^shared/radio/(assessment|candidates|cures|whistles)/',
+        dependencyTypesNot: ['type-only'],
+      },
     },
     {
       name: 'contracts-take-zod-only',

@@ -5,9 +5,9 @@ import {
 } from '../../shared/contracts/breakthrough-hours.ts';
 import type { CandidatesRequest } from '../../shared/contracts/candidates.ts';
 import { receptionTimeOf } from '../../shared/contracts/quantities.ts';
-import type { Assessment } from '../../shared/radio/assessment.ts';
-import type { BreakthroughHours } from '../../shared/radio/breakthrough-hours.ts';
-import { CANDIDATE_ORDERS, type Candidates } from '../../shared/radio/candidates.ts';
+import type { Assessment } from '../../shared/radio/assessment/assessment.ts';
+import type { BreakthroughHours } from '../../shared/radio/assessment/breakthrough-hours.ts';
+import { CANDIDATE_ORDERS, type Candidates } from '../../shared/radio/candidates/candidates.ts';
 import type { Computed, Engine } from '../computing/engine.ts';
 import type { ListAtSite } from '../computing/engine-tasks.ts';
 import type { ListRequest, ListsAtSites } from '../computing/lists-at-sites.ts';

@@ -2,33 +2,33 @@ import {
   type Assessment,
   type AssessmentInput,
   assess as assessReceiver,
-} from '../../shared/radio/assessment.ts';
+} from '../../shared/radio/assessment/assessment.ts';
 import {
   breakthroughHours as hoursOfBreakthrough,
   type BreakthroughHours,
-} from '../../shared/radio/breakthrough-hours.ts';
+} from '../../shared/radio/assessment/breakthrough-hours.ts';
 import {
   type CandidateCase,
   type Candidates,
   type CandidatesInput,
   judgeCandidates as judge,
-} from '../../shared/radio/candidates.ts';
-import type { CuresInput } from '../../shared/radio/cure-bench.ts';
-import { type Cures, findCures as findAllCures } from '../../shared/radio/cures.ts';
+} from '../../shared/radio/candidates/candidates.ts';
+import type { CuresInput } from '../../shared/radio/cures/cure-bench.ts';
+import { type Cures, findCures as findAllCures } from '../../shared/radio/cures/cures.ts';
 import {
   type FieldStrength,
   fieldStrengths as compute,
-} from '../../shared/radio/field-strength.ts';
+} from '../../shared/radio/propagation/field-strength.ts';
 import type { Period, ReceptionTime, Site } from '../../shared/radio/site.ts';
-import { type SkyWaveChoice, USUAL_SKY_WAVE } from '../../shared/radio/sky-wave.ts';
+import { type SkyWaveChoice, USUAL_SKY_WAVE } from '../../shared/radio/propagation/sky-wave.ts';
 import type { RasterRange, Station } from '../../shared/radio/station.ts';
-import { periodAt } from '../../shared/radio/sunlight.ts';
-import type { Tracking, TrackingInput } from '../../shared/radio/tracking.ts';
+import { periodAt } from '../../shared/radio/propagation/sunlight.ts';
+import type { Tracking, TrackingInput } from '../../shared/radio/tracking/tracking.ts';
 import {
   whistleCauses,
   type WhistleInput,
   type Whistles,
-} from '../../shared/radio/whistle-causes.ts';
+} from '../../shared/radio/whistles/whistle-causes.ts';
 import { BoundedCache } from './bounded-cache.ts';
 import { type StationColumns, unpackNames, unpackStations } from './station-columns.ts';
 

@@ -1,4 +1,4 @@
-import { designTracking as design } from '../../shared/radio/tracking.ts';
+import { designTracking as design } from '../../shared/radio/tracking/tracking.ts';
 import * as tasks from './engine-tasks.ts';
 
 /** A computation, and where it says that it has begun. */

@@ -1,8 +1,8 @@
 import { afterEach, describe, expect, it } from 'vitest';
 
 import { receiverDraft } from '../../shared/contracts/receiver.ts';
-import { defaultRaster } from '../../shared/radio/raster.ts';
-import { USUAL_SKY_WAVE } from '../../shared/radio/sky-wave.ts';
+import { defaultRaster } from '../../shared/radio/channels/raster.ts';
+import { USUAL_SKY_WAVE } from '../../shared/radio/propagation/sky-wave.ts';
 import type { Station } from '../../shared/radio/station.ts';
 import { Engine } from './engine.ts';
 import type { ListAtSite, Tasks } from './engine-tasks.ts';

@@ -1,7 +1,7 @@
 import type { SiteDraft } from '../../shared/contracts/site.ts';
 import type { SentStation } from '../../shared/contracts/station.ts';
-import { stationsOnEveryChannel } from '../../shared/radio/assumed-stations.ts';
-import { defaultRaster } from '../../shared/radio/raster.ts';
+import { stationsOnEveryChannel } from '../../shared/radio/channels/assumed-stations.ts';
+import { defaultRaster } from '../../shared/radio/channels/raster.ts';
 import type { RasterRange, Station } from '../../shared/radio/station.ts';
 import type { Actor } from '../http/actor.ts';
 import { InvalidError, UnauthenticatedError } from '../http/errors.ts';

@@ -1,6 +1,6 @@
 import type { CuresRequest } from '../../shared/contracts/cures.ts';
-import { CANDIDATE_ORDERS } from '../../shared/radio/candidates.ts';
-import type { Cures as AllCures } from '../../shared/radio/cures.ts';
+import { CANDIDATE_ORDERS } from '../../shared/radio/candidates/candidates.ts';
+import type { Cures as AllCures } from '../../shared/radio/cures/cures.ts';
 import type { Computed, Engine } from '../computing/engine.ts';
 import type { ListsAtSites } from '../computing/lists-at-sites.ts';
 import type { Actor } from '../http/actor.ts';

@@ -10,7 +10,7 @@ import sites from '../../datasets/demo/sites.json' with { type: 'json' };
 import { receiverDraft } from '../../shared/contracts/receiver.ts';
 import { regionDraft } from '../../shared/contracts/region.ts';
 import { namedSite } from '../../shared/contracts/site.ts';
-import { defaultRaster, rasterChannels } from '../../shared/radio/raster.ts';
+import { defaultRaster, rasterChannels } from '../../shared/radio/channels/raster.ts';
 import { DEMO_LISTS, demoRows } from './demo-lists.ts';
 import { plainPlan, writeList } from './generate-list.ts';
 import { COLUMNS, listRows } from './list-generator.ts';

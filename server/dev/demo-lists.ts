@@ -1,7 +1,7 @@
 /**
  * The two regions of the demo club: what their lists in `datasets/demo` are made from.
  */
-import { defaultRaster } from '../../shared/radio/raster.ts';
+import { defaultRaster } from '../../shared/radio/channels/raster.ts';
 import { type ListPlan, type ListRow, listRows } from './list-generator.ts';
 
 /** A list that is partly planned by hand. */

@@ -12,7 +12,7 @@ import { parseArgs } from 'node:util';
 
 import { stringify } from 'csv-stringify';
 
-import { defaultRaster } from '../../shared/radio/raster.ts';
+import { defaultRaster } from '../../shared/radio/channels/raster.ts';
 import { DEMO_LISTS, demoRows } from './demo-lists.ts';
 import { COLUMNS, type ListPlan, type ListRow, listRows } from './list-generator.ts';
 

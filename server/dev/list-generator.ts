@@ -1,7 +1,7 @@
 /**
  * Allocation lists of invented stations, of any size, the same for the same plan.
  */
-import { rasterChannels } from '../../shared/radio/raster.ts';
+import { rasterChannels } from '../../shared/radio/channels/raster.ts';
 import type { RasterRange } from '../../shared/radio/station.ts';
 import { callSign, inventedPlace, stationName } from './invented-names.ts';
 import { pick, seededRandom } from './random.ts';

@@ -7,7 +7,7 @@ import type {
   Region,
   StationQuery,
 } from '../../shared/contracts/region.ts';
-import { nearestChannel } from '../../shared/radio/raster.ts';
+import { nearestChannel } from '../../shared/radio/channels/raster.ts';
 import type { Station } from '../../shared/radio/station.ts';
 import type { Actor } from '../http/actor.ts';
 import { NotFoundError } from '../http/errors.ts';

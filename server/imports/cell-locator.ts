@@ -1,4 +1,4 @@
-import { locatorCentre } from '../../shared/radio/locator.ts';
+import { locatorCentre } from '../../shared/radio/propagation/locator.ts';
 
 const PATTERN = /^[A-R]{2}\d{2}(?:[A-X]{2}(?:\d{2})?)?$/i;
 

@@ -2,7 +2,7 @@ import { literal, QueryTypes, type Sequelize } from 'sequelize';
 
 import type { Page, PageQuery } from '../../shared/contracts/paging.ts';
 import type { Region, RegionDraft } from '../../shared/contracts/region.ts';
-import { defaultRaster } from '../../shared/radio/raster.ts';
+import { defaultRaster } from '../../shared/radio/channels/raster.ts';
 import { isDeadlock } from '../db/database-faults.ts';
 import { inTransaction } from '../db/transaction.ts';
 import { type Actor, hasRole } from '../http/actor.ts';

@@ -2,7 +2,7 @@ import * as fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 
 import { trackingAnswer, trackingRequest } from '../../shared/contracts/tracking.ts';
-import { designTracking } from '../../shared/radio/tracking.ts';
+import { designTracking } from '../../shared/radio/tracking/tracking.ts';
 
 const hz = fc.oneof(
   fc.integer({ min: 100_000, max: 2_000_000 }),

@@ -1,7 +1,7 @@
 import * as z from 'zod';
 
-import { CURE_KINDS } from '../radio/cure-plans.ts';
-import type { Cures as RadioCures } from '../radio/cures.ts';
+import { CURE_KINDS } from '../radio/cures/cure-plans.ts';
+import type { Cures as RadioCures } from '../radio/cures/cures.ts';
 import { period } from './quantities.ts';
 import { receiverDraft } from './receiver.ts';
 import { site } from './site.ts';

@@ -1,6 +1,6 @@
 import * as z from 'zod';
 
-import type { Tracking, TrackingInput as RadioTracking } from '../radio/tracking.ts';
+import type { Tracking, TrackingInput as RadioTracking } from '../radio/tracking/tracking.ts';
 import { frequencyHz } from './quantities.ts';
 
 const capacitanceF = z

@@ -1,6 +1,6 @@
 import * as z from 'zod';
 
-import type { Whistles as RadioWhistles } from '../radio/whistle-causes.ts';
+import type { Whistles as RadioWhistles } from '../radio/whistles/whistle-causes.ts';
 import { cause } from './assessment.ts';
 import { frequencyHz, receptionTime } from './quantities.ts';
 import { receiverDraft } from './receiver.ts';

@@ -4,7 +4,7 @@
  * @module radio/station
  */
 
-import type { PathSection } from './mixed-path.ts';
+import type { PathSection } from './propagation/mixed-path.ts';
 
 /** One station. What is null was not given. */
 export interface Station {

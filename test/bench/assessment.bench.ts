@@ -2,8 +2,8 @@
  * Assessing a receiver, and 400 candidates for its IF, against a bare loop over the same stations:
  * ratios in one run, the best of several turns each.
  */
-import { assess } from '../../shared/radio/assessment.ts';
-import { judgeCandidates } from '../../shared/radio/candidates.ts';
+import { assess } from '../../shared/radio/assessment/assessment.ts';
+import { judgeCandidates } from '../../shared/radio/candidates/candidates.ts';
 import type { Station } from '../../shared/radio/station.ts';
 import {
   BENCH_RASTER,

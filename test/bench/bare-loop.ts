@@ -4,10 +4,10 @@
  * the smallest ratio. No objects, no hidden responses, no totals, no order.
  */
 import type { Band, Receiver } from '../../shared/radio/receiver.ts';
-import { rasterChannels } from '../../shared/radio/raster.ts';
-import { WeightingTables } from '../../shared/radio/receiver-at-site.ts';
-import { ifSelectivity } from '../../shared/radio/selectivity.ts';
-import { assumedWantedField } from '../../shared/radio/service-figures.ts';
+import { rasterChannels } from '../../shared/radio/channels/raster.ts';
+import { WeightingTables } from '../../shared/radio/assessment/receiver-at-site.ts';
+import { ifSelectivity } from '../../shared/radio/circuits/selectivity.ts';
+import { assumedWantedField } from '../../shared/radio/hearing/service-figures.ts';
 import type { RasterRange, Station } from '../../shared/radio/station.ts';
 
 const OSCILLATOR_DB = [3, 0, -6, -10, -14, -17];

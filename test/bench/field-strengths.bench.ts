@@ -5,7 +5,7 @@
  */
 import geodesy from 'geographiclib-geodesic';
 
-import { fieldStrengths } from '../../shared/radio/field-strength.ts';
+import { fieldStrengths } from '../../shared/radio/propagation/field-strength.ts';
 import type { ReceptionTime, Site } from '../../shared/radio/site.ts';
 import type { Station } from '../../shared/radio/station.ts';
 import { seeded } from '../support/seeded-list.ts';

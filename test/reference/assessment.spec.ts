@@ -1,14 +1,14 @@
 import { describe, expect, it } from 'vitest';
 
 import reference from '../../datasets/reference/assessment.json' with { type: 'json' };
-import { assess } from '../../shared/radio/assessment.ts';
-import { earWeighting } from '../../shared/radio/ear-weighting.ts';
-import { programmeBands } from '../../shared/radio/programme.ts';
-import { defaultRaster } from '../../shared/radio/raster.ts';
+import { assess } from '../../shared/radio/assessment/assessment.ts';
+import { earWeighting } from '../../shared/radio/hearing/ear-weighting.ts';
+import { programmeBands } from '../../shared/radio/hearing/programme.ts';
+import { defaultRaster } from '../../shared/radio/channels/raster.ts';
 import type { ItuRegion } from '../../shared/radio/site.ts';
-import { ifSelectivity } from '../../shared/radio/selectivity.ts';
-import { programmeWeighting, type Weighting } from '../../shared/radio/weighting.ts';
-import { weightingGrid, WeightingTable } from '../../shared/radio/weighting-table.ts';
+import { ifSelectivity } from '../../shared/radio/circuits/selectivity.ts';
+import { programmeWeighting, type Weighting } from '../../shared/radio/hearing/weighting.ts';
+import { weightingGrid, WeightingTable } from '../../shared/radio/hearing/weighting-table.ts';
 import { givenStations, oneBandReceiver, siteIn } from '../support/plain-sets.ts';
 
 const { earWeighting: ear, weighting, published, responses } = reference;

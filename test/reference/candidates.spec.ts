@@ -1,9 +1,9 @@
 import { describe, expect, it } from 'vitest';
 
 import reference from '../../datasets/reference/candidates.json' with { type: 'json' };
-import { assess } from '../../shared/radio/assessment.ts';
-import { type Candidates, judgeCandidates } from '../../shared/radio/candidates.ts';
-import { defaultRaster } from '../../shared/radio/raster.ts';
+import { assess } from '../../shared/radio/assessment/assessment.ts';
+import { type Candidates, judgeCandidates } from '../../shared/radio/candidates/candidates.ts';
+import { defaultRaster } from '../../shared/radio/channels/raster.ts';
 import type { ItuRegion } from '../../shared/radio/site.ts';
 import { givenStations, oneBandReceiver, plainReceiver, siteIn } from '../support/plain-sets.ts';
 

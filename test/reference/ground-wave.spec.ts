@@ -3,9 +3,9 @@ import { readFileSync } from 'node:fs';
 import { describe, expect, it } from 'vitest';
 
 import propagation from '../../datasets/reference/propagation.json' with { type: 'json' };
-import { flatEarthAttenuation } from '../../shared/radio/flat-earth.ts';
-import { GROUNDS } from '../../shared/radio/ground.ts';
-import { groundWave } from '../../shared/radio/ground-wave.ts';
+import { flatEarthAttenuation } from '../../shared/radio/propagation/flat-earth.ts';
+import { GROUNDS } from '../../shared/radio/propagation/ground.ts';
+import { groundWave } from '../../shared/radio/propagation/ground-wave.ts';
 import type { Ground } from '../../shared/radio/site.ts';
 import { hertz, metres } from '../../shared/radio/units.ts';
 

@@ -1,8 +1,8 @@
 import { describe, expect, it } from 'vitest';
 
 import reference from '../../datasets/reference/mixer.json' with { type: 'json' };
-import { mixerLevel } from '../../shared/radio/product-levels.ts';
-import { productFrequencies } from '../../shared/radio/superheterodyne.ts';
+import { mixerLevel } from '../../shared/radio/mixing/product-levels.ts';
+import { productFrequencies } from '../../shared/radio/mixing/superheterodyne.ts';
 import { besselI, productLines, spectrumOf } from '../support/simulated-mixer.ts';
 
 const { oscillatorHarmonics } = reference;

@@ -1,11 +1,11 @@
 import { describe, expect, it } from 'vitest';
 
 import { pick, seededRandom } from '../../server/dev/random.ts';
-import { coupledPairRejection } from '../../shared/radio/coupled-pair.ts';
+import { coupledPairRejection } from '../../shared/radio/circuits/coupled-pair.ts';
 import type { Trap } from '../../shared/radio/receiver.ts';
-import { designTracking, type TrackingInput } from '../../shared/radio/tracking.ts';
-import { trapLoss } from '../../shared/radio/trap.ts';
-import { circuitRejection, detuning } from '../../shared/radio/tuned-circuit.ts';
+import { designTracking, type TrackingInput } from '../../shared/radio/tracking/tracking.ts';
+import { trapLoss } from '../../shared/radio/circuits/trap.ts';
+import { circuitRejection, detuning } from '../../shared/radio/circuits/tuned-circuit.ts';
 import {
   coupledPair,
   isolatedCircuits,

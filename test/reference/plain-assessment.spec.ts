@@ -5,8 +5,8 @@
 import * as fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 
-import { assess, type Assessment } from '../../shared/radio/assessment.ts';
-import type { Response } from '../../shared/radio/response.ts';
+import { assess, type Assessment } from '../../shared/radio/assessment/assessment.ts';
+import type { Response } from '../../shared/radio/assessment/response.ts';
 import { plainResponses, plainVerdict } from '../support/plain-assessment.ts';
 import { plainCase, receivers, sites, stationLists } from '../support/random-cases.ts';
 

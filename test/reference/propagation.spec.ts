@@ -1,13 +1,13 @@
 import { describe, expect, it } from 'vitest';
 
 import propagation from '../../datasets/reference/propagation.json' with { type: 'json' };
-import { groundWave } from '../../shared/radio/ground-wave.ts';
-import { locator, locatorCentre } from '../../shared/radio/locator.ts';
-import { millington } from '../../shared/radio/mixed-path.ts';
-import { noiseField } from '../../shared/radio/noise.ts';
-import { pathLength, sunTimes } from '../../shared/radio/path.ts';
+import { groundWave } from '../../shared/radio/propagation/ground-wave.ts';
+import { locator, locatorCentre } from '../../shared/radio/propagation/locator.ts';
+import { millington } from '../../shared/radio/propagation/mixed-path.ts';
+import { noiseField } from '../../shared/radio/propagation/noise.ts';
+import { pathLength, sunTimes } from '../../shared/radio/propagation/path.ts';
 import type { Ground, NoiseClass } from '../../shared/radio/site.ts';
-import { skyWave } from '../../shared/radio/sky-wave.ts';
+import { skyWave } from '../../shared/radio/propagation/sky-wave.ts';
 import { hertz, type Metres, metres } from '../../shared/radio/units.ts';
 
 const { skyWave: sky, skyWaveP1147, mixedPath, noise, distance, locators, sun } = propagation;

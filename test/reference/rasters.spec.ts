@@ -7,7 +7,7 @@ import {
   nearestChannel,
   rasterChannels,
   rasterDistance,
-} from '../../shared/radio/raster.ts';
+} from '../../shared/radio/channels/raster.ts';
 import type { ItuRegion } from '../../shared/radio/site.ts';
 
 const { channels, distances, neighbours } = rasters;

@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
 
 import reference from '../../datasets/reference/selectivity.json' with { type: 'json' };
-import { ifSelectivity, skirtExponent } from '../../shared/radio/selectivity.ts';
+import { ifSelectivity, skirtExponent } from '../../shared/radio/circuits/selectivity.ts';
 
 const { widths, shapeFactors } = reference;
 

@@ -1,9 +1,14 @@
 import { describe, expect, it } from 'vitest';
 
 import reference from '../../datasets/reference/special-functions.json' with { type: 'json' };
-import { airy } from '../../shared/radio/airy.ts';
-import { complex, type Complex, modulus, subtract } from '../../shared/radio/complex.ts';
-import { faddeeva } from '../../shared/radio/faddeeva.ts';
+import { airy } from '../../shared/radio/mathematics/airy.ts';
+import {
+  complex,
+  type Complex,
+  modulus,
+  subtract,
+} from '../../shared/radio/mathematics/complex.ts';
+import { faddeeva } from '../../shared/radio/mathematics/faddeeva.ts';
 
 const number = ([re = NaN, im = NaN]: readonly number[]): Complex => complex(re, im);
 

@@ -1,17 +1,17 @@
 import { describe, expect, it } from 'vitest';
 
 import reference from '../../datasets/reference/superheterodyne.json' with { type: 'json' };
-import { capacitanceChange } from '../../shared/radio/beat-oscillator.ts';
-import { harmonicsOnChannels } from '../../shared/radio/harmonics-on-channels.ts';
-import { whistlePitch } from '../../shared/radio/harmonic-whistles.ts';
-import { defaultRaster } from '../../shared/radio/raster.ts';
+import { capacitanceChange } from '../../shared/radio/mixing/beat-oscillator.ts';
+import { harmonicsOnChannels } from '../../shared/radio/candidates/harmonics-on-channels.ts';
+import { whistlePitch } from '../../shared/radio/mixing/harmonic-whistles.ts';
+import { defaultRaster } from '../../shared/radio/channels/raster.ts';
 import {
   halfIfFrequencies,
   imageFrequency,
   oscillatorFrequency,
   productFrequencies,
   rangeRatio,
-} from '../../shared/radio/superheterodyne.ts';
+} from '../../shared/radio/mixing/superheterodyne.ts';
 
 const { frequencies, rangeRatios, whistles, capacitance } = reference;
 

@@ -6,9 +6,13 @@ import {
   type Tracking,
   designTracking,
   type TrackingInput,
-} from '../../shared/radio/tracking.ts';
-import { curveOf, trackingConstants, trackingError } from '../../shared/radio/tracking-curve.ts';
-import { circuitRejection } from '../../shared/radio/tuned-circuit.ts';
+} from '../../shared/radio/tracking/tracking.ts';
+import {
+  curveOf,
+  trackingConstants,
+  trackingError,
+} from '../../shared/radio/tracking/tracking-curve.ts';
+import { circuitRejection } from '../../shared/radio/circuits/tuned-circuit.ts';
 
 const { curve, parts, best, loss, refit } = reference;
 const POINTS = [600_000, 1_000_000, 1_400_000] as const;

@@ -1,10 +1,10 @@
 import { describe, expect, it } from 'vitest';
 
 import reference from '../../datasets/reference/tuned-circuits.json' with { type: 'json' };
-import { coupledPairRejection } from '../../shared/radio/coupled-pair.ts';
+import { coupledPairRejection } from '../../shared/radio/circuits/coupled-pair.ts';
 import type { Trap } from '../../shared/radio/receiver.ts';
-import { trapFrequency, trapLoss } from '../../shared/radio/trap.ts';
-import { circuitRejection, detuning } from '../../shared/radio/tuned-circuit.ts';
+import { trapFrequency, trapLoss } from '../../shared/radio/circuits/trap.ts';
+import { circuitRejection, detuning } from '../../shared/radio/circuits/tuned-circuit.ts';
 
 const { examinationItems, isolated, ifRejection, coupledPair, traps } = reference;
 

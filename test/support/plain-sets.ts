@@ -1,5 +1,5 @@
 /** Plain receivers, sites and lists for the engine's tests. */
-import type { FieldStrength } from '../../shared/radio/field-strength.ts';
+import type { FieldStrength } from '../../shared/radio/propagation/field-strength.ts';
 import type { Band, Receiver } from '../../shared/radio/receiver.ts';
 import type { ItuRegion, Site } from '../../shared/radio/site.ts';
 import type { Station } from '../../shared/radio/station.ts';

@@ -1,8 +1,8 @@
 /** Random receivers, sites and lists for the engine's laws, drawn by fast-check. */
 import * as fc from 'fast-check';
 
-import type { FieldStrength } from '../../shared/radio/field-strength.ts';
-import { defaultRaster } from '../../shared/radio/raster.ts';
+import type { FieldStrength } from '../../shared/radio/propagation/field-strength.ts';
+import { defaultRaster } from '../../shared/radio/channels/raster.ts';
 import type { Band, Receiver } from '../../shared/radio/receiver.ts';
 import type { Period, Site } from '../../shared/radio/site.ts';
 import type { RasterRange, Station } from '../../shared/radio/station.ts';

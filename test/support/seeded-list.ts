@@ -1,5 +1,5 @@
 /** Seeded lists of given fields for benchmarks: on the rasters of the bands, as real lists are. */
-import type { FieldStrength } from '../../shared/radio/field-strength.ts';
+import type { FieldStrength } from '../../shared/radio/propagation/field-strength.ts';
 import type { Receiver } from '../../shared/radio/receiver.ts';
 import type { Site } from '../../shared/radio/site.ts';
 import type { RasterRange, Station } from '../../shared/radio/station.ts';

@@ -1,7 +1,7 @@
 import { FormArray, FormControl, FormGroup } from '@angular/forms';
 import * as z from 'zod';
 
-import { defaultRaster } from '../../../shared/radio/raster';
+import { defaultRaster } from '../../../shared/radio/channels/raster';
 import type { ItuRegion } from '../../../shared/radio/site';
 import { needed } from '../ui/form-problems/form-issues';
 

@@ -1,6 +1,6 @@
 import type { Assessment } from '../../../shared/contracts/assessment';
 import type { Candidate, CandidatesAnswer } from '../../../shared/contracts/candidates';
-import { nearestChannel, defaultRaster } from '../../../shared/radio/raster';
+import { nearestChannel, defaultRaster } from '../../../shared/radio/channels/raster';
 import type { Period } from '../../../shared/radio/site';
 import { kilohertz, whole } from '../charts/readings';
 import { formatFrequency } from '../ui/frequency-pipe';

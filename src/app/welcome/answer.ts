@@ -1,6 +1,6 @@
 import type { Assessment } from '../../../shared/contracts/assessment';
 import type { CandidatesAnswer } from '../../../shared/contracts/candidates';
-import { defaultRaster, rasterChannels } from '../../../shared/radio/raster';
+import { defaultRaster, rasterChannels } from '../../../shared/radio/channels/raster';
 import type { CandidateMark } from '../charts/candidate-lane/candidate-lane';
 import { receiverOf, type Trial } from './trial';
 

@@ -1,7 +1,7 @@
 import { ChangeDetectionStrategy, Component, computed, inject } from '@angular/core';
 import { MatButtonModule } from '@angular/material/button';
 
-import { noiseField } from '../../../shared/radio/noise';
+import { noiseField } from '../../../shared/radio/propagation/noise';
 import { BandStrip } from '../charts/band-strip/band-strip';
 import { loudness } from '../charts/band-strip/strip-layout';
 import { CandidateLane } from '../charts/candidate-lane/candidate-lane';

@@ -9,7 +9,7 @@ import { type Plan, plan, type PlanInput } from '../../../../shared/contracts/pl
 import { bareReceiver, storedReceiver } from '../../../../shared/contracts/receiver';
 import { type Edition, edition, type Region, region } from '../../../../shared/contracts/region';
 import { type NamedSite, type StoredSite, storedSite } from '../../../../shared/contracts/site';
-import { defaultRaster } from '../../../../shared/radio/raster';
+import { defaultRaster } from '../../../../shared/radio/channels/raster';
 import type { Period } from '../../../../shared/radio/site';
 import { remote } from '../../core/remote';
 import { addressParams, readAddress, type TrialAddress } from '../address/trial-address';

@@ -1,5 +1,5 @@
 import { receiverDraft, type ReceiverInput } from '../../../../shared/contracts/receiver';
-import { outOfReach } from '../../../../shared/radio/if-reach';
+import { outOfReach } from '../../../../shared/radio/candidates/if-reach';
 import { candidateRange, reachOf } from './candidate-range';
 
 const receiver = (changes: Partial<ReceiverInput>) =>

@@ -1,5 +1,5 @@
 import { receiverDraft } from '../../../../shared/contracts/receiver';
-import { defaultRaster } from '../../../../shared/radio/raster';
+import { defaultRaster } from '../../../../shared/radio/channels/raster';
 import { noiseAt, passband, rasterOn, shownAround } from './surroundings';
 
 const receiver = receiverDraft.parse({

@@ -1,7 +1,7 @@
-import { noiseField } from '../../../../shared/radio/noise';
-import { guardBands, rasterChannels, rasterStep } from '../../../../shared/radio/raster';
+import { noiseField } from '../../../../shared/radio/propagation/noise';
+import { guardBands, rasterChannels, rasterStep } from '../../../../shared/radio/channels/raster';
 import type { Receiver } from '../../../../shared/radio/receiver';
-import { ifSelectivity } from '../../../../shared/radio/selectivity';
+import { ifSelectivity } from '../../../../shared/radio/circuits/selectivity';
 import type { Site } from '../../../../shared/radio/site';
 import type { RasterRange } from '../../../../shared/radio/station';
 import { candidateRange } from './candidate-range';

@@ -5,7 +5,7 @@ import { Router, RouterLink } from '@angular/router';
 
 import type { Problem } from '../../../../shared/contracts/problem';
 import type { Region } from '../../../../shared/contracts/region';
-import { rasterChannels } from '../../../../shared/radio/raster';
+import { rasterChannels } from '../../../../shared/radio/channels/raster';
 import { toProblem } from '../../core/api-problem';
 import { Confirm } from '../../ui/confirm/confirm';
 import { Icon } from '../../ui/icon/icon';

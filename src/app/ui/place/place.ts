@@ -1,5 +1,5 @@
-import { locatorCentre } from '../../../../shared/radio/locator';
-import type { Place } from '../../../../shared/radio/path';
+import { locatorCentre } from '../../../../shared/radio/propagation/locator';
+import type { Place } from '../../../../shared/radio/propagation/path';
 import { type Axis, formatCoordinate, parseCoordinate } from './coordinate';
 
 export type PlaceReading = { readonly place: Place | null } | { readonly problem: string };
