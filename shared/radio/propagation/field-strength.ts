@@ -82,7 +82,10 @@ export const fieldStrengths = (
   stations: readonly Station[],
   time: ReceptionTime,
   choice: SkyWaveChoice = USUAL_SKY_WAVE,
-): FieldStrength[] => new FieldsAtSite(site, stations, choice).at(time);
+): FieldStrength[] => {
+  const fields = new FieldsAtSite(site, stations, choice);
+  return stations.map((station) => fields.of(station, time));
+};
 
 /** Fields of stations at a site for several times: what does not change is worked out once. */
 export class FieldsAtSite {
@@ -90,30 +93,27 @@ export class FieldsAtSite {
   private readonly ground: Ground | null;
   private readonly groundWaves = new GroundWaves();
   private readonly stations: readonly Station[];
-  private readonly paths: readonly (StationPath | null)[];
+  private readonly choice: SkyWaveChoice;
   private readonly choiceNotes: readonly string[];
+  private paths: readonly (StationPath | null)[] | undefined;
 
   /** Takes what `fieldStrengths` takes, and throws what it throws. */
   constructor(site: Site, stations: readonly Station[], choice: SkyWaveChoice = USUAL_SKY_WAVE) {
-    const place = placeOf(site);
-    this.place = place;
+    this.place = placeOf(site);
     this.ground = site.ground;
     this.stations = stations;
-    this.paths = stations.map((station) => {
-      const from = placeOf(station);
-      return place && from ? new StationPath(from, place, choice) : null;
-    });
+    this.choice = choice;
     this.choiceNotes = notesOnChoice(choice);
   }
 
-  /** The fields at a time, as `fieldStrengths` gives them. */
+  /** The fields at a time, as `fieldStrengths` gives them; the paths are kept for other times. */
   at(time: ReceptionTime): FieldStrength[] {
-    return this.stations.map((station, index) =>
-      this.fieldOf(station, this.paths[index] ?? null, time),
-    );
+    const paths = (this.paths ??= this.stations.map((station) => this.pathFrom(station)));
+    return this.stations.map((station, index) => this.of(station, time, paths[index] ?? null));
   }
 
-  private fieldOf(station: Station, path: StationPath | null, time: ReceptionTime): FieldStrength {
+  /** The field of one station at a time. */
+  of(station: Station, time: ReceptionTime, path = this.pathFrom(station)): FieldStrength {
     if (station.fieldDb !== null) {
       return withoutWaves(station, path, station.fieldDb, [FIELD_NOTES.given]);
     }
@@ -133,6 +133,11 @@ export class FieldsAtSite {
     const notes = notesOn(station, path, time);
     if (skyDb !== null) notes.push(...this.choiceNotes);
     return { station: station.id, distanceM: path.distance, groundDb, skyDb, fieldDb, notes };
+  }
+
+  private pathFrom(station: Station): StationPath | null {
+    const from = placeOf(station);
+    return this.place && from ? new StationPath(from, this.place, this.choice) : null;
   }
 
   /** Ground wave of 1 kW; null where a place or the ground is not known. */

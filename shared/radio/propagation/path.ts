@@ -4,7 +4,7 @@
  * @module radio/propagation/path
  */
 import geodesy from 'geographiclib-geodesic';
-import { getPosition, getTimes } from 'suncalc';
+import { getPosition, getTimes, times as timesOfTheDay } from 'suncalc';
 
 import { type Metres, metres } from '../units.ts';
 
@@ -23,6 +23,10 @@ export interface SunTimes {
 
 const DEGREE = Math.PI / 180;
 const { WGS84, DISTANCE, AZIMUTH } = geodesy.Geodesic;
+
+// suncalc works out every time of the day on its list. Sunrise and sunset are the first; dawns and
+// golden hours would make a long list of stations near sunset three times as slow.
+timesOfTheDay.splice(1);
 
 /**
  * Length of the shortest path between two places on the WGS84 ellipsoid.

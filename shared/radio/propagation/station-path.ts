@@ -20,17 +20,23 @@ import { type Decibels, decibels, hertz, type Metres, metres } from '../units.ts
 
 /** Ground waves: stations that share a frequency and a ground share the work. */
 export class GroundWaves {
-  private readonly waves = new Map<string, (distance: Metres) => Decibels>();
+  private readonly waves = new Map<Ground, Map<number, (distance: Metres) => Decibels>>();
 
   /** Field of the ground wave of 1 kW over uniform ground, dB(uV/m). */
   field(ground: Ground, frequencyHz: number, distance: Metres): Decibels {
-    const key = `${ground}/${frequencyHz}`;
-    let wave = this.waves.get(key);
+    const over = this.over(ground);
+    let wave = over.get(frequencyHz);
     if (!wave) {
       wave = groundWave(hertz(frequencyHz), GROUNDS[ground]);
-      this.waves.set(key, wave);
+      over.set(frequencyHz, wave);
     }
     return wave(distance);
+  }
+
+  private over(ground: Ground): Map<number, (distance: Metres) => Decibels> {
+    const known = this.waves.get(ground) ?? new Map<number, (distance: Metres) => Decibels>();
+    this.waves.set(ground, known);
+    return known;
   }
 
   /** Field of the ground wave of 1 kW over sections, drawn to the distance, dB(uV/m). */
@@ -99,7 +105,7 @@ export class StationPath {
   periodAtStation(time: ReceptionTime): Period {
     if (typeof time === 'string') return time;
     this.sunAtStation ??= new Sunlight(this.from);
-    return this.sunAtStation.hours(time) > 0 ? 'day' : 'night';
+    return this.sunAtStation.isUp(time) ? 'day' : 'night';
   }
 
   private get middle(): Place {

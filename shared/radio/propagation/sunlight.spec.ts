@@ -62,6 +62,22 @@ describe('Sunlight', () => {
     }
   });
 
+  it('is up whenever it has been or will be up for a time, at any place', () => {
+    const place = fc.record({
+      latitude: fc.double({ min: -90, max: 90, noNaN: true }),
+      longitude: fc.double({ min: -180, max: 180, noNaN: true }),
+    });
+    const minute = fc.integer({ min: 0, max: 365 * 24 * 60 });
+    fc.assert(
+      fc.property(place, minute, (where, since) => {
+        const at = new Date(Date.UTC(2026, 0, 1, 0, since));
+
+        expect(new Sunlight(where).isUp(at)).toBe(new Sunlight(where).hours(at) > 0);
+      }),
+      { numRuns: 5000 },
+    );
+  });
+
   it('refuses what is no date', () => {
     expect(() => new Sunlight({ latitude: 0, longitude: 0 }).hours(new Date(NaN))).toThrow(
       RangeError,

@@ -9,11 +9,14 @@ import { CRITICAL_HOURS } from './sky-wave.ts';
 
 const HOUR_MS = 3_600_000;
 const DAY_MS = 24 * HOUR_MS;
+const DEGREE = Math.PI / 180;
 
 /** Below this altitude, degrees, the sun is down at any place, its disc and refraction allowed for. */
 const SURELY_DOWN = -1.5;
-/** Above this one it is up for longer than the critical hours: it climbs 15 degrees an hour at most. */
-const SURELY_DAY = 15 * CRITICAL_HOURS + 2;
+/** Above this one it is up; the disc, refraction and the times' 2 minutes come to far less. */
+const SURELY_UP = 1.5;
+/** It climbs by less than this in the critical hours at the equator, by the cosine of it elsewhere. */
+const CLIMB = 15 * CRITICAL_HOURS;
 
 interface SunEvent {
   readonly at: number;
@@ -56,7 +59,26 @@ export class Sunlight {
     if (this.known && isOnDay(this.known, time)) return hoursOnDay(this.known, time);
     const altitude = sunAltitude(this.place, at);
     if (altitude < SURELY_DOWN) return 0;
-    if (altitude > SURELY_DAY) return Infinity;
+    if (altitude > SURELY_UP + CLIMB * Math.cos(this.place.latitude * DEGREE)) return Infinity;
+    return this.hoursByEvents(at);
+  }
+
+  /**
+   * Whether any of the sun is above the horizon: `hours` above 0, but cheaper.
+   *
+   * @param at The moment.
+   * @returns Whether it is day.
+   * @throws {RangeError} If the moment is no valid date.
+   * @example
+   *   new Sunlight({ latitude: 0, longitude: 0 }).isUp(new Date('2026-03-20T12:00:00Z')); // true
+   */
+  isUp(at: Date): boolean {
+    if (!this.known && sunAltitude(this.place, at) > SURELY_UP) return true;
+    return this.hours(at) > 0;
+  }
+
+  private hoursByEvents(at: Date): number {
+    const time = at.getTime();
     const { sunrise, sunset, polar } = sunTimes(this.place, at);
     if (sunrise && sunset) {
       this.known = { rise: sunrise.getTime(), set: sunset.getTime() };
@@ -116,4 +138,4 @@ function eventsAround(place: Place, around: Date): SunEvent[] {
  *   periodAt({ latitude: 0, longitude: 0 }, new Date('2026-03-20T00:00:00Z')); // 'night'
  */
 export const periodAt = (place: Place, at: Date): Period =>
-  new Sunlight(place).hours(at) > 0 ? 'day' : 'night';
+  new Sunlight(place).isUp(at) ? 'day' : 'night';
