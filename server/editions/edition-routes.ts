@@ -1,5 +1,6 @@
 import { pageOf, pageQuery } from '../../shared/contracts/paging.ts';
-import { edition, listedStation, stationQuery } from '../../shared/contracts/region.ts';
+import { edition } from '../../shared/contracts/region.ts';
+import { listedStation, stationQuery } from '../../shared/contracts/station-list.ts';
 import { route, type Route } from '../http/route.ts';
 import type { Editions } from './editions.ts';
 

@@ -1,12 +1,9 @@
 import { Op, type Sequelize } from 'sequelize';
 
 import type { Page, PageQuery } from '../../shared/contracts/paging.ts';
-import type {
-  Edition,
-  ListedStation,
-  Region,
-  StationQuery,
-} from '../../shared/contracts/region.ts';
+import { rangesInForce } from '../../shared/contracts/raster.ts';
+import type { Edition, Region } from '../../shared/contracts/region.ts';
+import type { ListedStation, StationQuery } from '../../shared/contracts/station-list.ts';
 import { nearestChannel } from '../../shared/radio/channels/raster.ts';
 import type { Station } from '../../shared/radio/station.ts';
 import type { Actor } from '../http/actor.ts';
@@ -47,7 +44,8 @@ export class Editions {
   }
 
   async stations(actor: Actor, id: number, query: StationQuery): Promise<Page<ListedStation>> {
-    const { region } = await this.find(actor, id);
+    const { row: edition, region } = await this.find(actor, id);
+    const raster = rangesInForce(region.rasters, edition.date);
     const { rows, count } = await StationModel.findAndCountAll({
       where: { [Op.and]: [{ editionId: id }, matchesSearch(query.search)] },
       order: [
@@ -57,11 +55,12 @@ export class Editions {
       limit: query.pageSize,
       offset: (query.page - 1) * query.pageSize,
     });
-    return { items: rows.map((row) => toStation(row, region)), total: count };
+    return { items: rows.map((row) => toStation(row, raster)), total: count };
   }
 
   async rasterOf(actor: Actor, id: number): Promise<Region['raster']> {
-    return (await this.find(actor, id)).region.raster;
+    const { row, region } = await this.find(actor, id);
+    return rangesInForce(region.rasters, row.date);
   }
 
   /** Every station of an edition as the engine computes with it, in the order of the list. */
@@ -139,10 +138,12 @@ const toEdition = (row: EditionModel, region: Region | undefined): Edition => ({
   source: row.source,
   note: row.note,
   stations: row.stations,
+  raster: rangesInForce(region?.rasters ?? [], row.date),
+  editable: region?.editable ?? false,
   createdAt: row.createdAt.toISOString(),
 });
 
-const toStation = (row: StationModel, { raster }: Region): ListedStation => ({
+const toStation = (row: StationModel, raster: Region['raster']): ListedStation => ({
   id: row.id,
   name: row.name,
   callSign: row.callSign,
@@ -153,5 +154,10 @@ const toStation = (row: StationModel, { raster }: Region): ListedStation => ({
   powerNightW: row.powerNightW,
   hours: row.hours,
   note: row.note,
+  patternDb: null,
   onRaster: nearestChannel(raster, row.frequencyHz) === row.frequencyHz,
+  offAir: false,
+  corrections: [],
+  distanceM: null,
+  fieldDb: null,
 });

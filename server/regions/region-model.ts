@@ -7,8 +7,8 @@ import {
   type Sequelize,
 } from 'sequelize';
 
+import type { DatedRaster } from '../../shared/contracts/raster.ts';
 import type { ItuRegion } from '../../shared/radio/site.ts';
-import type { RasterRange } from '../../shared/radio/station.ts';
 
 export class RegionModel extends Model<
   InferAttributes<RegionModel>,
@@ -18,7 +18,8 @@ export class RegionModel extends Model<
   declare workshopId: number;
   declare name: string;
   declare ituRegion: ItuRegion;
-  declare raster: RasterRange[];
+  /** The earliest first. */
+  declare rasters: DatedRaster[];
 
   static register(sequelize: Sequelize): void {
     RegionModel.init(
@@ -27,7 +28,7 @@ export class RegionModel extends Model<
         workshopId: { type: DataTypes.INTEGER.UNSIGNED, allowNull: false },
         name: { type: DataTypes.STRING(120), allowNull: false },
         ituRegion: { type: DataTypes.TINYINT.UNSIGNED, allowNull: false },
-        raster: { type: DataTypes.JSON, allowNull: false },
+        rasters: { type: DataTypes.JSON, allowNull: false },
       },
       { sequelize, modelName: 'Region', tableName: 'regions' },
     );

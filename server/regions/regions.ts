@@ -1,6 +1,7 @@
 import { literal, QueryTypes, type Sequelize } from 'sequelize';
 
 import type { Page, PageQuery } from '../../shared/contracts/paging.ts';
+import { type DatedRaster, rangesInForce } from '../../shared/contracts/raster.ts';
 import type { Region, RegionDraft } from '../../shared/contracts/region.ts';
 import { defaultRaster } from '../../shared/radio/channels/raster.ts';
 import { isDeadlock } from '../db/database-faults.ts';
@@ -52,7 +53,7 @@ export class Regions {
   }
 
   async change(actor: Actor, id: number, draft: RegionDraft): Promise<Region> {
-    await this.whileFree(actor, id, (row) => row.update(filled(draft)));
+    await this.whileFree(actor, id, (row) => row.update(filled(draft, row)));
     return this.get(actor, id);
   }
 
@@ -94,14 +95,25 @@ async function find({ workshopId }: Actor, id: number): Promise<RegionModel> {
   return row;
 }
 
-const filled = ({ name, ituRegion, raster }: RegionDraft) => ({
-  name,
-  ituRegion,
-  raster: raster ?? defaultRaster(ituRegion),
-});
+/** A region without a raster of its own has the ITU Region's; what it has stays unless that changes. */
+function filled({ name, ituRegion, raster, rasters }: RegionDraft, before?: RegionModel) {
+  const usual = before?.ituRegion === ituRegion ? before.rasters : always(defaultRaster(ituRegion));
+  const given = rasters ?? (raster ? always(raster) : usual);
+  const byDate = [...given].sort((a, b) => (a.from ?? '').localeCompare(b.from ?? ''));
+  return { name, ituRegion, rasters: byDate };
+}
+
+const always = (ranges: DatedRaster['ranges']): DatedRaster[] => [{ from: null, ranges }];
 
 function toRegion(actor: Actor, row: RegionModel): Region {
-  const { id, name, ituRegion, raster } = row;
-  const editable = hasRole(actor, 'librarian');
-  return { id, name, ituRegion, raster, editable, editions: Number(row.get('editions') ?? 0) };
+  const { id, name, ituRegion, rasters } = row;
+  return {
+    id,
+    name,
+    ituRegion,
+    raster: rangesInForce(rasters, new Date().toISOString().slice(0, 10)),
+    rasters,
+    editable: hasRole(actor, 'librarian'),
+    editions: Number(row.get('editions') ?? 0),
+  };
 }

@@ -1,41 +1,33 @@
 import * as z from 'zod';
 
-import {
-  frequencyHz,
-  ituRegion,
-  latitude,
-  longitude,
-  nameText,
-  resourceId,
-  spanHz,
-} from './quantities.ts';
-import { pageQuery } from './paging.ts';
+import { ituRegion, nameText, noteText, resourceId } from './quantities.ts';
+import { datedRaster, datedRasters, rasterRange, rasterRanges } from './raster.ts';
 
-/** A part of the spectrum divided into equal channels. */
-export const rasterRange = z
-  .strictObject({ lowHz: frequencyHz, highHz: frequencyHz, stepHz: spanHz })
-  .refine(({ lowHz, highHz }) => highHz >= lowHz, {
-    path: ['highHz'],
-    error: 'The raster must end at or above where it begins.',
+/**
+ * What a client sends to create or change a region: one raster for ever, or dated ones. Without
+ * either a new region takes the ITU Region's own and another keeps what it has.
+ */
+export const regionDraft = z
+  .strictObject({
+    name: nameText,
+    ituRegion,
+    raster: rasterRanges.optional(),
+    rasters: datedRasters.optional(),
   })
-  .refine(({ lowHz, highHz, stepHz }) => (highHz - lowHz) / stepHz <= 10_000, {
-    path: ['stepHz'],
-    error: 'Give a step that makes at most 10000 channels.',
+  .refine(({ raster, rasters }) => raster === undefined || rasters === undefined, {
+    path: ['rasters'],
+    error: 'Give either one raster or dated rasters.',
   });
-
-/** What a client sends to create a region; without a raster the ITU Region's own is taken. */
-export const regionDraft = z.strictObject({
-  name: nameText,
-  ituRegion,
-  raster: z.array(rasterRange).max(20, 'Give at most 20 ranges.').optional(),
-});
 export type RegionDraft = z.output<typeof regionDraft>;
 
 export const region = z.object({
   id: resourceId,
   name: z.string(),
   ituRegion,
+  /** The raster in force today. */
   raster: z.array(rasterRange),
+  /** All rasters, the earliest first. */
+  rasters: z.array(datedRaster),
   /** Whether the caller may change it and import lists. */
   editable: z.boolean(),
   editions: z.int().nonnegative(),
@@ -53,27 +45,18 @@ export const edition = z.object({
   source: z.string(),
   note: z.string(),
   stations: z.int().nonnegative(),
+  /** The region's raster in force at the edition's date, by which it is judged. */
+  raster: z.array(rasterRange),
+  /** Whether the caller may change or delete it. */
+  editable: z.boolean(),
   createdAt: z.iso.datetime(),
 });
 export type Edition = z.infer<typeof edition>;
 
-/** Which stations of an edition are asked for: by name, call sign or frequency in kHz. */
-export const stationQuery = pageQuery.extend({ search: z.string().trim().max(100).default('') });
-export type StationQuery = z.output<typeof stationQuery>;
-
-/** A station of an edition. */
-export const listedStation = z.object({
-  id: resourceId,
-  name: z.string(),
-  callSign: z.string(),
-  frequencyHz,
-  latitude: latitude.nullable(),
-  longitude: longitude.nullable(),
-  powerDayW: z.number().nullable(),
-  powerNightW: z.number().nullable(),
-  hours: z.string(),
-  note: z.string(),
-  /** Whether the frequency is a channel of the region's raster. */
-  onRaster: z.boolean(),
+/** What can be changed of an edition; its stations cannot. */
+export const editionChange = z.strictObject({
+  label: nameText,
+  date: z.iso.date('Give a date such as 2026-03-01.'),
+  note: noteText.default(''),
 });
-export type ListedStation = z.infer<typeof listedStation>;
+export type EditionChange = z.output<typeof editionChange>;

@@ -4,7 +4,7 @@ import { join } from 'node:path';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 
 import { importCheck, importState } from '../../shared/contracts/list-import.ts';
-import { listedStation } from '../../shared/contracts/region.ts';
+import { listedStation } from '../../shared/contracts/station-list.ts';
 import type { ApiClient } from '../support/api-client.ts';
 import { type ApiServer, startApiServer } from '../support/api-server.ts';
 import {

@@ -1,12 +1,12 @@
 import { Injectable, linkedSignal } from '@angular/core';
 
 import { type Page, pageOf } from '../../../shared/contracts/paging';
+import { edition } from '../../../shared/contracts/region';
 import {
-  edition,
   type ListedStation,
   listedStation,
   type StationQuery,
-} from '../../../shared/contracts/region';
+} from '../../../shared/contracts/station-list';
 import { remote } from '../core/remote';
 
 /** Stations found, and what was searched for. */

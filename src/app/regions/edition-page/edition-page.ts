@@ -8,7 +8,7 @@ import { MatProgressBarModule } from '@angular/material/progress-bar';
 import { Router, RouterLink } from '@angular/router';
 import { map } from 'rxjs';
 
-import { stationQuery } from '../../../../shared/contracts/region';
+import { stationQuery } from '../../../../shared/contracts/station-list';
 import { Empty } from '../../ui/page-state/empty';
 import { Loading } from '../../ui/page-state/loading';
 import { ProblemNote } from '../../ui/page-state/problem-note';

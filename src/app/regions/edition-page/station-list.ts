@@ -1,6 +1,6 @@
 import { ChangeDetectionStrategy, Component, input } from '@angular/core';
 
-import type { ListedStation } from '../../../../shared/contracts/region';
+import type { ListedStation } from '../../../../shared/contracts/station-list';
 import { FrequencyPipe } from '../../ui/frequency-pipe';
 import { Icon } from '../../ui/icon/icon';
 import { PlacePipe } from '../../ui/place/place-pipe';

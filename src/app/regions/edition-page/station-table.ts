@@ -1,7 +1,7 @@
 import { ChangeDetectionStrategy, Component, input } from '@angular/core';
 import { MatTableModule } from '@angular/material/table';
 
-import type { ListedStation } from '../../../../shared/contracts/region';
+import type { ListedStation } from '../../../../shared/contracts/station-list';
 import { Icon } from '../../ui/icon/icon';
 import { PlacePipe } from '../../ui/place/place-pipe';
 import { PowerPipe } from '../power-pipe';
