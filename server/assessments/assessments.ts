@@ -12,7 +12,6 @@ import type { Computed, Engine } from '../computing/engine.ts';
 import type { ListAtSite } from '../computing/engine-tasks.ts';
 import type { ListRequest, ListsAtSites } from '../computing/lists-at-sites.ts';
 import type { Actor } from '../http/actor.ts';
-import { refuseNotYet } from './not-yet.ts';
 
 /** Judges receivers; stores nothing. */
 export class Assessments {
@@ -29,7 +28,6 @@ export class Assessments {
     request: AssessmentRequest,
     signal?: AbortSignal,
   ): Promise<Computed<Assessment>> {
-    refuseNotYet(request);
     const list = await this.lists.find(actor, request);
     const { receiver, maxM, maxN, leaveOutBetterThan, limit } = request;
     const ask = { receiver, maxM, maxN, leaveOutBetterThan, limit };
@@ -42,7 +40,6 @@ export class Assessments {
     request: BreakthroughHoursRequest,
     signal?: AbortSignal,
   ): Promise<Computed<BreakthroughHours>> {
-    refuseNotYet(request);
     const list = await this.lists.find(actor, request);
     const { receiver, date } = request;
     const task = { list, receiver, times: momentsOf(date, list.columns.count) };
@@ -54,7 +51,6 @@ export class Assessments {
     request: CandidatesRequest,
     signal?: AbortSignal,
   ): Promise<Computed<Candidates>> {
-    refuseNotYet(request);
     const lists: ListAtSite[] = [];
     for (const [path, each] of casesOf(request)) {
       lists.push(await this.lists.find(actor, each, path));

@@ -30,9 +30,6 @@ export class InvalidError extends OperationalError {
   }
 }
 
-/** A field of the contract that this version does not compute with. */
-export class NotYetError extends InvalidError {}
-
 export class UnauthenticatedError extends OperationalError {
   readonly status = 401;
   readonly type: string = 'sign-in-needed';

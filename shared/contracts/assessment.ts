@@ -71,13 +71,16 @@ export const response = z.object({
 });
 
 const span = z.object({ low: z.int(), high: z.int() });
+const harmonicPoints = z.array(z.object({ harmonic: z.int(), dialHz: z.int() }));
 
 const judgedBand = z.object({
   name: z.string(),
   oscillatorHz: span,
   imageHz: span,
   rejection: z.array(z.object({ dialHz: z.int(), imageDb: z.number(), ifDb: z.number() })),
-  harmonics: z.array(z.object({ harmonic: z.int(), dialHz: z.int() })),
+  harmonics: harmonicPoints,
+  /** Harmonics of the second oscillator on the band; none without a second conversion. */
+  secondOscillator: harmonicPoints,
   totals: z.array(
     z.object({ dialHz: z.int(), ratioDb: z.number(), grade, stations: z.array(z.int()) }),
   ),

@@ -1,5 +1,6 @@
 import * as z from 'zod';
 
+import { ifSelectivity } from '../radio/circuits/selectivity.ts';
 import type { Receiver as RadioReceiver } from '../radio/receiver.ts';
 import { searchQuery } from './paging.ts';
 import { band } from './receiver-band.ts';
@@ -13,8 +14,9 @@ import {
   spanHz,
 } from './quantities.ts';
 
-/** Width of an IF amplifier; a bound also on what judging it costs. */
-const ifWidthHz = spanHz.max(1_000_000, 'Give a width of 1 MHz or less.');
+/** Largest width of an IF amplifier; a bound also on what judging it costs. */
+const WIDEST_IF_HZ = 1_000_000;
+const ifWidthHz = spanHz.max(WIDEST_IF_HZ, 'Give a width of 1 MHz or less.');
 
 const widths = z
   .strictObject({ kind: z.literal('widths'), b6Hz: ifWidthHz, b60Hz: ifWidthHz })
@@ -107,8 +109,38 @@ function checkOscillators(
   });
 }
 
+/** A table goes outwards from the centre, and no IF amplifier is wider than one MHz. */
+function checkSelectivity(
+  { selectivity, ifHz }: Pick<RadioReceiver, 'selectivity' | 'ifHz'>,
+  context: z.RefinementCtx,
+): void {
+  const refuse = (field: string, message: string): void => {
+    context.addIssue({ code: 'custom', path: ['selectivity', field], message });
+  };
+  if (selectivity.kind === 'table') {
+    const offsets = selectivity.points.map(({ offsetHz }) => offsetHz);
+    if (offsets.some((offset, index) => index > 0 && offset <= (offsets[index - 1] ?? 0))) {
+      refuse('points', 'Give the points from the centre outwards, every offset once.');
+    }
+    if ((offsets.at(-1) ?? 0) > WIDEST_IF_HZ / 2) {
+      refuse('points', 'Give offsets of 500 kHz or less.');
+    }
+  }
+  if (selectivity.kind !== 'transformers') return;
+  if (ifSelectivity(selectivity, ifHz).b60Hz > WIDEST_IF_HZ) {
+    refuse('q', 'Give a higher Q: so the width at -60 dB would be more than 1 MHz.');
+  }
+}
+
+type Judged = Pick<RadioReceiver, 'ifHz' | 'bands' | 'selectivity'>;
+
+function checkReceiver(receiver: Judged, context: z.RefinementCtx): void {
+  checkOscillators(receiver, context);
+  checkSelectivity(receiver, context);
+}
+
 /** What a client sends to compute with a receiver. */
-export const receiverDraft = z.strictObject(receiverFields).superRefine(checkOscillators);
+export const receiverDraft = z.strictObject(receiverFields).superRefine(checkReceiver);
 
 /** A receiver as it is typed or sent, before defaults are filled. */
 export type ReceiverInput = z.input<typeof receiverDraft>;
@@ -118,7 +150,7 @@ export type ReceiverDraft = z.output<typeof receiverDraft>;
 /** What a client sends to store a receiver. Lists need something to show for one without a name. */
 export const newReceiver = z
   .strictObject({ ...receiverFields, name: nameText.default('Unnamed receiver') })
-  .superRefine(checkOscillators);
+  .superRefine(checkReceiver);
 
 /** A receiver without what the server decides about it, which parsing leaves out. */
 export const bareReceiver = z.object(receiverFields);
@@ -141,7 +173,7 @@ export const receiverChange = z
     name: nameText,
     version: z.int('Send the version you changed.').positive(),
   })
-  .superRefine(checkOscillators);
+  .superRefine(checkReceiver);
 export type ReceiverChange = z.output<typeof receiverChange>;
 
 /** Which receivers are asked for, and in which order. */

@@ -134,24 +134,6 @@ describe('POST /api/assessments', () => {
 
     expect(body.issues.map((each: { path: string }) => each.path)).toContain(path);
   });
-
-  it.each<[string, object]>([
-    [
-      'receiver.selectivity.kind',
-      { receiver: sentReceiver({ selectivity: { kind: 'transformers', count: 2, q: 60 } }) },
-    ],
-    ['receiver.aerial', { receiver: sentReceiver({ aerial: { kind: 'loop' } }) }],
-    [
-      'receiver.secondConversion',
-      { receiver: sentReceiver({ secondConversion: { ifHz: 50_000, oscillator: 'above' } }) },
-    ],
-    ['maxM', { maxM: 4 }],
-    ['maxN', { maxN: 3 }],
-  ])('with %s, which is not computed yet, answers 400 and says so', async (path, change) => {
-    const { body } = await visitor.post('/api/assessments', asked(change)).expect(400);
-
-    expect(body.issues).toEqual([{ path, message: 'not yet: this is not computed so far.' }]);
-  });
 });
 
 describe('POST /api/if-candidates', () => {

@@ -40,6 +40,7 @@ const band: JudgedBand = {
     { dialHz: 1_400_000, imageDb: 40, ifDb: 45 },
   ],
   harmonics: [],
+  secondOscillator: [],
   totals: [],
   total: 1,
   responses: [{ ...heard, ledger: [] }],

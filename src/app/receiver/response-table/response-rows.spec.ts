@@ -32,6 +32,7 @@ const band = (name: string, responses: JudgedResponse[]): JudgedBand => ({
   imageHz: { low: 0, high: 1 },
   rejection: [],
   harmonics: [],
+  secondOscillator: [],
   totals: [],
   total: responses.length,
   responses,
