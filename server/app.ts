@@ -16,13 +16,14 @@ import { problemHandler } from './http/problem-handler.ts';
 import { requestLog } from './http/request-log.ts';
 import type { Route } from './http/route.ts';
 import { routerOf } from './http/router.ts';
-import { securityHeaders } from './http/security-headers.ts';
+import { secretAddress, securityHeaders } from './http/security-headers.ts';
 import { xsrf } from './http/xsrf.ts';
 import { importRoutes } from './imports/import-routes.ts';
 import type { Logger } from './logger.ts';
 import { docsFiles } from './openapi/docs-files.ts';
 import { withDescription } from './openapi/openapi-routes.ts';
 import { planRoutes } from './plans/plan-routes.ts';
+import { sharedPlanRoutes } from './plans/shared-plan-routes.ts';
 import { receiverRoutes } from './receivers/receiver-routes.ts';
 import { regionRoutes } from './regions/region-routes.ts';
 import type { Services } from './services.ts';
@@ -52,6 +53,7 @@ export function apiRoutes(services: Services): Route[] {
     ...trackingRoutes(engine),
     ...whistleRoutes(services.whistles),
     ...planRoutes(services.plans),
+    ...sharedPlanRoutes(services.plans, limits),
   ];
 }
 
@@ -65,6 +67,7 @@ export function createApp(
   const app = express();
   app.disable('x-powered-by').disable('etag').set('trust proxy', config.TRUSTED_PROXIES);
   app.use(requestLog(log), securityHeaders(config), health(database), compression());
+  app.use(['/shared', '/api/shared-plans'], secretAddress);
 
   app.use('/api', noStore, xsrf(config), authentication(sessionCookie(config), services.sessions));
   const routes = withDescription(apiRoutes(services), sessionCookie(config));

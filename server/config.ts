@@ -52,6 +52,8 @@ const environment = z
     LIMIT_COMPUTE_VISITOR: count(300),
     /** Computing calls of an account in a minute. */
     LIMIT_COMPUTE_ACCOUNT: count(1200),
+    /** Reads of shared plans from one address in a minute: a club evening looks at one together. */
+    LIMIT_SHARED_PLANS: count(120),
   })
   .refine(({ NODE_ENV, SESSION_SECRET }) => NODE_ENV !== 'production' || SESSION_SECRET, {
     path: ['SESSION_SECRET'],

@@ -18,6 +18,7 @@ import { Commits } from './imports/commits.ts';
 import { Imports } from './imports/imports.ts';
 import { Uploads } from './imports/uploads.ts';
 import type { Logger } from './logger.ts';
+import { PlanShares } from './plans/plan-shares.ts';
 import { Plans } from './plans/plans.ts';
 import { Receivers } from './receivers/receivers.ts';
 import { Regions } from './regions/regions.ts';
@@ -68,6 +69,13 @@ export function createServices(database: Sequelize, config: Config, log: Logger)
     whistles: new Whistles(lists, engine),
     engine,
     assessments,
-    plans: new Plans(database, { receivers, sites, editions, assessments, people: accounts }),
+    plans: new Plans(database, new PlanShares(database), {
+      receivers,
+      sites,
+      editions,
+      assessments,
+      workshops,
+      people: accounts,
+    }),
   };
 }

@@ -82,6 +82,14 @@ export class Editions {
     }
   }
 
+  /** Some stations of an edition, as lists name them. */
+  async named(id: number, stationIds: readonly number[]): Promise<StationModel[]> {
+    return StationModel.findAll({
+      attributes: ['id', 'name', 'callSign', 'frequencyHz'],
+      where: { editionId: id, id: { [Op.in]: [...stationIds] } },
+    });
+  }
+
   /** The edition with the region it belongs to; another workshop's is not found. */
   async find(actor: Actor, id: number): Promise<{ row: EditionModel; region: Region }> {
     const row = await EditionModel.findByPk(id);

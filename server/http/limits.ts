@@ -17,6 +17,7 @@ type Settings = Pick<
   | 'LIMIT_REGISTER'
   | 'LIMIT_COMPUTE_VISITOR'
   | 'LIMIT_COMPUTE_ACCOUNT'
+  | 'LIMIT_SHARED_PLANS'
 >;
 
 /** How often a caller may do what is costly or can be abused; counted for all processes together. */
@@ -38,6 +39,10 @@ export class Limits {
 
   async registering(address: string): Promise<void> {
     await this.spend(`register:${digest(address)}`, this.settings.LIMIT_REGISTER, HOUR);
+  }
+
+  async readingShared(address: string): Promise<void> {
+    await this.spend(`shared-plans:${digest(address)}`, this.settings.LIMIT_SHARED_PLANS, MINUTE);
   }
 
   /**

@@ -10,6 +10,10 @@ const HEADER = 'X-Request-Id';
 /** The id that the log, the answer's header and a problem's `instance` have in common. */
 export const requestId = (response: Response): string => String(response.getHeader(HEADER) ?? '');
 
+/** The end of a link to a shared plan is a secret and must not be found in a log. */
+export const withoutSecret = (path: string): string =>
+  path.replace(/^(\/api\/shared-plans|\/shared)\/.*/, '$1/…');
+
 /** Gives each request an id and writes one line for it. */
 export function requestLog(log: Logger): RequestHandler {
   return pinoHttp({
@@ -27,7 +31,7 @@ export function requestLog(log: Logger): RequestHandler {
       req: ({ id, method, url }: { id: string; method: string; url: string }) => ({
         id,
         method,
-        path: url.split('?')[0],
+        path: withoutSecret(url.split('?')[0] ?? ''),
       }),
       res: ({ statusCode }: { statusCode: number }) => ({ status: statusCode }),
     },

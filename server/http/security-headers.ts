@@ -14,6 +14,12 @@ export function securityHeaders({ BEHIND_TLS }: { readonly BEHIND_TLS: boolean }
   });
 }
 
+/** For addresses that hold a secret: told to no other site, and kept out of search engines. */
+export const secretAddress: RequestHandler = (_request, response, next) => {
+  response.set({ 'Referrer-Policy': 'no-referrer', 'X-Robots-Tag': 'noindex, nofollow' });
+  next();
+};
+
 /** The policy of the client's page: its styles carry the nonce. */
 export function pagePolicy(nonce: string, isBehindTls: boolean): RequestHandler {
   return helmet.contentSecurityPolicy({

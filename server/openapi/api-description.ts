@@ -52,7 +52,7 @@ function parametersOf(row: Route): Json[] {
     name,
     in: 'path',
     required: true,
-    schema: { type: 'integer', minimum: 1 },
+    schema: name === 'token' ? { type: 'string' } : { type: 'integer', minimum: 1 },
   }));
   return [...inPath, ...queryParametersOf(row), ...headersOf(row)];
 }

@@ -7,7 +7,7 @@ import {
   type Sequelize,
 } from 'sequelize';
 
-import type { Plan } from '../../shared/contracts/plan.ts';
+import type { Plan, WholePlan } from '../../shared/contracts/plan.ts';
 
 /** What a plan keeps as it was, whatever becomes of receiver, site and edition. */
 export type PlanSnapshot = Pick<
@@ -20,7 +20,12 @@ export type PlanSnapshot = Pick<
   | 'everyChannelDb'
   | 'receiver'
   | 'results'
->;
+> &
+  // Plans of old lack these.
+  Partial<Pick<Plan, 'edition' | 'savedReceiver'>> & { readonly regionId?: number | null };
+
+/** The stations a plan names and all that was heard; read only with a single plan. */
+export type PlanWorking = Pick<WholePlan, 'stations' | 'judged'>;
 
 export class PlanModel extends Model<
   InferAttributes<PlanModel>,
@@ -34,6 +39,8 @@ export class PlanModel extends Model<
   declare name: string;
   declare ifHz: number;
   declare snapshot: PlanSnapshot;
+  /** Null: kept before plans held it. */
+  declare working: CreationOptional<PlanWorking | null>;
   declare createdAt: CreationOptional<Date>;
 
   static register(sequelize: Sequelize): void {
@@ -47,6 +54,7 @@ export class PlanModel extends Model<
         name: { type: DataTypes.STRING(120), allowNull: false },
         ifHz: { type: DataTypes.INTEGER.UNSIGNED, allowNull: false },
         snapshot: { type: DataTypes.JSON, allowNull: false },
+        working: { type: DataTypes.JSON, allowNull: true },
         createdAt: { type: DataTypes.DATE(3), allowNull: false },
       },
       { sequelize, tableName: 'plans' },

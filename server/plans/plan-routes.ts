@@ -1,5 +1,5 @@
 import { pageOf, pageQuery } from '../../shared/contracts/paging.ts';
-import { plan, planDraft } from '../../shared/contracts/plan.ts';
+import { plan, planDraft, wholePlan } from '../../shared/contracts/plan.ts';
 import { route, type Route } from '../http/route.ts';
 import type { Plans } from './plans.ts';
 
@@ -24,7 +24,7 @@ export const planRoutes = (plans: Pick<Plans, 'list' | 'get' | 'keep' | 'remove'
     access: 'member',
     body: planDraft,
     status: 201,
-    answer: plan,
+    answer: wholePlan,
     computing: true,
     faults: [404, 429],
     handle: ({ actor, id, body }) => plans.keep(actor, id(), body),
@@ -32,9 +32,9 @@ export const planRoutes = (plans: Pick<Plans, 'list' | 'get' | 'keep' | 'remove'
   route({
     method: 'get',
     path: one,
-    summary: 'A plan, as it was when kept',
+    summary: 'A plan, as it was when kept, with all that was heard',
     access: 'member',
-    answer: plan,
+    answer: wholePlan,
     faults: [404],
     handle: ({ actor, id }) => plans.get(actor, id(), id('planId')),
   }),

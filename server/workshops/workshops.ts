@@ -36,6 +36,10 @@ export class Workshops {
     }));
   }
 
+  async nameOf(workshopId: number): Promise<string> {
+    return (await WorkshopModel.findByPk(workshopId))?.name ?? '';
+  }
+
   async get({ workshopId, role }: Actor): Promise<Workshop> {
     const row = await WorkshopModel.findByPk(workshopId);
     if (!row) throw new NotFoundError('workshop', workshopId);

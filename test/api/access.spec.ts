@@ -58,10 +58,15 @@ describe('every route', () => {
     const open = routes.filter(({ access }) => access === 'visitor');
 
     expect(open.map(({ method, path }) => `${method} ${path}`).sort()).toEqual(
-      expect.arrayContaining(['delete /api/session', 'post /api/accounts', 'post /api/session']),
+      expect.arrayContaining([
+        'delete /api/session',
+        'get /api/shared-plans/:token',
+        'post /api/accounts',
+        'post /api/session',
+      ]),
     );
     const computing = open.filter((row) => row.computing).map(({ path }) => path);
-    expect(open).toHaveLength(3 + computing.length);
+    expect(open).toHaveLength(4 + computing.length);
   });
 
   it('answers a reader with what its row says', async () => {

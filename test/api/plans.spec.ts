@@ -1,6 +1,6 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 
-import { plan } from '../../shared/contracts/plan.ts';
+import { plan, wholePlan } from '../../shared/contracts/plan.ts';
 import type { ApiClient } from '../support/api-client.ts';
 import { type ApiServer, startApiServer } from '../support/api-server.ts';
 import { club } from '../support/club.ts';
@@ -43,7 +43,7 @@ describe('POST /api/receivers/:id/plans', () => {
 
     const { body, headers } = await person.post(path, draft).expect(201);
 
-    const kept = plan.parse(body);
+    const kept = wholePlan.parse(body);
     expect(kept).toMatchObject({
       name: 'Move it',
       ifHz: 460_000,
@@ -59,7 +59,9 @@ describe('POST /api/receivers/:id/plans', () => {
     expect(headers['location']).toBe(`${path}/${kept.id}`);
     await person.get(`${path}/${kept.id}`).expect(200, body);
     const { body: list } = await person.get(path).expect(200);
-    expect(list).toEqual({ items: [body], total: 1 });
+    const { stations: _stations, judged: _judged, ...head } = body;
+    expect(list).toEqual({ items: [head], total: 1 });
+    expect(plan.parse(list.items[0])).toEqual(plan.parse(head));
   });
 
   it('judges the chosen IF as an assessment of the realigned set does', async () => {
@@ -76,7 +78,20 @@ describe('POST /api/receivers/:id/plans', () => {
       })
       .expect(200);
 
-    expect(body.results.day).toEqual(day.verdict);
+    const { stations, results } = wholePlan.parse(body);
+    const named = (verdict: typeof results.day) =>
+      verdict.harmed.map(({ station, ...rest }) => ({
+        ...rest,
+        name: stations[station]?.name,
+      }));
+    expect(results.day).toMatchObject({
+      usable: day.verdict.usable,
+      deficitDb: day.verdict.deficitDb,
+    });
+    expect(named(results.day).map(({ dialHz }) => dialHz)).toEqual(
+      day.verdict.harmed.map(({ dialHz }: { dialHz: number }) => dialHz),
+    );
+    for (const { name, dialHz } of named(results.day)) expect(name).toBe(`${dialHz / 1000} kHz`);
   });
 
   it.each([
@@ -137,7 +152,12 @@ describe('a plan', () => {
       .expect(200);
 
     const { body } = await person.get(`${path}/${kept.id}`).expect(200);
-    expect(body).toEqual({ ...kept, editionId: null, siteId: null });
+    expect(body).toEqual({
+      ...kept,
+      editionId: null,
+      siteId: null,
+      standing: { newerEdition: null, isReceiverChanged: true, isSiteChanged: true },
+    });
     await person.delete(`/api/receivers/${receiverId}`).expect(204);
     await person.get(`${path}/${kept.id}`).expect(404);
   });
@@ -153,5 +173,70 @@ describe('a plan', () => {
     await admin.delete(`${path}/${second}`).expect(204);
     const { body } = await librarian.get(path).expect(200);
     expect(body).toEqual({ items: [], total: 0 });
+  });
+});
+
+describe('a plan', () => {
+  it('can be read alone: stations by name, call sign and frequency, responses with working', async () => {
+    const { siteId, path } = await benchOf(person);
+    const editionId = await importList(person, await addRegion(person), cleanList(200), 'Alone');
+    const draft = draftOf(siteId, { everyChannelDb: null, editionId });
+
+    const kept = wholePlan.parse((await person.post(path, draft).expect(201)).body);
+
+    expect(kept.edition).toMatchObject({ label: 'Alone', regionName: 'Vale', stations: 200 });
+    const heard = kept.judged?.night.bands.flatMap(({ responses }) => responses) ?? [];
+    expect(heard.length).toBeGreaterThan(10);
+    for (const { station, wantedStation, ledger } of heard) {
+      expect(kept.stations[station]?.name).toMatch(/^Radio Vale \d+$/);
+      expect(kept.stations[station]?.frequencyHz).toBeGreaterThan(500_000);
+      if (wantedStation !== null) expect(kept.stations[wantedStation]).toBeDefined();
+      expect(ledger.length).toBeGreaterThan(0);
+    }
+  });
+
+  it('is judged with the set-up on trial, beside the one that is saved', async () => {
+    const { siteId, path } = await benchOf(person);
+    const sharp = { qLow: 120, qHigh: 120 };
+    const trial = sentReceiver();
+    trial.bands = trial.bands.map((band) => ({ ...band, circuits: [sharp, sharp] }));
+
+    const { body } = await person.post(path, draftOf(siteId, { receiver: trial })).expect(201);
+    const plain = await person.post(path, draftOf(siteId)).expect(201);
+
+    const [kept, saved] = [wholePlan.parse(body), wholePlan.parse(plain.body)];
+    expect(kept.receiver.bands[0]?.circuits).toEqual([sharp, sharp]);
+    expect(kept.savedReceiver?.bands[0]?.circuits).toHaveLength(1);
+    expect(kept.standing.isReceiverChanged).toBe(false);
+    expect(saved.savedReceiver).toBeNull();
+    expect(kept.results.night.deficitDb).toBeLessThan(saved.results.night.deficitDb);
+    expect(kept.results.before?.night.deficitDb).toBe(saved.results.before?.night.deficitDb);
+    await person.post(path, draftOf(siteId, { receiver: { ifHz: 1 } })).expect(400);
+  });
+
+  it('says that a newer edition of its list exists, and that receiver or site changed', async () => {
+    const { siteId, receiverId, path } = await benchOf(person);
+    const region = await addRegion(person);
+    const editionId = await importList(person, region, cleanList(20), 'Old');
+    const draft = draftOf(siteId, { everyChannelDb: null, editionId });
+    const { body: kept } = await person.post(path, draft).expect(201);
+    expect(kept.standing).toEqual({
+      newerEdition: null,
+      isReceiverChanged: false,
+      isSiteChanged: false,
+    });
+
+    const newer = await importList(person, region, cleanList(21), 'New');
+    await person.put(`/api/sites/${siteId}`, sentSite({ noise: 'city' })).expect(200);
+    await person
+      .put(`/api/receivers/${receiverId}`, { ...sentReceiver({ ifRange: 0.1 }), version: 1 })
+      .expect(200);
+
+    const { body } = await person.get(`${path}/${kept.id}`).expect(200);
+    expect(body.standing).toMatchObject({
+      newerEdition: { id: newer, label: 'New' },
+      isReceiverChanged: true,
+      isSiteChanged: true,
+    });
   });
 });

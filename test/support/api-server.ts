@@ -52,6 +52,7 @@ export async function startApiServer(
     LIMIT_REGISTER: UNLIMITED,
     LIMIT_COMPUTE_VISITOR: UNLIMITED,
     LIMIT_COMPUTE_ACCOUNT: UNLIMITED,
+    LIMIT_SHARED_PLANS: UNLIMITED,
     ...settings,
   });
   const log = createLogger(process.env['TEST_LOG_LEVEL'] ?? 'silent');
