@@ -31,6 +31,7 @@ import { sessionCookie } from './sessions/session-door.ts';
 import { sessionRoutes } from './sessions/session-routes.ts';
 import { siteRoutes } from './sites/site-routes.ts';
 import { trackingRoutes } from './tracking/tracking-routes.ts';
+import { trapRoutes } from './traps/trap-routes.ts';
 import { whistleRoutes } from './whistles/whistle-routes.ts';
 import { workshopRoutes } from './workshops/workshop-routes.ts';
 
@@ -51,6 +52,7 @@ export function apiRoutes(services: Services): Route[] {
     ...assessmentRoutes(assessments),
     ...cureRoutes(services.cures),
     ...trackingRoutes(engine),
+    ...trapRoutes(),
     ...whistleRoutes(services.whistles),
     ...planRoutes(services.plans),
     ...sharedPlanRoutes(services.plans, limits),

@@ -13,6 +13,7 @@ import {
   resourceId,
   spanHz,
 } from './quantities.ts';
+import { trap } from './trap.ts';
 
 /** Largest width of an IF amplifier; a bound also on what judging it costs. */
 const WIDEST_IF_HZ = 1_000_000;
@@ -38,15 +39,6 @@ const table = z.strictObject({
     .array(z.strictObject({ offsetHz: z.int().min(0), rejectionDb: decibelsValue }))
     .min(2, 'Give at least two points.')
     .max(200, 'Give at most 200 points.'),
-});
-
-const trap = z.strictObject({
-  kind: z.enum(['parallel', 'series']),
-  inductanceH: z.number().min(1e-9).max(1, 'Give an inductance between 1 nH and 1 H.'),
-  capacitanceF: z.number().min(1e-13).max(1e-3, 'Give a capacitance between 0.1 pF and 1 mF.'),
-  q: qValue,
-  sourceOhms: z.number().min(0.1).max(1e7, 'Give 0.1 ohm to 10 megohms.'),
-  loadOhms: z.number().min(0.1).max(1e7, 'Give 0.1 ohm to 10 megohms.'),
 });
 
 const aerial = z.discriminatedUnion('kind', [
