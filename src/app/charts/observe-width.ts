@@ -1,8 +1,14 @@
-import { DestroyRef, ElementRef, inject, signal, type Signal } from '@angular/core';
+import { computed, DestroyRef, ElementRef, inject, signal, type Signal } from '@angular/core';
 
-/** Width of the component's own element in CSS pixels, kept current. Call while it is made. */
+import { PAPER_WIDTH, Printing } from './chart/printing';
+
+/**
+ * Width of the component's own element in CSS pixels, kept current; on paper, the paper's. Call
+ * while it is made.
+ */
 export function observeWidth(): Signal<number> {
   const host = inject<ElementRef<HTMLElement>>(ElementRef).nativeElement;
+  const printing = inject(Printing);
   const width = signal(host.clientWidth || 640);
   if (typeof ResizeObserver !== 'undefined') {
     const observer = new ResizeObserver(([entry]) => {
@@ -13,5 +19,5 @@ export function observeWidth(): Signal<number> {
       observer.disconnect();
     });
   }
-  return width.asReadonly();
+  return computed(() => (printing.isOn() ? PAPER_WIDTH : width()));
 }

@@ -20,6 +20,6 @@ export const hues: Readonly<Record<HueName, Hue>> = {
   ochre: { paper: '#bb7b15', walnut: '#b5920a' },
 };
 
-/** The hue as a CSS colour that follows the theme. */
+/** The hue as a CSS colour that follows the theme; the paper's own colour of marks when printed. */
 export const hueColour = (name: HueName): string =>
-  `light-dark(${hues[name].paper}, ${hues[name].walnut})`;
+  `var(--fallow-mark, light-dark(${hues[name].paper}, ${hues[name].walnut}))`;

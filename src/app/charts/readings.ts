@@ -44,8 +44,10 @@ export const change = (db: number): string =>
 export const percent = (fraction: number): string =>
   `${fraction > 0 ? '+' : ''}${fixed(fraction * 100, 2)} %`;
 
-/** A distance in kilometres. */
+/** A distance in kilometres, without its unit; a dash when missing. */
+export const kilometres = (metres: number | null): string =>
+  metres === null ? '\u2013' : fixed(metres / 1000, metres < 100_000 ? 1 : 0);
+
+/** A distance in kilometres with its unit; a dash when missing. */
 export const distance = (metres: number | null): string =>
-  metres === null
-    ? '\u2013'
-    : $localize`${fixed(metres / 1000, metres < 100_000 ? 1 : 0)}:value: km`;
+  metres === null ? kilometres(null) : $localize`${kilometres(metres)}:value: km`;

@@ -42,6 +42,7 @@ const band: JudgedBand = {
     { dialHz: 550_000, imageDb: 50, ifDb: 25 },
     { dialHz: 1_600_000, imageDb: 40, ifDb: 45 },
   ],
+  secondOscillator: [],
   harmonics: [{ harmonic: 2, dialHz: 910_000 }],
   totals: [],
   total: 31,

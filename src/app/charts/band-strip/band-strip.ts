@@ -9,7 +9,7 @@ import {
 } from '@angular/core';
 import { type ScaleLinear } from 'd3';
 
-import { ChartHead } from '../chart-head/chart-head';
+import { Chart } from '../chart/chart';
 import { type StationAtSite } from '../choice-chart/choice-layout';
 import { frame, NARROW } from '../frame';
 import { observeWidth } from '../observe-width';
@@ -18,7 +18,6 @@ import { type PlotMark } from '../plot/plot-mark';
 import { PlotLabels } from '../plot/plot-labels';
 import { RangeBars } from '../range-bars/range-bars';
 import { bandUnit } from '../readings';
-import { TwinTable } from '../twin-table/twin-table';
 import { type Window } from '../zoom-window';
 import { DialGlass } from './dial-glass';
 import { HeardMarks } from './heard-marks';
@@ -40,7 +39,7 @@ import { stripColumns, stripReadout, stripRows, stripSentence } from './strip-wo
   selector: 'app-band-strip',
   templateUrl: './band-strip.html',
   styleUrl: './band-strip.scss',
-  imports: [ChartHead, DialGlass, HeardMarks, Plot, PlotLabels, RangeBars, TwinTable],
+  imports: [Chart, DialGlass, HeardMarks, Plot, PlotLabels, RangeBars],
   changeDetection: ChangeDetectionStrategy.OnPush,
 })
 export class BandStrip {
@@ -61,9 +60,7 @@ export class BandStrip {
 
   private readonly width = observeWidth();
   protected readonly window = signal<Window | null>(null);
-  protected readonly isTable = signal(false);
   protected readonly strip = STRIP;
-  protected readonly columns = stripColumns();
   private readonly isNarrow = computed(() => this.width() < NARROW);
   protected readonly frame = computed(() =>
     frame(this.width(), STRIP_HEIGHT + 28, {
@@ -135,7 +132,10 @@ export class BandStrip {
     const { unit, write } = this.unit();
     return $localize`${this.band().name}:band:, ${write(low)}:low:–${write(high)}:high: ${unit}:unit:`;
   });
-  protected readonly rows = computed(() => stripRows(this.band(), this.nameOf));
+  protected readonly table = () => ({
+    columns: stripColumns(),
+    rows: stripRows(this.band(), this.nameOf),
+  });
   private readonly byId = computed(() => new Map(this.stations().map((each) => [each.id, each])));
 
   protected readonly describe = (id: string) =>

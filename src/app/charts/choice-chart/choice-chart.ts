@@ -1,25 +1,16 @@
-import {
-  ChangeDetectionStrategy,
-  Component,
-  computed,
-  input,
-  model,
-  output,
-  signal,
-} from '@angular/core';
+import { ChangeDetectionStrategy, Component, computed, input, model, output } from '@angular/core';
 import { scaleLinear } from 'd3';
 
 import { formatFrequency } from '../../ui/frequency-pipe';
 import { FrequencyAxis } from '../axis/frequency-axis';
 import { LevelAxis } from '../axis/level-axis';
-import { ChartHead } from '../chart-head/chart-head';
+import { Chart } from '../chart/chart';
 import { frame, NARROW } from '../frame';
 import { observeWidth } from '../observe-width';
 import { Plot } from '../plot/plot';
 import { PlotLabels } from '../plot/plot-labels';
 import { type Readout } from '../plot/plot-mark';
-import { distance, field, kilohertz, tenths } from '../readings';
-import { TwinTable } from '../twin-table/twin-table';
+import { distance, field, kilohertz, kilometres, tenths } from '../readings';
 import { type Window } from '../zoom-window';
 import { ChoiceGround, type DrawnStretch } from './choice-ground';
 import {
@@ -47,17 +38,7 @@ export interface Stretch {
   selector: 'app-choice-chart',
   templateUrl: './choice-chart.html',
   styleUrl: './choice-chart.scss',
-  imports: [
-    ChartHead,
-    ChoiceGround,
-    ChoiceStems,
-    FrequencyAxis,
-    IfMarker,
-    LevelAxis,
-    Plot,
-    PlotLabels,
-    TwinTable,
-  ],
+  imports: [Chart, ChoiceGround, ChoiceStems, FrequencyAxis, IfMarker, LevelAxis, Plot, PlotLabels],
   changeDetection: ChangeDetectionStrategy.OnPush,
 })
 export class ChoiceChart {
@@ -82,7 +63,6 @@ export class ChoiceChart {
   readonly settled = output();
 
   private readonly width = observeWidth();
-  protected readonly isTable = signal(false);
   protected readonly isNarrow = computed(() => this.width() < NARROW);
   protected readonly frame = computed(() =>
     frame(this.width(), FIELD_HEIGHT + 104, {
@@ -160,14 +140,14 @@ export class ChoiceChart {
       : { y: this.y()(noise), text: $localize`noise ${tenths(noise)}:level:` };
   });
 
-  protected readonly columns = [
+  private readonly columns = [
     $localize`Station`,
     $localize`Frequency, kHz`,
     $localize`Field, dB(µV/m)`,
     $localize`Through the passband, dB(µV/m)`,
     $localize`Distance, km`,
   ];
-  protected readonly rows = computed(() =>
+  private readonly rows = computed(() =>
     this.heard().map((station) => ({
       id: stationMark(station.id),
       cells: [
@@ -175,10 +155,12 @@ export class ChoiceChart {
         kilohertz(station.frequencyHz),
         tenths(station.fieldDb),
         tenths(station.fieldDb - this.rejection()(station.frequencyHz - this.trialHz())),
-        distance(station.distanceM),
+        kilometres(station.distanceM),
       ],
     })),
   );
+
+  protected readonly table = () => ({ columns: this.columns, rows: this.rows() });
 
   protected readonly describe = (id: string): Readout | undefined => {
     const station = this.heard().find((each) => stationMark(each.id) === id);

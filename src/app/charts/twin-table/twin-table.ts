@@ -6,6 +6,12 @@ export interface TwinRow {
   readonly cells: readonly string[];
 }
 
+/** The rows of a chart under their heads. */
+export interface ChartTable {
+  readonly columns: readonly string[];
+  readonly rows: readonly TwinRow[];
+}
+
 /** The same rows as a chart, to read and to pick in. The first column names the row. */
 @Component({
   selector: 'app-twin-table',
