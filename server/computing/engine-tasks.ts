@@ -30,6 +30,8 @@ import {
   type Whistles,
 } from '../../shared/radio/whistles/whistle-causes.ts';
 import { BoundedCache } from './bounded-cache.ts';
+import { placeKey } from './list-key.ts';
+import { keptFields, type SharedFields } from './shared-fields.ts';
 import { type StationColumns, unpackNames, unpackStations } from './station-columns.ts';
 
 /** The stations of a request and the site they are received at. */
@@ -37,8 +39,10 @@ export interface ListAtSite {
   readonly site: Site;
   readonly raster: readonly RasterRange[];
   readonly columns: StationColumns;
-  /** Names an edition, whose stations never change; null for a list that was sent. */
-  readonly editionId: number | null;
+  /** Names what is on the list, so that what comes of it can be kept; null for one that was sent. */
+  readonly content: string | null;
+  /** Fields by day and at night with the usual sky wave, for all threads; null for a sent list. */
+  readonly kept: Readonly<Record<Period, SharedFields>> | null;
 }
 
 type FromList = 'site' | 'stations' | 'fields' | 'raster';
@@ -99,12 +103,13 @@ interface Skipped {
   readonly reason: string;
 }
 
-const KEPT_STATIONS = 300_000;
-const KEPT_FIELDS = 600_000;
+const KEPT_STATIONS = 150_000;
+const KEPT_FIELDS = 150_000;
 
-/** This thread's own: any other can make the same again. */
+/** This thread's own and small: there may be many threads, and any can make the same again. */
 const unpacked = new BoundedCache<Station[]>(KEPT_STATIONS);
-const computed = new BoundedCache<FieldStrength[]>(KEPT_FIELDS);
+/** Fields at a moment, or of a sky wave that is not the usual one. */
+const unusual = new BoundedCache<FieldStrength[]>(KEPT_FIELDS);
 
 export function assess({ list, time, skyWave, ask }: Tasks['assess']['takes']): Assessment {
   const { site, raster } = list;
@@ -170,9 +175,9 @@ function caseOf(list: ListAtSite, periods: readonly Period[]): CandidateCase {
   };
 }
 
-function stationsOf({ editionId, columns }: ListAtSite): Station[] {
-  if (editionId === null) return unpackStations(columns);
-  return unpacked.remember(String(editionId), columns.count, () => unpackStations(columns));
+function stationsOf({ content, columns }: ListAtSite): Station[] {
+  if (content === null) return unpackStations(columns);
+  return unpacked.remember(content, columns.count, () => unpackStations(columns));
 }
 
 function fieldsOf(
@@ -180,14 +185,19 @@ function fieldsOf(
   time: ReceptionTime,
   skyWave: SkyWaveChoice = USUAL_SKY_WAVE,
 ): FieldStrength[] {
-  const { editionId, site, columns } = list;
+  const { content, kept, site, columns } = list;
   const make = () => compute(site, stationsOf(list), time, skyWave);
-  if (editionId === null) return make();
+  if (content === null || kept === null) return make();
+  if (typeof time === 'string' && isUsual(skyWave)) {
+    return keptFields(kept[time], stationsOf(list), make);
+  }
   const when = time instanceof Date ? time.toISOString() : time;
-  const { form, nights } = skyWave;
-  const key = [editionId, site.latitude, site.longitude, site.ground, when, form, nights].join();
-  return computed.remember(key, columns.count, make);
+  const key = [placeKey(content, site), when, skyWave.form, skyWave.nights].join();
+  return unusual.remember(key, columns.count, make);
 }
+
+const isUsual = ({ form, nights }: SkyWaveChoice): boolean =>
+  form === USUAL_SKY_WAVE.form && nights === USUAL_SKY_WAVE.nights;
 
 /** Day or night at the site; one without a place has fields given, the same at any time. */
 function periodOf({ latitude, longitude }: Site, time: ReceptionTime): Period {

@@ -1,3 +1,5 @@
+import { move } from 'piscina';
+
 import { designTracking as design } from '../../shared/radio/tracking/tracking.ts';
 import * as tasks from './engine-tasks.ts';
 
@@ -9,11 +11,14 @@ export interface Order {
 
 const encoder = new TextEncoder();
 
-/** Runs a computation and answers it as JSON, so that the event loop need not write it out. */
+/**
+ * Runs a computation and answers it as JSON, so that the event loop need not write it out. The bytes
+ * are moved to the other thread: copying the largest answers there would hold the loop.
+ */
 function answered(compute: (task: never) => unknown) {
-  return ({ task, begun }: Order): Uint8Array => {
+  return ({ task, begun }: Order) => {
     Atomics.store(begun, 0, 1);
-    return encoder.encode(JSON.stringify(compute(task as never)));
+    return move(encoder.encode(JSON.stringify(compute(task as never))));
   };
 }
 

@@ -2,11 +2,14 @@ import type { SiteDraft } from '../../shared/contracts/site.ts';
 import type { SentStation } from '../../shared/contracts/station.ts';
 import { stationsOnEveryChannel } from '../../shared/radio/channels/assumed-stations.ts';
 import { defaultRaster } from '../../shared/radio/channels/raster.ts';
+import type { Period } from '../../shared/radio/site.ts';
 import type { RasterRange, Station } from '../../shared/radio/station.ts';
 import type { Actor } from '../http/actor.ts';
 import { InvalidError, UnauthenticatedError } from '../http/errors.ts';
 import { BoundedCache } from './bounded-cache.ts';
 import type { ListAtSite } from './engine-tasks.ts';
+import { contentKey, placeKey } from './list-key.ts';
+import { roomForFields, type SharedFields } from './shared-fields.ts';
 import { packStations, type StationColumns } from './station-columns.ts';
 
 /** What is needed of the editions. */
@@ -24,11 +27,21 @@ export interface ListRequest {
 }
 
 const KEPT_STATIONS = 1_000_000;
+const KEPT_FIELDS = 2_000_000;
 
-/** Finds the stations of a request. An edition never changes, so it is kept in memory, in bounds. */
+/** Content of an edition as it was imported. */
+const AS_IMPORTED = 0;
+
+/**
+ * Finds the stations of a request. What was read of an edition is kept in memory within bounds, and
+ * so is room for the fields of its stations at a site, which the threads fill; another process can
+ * make both again.
+ */
 export class ListsAtSites {
   private readonly editions: EditionShelf;
   private readonly kept = new BoundedCache<StationColumns>(KEPT_STATIONS);
+  private readonly reading = new Map<string, Promise<StationColumns>>();
+  private readonly fields = new BoundedCache<Record<Period, SharedFields>>(KEPT_FIELDS);
 
   constructor(editions: EditionShelf) {
     this.editions = editions;
@@ -44,25 +57,41 @@ export class ListsAtSites {
     if (!actor) throw new UnauthenticatedError('Sign in to compute with an edition.');
     const raster = await this.editions.rasterOf(actor, editionId);
     demandPlace(site, path);
-    return { site, raster, editionId, columns: await this.edition(editionId) };
+    const content = contentKey({ editionId, version: AS_IMPORTED });
+    const columns = await this.stations(editionId, content);
+    const kept = this.fields.remember(placeKey(content, site), 2 * columns.count, () => ({
+      day: roomForFields(columns.count),
+      night: roomForFields(columns.count),
+    }));
+    return { site, raster, content, columns, kept };
   }
 
-  private async edition(id: number): Promise<StationColumns> {
-    const found = this.kept.get(String(id));
-    if (found) return found;
-    const columns = packStations(await this.editions.everyStation(id));
-    this.kept.set(String(id), columns, columns.count);
+  /** Read once, also when several ask at the same time. */
+  private stations(editionId: number, content: string): Promise<StationColumns> {
+    const found = this.kept.get(content) ?? this.reading.get(content);
+    if (found) return Promise.resolve(found);
+    const reading = this.read(editionId, content).finally(() => this.reading.delete(content));
+    this.reading.set(content, reading);
+    return reading;
+  }
+
+  private async read(editionId: number, content: string): Promise<StationColumns> {
+    const columns = await packStations(await this.editions.everyStation(editionId));
+    this.kept.set(content, columns, columns.count);
     return columns;
   }
 }
 
-function sentList({ site, stations, everyChannelDb = 0 }: ListRequest, path: string): ListAtSite {
+async function sentList(
+  { site, stations, everyChannelDb = 0 }: ListRequest,
+  path: string,
+): Promise<ListAtSite> {
   const raster = defaultRaster(site.ituRegion);
   const list =
     stations?.map((each, id) => ({ ...each, id })) ??
     stationsOnEveryChannel(raster, everyChannelDb);
   if (list.some(({ fieldDb }) => fieldDb === null)) demandPlace(site, path);
-  return { site, raster, editionId: null, columns: packStations(list) };
+  return { site, raster, content: null, kept: null, columns: await packStations(list) };
 }
 
 function demandPlace(site: SiteDraft, path: string): void {

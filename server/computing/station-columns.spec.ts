@@ -27,10 +27,10 @@ const EMPTY = {
 };
 
 describe('packStations', () => {
-  it('keeps every station exactly, the names apart', () => {
-    fc.assert(
-      fc.property(fc.array(station, { maxLength: 20 }), (stations) => {
-        const columns = packStations(stations);
+  it('keeps every station exactly, the names apart', async () => {
+    await fc.assert(
+      fc.asyncProperty(fc.array(station, { maxLength: 20 }), async (stations) => {
+        const columns = await packStations(stations);
 
         expect(unpackStations(columns)).toEqual(stations.map((each) => ({ ...each, name: '' })));
         expect(unpackNames(columns)).toEqual(stations.map(({ name }) => name));
@@ -38,15 +38,29 @@ describe('packStations', () => {
     );
   });
 
-  it('keeps path and pattern of those that have any', () => {
+  it('keeps path and pattern of those that have any', async () => {
     const plain = { ...EMPTY, id: 1 };
     const patternDb = Array.from({ length: 36 }, (_, index) => 5 - index);
     const path = [{ ground: 'sea' as const, lengthM: 5 }];
     const stations = [plain, { ...plain, id: 2, path, patternDb }, { ...plain, patternDb }];
-    const [first, second, third] = unpackStations(packStations(stations));
+    const [first, second, third] = unpackStations(await packStations(stations));
 
     expect(first).toEqual(plain);
     expect(second).toMatchObject({ path, patternDb });
     expect(third).toMatchObject({ path: null, patternDb });
+  });
+
+  it('keeps a list that is packed in several slices', async () => {
+    const path = [{ ground: 'sea' as const, lengthM: 5 }];
+    const stations = Array.from({ length: 10_001 }, (_, id) => ({
+      ...EMPTY,
+      id,
+      name: `Radio "${id}"`,
+      ...(id % 5000 === 0 ? { path, patternDb: null } : {}),
+    }));
+    const columns = await packStations(stations);
+
+    expect(unpackStations(columns)).toEqual(stations.map((each) => ({ ...each, name: '' })));
+    expect(unpackNames(columns)).toEqual(stations.map(({ name }) => name));
   });
 });

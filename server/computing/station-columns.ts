@@ -1,3 +1,5 @@
+import { setImmediate } from 'node:timers/promises';
+
 import type { Station } from '../../shared/radio/station.ts';
 
 /**
@@ -14,6 +16,8 @@ export interface StationColumns {
   readonly details: Uint8Array;
 }
 
+const encoder = new TextEncoder();
+
 type Details = Pick<Station, 'path' | 'patternDb'>;
 
 const NAMES = [
@@ -26,21 +30,50 @@ const NAMES = [
   'fieldDb',
 ] as const;
 
-export function packStations(stations: readonly Station[]): StationColumns {
+/** Packed in one go: more would hold up other requests. */
+const SLICE = 5000;
+
+/** Packs a list slice by slice, with the event loop free between them. */
+export async function packStations(stations: readonly Station[]): Promise<StationColumns> {
   const count = stations.length;
   const numbers = new Float64Array(new SharedArrayBuffer(NAMES.length * count * 8));
-  NAMES.forEach((column, at) => {
-    stations.forEach((station, index) => {
-      numbers[at * count + index] = station[column] ?? NaN;
-    });
-  });
-  const names = packJson(stations.map(({ name }) => name));
-  return { count, numbers, names, details: packJson(Object.fromEntries(detailed(stations))) };
+  const names: Uint8Array[] = [];
+  const details: (readonly [number, Details])[] = [];
+  for (let from = 0; from < count; from += SLICE) {
+    if (from > 0) await setImmediate();
+    const slice = stations.slice(from, from + SLICE);
+    NAMES.forEach((column, at) => fillColumn(numbers, at * count + from, slice, column));
+    names.push(encodeNames(slice, from > 0));
+    details.push(...detailed(slice, from));
+  }
+  return {
+    count,
+    numbers,
+    names: joined([encoder.encode('['), ...names, encoder.encode(']')]),
+    details: joined([encoder.encode(JSON.stringify(Object.fromEntries(details)))]),
+  };
 }
 
-const detailed = (stations: readonly Station[]): [number, Details][] =>
+function fillColumn(
+  numbers: Float64Array,
+  from: number,
+  stations: readonly Station[],
+  column: (typeof NAMES)[number],
+): void {
+  stations.forEach((station, index) => {
+    numbers[from + index] = station[column] ?? NaN;
+  });
+}
+
+/** Names as the inside of a JSON array. */
+function encodeNames(stations: readonly Station[], hasOthersBefore: boolean): Uint8Array {
+  const inside = JSON.stringify(stations.map(({ name }) => name)).slice(1, -1);
+  return encoder.encode(hasOthersBefore ? `,${inside}` : inside);
+}
+
+const detailed = (stations: readonly Station[], from: number): [number, Details][] =>
   stations.flatMap(({ path = null, patternDb = null }, index): [number, Details][] =>
-    (path ?? patternDb) ? [[index, { path, patternDb }]] : [],
+    (path ?? patternDb) ? [[from + index, { path, patternDb }]] : [],
   );
 
 /** The stations, with their names left out. */
@@ -68,10 +101,14 @@ export function unpackStations({ count, numbers, details }: StationColumns): Sta
 /** The names alone, in the stations' order. */
 export const unpackNames = ({ names }: StationColumns): string[] => unpackJson(names) as string[];
 
-function packJson(value: unknown): Uint8Array {
-  const text = new TextEncoder().encode(JSON.stringify(value));
-  const shared = new Uint8Array(new SharedArrayBuffer(text.length));
-  shared.set(text);
+function joined(parts: readonly Uint8Array[]): Uint8Array {
+  const length = parts.reduce((sum, part) => sum + part.length, 0);
+  const shared = new Uint8Array(new SharedArrayBuffer(length));
+  let at = 0;
+  for (const part of parts) {
+    shared.set(part, at);
+    at += part.length;
+  }
   return shared;
 }
 

@@ -1,11 +1,28 @@
-/** How benchmarks measure: the best of several turns, and the growth of the heap. */
+/** How benchmarks measure, and how they hold a figure against its aim. */
 
-/** A thing measured, beside the least it could cost. */
-export interface Measured {
-  readonly name: string;
-  readonly ms: number;
-  readonly bareMs: number;
+/** One line to print, and whether its aim is missed by more than a noisy machine explains. */
+export interface Verdict {
+  readonly text: string;
+  readonly farOff: boolean;
 }
+
+/** A machine that others use too may be this much off. */
+const FAR = 1.5;
+
+/** A figure that is to be at most its aim. */
+export const held = (text: string, figure: number, aim: number, unit = ''): Verdict => ({
+  text: `${text}; aim: at most ${aim} ${unit}`.trimEnd() + (figure <= aim ? '' : ' - MISSED'),
+  farOff: !(figure <= FAR * aim),
+});
+
+/** A figure that is to be at least its aim. */
+export const reached = (text: string, figure: number, aim: number): Verdict => ({
+  text: `${text}; aim: at least ${aim}${figure >= aim ? '' : ' - MISSED'}`,
+  farOff: !(figure >= aim / FAR),
+});
+
+/** A figure without an aim. */
+export const told = (text: string): Verdict => ({ text, farOff: false });
 
 /**
  * Shortest processor time of several turns, after one to warm up, milliseconds. Processor time, so

@@ -31,26 +31,26 @@ export interface FieldStrength {
   readonly notes: string[];
 }
 
-/** Every note a field can carry, by a name that stays the same when the wording changes. */
+/** Every note a field can carry, in the order they are told, by a name that outlives its wording. */
 export const FIELD_NOTES = {
   given: 'The field is as given; no propagation was computed.',
   silent: 'The station is silent in this period.',
-  noPower: 'The station has no power for this period.',
   noStationPlace: 'The station has no place.',
+  noPower: 'The station has no power for this period.',
   noSitePlace: 'The site has no place.',
   noGround: 'The site has no class of ground.',
   near: 'The station is nearer than 1 km; its field is taken as at 1 km.',
-  noSkyWave:
-    'There is no sky-wave model here below 150 and above 1710 kHz: this is the ground wave alone.',
-  skyWaveExtrapolated: 'The sky wave below 535 kHz is extrapolated from the medium-wave formula.',
-  skyWaveLatitude: 'The path runs beyond 60 degrees of geomagnetic latitude; it is taken as 60.',
   mixedPath: 'The ground wave runs over several kinds of ground, by Millington.',
   scaledPath: 'The sections of the path do not add up to the distance; they were scaled to it.',
   pattern: 'The directional pattern of the aerial is counted in.',
-  skyWaveP1147: 'The sky wave is computed by the form of ITU-R P.1147.',
-  skyWaveTenth: 'The sky wave is that which is exceeded in 10 % of the nights.',
+  noSkyWave:
+    'There is no sky-wave model here below 150 and above 1710 kHz: this is the ground wave alone.',
   criticalHours:
     'The sun is up at the middle of the path for less than two hours: what is left of the sky wave is estimated.',
+  skyWaveExtrapolated: 'The sky wave below 535 kHz is extrapolated from the medium-wave formula.',
+  skyWaveLatitude: 'The path runs beyond 60 degrees of geomagnetic latitude; it is taken as 60.',
+  skyWaveP1147: 'The sky wave is computed by the form of ITU-R P.1147.',
+  skyWaveTenth: 'The sky wave is that which is exceeded in 10 % of the nights.',
 } as const;
 
 /**
