@@ -68,7 +68,7 @@ export class Editions {
     const stations: Station[] = [];
     let after = 0;
     for (;;) {
-      // Some thousands at a time: reading a long list must not hold up other requests.
+      // A thousand at a time: reading a long list must not hold up other requests.
       const rows = await StationModel.findAll({
         attributes: [...COMPUTED_WITH],
         where: { editionId: id, id: { [Op.gt]: after } },
@@ -99,7 +99,7 @@ export class Editions {
   }
 }
 
-const READ_AT_ONCE = 5000;
+const READ_AT_ONCE = 1000;
 const COMPUTED_WITH = [
   'id',
   'name',
