@@ -4,7 +4,10 @@ import { type InferAttributes, QueryTypes, type Sequelize, type Transaction } fr
 import { EditionModel } from './edition-model.ts';
 import { StationModel } from './station-model.ts';
 
-export type NewStation = Omit<InferAttributes<StationModel>, 'id' | 'editionId'>;
+export type NewStation = Omit<InferAttributes<StationModel>, 'id' | 'editionId' | 'patternDb'> & {
+  /** Gains of the aerial, dB, every 10 degrees from north; null where the list tells none. */
+  readonly patternDb: readonly number[] | null;
+};
 
 export interface NewEdition {
   readonly regionId: number;
@@ -18,6 +21,8 @@ export interface StationMark {
   readonly id: number;
   readonly identity: string;
   readonly fingerprint: string;
+  readonly latitude: number | null;
+  readonly longitude: number | null;
 }
 
 const COLUMNS = [
@@ -36,8 +41,12 @@ const COLUMNS = [
 
 const INSERT = `
   INSERT INTO stations (edition_id, name, call_sign, frequency_hz, latitude, longitude,
-    power_day_w, power_night_w, hours, note, identity, fingerprint)
-  VALUES (?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?)`;
+    power_day_w, power_night_w, hours, note, identity, fingerprint, pattern_db)
+  VALUES (?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?)`;
+
+/** Everything that a station is in another edition as well. */
+const KEPT = `name, call_sign, frequency_hz, latitude, longitude, power_day_w, power_night_w,
+  pattern_db, hours, note, identity, fingerprint`;
 
 const MARKS_AT_ONCE = 20_000;
 
@@ -67,7 +76,7 @@ export class EditionWriter {
     let after = 0;
     for (;;) {
       const marks = await this.database.query<StationMark>(
-        `SELECT id, identity, fingerprint FROM stations
+        `SELECT id, identity, fingerprint, latitude, longitude FROM stations
          WHERE edition_id = ? AND id > ? ORDER BY id LIMIT ${MARKS_AT_ONCE}`,
         { replacements: [editionId, after], type: QueryTypes.SELECT },
       );
@@ -90,8 +99,33 @@ export class EditionWriter {
   ): Promise<void> {
     if (stations.length === 0) return;
     const { connection } = transaction as unknown as { connection: Connection };
-    const rows = stations.map((station) => [editionId, ...COLUMNS.map((name) => station[name])]);
+    const rows = stations.map((station) => [
+      editionId,
+      ...COLUMNS.map((name) => station[name]),
+      station.patternDb?.join(',') ?? null,
+    ]);
     await connection.batch(INSERT, rows);
+  }
+
+  /** An edition of a region by its name; null when the region has no such edition. */
+  async named(id: number, regionId: number): Promise<EditionModel | null> {
+    return EditionModel.findOne({ where: { id, regionId } });
+  }
+
+  /** Takes over what stays of another edition; answers how many stations that are. */
+  async keep(
+    editionId: number,
+    from: number,
+    replaced: readonly number[],
+    transaction: Transaction,
+  ): Promise<number> {
+    await this.database.query(
+      `INSERT INTO stations (edition_id, ${KEPT})
+       SELECT ?, ${KEPT} FROM stations WHERE edition_id = ? ${replaced.length > 0 ? 'AND id NOT IN (?)' : ''}
+       ORDER BY id`,
+      { replacements: [editionId, from, [...replaced]], type: QueryTypes.INSERT, transaction },
+    );
+    return StationModel.count({ where: { editionId }, transaction });
   }
 
   async finish(editionId: number, stations: number, transaction: Transaction): Promise<void> {

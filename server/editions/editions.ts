@@ -108,6 +108,7 @@ const COMPUTED_WITH = [
   'longitude',
   'powerDayW',
   'powerNightW',
+  'patternDb',
 ] as const;
 
 const toComputedWith = (row: StationModel): Station => ({
@@ -119,6 +120,7 @@ const toComputedWith = (row: StationModel): Station => ({
   powerDayW: row.powerDayW,
   powerNightW: row.powerNightW,
   fieldDb: null,
+  patternDb: row.patternDb?.split(',').map(Number) ?? null,
 });
 
 async function page(

@@ -21,6 +21,8 @@ export class StationModel extends Model<
   declare longitude: number | null;
   declare powerDayW: number | null;
   declare powerNightW: number | null;
+  /** 36 gains joined by commas. */
+  declare patternDb: CreationOptional<string | null>;
   declare hours: string;
   declare note: string;
   /** Equal for the same station in another edition. */
@@ -40,6 +42,7 @@ export class StationModel extends Model<
         longitude: { type: DataTypes.DOUBLE, allowNull: true },
         powerDayW: { type: DataTypes.DOUBLE, allowNull: true },
         powerNightW: { type: DataTypes.DOUBLE, allowNull: true },
+        patternDb: { type: DataTypes.STRING(300), allowNull: true },
         hours: { type: DataTypes.STRING(200), allowNull: false },
         note: { type: DataTypes.STRING(1000), allowNull: false },
         identity: { type: DataTypes.CHAR(22), allowNull: false },

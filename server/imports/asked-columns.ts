@@ -5,6 +5,7 @@ import {
 } from '../../shared/contracts/list-import.ts';
 import { InvalidError } from '../http/errors.ts';
 import { openUnits } from './column-matching.ts';
+import { readPatternHeader } from './pattern-headers.ts';
 
 type Asked = NonNullable<ImportMatching['columns']>;
 type Issue = InvalidError['issues'][number];
@@ -19,10 +20,40 @@ export function askedColumns(
   proposed: readonly ImportColumn[],
   asked: Asked | undefined,
 ): ImportColumn[] {
-  const columns = asked ? placed(proposed, asked) : [...proposed];
-  const issues = [...doubled(columns), ...wrongUnits(columns), ...missing(columns)];
+  const columns = sharedPattern(asked ? placed(proposed, asked) : [...proposed]);
+  const issues = [
+    ...doubled(columns),
+    ...wrongBearings(columns),
+    ...wrongUnits(columns),
+    ...missing(columns),
+  ];
   if (issues.length > 0) throw new InvalidError(...issues);
   return columns;
+}
+
+/** A pattern is given in one unit: said of one of its columns, it holds for all. */
+function sharedPattern(columns: readonly ImportColumn[]): ImportColumn[] {
+  const said =
+    columns.find(({ field, unit }) => field === 'pattern' && unit !== null)?.unit ?? null;
+  return columns.map((column) =>
+    column.field === 'pattern' && column.unit === null ? { ...column, unit: said } : column,
+  );
+}
+
+function wrongBearings(columns: readonly ImportColumn[]): Issue[] {
+  const met = new Map<number, string>();
+  return columns.flatMap(({ header, field }, index) => {
+    if (field !== 'pattern') return [];
+    const bearing = readPatternHeader(header)?.bearing;
+    const other = bearing === undefined ? undefined : met.get(bearing);
+    if (bearing !== undefined) met.set(bearing, header);
+    if (bearing !== undefined && other === undefined) return [];
+    const message =
+      other === undefined
+        ? `"${header}" names no bearing: a column of a pattern is called such as "pattern_010".`
+        : `"${header}" and "${other}" name the same bearing.`;
+    return { path: `columns.${index}.field`, message };
+  });
 }
 
 function placed(proposed: readonly ImportColumn[], asked: Asked): ImportColumn[] {
@@ -58,7 +89,7 @@ function plainUnit(field: ImportColumn['field'], proposed: ImportColumn | undefi
 function doubled(columns: readonly ImportColumn[]): Issue[] {
   return columns.flatMap(({ field, header }, index) => {
     const first = columns.findIndex((each) => each.field === field);
-    if (field === null || first === index) return [];
+    if (field === null || field === 'pattern' || first === index) return [];
     return {
       path: `columns.${index}.field`,
       message: `"${header}" and "${columns[first]?.header ?? ''}" cannot both hold the ${field}.`,

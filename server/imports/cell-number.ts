@@ -1,8 +1,8 @@
 export type DecimalMark = '.' | ',';
 
 const PATTERNS: Readonly<Record<DecimalMark, RegExp>> = {
-  '.': /^[-+]?(?:\d+|\d{1,3}(?:[ ,'\u00a0\u2009\u202f]\d{3})+)?(?:\.\d*)?(?:e[-+]?\d{1,2})?$/i,
-  ',': /^[-+]?(?:\d+|\d{1,3}(?:[ .'\u00a0\u2009\u202f]\d{3})+)?(?:,\d*)?(?:e[-+]?\d{1,2})?$/i,
+  '.': /^[-+]?(?:\d+|\d{1,3}(?:[ ,'\u2019\u00a0\u2009\u202f]\d{3})+)?(?:\.\d*)?(?:e[-+]?\d{1,2})?$/i,
+  ',': /^[-+]?(?:\d+|\d{1,3}(?:[ .'\u2019\u00a0\u2009\u202f]\d{3})+)?(?:,\d*)?(?:e[-+]?\d{1,2})?$/i,
 };
 
 /** What nearly every cell looks like, read at once. */
@@ -20,6 +20,6 @@ export function readNumber(cell: string, mark: DecimalMark): number | null {
   const text = cell.trim().replace('\u2212', '-');
   if (!/\d/.test(text) || !PATTERNS[mark].test(text)) return null;
   const plain = mark === ',' ? text.replace(/\./g, '').replace(',', '.') : text;
-  const value = Number(plain.replace(/[ ,'\u00a0\u2009\u202f]/g, ''));
+  const value = Number(plain.replace(/[ ,'\u2019\u00a0\u2009\u202f]/g, ''));
   return Number.isFinite(value) ? value : null;
 }

@@ -16,10 +16,11 @@ export function readQuantity(
   mark: DecimalMark,
   allowed: readonly ImportUnit[],
 ): number | null {
-  const [, digits = cell, suffix = ''] = /^(.*?\d[.,]?)\s*([a-z]+)$/i.exec(cell.trim()) ?? [];
-  const value = readNumber(digits, mark);
+  const plain = readNumber(cell, mark);
+  const suffixed = plain === null ? /^(.*?\d[.,]?)\s*([a-z]+)$/i.exec(cell.trim()) : null;
+  const value = plain ?? readNumber(suffixed?.[1] ?? '', mark);
   if (value === null) return null;
-  const name = (suffix || unit).toLowerCase();
+  const name = (suffixed?.[2] ?? unit).toLowerCase();
   if (name === 'dbw') return allowed.includes('dBW') ? 10 ** (value / 10) : null;
   const [known, scale] = SCALES[name] ?? [];
   return known !== undefined && allowed.includes(known) ? value * (scale ?? 1) : null;

@@ -47,6 +47,6 @@ describe('isComplete', () => {
     ['name;frequency_khz;latitude;longitude', true],
     ['name;frequency_khz;power', false],
   ])('of %s is %s', (header, complete) => {
-    expect(isComplete(propose(header, 'a;1;1;1'))).toBe(complete);
+    expect(isComplete({ columns: propose(header, 'a;1;1;1'), letterO: null })).toBe(complete);
   });
 });

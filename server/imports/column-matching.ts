@@ -4,9 +4,12 @@ import {
   type ImportUnit,
   importUnitsOf,
 } from '../../shared/contracts/list-import.ts';
-import { type Axis, readCoordinate } from './cell-coordinate.ts';
+import { readCoordinate } from './cell-coordinate.ts';
+import type { Axis } from './cell-hemisphere.ts';
 import { type DecimalMark, isBlank } from './cell-number.ts';
 import { readHeader } from './header-words.ts';
+import type { ListReading } from './list-reading.ts';
+import { patternColumns } from './pattern-headers.ts';
 
 /**
  * Proposes what each column holds, by its header. Of two columns for one field the first is taken.
@@ -18,7 +21,10 @@ export function proposeColumns(
   mark: DecimalMark,
 ): ImportColumn[] {
   const taken = new Set<ImportField>();
+  const pattern = patternColumns(headers);
   return headers.map((header, index) => {
+    const bearing = pattern.get(index);
+    if (bearing) return { header, field: 'pattern', unit: patternUnit(bearing.unit) };
     const { field, unit } = readHeader(header);
     if (field === null || taken.has(field)) return { header, field: null, unit: null };
     taken.add(field);
@@ -26,6 +32,9 @@ export function proposeColumns(
     return { header, field, unit: unitOf(field, unit, cells, mark) };
   });
 }
+
+const patternUnit = (named: ImportUnit | null): ImportUnit | null =>
+  named !== null && importUnitsOf.pattern.includes(named) ? named : null;
 
 function unitOf(
   field: ImportField,
@@ -41,7 +50,7 @@ function unitOf(
 /** Packed digits (DDMMSS) are no decimal degrees: where most cells are, the unit is dms. */
 function angleUnit(axis: Axis, cells: readonly string[], mark: DecimalMark): ImportUnit {
   const reads = (unit: ImportUnit) =>
-    cells.filter((cell) => readCoordinate(cell, axis, unit, mark) !== null).length;
+    cells.filter((cell) => readCoordinate(cell, axis, { unit, mark }) !== null).length;
   return reads('dms') > reads('degrees') ? 'dms' : 'degrees';
 }
 
@@ -50,21 +59,31 @@ function cellUnit(field: ImportField, cells: readonly string[]): ImportUnit | nu
   const carried = new Set(
     cells.map((cell) => /\d\s*([a-z]+)\s*$/i.exec(cell)?.[1]?.toLowerCase() ?? ''),
   );
-  const [only] = carried;
-  if (carried.size !== 1) return null;
-  return importUnitsOf[field].find((unit) => unit.toLowerCase() === only) ?? null;
+  // Cells that each say their unit need none; it only has to be there for those to come.
+  if (carried.has('')) return null;
+  const units = [...carried].map((word) =>
+    importUnitsOf[field].find((unit) => unit.toLowerCase() === word),
+  );
+  return units.every((unit) => unit !== undefined) ? (units[0] ?? null) : null;
 }
 
-/** Whether the columns can be read without asking: a frequency, a name, and every unit known. */
-export function isComplete(columns: readonly ImportColumn[]): boolean {
+/** Whether a list can be read without asking: a frequency, a name, every unit and letter known. */
+export function isComplete({
+  columns,
+  letterO,
+}: Pick<ListReading, 'columns' | 'letterO'>): boolean {
   const fields = new Set(columns.map(({ field }) => field));
   const isNamed = fields.has('name') || fields.has('callSign');
   const isPlaced = fields.has('latitude') === fields.has('longitude');
-  return fields.has('frequency') && isNamed && isPlaced && openUnits(columns).length === 0;
+  const isClear = openUnits(columns).length === 0 && letterO !== 'open';
+  return fields.has('frequency') && isNamed && isPlaced && isClear;
 }
 
-/** Indexes of the columns whose unit is needed and not known. */
+/** Indexes of the columns whose unit is needed and not known; of a pattern's only the first. */
 export const openUnits = (columns: readonly ImportColumn[]): number[] =>
-  columns.flatMap(({ field, unit }, index) =>
-    field !== null && unit === null && importUnitsOf[field].length > 0 ? [index] : [],
-  );
+  columns.flatMap(({ field, unit }, index) => {
+    const isOpen = field !== null && unit === null && importUnitsOf[field].length > 0;
+    const isAsked =
+      field === 'pattern' && columns.findIndex((each) => each.field === field) < index;
+    return isOpen && !isAsked ? [index] : [];
+  });

@@ -11,6 +11,7 @@ describe('detectDelimiter', () => {
     ['Station;kHz\nx, y;1\nz, w;2', ';'],
     ['"a;b";c,d\n"e;f",1', ','],
     ['kHz\n612', ','],
+    ['List of 2026, all bands\nas of May\nName;kHz;W\na;1;2\nb;3;4', ';'],
     ['', ','],
   ])('of %j is %j', (sample, delimiter) => {
     expect(detectDelimiter(sample)).toBe(delimiter);
@@ -27,7 +28,21 @@ describe('detectDecimalMark', () => {
     [['612,5', '48.12', '11.34'], ';', '.'],
     [['0,25 kW'], ';', ','],
     [['Mill', '612'], ';', '.'],
+    [['1.234,5'], ';', ','],
+    [['1,234.5'], ';', '.'],
+    [['1 234,5'], ';', ','],
+    [["1'234.5"], ';', '.'],
+    [['1.234.567'], ';', ','],
   ] as const)('of %j separated by %j is %j', (cells, delimiter, mark) => {
-    expect(detectDecimalMark([cells], delimiter)).toBe(mark);
+    expect(detectDecimalMark([cells], delimiter).mark).toBe(mark);
+  });
+
+  it.each([
+    [['48.1234'], true],
+    [['612', 'Mill'], true],
+    [['1.359', '1.404'], false],
+    [['0.359'], true],
+  ])('knows of %j whether it is sure: %s', (cells, sure) => {
+    expect(detectDecimalMark([cells], ';').sure).toBe(sure);
   });
 });

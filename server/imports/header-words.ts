@@ -5,9 +5,10 @@ import {
   type ImportUnit,
   importUnit,
 } from '../../shared/contracts/list-import.ts';
+import { meaningsByWord, plainWords } from './plain-words.ts';
 
-const fieldsByWord = index(words.fields, (name) => importField.parse(name));
-const unitsByWord = index(words.units, (name) => importUnit.parse(name));
+const fieldsByWord = meaningsByWord(words.fields, (name) => importField.parse(name));
+const unitsByWord = meaningsByWord(words.units, (name) => importUnit.parse(name));
 
 /** A header taken apart: what the column holds and in which unit, as far as the words tell. */
 export interface ReadHeader {
@@ -20,15 +21,22 @@ export interface ReadHeader {
  * last words: "Power day (kW)", "power_day_kw", "Frequency [MHz]".
  */
 export function readHeader(header: string): ReadHeader {
-  const bracketed = /^(.*?)[([{]([^)\]}]*)[)\]}]\s*$/s.exec(header);
-  const unit = bracketed ? unitsByWord.get(plainWords(bracketed[2] ?? '')) : undefined;
-  if (bracketed && unit !== undefined) {
-    return { field: fieldsByWord.get(plainWords(bracketed[1] ?? '')) ?? null, unit };
-  }
+  const { body, unit } = splitUnit(header);
+  if (unit !== null) return { field: fieldsByWord.get(plainWords(body)) ?? null, unit };
   const text = plainWords(header);
   const whole = fieldsByWord.get(text);
   return whole === undefined ? readSuffixed(text.split(' ')) : { field: whole, unit: null };
 }
+
+/** A unit in brackets at the end of a header, and what stands before it. */
+export function splitUnit(header: string): { body: string; unit: ImportUnit | null } {
+  const [, body = header, inner = ''] = /^([^([{]*)[([{]([^)\]}]*)[)\]}]\s*$/.exec(header) ?? [];
+  return { body, unit: unitOfWords(inner) };
+}
+
+/** The unit that words name; null when they name none. */
+export const unitOfWords = (text: string): ImportUnit | null =>
+  unitsByWord.get(plainWords(text)) ?? null;
 
 function readSuffixed(all: readonly string[]): ReadHeader {
   for (let from = 1; from < all.length; from++) {
@@ -44,25 +52,4 @@ function readSuffixed(all: readonly string[]): ReadHeader {
 function quantityOf(unit: ImportUnit): ImportField | null {
   if (unit === 'Hz' || unit === 'kHz' || unit === 'MHz') return 'frequency';
   return unit === 'W' || unit === 'kW' || unit === 'dBW' ? 'power' : null;
-}
-
-/** Lower-case words without accents, punctuation or joined capitals. */
-function plainWords(text: string): string {
-  return text
-    .normalize('NFD')
-    .replace(/\p{M}/gu, '')
-    .replace(/\u0142/g, 'l')
-    .replace(/\u00df/g, 'ss')
-    .replace(/(\p{Ll})(\p{Lu})(?=\p{Ll}{2})/gu, '$1 $2')
-    .toLowerCase()
-    .replace(/(\p{L}{3,}?)(khz|mhz|hz|kw|dbw)$/u, '$1 $2')
-    .replace(/[^\p{L}\p{N}]+/gu, ' ')
-    .trim();
-}
-
-function index<T>(lists: Readonly<Record<string, readonly string[]>>, named: (key: string) => T) {
-  const entries = Object.entries(lists).flatMap(([key, list]) =>
-    list.map((word): [string, T] => [plainWords(word), named(key)]),
-  );
-  return new Map(entries);
 }

@@ -8,9 +8,15 @@ export const toProposal = ({ id, fileName, reading, sample }: ImportModel): Impo
   encoding: reading.encoding,
   delimiter: reading.delimiter,
   decimalMark: reading.decimalMark,
+  decimalMarkSure: reading.decimalMarkSure ?? true,
+  headerLine: reading.headerLine,
+  letterO: reading.letterO,
+  remembered: reading.remembered ?? false,
   columns: [...reading.columns],
   sample,
-  complete: isComplete(reading.columns),
+  complete: isComplete(reading),
+  completes: reading.completes ?? null,
+  addsTo: reading.addsTo,
 });
 
 export const toState = (row: ImportModel): ImportState => ({
@@ -21,6 +27,8 @@ export const toState = (row: ImportModel): ImportState => ({
   editionId: row.editionId ?? null,
   reason: row.reason ?? null,
   faults: row.state === 'ready' ? (row.faults ?? []) : [],
+  causes: row.state === 'ready' ? (row.findings?.causes ?? []) : [],
+  remarks: row.findings?.remarks ?? [],
   proposal: toProposal(row),
   label: row.label ?? null,
   date: row.date ?? null,

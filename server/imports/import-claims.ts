@@ -2,15 +2,19 @@ import { literal, Op, type Transaction, UniqueConstraintError, type WhereOptions
 
 import type { ImportCheck } from '../../shared/contracts/list-import.ts';
 import { ImportModel } from './import-model.ts';
-import type { ListReading } from './list-inspection.ts';
+import type { Proposed } from './list-proposal.ts';
+import type { ListReading } from './list-reading.ts';
 
 /** What a check found, with what it was made by. */
 export interface CheckResult {
   readonly reading: ListReading;
+  readonly sample: string[][];
+  readonly headerKey: string;
   readonly label: string;
   readonly date: string;
   readonly counts: ImportCheck['rows'];
   readonly faults: ImportCheck['faults'];
+  readonly findings: Pick<ImportCheck, 'causes' | 'remarks'>;
   readonly baseEditionId: number | null;
 }
 
@@ -22,6 +26,13 @@ const FREE = { worker: null, leaseUntil: null, committingRegionId: null };
  * Every change of state is one conditional UPDATE: of two processes or two librarians only one gets
  * the row. A worker holds a lease by the database's clock; one that dies loses it.
  */
+
+/** Keeps how the file is to be taken apart; what was found by an earlier way is no longer true. */
+export const layOut = (id: number, proposed: Proposed): Promise<boolean> =>
+  change(
+    { ...FREE, ...proposed, state: 'uploaded', counts: null, faults: null, findings: null },
+    { id, state: ['uploaded', 'ready', 'failed'] },
+  );
 
 /** Marks the import as being checked; false when its state does not allow it. */
 export const claimCheck = (id: number, worker: string): Promise<boolean> =>

@@ -8,7 +8,10 @@ import {
 } from 'sequelize';
 
 import type { ImportCheck, ImportFault, ImportState } from '../../shared/contracts/list-import.ts';
-import type { ListReading } from './list-inspection.ts';
+import type { ListReading } from './list-reading.ts';
+
+/** What a check found beside counts and faults. */
+type Findings = Pick<ImportCheck, 'causes' | 'remarks'>;
 
 export class ImportModel extends Model<
   InferAttributes<ImportModel>,
@@ -20,12 +23,15 @@ export class ImportModel extends Model<
   /** As the user calls the file, and as we do. */
   declare fileName: string;
   declare storedName: string;
+  /** Equal for files with the same column headers. */
+  declare headerKey: CreationOptional<string | null>;
   declare reading: ListReading;
   declare sample: string[][];
   declare label: CreationOptional<string | null>;
   declare date: CreationOptional<string | null>;
   declare counts: CreationOptional<ImportCheck['rows'] | null>;
   declare faults: CreationOptional<ImportFault[] | null>;
+  declare findings: CreationOptional<Findings | null>;
   /** The edition the counts were made against. */
   declare baseEditionId: CreationOptional<number | null>;
   declare editionId: CreationOptional<number | null>;
@@ -46,12 +52,14 @@ export class ImportModel extends Model<
         state: { type: DataTypes.STRING, allowNull: false },
         fileName: { type: DataTypes.STRING(255), allowNull: false },
         storedName: { type: DataTypes.CHAR(36), allowNull: false },
+        headerKey: { type: DataTypes.CHAR(22), allowNull: true },
         reading: { type: DataTypes.JSON, allowNull: false },
         sample: { type: DataTypes.JSON, allowNull: false },
         label: { type: DataTypes.STRING(120), allowNull: true },
         date: { type: DataTypes.DATEONLY, allowNull: true },
         counts: { type: DataTypes.JSON, allowNull: true },
         faults: { type: DataTypes.JSON, allowNull: true },
+        findings: { type: DataTypes.JSON, allowNull: true },
         baseEditionId: { type: DataTypes.INTEGER.UNSIGNED, allowNull: true },
         editionId: { type: DataTypes.INTEGER.UNSIGNED, allowNull: true },
         committingRegionId: { type: DataTypes.INTEGER.UNSIGNED, allowNull: true, unique: true },

@@ -5,6 +5,7 @@ import type { Response } from 'express';
 
 import {
   importCheck,
+  importLayout,
   importMatching,
   importProposal,
   importState,
@@ -12,7 +13,7 @@ import {
 import { pageOf, pageQuery } from '../../shared/contracts/paging.ts';
 import { route, type Route } from '../http/route.ts';
 import type { Imports } from './imports.ts';
-import { csvWriter } from './list-rejects.ts';
+import { csvWriter, rejectsName } from './list-rejects.ts';
 import type { Uploads } from './uploads.ts';
 
 const list = '/api/regions/:id/imports';
@@ -63,6 +64,16 @@ export const importRoutes = (imports: Imports, uploads: Uploads): Route[] => [
     handle: ({ actor, id, body }) => imports.check(actor, id(), id('importId'), body),
   }),
   route({
+    method: 'put',
+    path: `${one}/reading`,
+    summary: 'Choose encoding, delimiter or decimal mark; answers how the list is read then',
+    access: 'librarian',
+    body: importLayout,
+    answer: importProposal,
+    faults: [404, 409],
+    handle: ({ actor, id, body }) => imports.layOut(actor, id(), id('importId'), body),
+  }),
+  route({
     method: 'post',
     path: `${one}/commit`,
     summary: 'Store the good rows as a new edition, all or none; goes on in the background',
@@ -81,7 +92,7 @@ export const importRoutes = (imports: Imports, uploads: Uploads): Route[] => [
     faults: [404, 409],
     handle: async ({ actor, id, response }) => {
       const { rows, delimiter } = await imports.rejects(actor, id(), id('importId'));
-      await sendCsv(response, `rejects-${id('importId')}.csv`, rows, delimiter);
+      await sendCsv(response, rejectsName(id('importId')), rows, delimiter);
     },
   }),
   route({

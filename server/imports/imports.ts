@@ -1,10 +1,10 @@
 import { randomUUID } from 'node:crypto';
-import { parse } from 'node:path';
 
 import { Op, QueryTypes, type Sequelize } from 'sequelize';
 
 import type {
   ImportCheck,
+  ImportLayout,
   ImportMatching,
   ImportProposal,
   ImportState,
@@ -14,14 +14,23 @@ import type { Region } from '../../shared/contracts/region.ts';
 import { inTransaction } from '../db/transaction.ts';
 import type { Actor } from '../http/actor.ts';
 import { ConflictError, NotFoundError } from '../http/errors.ts';
-import { askedColumns } from './asked-columns.ts';
-import { cancel, claimCheck, dropCheck, failExpired, finishCheck, undo } from './import-claims.ts';
+import { checkOrder, proposeAnew } from './check-order.ts';
+import {
+  cancel,
+  claimCheck,
+  dropCheck,
+  failExpired,
+  finishCheck,
+  layOut,
+  undo,
+} from './import-claims.ts';
 import { ImportModel } from './import-model.ts';
 import { toProposal, toState } from './import-answers.ts';
 import { checkList } from './list-check.ts';
-import { inspectList, type ListReading } from './list-inspection.ts';
+import { proposeList } from './list-proposal.ts';
+import type { ListReading } from './list-reading.ts';
 import { rejectedRows } from './list-rejects.ts';
-import { type KnownRow, RowTally } from './row-tally.ts';
+import { type EditionMarks, tallyBeside } from './list-tally.ts';
 import { busy } from './import-busy.ts';
 import type { Commits } from './commits.ts';
 import type { ReceivedFile, Uploads } from './uploads.ts';
@@ -32,9 +41,9 @@ interface RegionRegister {
 }
 
 /** What the imports need of the editions. */
-interface EditionStore {
+interface EditionStore extends EditionMarks {
   latest(regionId: number): Promise<number | null>;
-  marks(editionId: number): AsyncIterable<readonly KnownRow[]>;
+  named(id: number, regionId: number): Promise<{ id: number; label: string; date: string } | null>;
   remove(editionId: number): Promise<void>;
 }
 
@@ -76,13 +85,13 @@ export class Imports {
 
   async take(regionId: number, file: ReceivedFile): Promise<ImportProposal> {
     try {
-      const { reading, sample } = await inspectList(this.uploads.path(file.storedName));
+      const path = this.uploads.path(file.storedName);
+      const proposed = await proposeList(this.editions, path, { ...file, regionId });
       const row = await ImportModel.create({
         ...file,
         regionId,
         state: 'uploaded',
-        reading,
-        sample,
+        ...proposed,
         progress: 0,
       });
       return toProposal(row);
@@ -113,6 +122,19 @@ export class Imports {
     return toState(await this.find(actor, regionId, id));
   }
 
+  /** Takes the text of the file apart as asked; answers how it is proposed to be read now. */
+  async layOut(
+    actor: Actor,
+    regionId: number,
+    id: number,
+    asked: ImportLayout,
+  ): Promise<ImportProposal> {
+    const row = await this.find(actor, regionId, id);
+    const found = await proposeAnew(this.uploads.path(row.storedName), row, asked);
+    if (!(await layOut(id, found))) throw busy(await this.find(actor, regionId, id));
+    return toProposal(await this.find(actor, regionId, id));
+  }
+
   /** Reads the whole file by the asked matching and says what storing it would do. */
   async check(
     actor: Actor,
@@ -121,18 +143,18 @@ export class Imports {
     asked: ImportMatching,
   ): Promise<ImportCheck> {
     const row = await this.find(actor, regionId, id);
-    const columns = askedColumns(row.reading.columns, asked.columns);
+    const path = this.uploads.path(row.storedName);
+    const order = await checkOrder(this.editions, path, row, asked, await this.today());
     const worker = randomUUID();
     if (!(await claimCheck(id, worker))) throw busy(await this.find(actor, regionId, id));
     try {
-      const reading = { ...row.reading, columns };
-      const { baseEditionId, ...found } = await this.compare(row, reading);
+      const { raster } = await this.regions.get(actor, regionId);
+      const { baseEditionId, ...found } = await this.compare(row, order.reading, raster);
       const isKept = await finishCheck(id, worker, {
-        reading,
-        label: asked.label ?? (parse(row.fileName).name.slice(0, 120) || 'List'),
-        date: asked.date ?? (await this.today()),
+        ...order,
         counts: found.rows,
         faults: found.faults,
+        findings: { causes: found.causes, remarks: found.remarks },
         baseEditionId,
       });
       if (!isKept) throw busy(await this.find(actor, regionId, id));
@@ -203,12 +225,9 @@ export class Imports {
     return row;
   }
 
-  private async compare(row: ImportModel, reading: ListReading) {
-    const tally = new RowTally();
+  private async compare(row: ImportModel, reading: ListReading, raster: Region['raster']) {
     const baseEditionId = await this.editions.latest(row.regionId);
-    if (baseEditionId !== null) {
-      for await (const marks of this.editions.marks(baseEditionId)) tally.know(marks);
-    }
+    const tally = await tallyBeside(this.editions, reading, baseEditionId, raster);
     const found = await checkList(this.uploads.path(row.storedName), reading, tally);
     return { ...found, baseEditionId };
   }

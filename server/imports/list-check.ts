@@ -1,38 +1,99 @@
-import type { ImportCheck, ImportFault } from '../../shared/contracts/list-import.ts';
+import type { ImportCause, ImportCheck, ImportFault } from '../../shared/contracts/list-import.ts';
 import { type CsvRow, csvRows } from './csv-rows.ts';
 import { fingerprintOf, identityOf } from './fingerprint.ts';
-import type { ListReading } from './list-inspection.ts';
+import type { ListReading } from './list-reading.ts';
+import { RowAsides } from './row-asides.ts';
 import type { KnownRow, RowTally } from './row-tally.ts';
+import { StationHalves } from './station-halves.ts';
 import { RowReader, type StationRow } from './station-row.ts';
 
 const FAULTS_ANSWERED = 1000;
+const LINES_SHOWN = 5;
 
 /** A row of the file, judged. */
 export type JudgedRow =
   | { readonly row: CsvRow; readonly station: (StationRow & KnownRow) | null }
   | { readonly row: CsvRow; readonly faults: readonly ImportFault[] };
 
-/** The list, row by row: the station, null for a repetition of an earlier row, or what is wrong. */
+/**
+ * The list, row by row: the station, null where the row adds none (it says again what another row
+ * has said, or belongs to a station told by another row), or what is wrong with the row.
+ */
 export async function* judgedRows(
   path: string,
   reading: ListReading,
   tally: RowTally,
 ): AsyncGenerator<JudgedRow> {
-  const reader = new RowReader(reading.columns, reading.decimalMark);
-  let isHeader = true;
+  const judge = new RowJudge(reading, tally);
   for await (const row of csvRows(path, reading)) {
-    if (isHeader) {
-      isHeader = false;
-      continue;
+    const judged = row.line < reading.dataLine ? judge.pass(row) : judge.judge(row);
+    if (judged) yield judged;
+  }
+  yield* judge.rest();
+}
+
+/** Judges the rows of one list, one after the other. */
+class RowJudge {
+  readonly #reading: ListReading;
+  readonly #tally: RowTally;
+  readonly #reader: RowReader;
+  readonly #asides: RowAsides;
+  readonly #halves: StationHalves;
+
+  constructor(reading: ListReading, tally: RowTally) {
+    this.#reading = reading;
+    this.#tally = tally;
+    this.#reader = new RowReader(reading);
+    this.#asides = new RowAsides(reading);
+    this.#halves = new StationHalves(tally);
+  }
+
+  /** A line before the rows. */
+  pass({ line }: CsvRow): null {
+    if (line < this.#reading.headerLine) this.#tally.remark('title', line);
+    return null;
+  }
+
+  judge(row: CsvRow): JudgedRow | null {
+    const aside = this.#asides.kindOf(row.cells);
+    if (aside !== null) {
+      this.#tally.remark(aside, row.line);
+      return null;
     }
-    const { station, faults } = reader.read(row);
-    if (station === null) {
-      tally.reject();
-      yield { row, faults };
-      continue;
+    const { station, faults, ...read } = this.#reader.read(row);
+    if (station === null) return this.#reject(row, faults);
+    if (row.cells.length < this.#reading.columns.length) this.#tally.remark('short', row.line);
+    const period = 'period' in read ? read.period : null;
+    if (period === null) return this.#keep(row, station);
+    const taken = this.#halves.take({ row, station }, period);
+    if (taken === null) return { row, station: null };
+    if ('whole' in taken) return this.#keep(taken.whole.row, taken.whole.station);
+    if (taken.isSame) {
+      this.#tally.repeat();
+      return { row, station: null };
     }
-    const known = { identity: identityOf(station), fingerprint: fingerprintOf(station) };
-    yield { row, station: tally.add(known) ? { ...station, ...known } : null };
+    const expected = `another period than that of line ${taken.repeats}, which is the same station`;
+    return this.#reject(row, [this.#reader.faultOf(row, 'hours', expected)]);
+  }
+
+  /** Stations of which only one row came. */
+  *rest(): Generator<JudgedRow> {
+    for (const { row, station } of this.#halves.rest()) yield this.#keep(row, station);
+  }
+
+  #keep(row: CsvRow, station: StationRow): JudgedRow {
+    const known = Object.assign(station, {
+      identity: identityOf(station),
+      fingerprint: fingerprintOf(station),
+    });
+    if (!this.#tally.add(known)) return { row, station: null };
+    this.#tally.note(known);
+    return { row, station: known };
+  }
+
+  #reject(row: CsvRow, faults: readonly ImportFault[]): JudgedRow {
+    this.#tally.reject();
+    return { row, faults };
   }
 }
 
@@ -43,9 +104,25 @@ export async function checkList(
   tally: RowTally,
 ): Promise<ImportCheck> {
   const faults: ImportFault[] = [];
+  const causes = new Map<string, ImportCause>();
   for await (const judged of judgedRows(path, reading, tally)) {
     if (!('faults' in judged)) continue;
-    faults.push(...judged.faults.slice(0, FAULTS_ANSWERED - faults.length));
+    for (const fault of judged.faults) {
+      if (faults.length < FAULTS_ANSWERED) faults.push(fault);
+      count(causes, fault);
+    }
   }
-  return { rows: tally.rows, faults };
+  const commonest = [...causes.values()].sort((a, b) => b.count - a.count);
+  return { rows: tally.rows, faults, causes: commonest, remarks: tally.remarks };
+}
+
+function count(causes: Map<string, ImportCause>, { line, column, expected }: ImportFault): void {
+  const key = `${column}\u001f${expected}`;
+  const cause = causes.get(key);
+  if (!cause) {
+    causes.set(key, { column, expected, count: 1, lines: [line] });
+    return;
+  }
+  cause.count += 1;
+  if (cause.lines.length < LINES_SHOWN) cause.lines.push(line);
 }

@@ -2,56 +2,62 @@ import { createReadStream } from 'node:fs';
 
 import iconv from 'iconv-lite';
 
-import type { ImportColumn } from '../../shared/contracts/list-import.ts';
+import type { ImportColumn, ImportLayout, LetterO } from '../../shared/contracts/list-import.ts';
 import { BadListError } from './bad-list-error.ts';
-import type { DecimalMark } from './cell-number.ts';
-import { isComplete, proposeColumns } from './column-matching.ts';
-import { detectDecimalMark, detectDelimiter } from './csv-detection.ts';
+import { meaningOfO } from './cell-hemisphere.ts';
+import { proposeColumns } from './column-matching.ts';
+import { detectDelimiter } from './csv-detection.ts';
 import { type CsvLayout, type CsvRow, csvRows } from './csv-rows.ts';
-import { detectEncoding } from './text-encoding.ts';
-
-/** Everything that decides how a file is read: the same for preview, check and commit. */
-export interface ListReading extends CsvLayout {
-  readonly decimalMark: DecimalMark;
-  readonly columns: readonly ImportColumn[];
-}
+import { findDecimalMark } from './decimal-mark.ts';
+import { findHeader } from './header-place.ts';
+import type { ListReading } from './list-reading.ts';
+import { checkEncoding, detectEncoding } from './text-encoding.ts';
 
 /** What a file seems to be. */
 export interface Inspection {
   readonly reading: ListReading;
   /** First rows, as text. */
   readonly sample: string[][];
-  readonly complete: boolean;
 }
 
 const HEAD_BYTES = 65_536;
-const DETECTION_ROWS = 500;
+const DETECTION_ROWS = 540;
 const SAMPLE_ROWS = 10;
 
 /**
- * Finds out how a file is to be read. The whole file is gone through once, so that one which cannot
- * be taken apart is refused here.
+ * Finds out how a file is to be read, as far as nobody has said so. The whole file is gone through
+ * once, so that one which cannot be taken apart is refused here.
  * @throws {BadListError} If it is no list.
+ * @throws {InvalidError} If it is not in the encoding that was asked for.
  */
-export async function inspectList(path: string): Promise<Inspection> {
-  const encoding = await detectEncoding(path);
-  const delimiter = detectDelimiter(await readText(path, encoding));
-  const [header, ...rows] = await firstRows(path, { encoding, delimiter });
-  if (!header) throw new BadListError('The file holds no text but blanks.');
-  if (rows.length === 0) {
+export async function inspectList(path: string, asked: ImportLayout = {}): Promise<Inspection> {
+  if (asked.encoding) await checkEncoding(path, asked.encoding);
+  const encoding = asked.encoding ?? (await detectEncoding(path));
+  const delimiter = asked.delimiter ?? detectDelimiter(await readText(path, encoding));
+  const table = findHeader(await firstRows(path, { encoding, delimiter }));
+  if (!table) throw new BadListError('The file holds no text but blanks.');
+  const { headers, headerLine, dataLine } = table;
+  if (table.rows.length === 0) {
     throw new BadListError('The file has a header and no rows, or rows and no line breaks.');
   }
-  const cells = rows.map((row) => [...row.cells]);
-  const decimalMark = detectDecimalMark(cells, delimiter);
-  const columns = proposeColumns(headersOf(header), cells, decimalMark);
+  const cells = table.rows.map((row) => [...row.cells]);
+  const found = findDecimalMark(headers, cells, delimiter);
+  const { mark: decimalMark, sure } = asked.decimalMark
+    ? { mark: asked.decimalMark, sure: true }
+    : found;
+  const columns = proposeColumns(headers, cells, decimalMark);
+  const letterO = letterOOf(columns, cells);
+  const layout = { encoding, delimiter, decimalMark, decimalMarkSure: sure };
   return {
-    reading: { encoding, delimiter, decimalMark, columns },
+    reading: { ...layout, headerLine, dataLine, letterO, columns, addsTo: null },
     sample: cells.slice(0, SAMPLE_ROWS).map((row) => row.map((cell) => cell.slice(0, 200))),
-    complete: isComplete(columns),
   };
 }
 
-const headersOf = ({ cells }: CsvRow): string[] => cells.map((cell) => cell.trim().slice(0, 200));
+function letterOOf(columns: readonly ImportColumn[], rows: readonly string[][]): LetterO {
+  const at = columns.findIndex(({ field }) => field === 'longitude');
+  return at < 0 ? null : meaningOfO(rows.map((row) => row[at] ?? ''));
+}
 
 async function firstRows(path: string, layout: CsvLayout): Promise<CsvRow[]> {
   const rows: CsvRow[] = [];

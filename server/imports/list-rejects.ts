@@ -1,8 +1,24 @@
 import { stringify } from 'csv-stringify';
 
 import { judgedRows } from './list-check.ts';
-import type { ListReading } from './list-inspection.ts';
+import type { ListReading } from './list-reading.ts';
 import { RowTally } from './row-tally.ts';
+
+/** The columns that a file of rejects has before those of the list. */
+export const REJECT_HEADERS = ['line', 'fault'] as const;
+
+/** Whether the headers are those of a file of rejects. */
+export const isRejects = (headers: readonly string[]): boolean =>
+  REJECT_HEADERS.every((header, index) => headers[index] === header);
+
+/** What the rejects of an import are called as a file. */
+export const rejectsName = (importId: number): string => `rejects-${importId}.csv`;
+
+/** The import whose rejects a file holds, by its name; a spreadsheet may have added to it. */
+export const rejectedImport = (fileName: string): number | null => {
+  const digits = /^rejects-(\d{1,9})\b/.exec(fileName)?.[1];
+  return digits === undefined ? null : Number(digits);
+};
 
 /**
  * The rejected rows as CSV in UTF-8: `line` and `fault`, then the file's own columns, so
@@ -10,7 +26,7 @@ import { RowTally } from './row-tally.ts';
  * an apostrophe; numbers stay numbers.
  */
 export async function* rejectedRows(path: string, reading: ListReading): AsyncGenerator<string[]> {
-  yield ['line', 'fault', ...reading.columns.map(({ header }) => header)];
+  yield [...REJECT_HEADERS, ...reading.columns.map(({ header }) => header)];
   for await (const judged of judgedRows(path, reading, new RowTally())) {
     if (!('faults' in judged)) continue;
     const { line, cells } = judged.row;

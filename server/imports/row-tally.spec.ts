@@ -17,14 +17,16 @@ describe('RowTally', () => {
     const known = [row('a', 'a1'), row('b', 'b1')];
     const offered = [row('a', 'a1'), row('b', 'b2'), row('c', 'c1'), row('c', 'c1')];
 
-    expect(tallied(known, offered)).toEqual({
+    expect(tallied(known, offered)).toMatchObject({
       total: 4,
       new: 1,
       changed: 1,
       same: 1,
       rejected: 0,
       duplicate: 1,
+      gone: 0,
     });
+    expect(tallied(known, [row('c', 'c1')])).toMatchObject({ new: 1, gone: 2 });
   });
 
   it('counts several stations of one name and frequency apart', () => {

@@ -20,7 +20,16 @@ const COLUMNS = [
   column('Power', 'power', 'kW'),
   column('Night', 'powerNight', 'kW'),
 ];
-const reader = new RowReader(COLUMNS, '.');
+const READING = {
+  encoding: 'UTF-8',
+  delimiter: ',',
+  decimalMark: '.',
+  headerLine: 1,
+  dataLine: 2,
+  letterO: null,
+  addsTo: null,
+} as const;
+const reader = new RowReader({ ...READING, columns: COLUMNS });
 const read = (text: string) => reader.read({ line: 7, cells: text.split('|') });
 
 describe('RowReader', () => {
@@ -33,6 +42,7 @@ describe('RowReader', () => {
       longitude: 8,
       powerDayW: 10_000,
       powerNightW: 2000,
+      patternDb: null,
       hours: '',
       note: '',
     });

@@ -1,9 +1,18 @@
-import type { ImportColumn, ImportFault, ImportField } from '../../shared/contracts/list-import.ts';
+import type {
+  ImportColumn,
+  ImportFault,
+  ImportField,
+  ImportUnit,
+} from '../../shared/contracts/list-import.ts';
 import { readCoordinate } from './cell-coordinate.ts';
-import { type DecimalMark, isBlank } from './cell-number.ts';
+import type { Axis } from './cell-hemisphere.ts';
+import { readLocator } from './cell-locator.ts';
+import { isBlank } from './cell-number.ts';
+import { type Period, readPeriod } from './cell-period.ts';
 import { readFrequency, readPower } from './cell-unit.ts';
 import type { CsvRow } from './csv-rows.ts';
-import { readLocator } from './cell-locator.ts';
+import type { ListReading } from './list-reading.ts';
+import { PatternReader } from './pattern-reader.ts';
 
 /** A row that can be stored. */
 export interface StationRow {
@@ -14,86 +23,128 @@ export interface StationRow {
   readonly longitude: number | null;
   readonly powerDayW: number | null;
   readonly powerNightW: number | null;
+  /** Gains of the aerial, dB, every 10 degrees from north; null where the list tells none. */
+  readonly patternDb: readonly number[] | null;
   readonly hours: string;
   readonly note: string;
 }
 
-/** A row read: the station, or everything that is wrong with it. */
+/** A row read: the station and the period its power is for, or everything that is wrong with it. */
 export type RowResult =
-  | { readonly station: StationRow; readonly faults: readonly [] }
+  | { readonly station: StationRow; readonly period: Period | null; readonly faults: readonly [] }
   | { readonly station: null; readonly faults: readonly ImportFault[] };
 
 const LENGTHS = { name: 200, callSign: 40, hours: 200, note: 1000 } as const;
 /** Breaks, tabs, other control characters and repeated spaces. */
-const UNTIDY = /\p{Cc}|\s{2}/u;
+const UNTIDY = /[\p{Cc}\s]{2}|[\p{Cc}\u00a0]/u;
+/** As our own exports keep a spreadsheet from running a cell. */
+const DEFUSED = /^'(?=[=+\-@])/;
 const DECIMAL_WORDS = { '.': 'a decimal point', ',': 'a decimal comma' } as const;
+const NOWHERE = { latitude: null, longitude: null } as const;
 
 /** Reads the rows of one list by its matching; built once a file, called once a row. */
 export class RowReader {
-  readonly #columns: ReadonlyMap<ImportField, { index: number; column: ImportColumn }>;
-  readonly #headers: readonly string[];
-  readonly #mark: DecimalMark;
+  readonly #at = new Map<ImportField, number>();
+  readonly #columns: readonly ImportColumn[];
+  readonly #reading: ListReading;
+  readonly #pattern: PatternReader | null;
+  readonly #hasPeriods: boolean;
 
-  constructor(columns: readonly ImportColumn[], mark: DecimalMark) {
-    this.#headers = columns.map(({ header }) => header);
-    this.#mark = mark;
-    this.#columns = new Map(
-      columns.flatMap((column, index) =>
-        column.field === null ? [] : [[column.field, { index, column }]],
-      ),
-    );
+  constructor(reading: ListReading) {
+    this.#reading = reading;
+    this.#columns = reading.columns;
+    reading.columns.forEach(({ field }, index) => {
+      if (field !== null && field !== 'pattern') this.#at.set(field, index);
+    });
+    this.#pattern = PatternReader.of(reading);
+    this.#hasPeriods =
+      this.#at.has('hours') &&
+      this.#at.has('power') &&
+      !this.#at.has('powerDay') &&
+      !this.#at.has('powerNight');
+  }
+
+  /** Cell of the column that holds a field, tidied at its ends; empty where there is none. */
+  cell(field: ImportField, { cells }: CsvRow): string {
+    const index = this.#at.get(field);
+    return index === undefined ? '' : (cells[index] ?? '');
   }
 
   read(row: CsvRow): RowResult {
     const faults: ImportFault[] = [];
-    this.#checkWidth(row, faults);
-    const texts = {
-      name: this.#text('name', row, faults),
-      callSign: this.#text('callSign', row, faults),
-      hours: this.#text('hours', row, faults),
-      note: this.#text('note', row, faults),
-    };
+    if (row.cells.length > this.#columns.length) this.#checkWidth(row, faults);
+    const name = this.#text('name', row, faults);
+    const callSign = this.#text('callSign', row, faults);
+    const hours = this.#text('hours', row, faults);
+    const note = this.#text('note', row, faults);
     const frequencyHz = this.#frequency(row, faults);
-    const place = this.#place(row, faults);
-    const powers = this.#powers(row, faults);
-    this.#checkNamed(row, faults);
+    const { latitude, longitude } = this.#place(row, faults);
+    const always = this.#power('power', row, faults);
+    const day = this.#power('powerDay', row, faults) ?? always;
+    const night = this.#power('powerNight', row, faults) ?? always;
+    const pattern = this.#pattern?.read(row, day ?? night, faults) ?? null;
+    if (name === '' && callSign === '') this.#checkNamed(row, faults);
     if (faults.length > 0 || frequencyHz === null) return { station: null, faults };
-    return { station: { ...texts, frequencyHz, ...place, ...powers }, faults: [] };
+    const period = this.#hasPeriods ? readPeriod(hours) : null;
+    const station: StationRow = {
+      name,
+      callSign,
+      frequencyHz,
+      latitude,
+      longitude,
+      powerDayW: day ?? pattern?.powerW ?? null,
+      powerNightW: night ?? pattern?.powerW ?? null,
+      patternDb: pattern?.patternDb ?? null,
+      hours,
+      note,
+    };
+    return { station, period, faults: [] };
+  }
+
+  /** A fault of the column that holds a field. */
+  faultOf(row: CsvRow, field: ImportField, expected: string): ImportFault {
+    const column = this.#columns[this.#at.get(field) ?? -1]?.header ?? field;
+    return { line: row.line, column, value: this.cell(field, row).slice(0, 200), expected };
   }
 
   #checkWidth({ line, cells }: CsvRow, faults: ImportFault[]): void {
-    const surplus = cells.slice(this.#headers.length).filter((cell) => cell.trim() !== '');
+    const width = this.#columns.length;
+    const surplus = cells.slice(width).filter((cell) => cell.trim() !== '');
     if (surplus.length === 0) return;
     faults.push({
       line,
-      column: this.#headers.at(-1) ?? '',
+      column: this.#columns.at(-1)?.header ?? '',
       value: surplus.join(' ').slice(0, 200),
-      expected: `${this.#headers.length} cells, as in the header; this row has ${cells.length}`,
+      expected: `${width} cells, as in the header, not more`,
     });
   }
 
   /** A station needs something to be called by, unless the list has no such column at all. */
   #checkNamed(row: CsvRow, faults: ImportFault[]): void {
-    const field = this.#columns.has('name') ? 'name' : 'callSign';
-    if (!this.#columns.has(field)) return;
-    if (this.#cell('name', row).trim() !== '' || this.#cell('callSign', row).trim() !== '') return;
-    this.#fault(row, field, 'a name or a call sign', faults);
+    const field = this.#at.has('name') ? 'name' : 'callSign';
+    if (!this.#at.has(field)) return;
+    if (this.cell('name', row).trim() !== '' || this.cell('callSign', row).trim() !== '') return;
+    faults.push(this.faultOf(row, field, 'a name or a call sign'));
   }
 
   #text(field: keyof typeof LENGTHS, row: CsvRow, faults: ImportFault[]): string {
-    const cell = this.#cell(field, row).trim();
-    const text = UNTIDY.test(cell) ? cell.replace(/[\s\p{Cc}]+/gu, ' ') : cell;
+    const cell = this.cell(field, row).trim();
+    if (cell === '') return '';
+    const text = (UNTIDY.test(cell) ? cell.replace(/[\s\p{Cc}]+/gu, ' ') : cell).replace(
+      DEFUSED,
+      '',
+    );
     if (text.length <= LENGTHS[field]) return text;
-    this.#fault(row, field, `at most ${LENGTHS[field]} characters`, faults);
+    faults.push(this.faultOf(row, field, `at most ${LENGTHS[field]} characters`));
     return '';
   }
 
   #frequency(row: CsvRow, faults: ImportFault[]): number | null {
-    const unit = this.#columns.get('frequency')?.column.unit ?? 'Hz';
-    const value = readFrequency(this.#cell('frequency', row), unit, this.#mark);
+    const unit = this.#unit('frequency') ?? 'Hz';
+    const value = readFrequency(this.cell('frequency', row), unit, this.#reading.decimalMark);
     if (value === null) {
-      const expected = `a frequency in ${unit} with ${DECIMAL_WORDS[this.#mark]}, 1 kHz to 1 GHz`;
-      this.#fault(row, 'frequency', expected, faults);
+      const expected = `a frequency in ${unit} with ${this.#markWords()}, 1 kHz to 1 GHz`;
+      faults.push(this.faultOf(row, 'frequency', expected));
     }
     return value;
   }
@@ -103,12 +154,12 @@ export class RowReader {
     const longitude = this.#degrees('longitude', row, faults);
     if (latitude !== null && longitude !== null) return { latitude, longitude };
     this.#checkPair(row, latitude, longitude, faults);
-    const cell = this.#cell('locator', row);
-    if (isBlank(cell)) return { latitude: null, longitude: null };
+    const cell = this.cell('locator', row);
+    if (isBlank(cell)) return NOWHERE;
     const place = readLocator(cell);
     if (place) return place;
-    this.#fault(row, 'locator', 'a locator of 4, 6 or 8 characters, such as JN58td', faults);
-    return { latitude: null, longitude: null };
+    faults.push(this.faultOf(row, 'locator', 'a locator of 4, 6 or 8 characters, such as JN58td'));
+    return NOWHERE;
   }
 
   /** Half a place is a slip of the pen, not a station without place. */
@@ -117,55 +168,51 @@ export class RowReader {
     latitude: number | null,
     longitude: number | null,
     faults: ImportFault[],
-  ) {
-    if (latitude !== null && isBlank(this.#cell('longitude', row))) {
-      this.#fault(row, 'longitude', 'a longitude, as there is a latitude', faults);
+  ): void {
+    if (latitude !== null && isBlank(this.cell('longitude', row))) {
+      faults.push(this.faultOf(row, 'longitude', 'a longitude, as there is a latitude'));
     }
-    if (longitude !== null && isBlank(this.#cell('latitude', row))) {
-      this.#fault(row, 'latitude', 'a latitude, as there is a longitude', faults);
+    if (longitude !== null && isBlank(this.cell('latitude', row))) {
+      faults.push(this.faultOf(row, 'latitude', 'a latitude, as there is a longitude'));
     }
   }
 
-  #degrees(axis: 'latitude' | 'longitude', row: CsvRow, faults: ImportFault[]): number | null {
-    const cell = this.#cell(axis, row);
+  #degrees(axis: Axis, row: CsvRow, faults: ImportFault[]): number | null {
+    const cell = this.cell(axis, row);
     if (isBlank(cell)) return null;
-    const unit = this.#columns.get(axis)?.column.unit ?? null;
-    const value = readCoordinate(cell, axis, unit, this.#mark);
+    const { decimalMark: mark, letterO } = this.#reading;
+    const unit = this.#unit(axis);
+    const value = readCoordinate(cell, axis, { unit, mark, letterO });
     if (value === null) {
       const range = axis === 'latitude' ? '-90 (south) to 90' : '-180 (west) to 180';
       const form = unit === 'dms' ? 'degrees, minutes and seconds' : 'degrees';
-      this.#fault(row, axis, `${form} from ${range}, with ${DECIMAL_WORDS[this.#mark]}`, faults);
+      const expected = `${form} from ${range}, with ${this.#markWords()}`;
+      faults.push(this.faultOf(row, axis, expected));
     }
     return value;
   }
 
-  #powers(row: CsvRow, faults: ImportFault[]): Pick<StationRow, 'powerDayW' | 'powerNightW'> {
-    const always = this.#power('power', row, faults);
-    return {
-      powerDayW: this.#power('powerDay', row, faults) ?? always,
-      powerNightW: this.#power('powerNight', row, faults) ?? always,
-    };
-  }
-
-  #power(field: 'power' | 'powerDay' | 'powerNight', row: CsvRow, faults: ImportFault[]) {
-    const cell = this.#cell(field, row);
+  #power(
+    field: 'power' | 'powerDay' | 'powerNight',
+    row: CsvRow,
+    faults: ImportFault[],
+  ): number | null {
+    const cell = this.cell(field, row);
     if (isBlank(cell)) return null;
-    const unit = this.#columns.get(field)?.column.unit ?? 'W';
-    const value = readPower(cell, unit, this.#mark);
+    const unit = this.#unit(field) ?? 'W';
+    const value = readPower(cell, unit, this.#reading.decimalMark);
     if (value === null) {
-      const expected = `a power in ${unit} with ${DECIMAL_WORDS[this.#mark]}, 0 W to 100 MW`;
-      this.#fault(row, field, expected, faults);
+      const expected = `a power in ${unit} with ${this.#markWords()}, 0 W to 100 MW`;
+      faults.push(this.faultOf(row, field, expected));
     }
     return value;
   }
 
-  #cell(field: ImportField, { cells }: CsvRow): string {
-    const index = this.#columns.get(field)?.index;
-    return index === undefined ? '' : (cells[index] ?? '');
+  #unit(field: ImportField): ImportUnit | null {
+    return this.#columns[this.#at.get(field) ?? -1]?.unit ?? null;
   }
 
-  #fault(row: CsvRow, field: ImportField, expected: string, faults: ImportFault[]): void {
-    const column = this.#columns.get(field)?.column.header ?? field;
-    faults.push({ line: row.line, column, value: this.#cell(field, row).slice(0, 200), expected });
+  #markWords(): string {
+    return DECIMAL_WORDS[this.#reading.decimalMark];
   }
 }

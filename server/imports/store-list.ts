@@ -2,12 +2,13 @@ import type { Sequelize, Transaction } from 'sequelize';
 
 import { beat, finishCommit } from './import-claims.ts';
 import { judgedRows } from './list-check.ts';
-import type { ListReading } from './list-inspection.ts';
+import type { ListReading } from './list-reading.ts';
+import { addingTally, type EditionMarks } from './list-tally.ts';
 import { type KnownRow, RowTally } from './row-tally.ts';
 import type { StationRow } from './station-row.ts';
 
 /** What storing needs of the editions. */
-export interface ListWriter {
+export interface ListWriter extends EditionMarks {
   begin(
     draft: { regionId: number; label: string; date: string; source: string },
     transaction: Transaction,
@@ -17,6 +18,13 @@ export interface ListWriter {
     stations: readonly (StationRow & KnownRow)[],
     transaction: Transaction,
   ): Promise<void>;
+  /** Takes over what stays of another edition; answers how many stations the new one has then. */
+  keep(
+    editionId: number,
+    from: number,
+    replaced: readonly number[],
+    transaction: Transaction,
+  ): Promise<number>;
   finish(editionId: number, stations: number, transaction: Transaction): Promise<void>;
 }
 
@@ -50,7 +58,7 @@ export async function storeList(
   const transaction = await database.transaction();
   try {
     const editionId = await writer.begin(order.edition, transaction);
-    const stored = await copyRows(writer, order, editionId, transaction);
+    const stored = await storeRows(writer, order, editionId, transaction);
     await writer.finish(editionId, stored, transaction);
     if (!(await finishCommit(order.id, order.worker, editionId, transaction))) {
       throw new ImportLost();
@@ -62,9 +70,24 @@ export async function storeList(
   }
 }
 
+/** The rows of the file and, where they add to an edition, what stays of that one. */
+async function storeRows(
+  writer: ListWriter,
+  order: StoreOrder,
+  editionId: number,
+  transaction: Transaction,
+): Promise<number> {
+  const { addsTo } = order.reading;
+  if (addsTo === null) return copyRows(writer, order, new RowTally(), editionId, transaction);
+  const tally = await addingTally(writer, addsTo);
+  await copyRows(writer, order, tally, editionId, transaction);
+  return writer.keep(editionId, addsTo, tally.replaced, transaction);
+}
+
 async function copyRows(
   writer: ListWriter,
   { id, worker, path, reading, total }: StoreOrder,
+  tally: RowTally,
   editionId: number,
   transaction: Transaction,
 ): Promise<number> {
@@ -72,7 +95,7 @@ async function copyRows(
   let read = 0;
   let stored = 0;
   let nextBeat = 0;
-  for await (const judged of judgedRows(path, reading, new RowTally())) {
+  for await (const judged of judgedRows(path, reading, tally)) {
     read += 1;
     if ('station' in judged && judged.station) batch.push(judged.station);
     if (batch.length < ROWS_AT_ONCE) continue;

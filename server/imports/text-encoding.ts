@@ -1,21 +1,17 @@
+import { isAscii } from 'node:buffer';
 import { createReadStream } from 'node:fs';
 import { open } from 'node:fs/promises';
 import { TextDecoder } from 'node:util';
 
-import { analyse } from 'chardet';
-
+import { InvalidError } from '../http/errors.ts';
 import { BadListError } from './bad-list-error.ts';
 import { foreignKind } from './file-kind.ts';
+import { guessEncoding } from './guessed-encoding.ts';
 
 const HEAD_BYTES = 65_536;
-
-/** Single-byte encodings that a guess may name, and by what name they are read. */
-const GUESSES: Readonly<Record<string, string>> = {
-  'ISO-8859-1': 'windows-1252',
-  'windows-1252': 'windows-1252',
-  'ISO-8859-2': 'windows-1250',
-  'windows-1250': 'windows-1250',
-};
+/** How much text with other than ASCII letters a guess is made by. */
+const EVIDENCE_BYTES = 65_536;
+const EVIDENCE_OF_CHUNK = 8192;
 
 const EMPTY =
   'The file is empty: give a list with a line of column headers and a line for each station.';
@@ -34,7 +30,21 @@ export async function detectEncoding(path: string): Promise<string> {
   }
   const wide = markedEncoding(head) ?? unmarkedUtf16(head);
   if (wide !== null) return wide;
-  return (await isUtf8(path)) ? 'UTF-8' : guessEncoding(head);
+  const { isUtf8, evidence } = await readAll(path);
+  return isUtf8 ? 'UTF-8' : guessEncoding(evidence);
+}
+
+/**
+ * Checks an encoding that people chose.
+ * @throws {InvalidError} If it is UTF-8 and the file is not.
+ */
+export async function checkEncoding(path: string, encoding: string): Promise<void> {
+  if (encoding !== 'UTF-8' || (await readAll(path)).isUtf8) return;
+  throw new InvalidError({
+    path: 'encoding',
+    message:
+      'The file is not UTF-8: some of its bytes mean nothing there. Choose another encoding.',
+  });
 }
 
 async function readHead(path: string): Promise<Buffer> {
@@ -66,23 +76,38 @@ function unmarkedUtf16(head: Buffer): string | null {
   return null;
 }
 
-async function isUtf8(path: string): Promise<boolean> {
+/** Whether every byte obeys UTF-8, and the text around those that are not ASCII. */
+async function readAll(path: string): Promise<{ isUtf8: boolean; evidence: Buffer }> {
   const decoder = new TextDecoder('utf-8', { fatal: true });
+  const evidence: Buffer[] = [];
+  let kept = 0;
   let valid = true;
   let offset = 0;
   for await (const chunk of createReadStream(path) as AsyncIterable<Buffer>) {
     const zero = chunk.indexOf(0);
-    if (zero >= 0) {
-      throw new BadListError(
-        `The file holds a NUL byte (byte ${offset + zero + 1}): it is not plain text. ` +
-          'Export the list again as CSV.',
-      );
-    }
+    if (zero >= 0) throw nulByte(offset + zero + 1);
     offset += chunk.length;
     valid &&= decodes(decoder, chunk);
+    if (kept >= EVIDENCE_BYTES) continue;
+    const part = notAscii(chunk);
+    kept += part.length;
+    evidence.push(part);
   }
-  return valid && decodes(decoder);
+  return { isUtf8: valid && decodes(decoder), evidence: Buffer.concat(evidence) };
 }
+
+function notAscii(chunk: Buffer): Buffer {
+  if (isAscii(chunk)) return chunk.subarray(0, 0);
+  const at = chunk.findIndex((byte) => byte > 127);
+  const from = Math.max(0, at - 100);
+  // Copied: a part would keep the whole chunk in memory.
+  return Buffer.from(chunk.subarray(from, from + EVIDENCE_OF_CHUNK));
+}
+
+const nulByte = (at: number): BadListError =>
+  new BadListError(
+    `The file holds a NUL byte (byte ${at}): it is not plain text. Export the list again as CSV.`,
+  );
 
 function decodes(decoder: TextDecoder, chunk?: Buffer): boolean {
   try {
@@ -91,12 +116,4 @@ function decodes(decoder: TextDecoder, chunk?: Buffer): boolean {
   } catch {
     return false;
   }
-}
-
-function guessEncoding(head: Buffer): string {
-  for (const { name } of analyse(head)) {
-    const encoding = GUESSES[name];
-    if (encoding !== undefined) return encoding;
-  }
-  return 'windows-1252';
 }

@@ -50,9 +50,19 @@ describe('a clean list', () => {
     const { body: check } = await librarian
       .put(path, { label: 'Spring list', date: '2026-03-01' })
       .expect(200);
+    const nothing = { changed: 0, same: 0, rejected: 0, duplicate: 0, merged: 0, gone: 0, kept: 0 };
     expect(importCheck.parse(check)).toEqual({
-      rows: { total: 120, new: 120, changed: 0, same: 0, rejected: 0, duplicate: 0 },
+      rows: {
+        total: 120,
+        new: 120,
+        ...nothing,
+        offRaster: 0,
+        withoutPlace: 0,
+        withoutPower: 0,
+      },
       faults: [],
+      causes: [],
+      remarks: [],
     });
     const nothingYet = await librarian.get(`/api/regions/${regionId}/editions`).expect(200);
     expect(nothingYet.body).toEqual({ items: [], total: 0 });
@@ -215,13 +225,14 @@ describe('a list with bad rows', () => {
 
     const { body } = await librarian.put(path, { label: 'List' }).expect(200);
 
-    expect(body.rows).toEqual({
+    expect(body.rows).toMatchObject({
       total: 11,
       new: 2,
       changed: 0,
       same: 0,
       rejected: 8,
       duplicate: 1,
+      withoutPlace: 1,
     });
     expect(
       body.faults.map(({ line, column, value }: Record<string, unknown>) => [line, column, value]),
