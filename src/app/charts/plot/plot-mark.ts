@@ -42,6 +42,19 @@ export function nearestMark(
   return best;
 }
 
+/** The mark nearest to a point along the chart, however far up or down. */
+export const nearestAlong = (
+  marks: readonly PlotMark[],
+  x: number,
+  reach: number,
+): PlotMark | undefined =>
+  nearestMark(
+    marks.map((mark) => ({ ...mark, y: 0 })),
+    x,
+    0,
+    reach,
+  );
+
 const STEPS: Readonly<Record<string, (at: number, count: number) => number>> = {
   ArrowRight: (at) => at + 1,
   ArrowDown: (at) => at + 1,

@@ -15,6 +15,7 @@ import { showing, type WholeScale, type Window, zoomed } from '../zoom-window';
 import {
   inReadingOrder,
   markByKey,
+  nearestAlong,
   nearestMark,
   type PlotMark,
   type Readout,
@@ -56,6 +57,8 @@ export class Plot {
   readonly window = model<Window | null>(null);
   /** Id of the mark picked, here or elsewhere on the page. */
   readonly picked = model<string | null>(null);
+  /** The pointer asks for the mark above or below it, however far: for curves. */
+  readonly readsAlong = input(false);
   /** What Enter does with a mark, as a sentence; empty: nothing. */
   readonly leadsOn = input('');
   /** Enter was pressed on a mark. */
@@ -124,7 +127,9 @@ export class Plot {
     const box = this.surface().nativeElement.getBoundingClientRect();
     const { margin } = this.frame();
     const [x, y] = [event.clientX - box.left - margin.left, event.clientY - box.top - margin.top];
-    return nearestMark(this.marks(), x, y, REACH);
+    return this.readsAlong()
+      ? nearestAlong(this.marks(), x, REACH)
+      : nearestMark(this.marks(), x, y, REACH);
   }
 
   /** Goes to the next mark, also to one that is out of view. */
