@@ -54,7 +54,10 @@ export const planStation = z.object({
 });
 export type PlanStation = z.infer<typeof planStation>;
 
-/** What is heard with the chosen IF: the worst of each band, with their working. */
+/**
+ * What is heard with the chosen IF: the worst of each band, with their working. Kept plans are read
+ * by this: what the engine's answer gains later needs a default here.
+ */
 export const planJudgement = z.object({
   warnings: assessment.shape.warnings,
   leftOut: z.array(z.object({ reason: z.string(), count: z.int() })),

@@ -27,6 +27,12 @@ export const routes: Routes = [
     loadChildren: feature(() => import('./receiver/receiver.routes').then((m) => m.receiverRoutes)),
   },
   {
+    path: 'shared/:token',
+    loadChildren: feature(() =>
+      import('./receiver/plans/shared-plan/shared-plan.routes').then((m) => m.sharedPlanRoutes),
+    ),
+  },
+  {
     path: 'regions',
     loadChildren: feature(() => import('./regions/regions.routes').then((m) => m.regionsRoutes)),
   },

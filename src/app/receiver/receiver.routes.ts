@@ -23,6 +23,11 @@ export const receiverRoutes: Routes = [
         loadComponent: () => import('./plans/plan-list/plan-list').then((m) => m.PlanList),
       },
       {
+        path: 'compare',
+        title: $localize`Two plans compared`,
+        loadComponent: () => import('./plans/compare/compare-page').then((m) => m.ComparePage),
+      },
+      {
         path: ':planId',
         title: $localize`Plan`,
         loadComponent: () => import('./plans/plan-page/plan-page').then((m) => m.PlanPage),

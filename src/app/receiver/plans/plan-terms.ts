@@ -1,7 +1,8 @@
-import type { Plan } from '../../../../shared/contracts/plan';
+import type { ReadablePlan } from '../../../../shared/contracts/plan';
 import type { Period } from '../../../../shared/radio/site';
 import { verdictSentences } from '../advice/verdict-words';
 import { candidateColumns } from '../candidates-table/candidate-columns';
+import { stationName } from './plan-words';
 
 /** One term of a plan: the IF as it was, and as chosen. */
 export interface PlanTerm {
@@ -10,14 +11,19 @@ export interface PlanTerm {
   readonly chosen: string;
 }
 
-/** The verdict by day and by night in words; a kept plan names stations by where they are heard. */
-export const planVerdicts = ({ results }: Plan): string[] =>
-  (['day', 'night'] as const).map((period: Period) =>
-    verdictSentences(results[period], undefined, period, () => $localize`a station`).join(' '),
-  );
+/** The verdict for a period in words: the set as it was saved, and with the plan. */
+export function planVerdicts(plan: ReadablePlan, period: Period) {
+  const { results } = plan;
+  const words = (verdict: (typeof results)['day']) =>
+    verdictSentences(verdict, undefined, period, (place) => stationName(plan, place));
+  return {
+    before: results.before ? words(results.before[period]) : [],
+    after: words(results[period]),
+  };
+}
 
-/** Every term of the candidates, for the period the plan was judged in. */
-export const planTerms = ({ results, period, receiver }: Plan): PlanTerm[] =>
+/** Every term of the candidates for a period. */
+export const planTerms = ({ results, receiver }: ReadablePlan, period: Period): PlanTerm[] =>
   candidateColumns(period, receiver).map(({ label, text }) => ({
     label,
     present: text(results.present),

@@ -1,7 +1,8 @@
 import { DatePipe } from '@angular/common';
-import { ChangeDetectionStrategy, Component, inject, input, signal } from '@angular/core';
+import { ChangeDetectionStrategy, Component, computed, inject, input, signal } from '@angular/core';
 import { MatButtonModule } from '@angular/material/button';
-import { RouterLink } from '@angular/router';
+import { MatCheckboxModule } from '@angular/material/checkbox';
+import { Router, RouterLink } from '@angular/router';
 
 import type { Plan } from '../../../../../shared/contracts/plan';
 import type { Problem } from '../../../../../shared/contracts/problem';
@@ -11,7 +12,7 @@ import { Empty } from '../../../ui/page-state/empty';
 import { Loading } from '../../../ui/page-state/loading';
 import { ProblemNote } from '../../../ui/page-state/problem-note';
 import { planDeletion } from '../delete-plan';
-import { stationsOf, trialOf } from '../plan-words';
+import { notesOn, stationsOf, trialOf } from '../plan-words';
 import { PlansStore } from '../plans-store';
 
 /** Plans kept for a receiver, the newest first. */
@@ -19,11 +20,21 @@ import { PlansStore } from '../plans-store';
   selector: 'app-plan-list',
   templateUrl: './plan-list.html',
   styleUrl: './plan-list.scss',
-  imports: [DatePipe, Empty, FrequencyPipe, Loading, MatButtonModule, ProblemNote, RouterLink],
+  imports: [
+    DatePipe,
+    Empty,
+    FrequencyPipe,
+    Loading,
+    MatButtonModule,
+    MatCheckboxModule,
+    ProblemNote,
+    RouterLink,
+  ],
   changeDetection: ChangeDetectionStrategy.OnPush,
 })
 export class PlanList {
   private readonly remove = planDeletion();
+  private readonly router = inject(Router);
 
   /** Id of the receiver, from the address. */
   readonly id = input.required<string>();
@@ -32,6 +43,32 @@ export class PlanList {
   protected readonly refusal = signal<Problem | null>(null);
   protected readonly stationsOf = stationsOf;
   protected readonly trialOf = trialOf;
+  protected readonly notesOn = notesOn;
+  /** Plans chosen to be compared, in the order in which they were. */
+  protected readonly chosen = signal<readonly number[]>([]);
+  /** The two plans to compare, the older first. */
+  protected readonly pair = computed(() => {
+    const [a, b, more] = [...this.chosen()].sort((one, other) => one - other);
+    return a === undefined || b === undefined || more !== undefined ? undefined : { a, b };
+  });
+
+  protected chooseLabel({ name }: Plan): string {
+    return $localize`Choose ${name}:plan: to compare`;
+  }
+
+  /** A third choice takes the place of the first. */
+  protected choose(id: number, isChosen: boolean): void {
+    this.chosen.update((chosen) => {
+      const others = chosen.filter((each) => each !== id);
+      return isChosen ? [...others.slice(-1), id] : others;
+    });
+  }
+
+  protected compare(): void {
+    void this.router.navigate(['/receivers', this.id(), 'plans', 'compare'], {
+      queryParams: this.pair() ?? {},
+    });
+  }
 
   protected async delete(plan: Plan): Promise<void> {
     try {

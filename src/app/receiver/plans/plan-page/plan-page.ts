@@ -1,26 +1,35 @@
 import { DatePipe } from '@angular/common';
-import { ChangeDetectionStrategy, Component, computed, inject, input, signal } from '@angular/core';
+import { ChangeDetectionStrategy, Component, inject, input, signal } from '@angular/core';
 import { MatButtonModule } from '@angular/material/button';
 import { Router, RouterLink } from '@angular/router';
 
 import type { Plan } from '../../../../../shared/contracts/plan';
 import type { Problem } from '../../../../../shared/contracts/problem';
 import { toProblem } from '../../../core/api-problem';
-import { FrequencyPipe } from '../../../ui/frequency-pipe';
 import { Loading } from '../../../ui/page-state/loading';
 import { ProblemNote } from '../../../ui/page-state/problem-note';
-import { Caution } from '../../advice/caution';
 import { planDeletion } from '../delete-plan';
-import { planTerms, planVerdicts } from '../plan-terms';
+import { PlanStanding } from '../plan-standing/plan-standing';
+import { PlanView } from '../plan-view/plan-view';
 import { stationsOf, trialOf } from '../plan-words';
 import { PlansStore } from '../plans-store';
+import { SharePlan } from '../share-plan/share-plan';
 
-/** One plan as it was kept: the chosen IF beside the one before it. */
+/** One plan as it was kept, what has changed since, and the link by which others read it. */
 @Component({
   selector: 'app-plan-page',
   templateUrl: './plan-page.html',
   styleUrl: './plan-page.scss',
-  imports: [Caution, DatePipe, FrequencyPipe, Loading, MatButtonModule, ProblemNote, RouterLink],
+  imports: [
+    DatePipe,
+    Loading,
+    MatButtonModule,
+    PlanStanding,
+    PlanView,
+    ProblemNote,
+    RouterLink,
+    SharePlan,
+  ],
   changeDetection: ChangeDetectionStrategy.OnPush,
 })
 export class PlanPage {
@@ -35,14 +44,6 @@ export class PlanPage {
   protected readonly refusal = signal<Problem | null>(null);
   protected readonly stationsOf = stationsOf;
   protected readonly trialOf = trialOf;
-  protected readonly verdicts = computed(() => {
-    const plan = this.plan.value();
-    return plan ? planVerdicts(plan) : [];
-  });
-  protected readonly terms = computed(() => {
-    const plan = this.plan.value();
-    return plan ? planTerms(plan) : [];
-  });
 
   protected async delete(plan: Plan): Promise<void> {
     try {

@@ -4,12 +4,13 @@ import { MatButtonModule } from '@angular/material/button';
 import { bareReceiver, type StoredReceiver } from '../../../../../shared/contracts/receiver';
 import type { ReceiverFields } from '../receiver-form/controls';
 import { receiverOf } from '../receiver-form/fields';
-import { differences } from './differences';
+import { DifferenceTable } from '../../../ui/receiver-differences/difference-table';
+import { differences } from '../../../ui/receiver-differences/differences';
 
 /** Somebody else saved first: shows both states and lets the user decide. */
 @Component({
   selector: 'app-conflict',
-  imports: [MatButtonModule],
+  imports: [DifferenceTable, MatButtonModule],
   templateUrl: './conflict.html',
   styleUrl: './conflict.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,

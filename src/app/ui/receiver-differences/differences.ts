@@ -1,4 +1,5 @@
-import { formatFrequency } from '../../../ui/frequency-pipe';
+import { formatFrequency } from '../frequency-pipe';
+import { formatQuantity } from '../quantity/quantity';
 
 /** One field that two states of a receiver do not agree on. */
 export interface Difference {
@@ -22,6 +23,10 @@ export function differences(mine: object, theirs: object): Difference[] {
       theirs: valueWords(path, right.get(path)),
     }));
 }
+
+/** Every field of a receiver that is given, in words. */
+export const fieldsInWords = (receiver: object): { field: string; value: string }[] =>
+  differences(receiver, {}).map(({ field, mine }) => ({ field, value: mine }));
 
 /** Every single value under its path; what is not given has no path. */
 function leaves(value: unknown, path = ''): Leaves {
@@ -63,6 +68,30 @@ const words: Readonly<Record<string, string>> = {
   rangeHz: $localize`reach`,
   pitchHz: $localize`pitch`,
   kind: $localize`kind`,
+  aerial: $localize`aerial`,
+  resonanceHz: $localize`resonance`,
+  q: $localize`Q`,
+  count: $localize`number of transformers`,
+  coupling: $localize`coupling kQ`,
+  points: $localize`point`,
+  offsetHz: $localize`offset`,
+  rejectionDb: $localize`rejection`,
+  secondConversion: $localize`second conversion`,
+  oscillatorHarmonic: $localize`harmonic of the oscillator`,
+  assumedWantedDb: $localize`field wanted stations are taken to have`,
+  tuningToleranceHz: $localize`tuned as near as`,
+  dialStepHz: $localize`ticks of the dial`,
+  tracking: $localize`tracking`,
+  inductanceH: $localize`coil`,
+  capacitanceF: $localize`capacitor`,
+  sourceOhms: $localize`source`,
+  loadOhms: $localize`load`,
+  gangMinF: $localize`gang at least`,
+  gangMaxF: $localize`gang at most`,
+  strayF: $localize`stray capacitance`,
+  trimmer: $localize`trimmer at`,
+  fixedPadderF: $localize`fixed padder`,
+  alignHz: $localize`aligned at`,
 };
 
 /** "bands.0.highHz" reads "band 1, to". */
@@ -78,5 +107,8 @@ function valueWords(path: string, value: Leaf | undefined): string {
   if (value === undefined) return '–';
   if (typeof value !== 'number') return String(value);
   if (path.endsWith('Hz')) return formatFrequency(value);
+  if (path.endsWith('F')) return `${formatQuantity(value, 'capacitance')} pF`;
+  if (path.endsWith('inductanceH')) return `${formatQuantity(value, 'inductance')} µH`;
+  if (path.endsWith('Ohms')) return `${value} Ω`;
   return path.includes('Db') ? `${value} dB` : String(value);
 }

@@ -1,0 +1,24 @@
+import { DatePipe } from '@angular/common';
+import { ChangeDetectionStrategy, Component, input } from '@angular/core';
+import { RouterLink } from '@angular/router';
+
+import type { Plan } from '../../../../../shared/contracts/plan';
+import { FrequencyPipe } from '../../../ui/frequency-pipe';
+import { stationsOf } from '../plan-words';
+import type { ComparedTerm } from './comparison';
+import { OutcomeMark } from './outcome-mark';
+
+/** Every term of two plans, and how the second stands to the first in it. */
+@Component({
+  selector: 'app-compared-terms',
+  templateUrl: './compared-terms.html',
+  styleUrl: './compared-terms.scss',
+  imports: [DatePipe, FrequencyPipe, OutcomeMark, RouterLink],
+  changeDetection: ChangeDetectionStrategy.OnPush,
+})
+export class ComparedTerms {
+  readonly plans = input.required<readonly Plan[]>();
+  readonly terms = input.required<readonly ComparedTerm[]>();
+
+  protected readonly stationsOf = stationsOf;
+}
