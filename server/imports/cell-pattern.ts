@@ -51,21 +51,19 @@ const between = (at: number, low: number, high: number, before: number, after: n
   before + ((at - low) / (high - low)) * (after - before);
 
 /**
- * Powers by bearing as gains over the station's power; without one the strongest bearing is the
- * power. A station silent all round has none.
+ * Powers by bearing, dBW, as gains over the station's power; without one the strongest bearing is
+ * the power. A station silent all round has none.
  */
 export function gainsOfPowers(
-  levelsDbw: readonly number[],
+  levels: readonly (readonly [number, number])[],
   powerW: number | null,
 ): { readonly patternDb: number[]; readonly powerW: number } | null {
-  const strongest = Math.max(...levelsDbw);
+  const strongest = Math.max(...levels.map(([, level]) => level));
   if (!Number.isFinite(strongest)) return null;
   const watts = powerW !== null && powerW > 0 ? powerW : 10 ** (strongest / 10);
   const reference = 10 * Math.log10(watts);
-  return {
-    patternDb: levelsDbw.map((level) => hundredths(deepened(level - reference))),
-    powerW: Number(watts.toPrecision(12)),
-  };
+  const gains = levels.map(([at, level]): [number, number] => [at, deepened(level - reference)]);
+  return { patternDb: everyTenDegrees(gains), powerW: Number(watts.toPrecision(12)) };
 }
 
 const hundredths = (gain: number): number => Math.round(gain * 100) / 100;

@@ -79,7 +79,9 @@ function markOf(cell: string): { sign: 1 | -1; sure: boolean } | null {
   const sign = last === ',' ? 1 : -1;
   const before = marks.at(-2);
   if (before !== undefined && before !== last) return { sign, sure: true };
-  if (before === last) return { sign: sign === 1 ? -1 : 1, sure: true };
+  // "46.58.48" is no number but degrees, minutes and seconds.
+  const isGrouped = /^\d{1,3}(?:[.,]\d{3})+$/.test(digits);
+  if (before === last) return isGrouped ? { sign: sign === 1 ? -1 : 1, sure: true } : null;
   return {
     sign,
     sure: !/^\d{3}$/.test(behind) || /^0[.,]/.test(digits) || /^\d{4,}[.,]/.test(digits),

@@ -55,7 +55,6 @@ export class PatternReader {
     if (known.length === 0) return null;
     const isPower = this.#columns[0]?.unit !== 'dB' && this.#columns[0]?.unit !== 'relative';
     if (!isPower) return { patternDb: everyTenDegrees(known), powerW: null };
-    const finite = known.map(([at, level]): [number, number] => [at, Math.max(level, -100)]);
-    return gainsOfPowers(everyTenDegrees(finite), powerW);
+    return gainsOfPowers(known, powerW);
   }
 }
