@@ -5,6 +5,8 @@
  * hertz are wanted. Frequencies that are assigned are whole hertz, so equality and ordering are
  * exact; frequencies that are solved for are plain real numbers.
  *
+ * Source: definition.
+ *
  * @module radio/units
  */
 

@@ -1,10 +1,12 @@
 /**
  * Assessment of a receiver at a site: what it lets through, where on the dial, and how bad it is.
  *
+ * Source: own model: every term an equivalent field at the aerial; the parts name theirs.
+ *
  * @module radio/assessment/assessment
  */
 import type { BandScan } from './band-scan.ts';
-import type { Finding, FindingSink } from './finding.ts';
+import type { Finding, FindingSink, Orders } from './finding.ts';
 import { Deficit } from './deficit.ts';
 import { type DialTotal, DialTotals } from './dial-totals.ts';
 import type { FieldStrength } from '../propagation/field-strength.ts';
@@ -30,8 +32,8 @@ import { type FrequencySpan, imageSpan, oscillatorSpan } from '../mixing/tuning-
 import { type BandDeficit, type Verdict, verdictOf } from './verdict.ts';
 import { type Warning, warningsOf } from './warnings.ts';
 
-/** What is assessed. */
-export interface AssessmentInput {
+/** What is assessed; orders of the oscillator 0 to 5, of the signal 1 to 3. */
+export interface AssessmentInput extends Orders {
   readonly receiver: Receiver;
   readonly site: Site;
   readonly stations: readonly Station[];
@@ -39,10 +41,6 @@ export interface AssessmentInput {
   readonly fields: readonly FieldStrength[];
   readonly raster: readonly RasterRange[];
   readonly period: Period;
-  /** Highest order of the oscillator, 0 to 5. */
-  readonly maxM: number;
-  /** Highest order of the signal, 1 to 3. */
-  readonly maxN: number;
   /** Mildest grade that is still answered; null: all, hidden ones too. */
   readonly leaveOutBetterThan: Grade | null;
   /** Most responses answered for a band. */
@@ -100,8 +98,9 @@ export interface Assessment {
  * @throws {RangeError} If a value is out of range; the message names it.
  *
  * @example
- *   assess({ receiver, site, stations, fields, raster, period: 'night', maxM: 3, maxN: 2,
- *     leaveOutBetterThan: 'slightly-annoying', limit: 2000 }).verdict.usable; // 12
+ *   // An IF of 560 kHz with strong stations on 550 and 560: the one to hear on 1000 is harmed.
+ *   assess({ ...atSite, period: 'night', maxM: 3, maxN: 2,
+ *     leaveOutBetterThan: 'slightly-annoying', limit: 2000 }).verdict.usable; // 1
  */
 export function assess(input: AssessmentInput): Assessment {
   const { receiver, site, raster, period, maxM } = input;

@@ -74,13 +74,16 @@ export class BandScan {
    * @param sink Takes the findings.
    * @throws {RangeError} If an order is out of range.
    */
-  scan(ifHz: number, { maxM, maxN }: Orders, sink: FindingSink): void {
+  scan(ifHz: number, { maxM, maxN, checkpoint }: Orders, sink: FindingSink): void {
     checkOrders(maxM, maxN);
     this.scanBreakthrough(ifHz, maxN, sink);
     this.settings.moveTo(ifHz);
     for (let n = 1; n <= maxN; n++) {
       for (let m = 1; m <= maxM; m++) {
-        for (const meeting of MEETINGS) this.scanMeeting(m, n, meeting, sink);
+        for (const meeting of MEETINGS) {
+          checkpoint?.();
+          this.scanMeeting(m, n, meeting, sink);
+        }
       }
     }
     if (maxM >= this.dial.band.oscillatorHarmonic) this.scanSecondImage(ifHz, sink);

@@ -1,6 +1,8 @@
 /**
  * Through a day and a night: when the IF breaks through at a site, and when the image does.
  *
+ * Source: own rule for rise and fall; each moment as in `assess`.
+ *
  * @module radio/assessment/breakthrough-hours
  */
 import type { FieldStrength } from '../propagation/field-strength.ts';
@@ -25,6 +27,8 @@ export interface BreakthroughHoursInput {
   readonly raster: readonly RasterRange[];
   /** Moments, in order. */
   readonly times: readonly Date[];
+  /** Called between products; it throws when nobody waits for the answer any more. */
+  readonly checkpoint?: (() => void) | undefined;
 }
 
 /** The worst that is heard of one kind at a moment. */
@@ -64,7 +68,9 @@ export interface BreakthroughHours {
  * @returns Each moment in order, and the rises and falls.
  * @throws {RangeError} If a value is out of range; the message names it.
  * @example
- *   breakthroughHours({ receiver, site, stations, raster, times }).rises; // [19:30]
+ *   // A station on the IF, 600 km off, through the evening of 20 March: it rises after sunset.
+ *   breakthroughHours({ receiver, site, raster, stations: [distant], times: evening })
+ *     .rises.map((at) => at.toISOString()); // ['2026-03-21T00:00:00.000Z']
  */
 export function breakthroughHours(input: BreakthroughHoursInput): BreakthroughHours {
   const fieldsAtSite = new FieldsAtSite(input.site, input.stations);
@@ -86,7 +92,7 @@ function judgeOf(input: BreakthroughHoursInput): (fields: readonly FieldStrength
   const selectivity = ifSelectivity(receiver.selectivity, receiver.ifHz);
   // The image comes through the harmonic that the oscillator works on.
   const maxM = Math.max(...receiver.bands.map(({ oscillatorHarmonic }) => oscillatorHarmonic));
-  const orders = { maxM, maxN: 1 };
+  const orders = { maxM, maxN: 1, checkpoint: input.checkpoint };
   const tables = new WeightingTables(receiver, selectivity, site.ituRegion, maxM);
   return (fields) => {
     const spectrum = new Spectrum(stations, fields);

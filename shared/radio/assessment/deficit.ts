@@ -1,6 +1,8 @@
 /**
  * What a band lacks to its protection ratio, and the worst that is heard on it.
  *
+ * Source: own rule: decibels that lack to the protection ratio, which do not saturate.
+ *
  * @module radio/assessment/deficit
  */
 import type { BandScan } from './band-scan.ts';
@@ -123,6 +125,10 @@ export class Deficit implements FindingSink {
 /**
  * Kind of a product.
  *
+ * @param m Order of the oscillator.
+ * @param n Order of the signal.
+ * @param harmonic Harmonic of the oscillator that converts the wanted signal.
+ * @returns The kind.
  * @example
  *   kindOf(2, 2, 1); // 'products'
  */
@@ -131,7 +137,17 @@ export function kindOf(m: number, n: number, harmonic: number): Kind {
   return m === harmonic && n === 1 ? 'image' : 'products';
 }
 
-/** Order of responses: ratio, then dial setting, station, m, n. */
+/**
+ * Order of responses: ratio, then dial setting, station, m, n.
+ *
+ * @param one A response.
+ * @param other Another.
+ * @param ids Ids of the stations by their position.
+ * @returns Whether `one` comes first.
+ * @example
+ *   const found = { ratioDb: 20, dialHz: 1_000_000, position: 0, m: 1, n: 1 };
+ *   isBefore(found, { ...found, m: 2 }, [7]); // true
+ */
 export function isBefore(one: Worst, other: Worst, ids: readonly number[]): boolean {
   const difference =
     one.ratioDb - other.ratioDb ||

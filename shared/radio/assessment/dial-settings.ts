@@ -1,6 +1,8 @@
 /**
  * Dial settings at which a station is heard through a product of the mixer: closed form.
  *
+ * Source: arithmetic.
+ *
  * @module radio/assessment/dial-settings
  */
 import type { Dial } from './dial.ts';

@@ -177,7 +177,7 @@ export class Dial {
    * @returns dB(uV/m).
    */
   hiddenDb(row: number, group: number, position: number): number {
-    if (this.isNear(row, group)) return this.hiddenUnder(row, this.sumBand(row, group, position));
+    if (this.isNear(row, group)) return this.hiddenUnder(row, this.bandWithout(row, group, position));
     let hidden = this.hiddenDbs[row] ?? NaN;
     if (Number.isNaN(hidden)) {
       hidden = this.hiddenUnder(row, this.bandPower(row, group, position));
@@ -199,13 +199,28 @@ export class Dial {
    * @returns The power; -1: there is no such station.
    */
   bandPower(row: number, group: number, position: number): number {
-    if (this.isNear(row, group)) return this.sumBand(row, group, position);
+    return this.isNear(row, group) ? this.sumBand(row, group, position) : this.wholeBand(row);
+  }
+
+  private wholeBand(row: number): number {
     let power = this.bandPowers[row] ?? NaN;
     if (Number.isNaN(power)) {
       power = this.sumBand(row, -1, -1);
       this.bandPowers[row] = power;
     }
     return power;
+  }
+
+  /** The band less a near interferer: on a dense list summing it anew each time takes too long. */
+  private bandWithout(row: number, group: number, position: number): number {
+    const { spectrum } = this;
+    const distance = Math.abs((spectrum.hz[group] ?? NaN) - (this.hz[row] ?? NaN));
+    const whole = this.wholeBand(row);
+    const own =
+      (spectrum.powers[0]?.[position] ?? NaN) * 10 ** (this.weightingDb(row, distance) / 10);
+    // Where the interferer is most of the band, a difference would lose the rest in rounding.
+    if (distance === 0 || !(own <= whole / 2)) return this.sumBand(row, group, position);
+    return whole - own;
   }
 
   private hiddenUnder(row: number, bandPower: number): number {

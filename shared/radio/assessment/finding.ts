@@ -49,4 +49,6 @@ export interface FindingSink {
 export interface Orders {
   readonly maxM: number;
   readonly maxN: number;
+  /** Called between products; it throws when nobody waits for the answer any more. */
+  readonly checkpoint?: (() => void) | undefined;
 }

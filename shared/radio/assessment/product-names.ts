@@ -1,6 +1,8 @@
 /**
  * Products of the mixer in words.
  *
+ * Source: terms of the trade, common practice.
+ *
  * @module radio/assessment/product-names
  */
 import type { Cause } from './response.ts';

@@ -1,6 +1,8 @@
 /**
  * A receiver set up at a site: every band over the stations that are on the air.
  *
+ * Source: own rule; the parts name theirs.
+ *
  * @module radio/assessment/receiver-at-site
  */
 import { BandScan } from './band-scan.ts';

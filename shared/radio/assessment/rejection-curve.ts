@@ -1,6 +1,8 @@
 /**
  * Image and IF rejection over the dial.
  *
+ * Source: as in `FrontEnd`.
+ *
  * @module radio/assessment/rejection-curve
  */
 import type { FrontEnd } from '../circuits/front-end.ts';

@@ -1,6 +1,8 @@
 /**
  * Responses as they are answered, each with its working.
  *
+ * Source: own model, as in `assess`.
+ *
  * @module radio/assessment/responses
  */
 import type { BandScan } from './band-scan.ts';

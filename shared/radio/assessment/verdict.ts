@@ -1,6 +1,8 @@
 /**
  * The verdict on a receiver at a site: a count, not its worst figure.
  *
+ * Source: own rule: a count of stations, since one weak station would condemn every set.
+ *
  * @module radio/assessment/verdict
  */
 import type { Deficit, Loudest } from './deficit.ts';

@@ -1,6 +1,8 @@
 /**
  * What a user should know before trusting an assessment.
  *
+ * Source: common practice.
+ *
  * @module radio/assessment/warnings
  */
 import { primaryRefusal } from '../circuits/aerial.ts';

@@ -1,6 +1,8 @@
 /**
  * The numbers of the one sentence of advice on top of a receiver's page.
  *
+ * Source: own rule: the first candidate, beside what it changes.
+ *
  * @module radio/candidates/advice
  */
 import type { Candidate, Candidates } from './candidates.ts';
@@ -41,7 +43,8 @@ const WORTHWHILE_DB = 1;
  * @returns The advice.
  *
  * @example
- *   advise(judgeCandidates(input)).ifHz; // 555000
+ *   advise(judgeCandidates({ receiver, cases: [judged], periods: ['night'], fromHz: 551_000,
+ *     toHz: 560_000, stepHz: 500, maxM: 3, maxN: 2 })).ifHz; // 555000
  */
 export function advise({ present, candidates }: Candidates): Advice {
   const best = candidates[0];

@@ -1,6 +1,8 @@
 /**
  * The order of candidates for the IF.
  *
+ * Source: own rule: reach, then deficit, then whistles, then the smaller shift.
+ *
  * @module radio/candidates/candidate-order
  */
 import { type HarmonicOnChannel, nearestWhistle } from './harmonics-on-channels.ts';
@@ -29,7 +31,7 @@ const EQUAL_DB = 1e-9;
  * @returns Negative when `one` comes first.
  *
  * @example
- *   [...candidates].sort((a, b) => compareCandidates(a, b, 455_000));
+ *   compareCandidates(candidates[0], candidates[1], 455_000) < 0; // true: the deficit is smaller
  */
 export function compareCandidates(one: Orderable, other: Orderable, presentHz: number): number {
   return decide(one, other, presentHz).difference;
@@ -42,6 +44,8 @@ export function compareCandidates(one: Orderable, other: Orderable, presentHz: n
  * @param second The one after it.
  * @param presentHz The present IF, hertz.
  * @returns The term.
+ * @example
+ *   decidingTerm(candidates[0], candidates[1], 455_000); // 'deficit'
  */
 export function decidingTerm(first: Orderable, second: Orderable, presentHz: number): RankingTerm {
   return decide(first, second, presentHz).term;
@@ -73,6 +77,8 @@ function steps(deficitDb: number): number {
  * @param ordered The candidates, in order.
  * @param presentHz The present IF, hertz.
  * @returns A sentence.
+ * @example
+ *   rankingSentence(candidates.slice(0, 1), 455_000); // '450 kHz is the only candidate.'
  */
 export function rankingSentence(ordered: readonly Orderable[], presentHz: number): string {
   const [first, second] = ordered;

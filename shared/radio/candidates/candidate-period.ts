@@ -1,6 +1,8 @@
 /**
  * A candidate for the IF in one period.
  *
+ * Source: own rule, as in `Deficit`.
+ *
  * @module radio/candidates/candidate-period
  */
 import type { Kind } from '../assessment/deficit.ts';

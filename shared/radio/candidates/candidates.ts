@@ -1,6 +1,8 @@
 /**
  * Candidates for the intermediate frequency, judged against the lists of one or several sites.
  *
+ * Source: own rule; responses as in `assess`.
+ *
  * @module radio/candidates/candidates
  */
 import { capacitanceChange } from '../mixing/beat-oscillator.ts';
@@ -15,6 +17,7 @@ import type { FieldStrength } from '../propagation/field-strength.ts';
 import { type HarmonicOnChannel, harmonicsOnChannels } from './harmonics-on-channels.ts';
 import { outOfReach } from './if-reach.ts';
 import { breakthroughWindow } from './if-window.ts';
+import type { Orders } from '../assessment/finding.ts';
 import { Listening } from '../assessment/listening.ts';
 import { rasterDistance, rasterStep } from '../channels/raster.ts';
 import type { Receiver } from '../receiver.ts';
@@ -42,7 +45,7 @@ export interface CandidateCase {
 }
 
 /** What is judged. */
-export interface CandidatesInput {
+export interface CandidatesInput extends Orders {
   readonly receiver: Receiver;
   readonly cases: readonly CandidateCase[];
   readonly periods: readonly Period[];
@@ -50,8 +53,6 @@ export interface CandidatesInput {
   /** Inclusive. */
   readonly toHz: number;
   readonly stepHz: number;
-  readonly maxM: number;
-  readonly maxN: number;
 }
 
 /** One intermediate frequency, judged. */
@@ -99,9 +100,9 @@ export interface Candidates {
  * @throws {RangeError} If a value is out of range, or there would be more than 400 candidates.
  *
  * @example
- *   judgeCandidates({ receiver, cases: [{ site, stations, fields: { night }, raster }],
- *     periods: ['night'], fromHz: 551_000, toHz: 560_000, stepHz: 500, maxM: 3, maxN: 2 })
- *     .candidates[0]?.ifHz; // 554500 between strong stations on 550 and 560 kHz
+ *   judgeCandidates({ receiver, cases: [judged], periods: ['night'], fromHz: 551_000,
+ *     toHz: 560_000, stepHz: 500, maxM: 3, maxN: 2 })
+ *     .candidates[0]?.ifHz; // 555000 between strong stations on 550 and 560 kHz
  */
 export function judgeCandidates(input: CandidatesInput): Candidates {
   const { receiver } = input;
@@ -185,8 +186,9 @@ class Bench {
   }
 }
 
-function listeningsOf(
-  { receiver, cases, maxM, maxN }: CandidatesInput,
+/** The receiver at each site in one period, ready to be judged at any IF. */
+export function listeningsOf(
+  { receiver, cases, maxM, maxN, checkpoint }: Pick<CandidatesInput, 'receiver' | 'cases'> & Orders,
   period: Period,
   selectivity: IfSelectivity,
 ): Listening[] {
@@ -194,7 +196,10 @@ function listeningsOf(
     const spectrum = new Spectrum(stations, fields[period] ?? []);
     const tables = new WeightingTables(receiver, selectivity, site.ituRegion, maxM);
     const scans = bandScans(receiver, site, raster, spectrum, tables);
-    return new Listening(spectrum, scans, { orders: { maxM, maxN }, b6Hz: selectivity.b6Hz });
+    return new Listening(spectrum, scans, {
+      orders: { maxM, maxN, checkpoint },
+      b6Hz: selectivity.b6Hz,
+    });
   });
 }
 

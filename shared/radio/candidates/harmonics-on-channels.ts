@@ -1,6 +1,8 @@
 /**
  * Harmonics of an IF against the channels of the bands they fall on.
  *
+ * Source: arithmetic.
+ *
  * @module radio/candidates/harmonics-on-channels
  */
 import { ifHarmonics } from '../mixing/harmonic-whistles.ts';
@@ -28,8 +30,8 @@ export interface HarmonicOnChannel {
  * @returns The harmonics, ascending.
  *
  * @example
- *   harmonicsOnChannels(455_000, [{ lowHz: 520_000, highHz: 1_710_000 }], defaultRaster(1));
- *   // 910000 on 909000: 1000; 1365000 on 1368000: 3000
+ *   const bands = [{ lowHz: 520_000, highHz: 1_710_000 }];
+ *   harmonicsOnChannels(455_000, bands, defaultRaster(1)).map(({ beatHz }) => beatHz); // [1000, 3000]
  */
 export function harmonicsOnChannels(
   ifHz: number,

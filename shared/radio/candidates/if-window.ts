@@ -1,6 +1,8 @@
 /**
  * How exactly an IF must be kept.
  *
+ * Source: own rule: breakthrough within 3 dB of the best.
+ *
  * @module radio/candidates/if-window
  */
 import type { FrequencySpan } from '../mixing/tuning-spans.ts';
@@ -24,7 +26,7 @@ const STEP_HZ = 100;
  * @returns Whole hertz.
  *
  * @example
- *   breakthroughWindow(555_000, [(hz) => Math.abs(hz - 560_000) / 100], 11_000); // up to 555300
+ *   breakthroughWindow(555_000, [(hz) => Math.abs(hz - 560_000) / 100], 11_000).high; // 555300
  */
 export function breakthroughWindow(
   ifHz: number,

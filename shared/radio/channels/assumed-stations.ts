@@ -1,6 +1,8 @@
 /**
  * A list for those who have none: the same field on every channel.
  *
+ * Source: own rule.
+ *
  * @module radio/channels/assumed-stations
  */
 import { rasterChannels } from './raster.ts';

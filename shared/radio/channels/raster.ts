@@ -3,6 +3,9 @@
  *
  * A raster is dated data that people may edit; the defaults here are what the ITU Regions plan by.
  *
+ * Source: ITU-R Final Acts GE75 (9 kHz in Regions 1 and 3) and RJ81 (10 kHz in Region 2), from
+ * memory, not re-read; the rest is arithmetic.
+ *
  * @module radio/channels/raster
  */
 import type { ItuRegion } from '../site.ts';

@@ -1,6 +1,8 @@
 /**
  * A list of stations as columns, sorted by frequency once and searched ever after.
  *
+ * Source: arithmetic.
+ *
  * @module radio/channels/spectrum
  */
 import type { FieldStrength } from '../propagation/field-strength.ts';

@@ -1,6 +1,8 @@
 /**
  * Response of a pair of coupled circuits, as in an IF transformer.
  *
+ * Source: textbook theory of two coupled circuits, from memory, not re-read; checked with ngspice.
+ *
  * @module radio/circuits/coupled-pair
  */
 import { type Decibels, decibels } from '../units.ts';

@@ -1,6 +1,8 @@
 /**
  * Rejection of everything between the aerial and the mixer, on one band.
  *
+ * Source: tuned circuits in cascade, as in `circuitRejection`; stray pick-up is common practice.
+ *
  * @module radio/circuits/front-end
  */
 import { aerialLoss, type FixedLoss } from './aerial.ts';

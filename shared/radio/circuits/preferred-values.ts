@@ -1,6 +1,8 @@
 /**
  * Preferred values of components.
  *
+ * Source: IEC 60063, from memory, not re-read.
+ *
  * @module radio/circuits/preferred-values
  */
 

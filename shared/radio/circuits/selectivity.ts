@@ -1,6 +1,9 @@
 /**
  * Selectivity of the IF amplifier.
  *
+ * Source: own model through the two widths that a user knows; transformers as in
+ * `coupledPairRejection`.
+ *
  * @module radio/circuits/selectivity
  */
 import { coupledPairCrossing, coupledPairRejection } from './coupled-pair.ts';

@@ -1,6 +1,8 @@
 /**
  * Parts of a wave trap for a frequency.
  *
+ * Source: resonance, and own rule for the choice; losses as in `trapLoss`.
+ *
  * @module radio/circuits/trap-design
  */
 import { nearestPreferred, type Series } from './preferred-values.ts';

@@ -1,6 +1,8 @@
 /**
  * Wave traps at the aerial terminal.
  *
+ * Source: network theory; checked with ngspice.
+ *
  * @module radio/circuits/trap
  */
 import type { Trap } from '../receiver.ts';

@@ -1,6 +1,8 @@
 /**
  * Rejection of tuned circuits away from resonance.
  *
+ * Source: textbook theory of the parallel circuit; checked with ngspice.
+ *
  * @module radio/circuits/tuned-circuit
  */
 import { type Decibels, decibels } from '../units.ts';

@@ -1,12 +1,14 @@
 /**
  * A receiver judged as it is and as a cure leaves it, over the same stations.
  *
+ * Source: own rule; judged as in `judgeCandidates`.
+ *
  * @module radio/cures/cure-bench
  */
 import type { BandScan } from '../assessment/band-scan.ts';
 import { Deficit, type Worst } from '../assessment/deficit.ts';
 import type { FieldStrength } from '../propagation/field-strength.ts';
-import type { Finding, FindingSink } from '../assessment/finding.ts';
+import type { Finding, FindingSink, Orders } from '../assessment/finding.ts';
 import { FrontEnd } from '../circuits/front-end.ts';
 import { rasterChannels } from '../channels/raster.ts';
 import type { Receiver } from '../receiver.ts';
@@ -18,7 +20,7 @@ import type { RasterRange, Station } from '../station.ts';
 import { tuningOf } from '../tracking/tuning.ts';
 
 /** What is judged. */
-export interface CuresInput {
+export interface CuresInput extends Orders {
   readonly receiver: Receiver;
   readonly site: Site;
   readonly stations: readonly Station[];
@@ -26,8 +28,6 @@ export interface CuresInput {
   readonly fields: Readonly<Partial<Record<Period, readonly FieldStrength[]>>>;
   readonly raster: readonly RasterRange[];
   readonly periods: readonly Period[];
-  readonly maxM: number;
-  readonly maxN: number;
 }
 
 /** A receiver, designed for its own `ifHz`, and the IF it is aligned to. */
@@ -135,6 +135,9 @@ export class CureBench {
  * @param setUp The receiver and its IF.
  * @param channel The station's channel.
  * @returns Decibels.
+ * @throws {RangeError} If the receiver has no such band.
+ * @example
+ *   wantedLoss({ receiver, ifHz: 560_000 }, { band: 0, dialHz: 600_000 }); // 0: nothing but circuits
  */
 export function wantedLoss({ receiver, ifHz }: SetUp, channel: WantedChannel): number {
   const band = receiver.bands[channel.band];

@@ -1,6 +1,8 @@
 /**
  * The stations that come through on the IF, as a trap meets them.
  *
+ * Source: own rule; fields and rejections as in `assess`.
+ *
  * @module radio/cures/cure-offenders
  */
 import type { JudgedSetUp, SetUp, WantedChannel } from './cure-bench.ts';

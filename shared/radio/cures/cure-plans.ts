@@ -1,6 +1,8 @@
 /**
  * The changes to a receiver that are tried as cures.
  *
+ * Source: common practice.
+ *
  * @module radio/cures/cure-plans
  */
 import type { SetUp } from './cure-bench.ts';
@@ -31,13 +33,32 @@ export interface CurePlan {
 /** Q of a circuit added to a band that has none; common practice for medium wave. */
 const USUAL_Q = 80;
 
-/** The IF moved by the cores and trimmers that are there. */
+/**
+ * The IF moved by the cores and trimmers that are there.
+ *
+ * @param receiver The receiver.
+ * @param ifHz The new IF, hertz.
+ * @returns The plan.
+ * @example
+ *   movePlan(receiver, 554_500).name; // 'Move the IF to 554.5 kHz'
+ */
 export function movePlan(receiver: Receiver, ifHz: number): CurePlan {
   const name = `Move the IF to ${khz(ifHz)}`;
   return { kind: 'move-if', name, setUp: { receiver, ifHz }, parts: [], reversible: true };
 }
 
-/** A trap at the aerial terminal, in place of one that is there; with the IF moved or not. */
+/**
+ * A trap at the aerial terminal, in place of one that is there; with the IF moved or not.
+ *
+ * @param receiver The receiver.
+ * @param ifHz The IF, hertz.
+ * @param trap The trap.
+ * @returns The plan.
+ * @example
+ *   const offender = { hz: 560e3, levelDb: 50, leastDb: -Infinity };
+ *   const trap = bestTrap([offender], 600e3, { q: 100, sourceOhms: 400, loadOhms: 1000 });
+ *   trapPlan(receiver, 554_500, trap).kind; // 'move-if-and-trap'
+ */
 export function trapPlan(receiver: Receiver, ifHz: number, trap: CureTrap): CurePlan {
   const moved = ifHz !== receiver.ifHz;
   const place = trap.trap.kind === 'parallel' ? 'in the aerial lead' : 'across the aerial input';
@@ -52,7 +73,14 @@ export function trapPlan(receiver: Receiver, ifHz: number, trap: CureTrap): Cure
   };
 }
 
-/** The oscillator on the other side of the signal, on each band by itself where it can run there. */
+/**
+ * The oscillator on the other side of the signal, on each band by itself where it can run there.
+ *
+ * @param receiver The receiver.
+ * @returns A plan for each band on which it can.
+ * @example
+ *   otherSidePlans(receiver).length; // 1
+ */
 export function otherSidePlans(receiver: Receiver): CurePlan[] {
   const { ifHz, bands } = receiver;
   return bands.flatMap((band): CurePlan[] => {
@@ -71,7 +99,14 @@ export function otherSidePlans(receiver: Receiver): CurePlan[] {
   });
 }
 
-/** One more tuned circuit on every band, as good as the last of those that are there. */
+/**
+ * One more tuned circuit on every band, as good as the last of those that are there.
+ *
+ * @param receiver The receiver.
+ * @returns The plan.
+ * @example
+ *   oneMoreCircuitPlan(receiver).setUp.receiver.bands[0]?.circuits.length; // 3
+ */
 export function oneMoreCircuitPlan(receiver: Receiver): CurePlan {
   const more = (band: Band): Band => {
     const circuit = band.circuits.at(-1) ?? { qLow: USUAL_Q, qHigh: USUAL_Q };
@@ -86,7 +121,14 @@ export function oneMoreCircuitPlan(receiver: Receiver): CurePlan {
   };
 }
 
-/** Nothing gets past the tuned circuits any more. */
+/**
+ * Nothing gets past the tuned circuits any more.
+ *
+ * @param receiver The receiver.
+ * @returns The plan.
+ * @example
+ *   screeningPlan(receiver).setUp.receiver.strayDb; // null
+ */
 export function screeningPlan(receiver: Receiver): CurePlan {
   return {
     kind: 'screening',

@@ -1,6 +1,8 @@
 /**
  * The wave trap that does most against breakthrough.
  *
+ * Source: own rule: the least power that is left of all offenders; losses as in `trapLoss`.
+ *
  * @module radio/cures/cure-trap
  */
 import { nearestPreferred, type Series } from '../circuits/preferred-values.ts';
@@ -67,7 +69,7 @@ interface Found {
  *
  * @example
  *   bestTrap([{ hz: 560e3, levelDb: 50, leastDb: -Infinity }], 600e3,
- *     { q: 100, sourceOhms: 400, loadOhms: 1000 })?.frequencyHz; // within 1 kHz of 560000
+ *     { q: 100, sourceOhms: 400, loadOhms: 1000 })?.frequencyHz; // 559.9e3
  */
 export function bestTrap(
   offenders: readonly Offender[],

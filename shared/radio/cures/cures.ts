@@ -1,6 +1,8 @@
 /**
  * All cures of a receiver's unwanted responses on one table.
  *
+ * Source: own rule; judged as in `judgeCandidates`.
+ *
  * @module radio/cures/cures
  */
 import { CAUTION } from '../caution.ts';
@@ -74,8 +76,7 @@ const USUAL_ENDS: TrapEnds = { q: 100, sourceOhms: 400, loadOhms: 1000 };
  * @throws {RangeError} If a value is out of range; the message names it.
  *
  * @example
- *   findCures({ receiver, site, stations, fields: { night }, raster, periods: ['night'],
- *     maxM: 3, maxN: 2 }).cures[0]?.name; // "Move the IF to 554.5 kHz"
+ *   findCures({ receiver, ...judged, periods: ['night'], ...orders }).cures[0]?.name; // 'Move the IF to 572.6 kHz'
  */
 export function findCures(input: CuresInput): Cures {
   const bench = new CureBench(input);

@@ -1,6 +1,8 @@
 /**
  * Weighting of audible noise and tones by the ear.
  *
+ * Source: ITU-R BS.468, from memory, not re-read.
+ *
  * @module radio/hearing/ear-weighting
  */
 

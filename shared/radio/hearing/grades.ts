@@ -1,6 +1,9 @@
 /**
  * Grades of interference: the five words of ITU-R BS.1284, and one for what cannot be heard.
  *
+ * Source: words of ITU-R BS.1284, from memory, not re-read; thresholds of ITU-R BS.560-4 and 47 CFR
+ * 73.37.
+ *
  * @module radio/hearing/grades
  */
 import type { Service } from '../receiver.ts';

@@ -1,6 +1,9 @@
 /**
  * The spectrum of an average broadcast programme.
  *
+ * Source: own model, after the shape of the coloured noise of ITU-R BS.559, from memory, not re-
+ * read.
+ *
  * @module radio/hearing/programme
  */
 import type { ItuRegion } from '../site.ts';
@@ -24,6 +27,7 @@ export interface ProgrammeBand {
 /**
  * Audio width that stations of a Region emit: 4.5 kHz in Regions 1 and 3, 10 kHz in Region 2.
  *
+ * @returns Hertz.
  * @example
  *   emissionWidth(2); // 10000
  */

@@ -1,6 +1,8 @@
 /**
  * What a listener to a service expects: assumed wanted field, protection ratio, tuning tolerance.
  *
+ * Source: GE75 and Rio 1981, 47 CFR 73.37; the others from memory of the literature, not re-read.
+ *
  * @module radio/hearing/service-figures
  */
 import type { Band, Service } from '../receiver.ts';

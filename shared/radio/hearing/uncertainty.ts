@@ -1,6 +1,8 @@
 /**
  * How far off a figure may be: estimates of our own, one standard deviation.
  *
+ * Source: own estimate.
+ *
  * @module radio/hearing/uncertainty
  */
 import type { Period } from '../site.ts';
@@ -49,7 +51,7 @@ export function ratioUncertainty(
  * @returns One standard deviation, decibels.
  *
  * @example
- *   changeUncertainty(1, 1, (hz) => -hz / 1000, 5000); // hypot(0.5, 4) = 4.03
+ *   changeUncertainty(1, 1, (hz) => -hz / 1000, 5000); // 4.03 = hypot(0.5, 4)
  */
 export function changeUncertainty(
   n: number,

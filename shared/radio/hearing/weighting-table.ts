@@ -1,6 +1,8 @@
 /**
  * Weighting over the tuning tolerance of a set that is not locked to the station.
  *
+ * Source: own model: the worst that the tuning tolerance allows.
+ *
  * @module radio/hearing/weighting-table
  */
 import type { Weighting } from './weighting.ts';

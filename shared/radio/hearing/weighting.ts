@@ -2,6 +2,8 @@
  * What an interferer at a distance from the IF's centre is worth to a listener, relative to the
  * same programme on the same frequency.
  *
+ * Source: own model; network of ITU-R BS.468, from memory, not re-read.
+ *
  * @module radio/hearing/weighting
  */
 import { earWeighting, earWeightingPower } from './ear-weighting.ts';
@@ -75,7 +77,7 @@ export function programmeWeighting(
  *
  * @example
  *   const w = toneWeighting(ifSelectivity({ kind: 'widths', b6Hz: 6000, b60Hz: 22000 }, 455e3), 1000);
- *   w(2000); // more than w(0): the beat of 3 kHz is where the ear is keen
+ *   w(2000); // 8.4: the beat of 3 kHz is where the ear is keen
  */
 export function toneWeighting(selectivity: IfSelectivity, pitchHz: number): Weighting {
   if (!(pitchHz > 0)) throw new RangeError(`pitchHz must be above 0, got ${pitchHz}`);

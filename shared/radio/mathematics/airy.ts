@@ -47,7 +47,7 @@ const ASYMPTOTIC = asymptoticPairs(7);
  * @returns Ai(z) and Ai'(z), within 1e-9 of their envelope.
  * @throws {RangeError} If z is large and on the positive side.
  * @example
- *   airy(complex(-1)).value; // 0.535561
+ *   airy(complex(-1)).value; // 0.535561 + 0j
  */
 export function airy(z: Complex): Airy {
   if (modulus(z) < ASYMPTOTIC_FROM) return taylorSeries(z);

@@ -1,6 +1,8 @@
 /**
  * What a change of IF asks of the beat-frequency oscillator and of the IF capacitances.
  *
+ * Source: resonance; what is met in practice is common practice.
+ *
  * @module radio/mixing/beat-oscillator
  */
 

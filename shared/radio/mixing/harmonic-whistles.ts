@@ -1,6 +1,8 @@
 /**
  * Whistles of the harmonics of the IF, which leak from the detector back to the aerial.
  *
+ * Source: arithmetic.
+ *
  * @module radio/mixing/harmonic-whistles
  */
 
@@ -24,7 +26,7 @@ export interface IfHarmonic {
  * @throws {RangeError} If the IF is not above 0.
  *
  * @example
- *   ifHarmonics(455_000, 520_000, 1_710_000); // 2 on 910000, 3 on 1365000
+ *   ifHarmonics(455_000, 520_000, 1_710_000).map(({ dialHz }) => dialHz); // [910000, 1365000]
  */
 export function ifHarmonics(ifHz: number, lowHz: number, highHz: number): IfHarmonic[] {
   if (!(ifHz > 0)) throw new RangeError(`ifHz must be above 0, got ${ifHz}`);

@@ -1,6 +1,8 @@
 /**
  * Pairs of stations that make the IF between them, whatever the dial says.
  *
+ * Source: arithmetic of sums and differences; the level is told by no model here.
+ *
  * @module radio/mixing/intermodulation
  */
 import type { Response } from '../assessment/response.ts';

@@ -5,6 +5,8 @@
  * follow the conversion transconductance about 28, 14 and 9 % of the peak given by E. W. Herold,
  * Proc. IRE, February 1942 (abstract); the others are estimates of our own.
  *
+ * Source: own model after E. W. Herold, Proc. IRE, February 1942 (abstract).
+ *
  * @module radio/mixing/product-levels
  */
 

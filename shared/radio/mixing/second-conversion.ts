@@ -1,6 +1,8 @@
 /**
  * What a second conversion adds to the responses of a receiver.
  *
+ * Source: arithmetic.
+ *
  * @module radio/mixing/second-conversion
  */
 import type { Receiver, SecondConversion } from '../receiver.ts';
@@ -59,7 +61,8 @@ export function secondOscillator(
  * @returns The harmonics, ascending; none without a second conversion.
  *
  * @example
- *   secondOscillatorHarmonics(receiver, 1_600_000, 4_000_000); // 1 on 1685000, 2 on 3370000
+ *   const set = { ifHz: 1_600_000, secondConversion: { ifHz: 85_000, oscillator: 'above' } };
+ *   secondOscillatorHarmonics(set, 1_600_000, 4_000_000).length; // 2: on 1685000 and 3370000
  */
 export function secondOscillatorHarmonics(
   { ifHz, secondConversion }: Pick<Receiver, 'ifHz' | 'secondConversion'>,
@@ -79,6 +82,8 @@ export function secondOscillatorHarmonics(
  * @param receiver The receiver.
  * @param reachHz Half of B6: a harmonic of the second oscillator this near the first IF is heard.
  * @returns A sentence, or null.
+ * @example
+ *   secondConversionWarning(receiver, 3000); // null: there is none
  */
 export function secondConversionWarning(
   { ifHz, secondConversion }: Pick<Receiver, 'ifHz' | 'secondConversion'>,

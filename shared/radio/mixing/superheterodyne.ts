@@ -1,6 +1,8 @@
 /**
  * Frequencies of the superheterodyne.
  *
+ * Source: arithmetic.
+ *
  * @module radio/mixing/superheterodyne
  */
 import type { OscillatorSide } from '../receiver.ts';
@@ -8,6 +10,8 @@ import type { OscillatorSide } from '../receiver.ts';
 /**
  * Sign of the oscillator's side: +1 above the signal, -1 below.
  *
+ * @param side Side of the oscillator.
+ * @returns The sign.
  * @example
  *   sideSign('below'); // -1
  */

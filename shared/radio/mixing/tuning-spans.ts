@@ -1,6 +1,8 @@
 /**
  * What the oscillator and the image sweep while a band is tuned.
  *
+ * Source: arithmetic.
+ *
  * @module radio/mixing/tuning-spans
  */
 import type { Band } from '../receiver.ts';

@@ -1,6 +1,8 @@
 /**
  * What a directional aerial sends towards a bearing.
  *
+ * Source: own rule: straight lines between 36 bearings, in decibels.
+ *
  * @module radio/propagation/directional-pattern
  */
 import { type Decibels, decibels } from '../units.ts';

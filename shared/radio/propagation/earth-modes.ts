@@ -1,6 +1,8 @@
 /**
  * Modes of a wave that creeps round the spherical earth: the roots of its boundary condition.
  *
+ * Source: ITU-R P.368, from memory, not re-read; the boundary condition w'(t) = q w(t).
+ *
  * @module radio/propagation/earth-modes
  */
 import { airy } from '../mathematics/airy.ts';
@@ -36,7 +38,7 @@ const MAX_NEWTON_STEPS = 20;
  * @returns The root, near the negative real axis.
  * @throws {RangeError} If the order is not a whole number from 1.
  * @example
- *   modeRoot(1, complex(0)); // -1.018793, the first zero of Ai'
+ *   modeRoot(1, complex(0)); // -1.018793 + 0j, the first zero of Ai'
  */
 export function modeRoot(order: number, p: Complex): Complex {
   if (!Number.isInteger(order) || order < 1) {

@@ -1,6 +1,8 @@
 /**
  * Field strength of every station of a list at a receiving site.
  *
+ * Source: the parts name theirs; own rule for power and sky wave at a moment, by suncalc.
+ *
  * @module radio/propagation/field-strength
  */
 import { patternGain } from './directional-pattern.ts';
@@ -75,7 +77,7 @@ export const FIELD_NOTES = {
  *   valid date.
  * @example
  *   // A station of 10 kW on 1 MHz, 50 km away over average ground, by day:
- *   fieldStrengths(site, [station], 'day')[0].fieldDb; // 67.03
+ *   fieldStrengths(site, [station], 'day')[0].fieldDb; // 67.0
  */
 export const fieldStrengths = (
   site: Site,

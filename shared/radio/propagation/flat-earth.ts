@@ -1,6 +1,8 @@
 /**
  * Ground wave over a flat earth, for distances where its curvature does not matter yet.
  *
+ * Source: K. A. Norton, from memory, not re-read.
+ *
  * @module radio/propagation/flat-earth
  */
 import {

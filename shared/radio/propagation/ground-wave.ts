@@ -1,6 +1,8 @@
 /**
  * Ground wave of a station: the flat earth near by, the spherical earth farther away.
  *
+ * Source: as in the two modules it joins; checked with data published with NTIA's LFMF.
+ *
  * @module radio/propagation/ground-wave
  */
 import { flatEarthAttenuation } from './flat-earth.ts';

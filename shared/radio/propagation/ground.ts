@@ -1,6 +1,9 @@
 /**
  * Electrical constants of the ground and what follows from them at a frequency.
  *
+ * Source: definition of the complex permittivity; ground classes from memory of ITU-R P.527, not
+ * re-read.
+ *
  * @module radio/propagation/ground
  */
 import { complex, type Complex, divide, squareRoot, subtract } from '../mathematics/complex.ts';
@@ -66,7 +69,7 @@ export function complexPermittivity(frequencyHz: number, ground: GroundConstants
  * @param ground Constants of the ground.
  * @returns delta.
  * @example
- *   surfaceImpedance(1_000_000, GROUNDS.sea); // 0.0023642 + 0.0023612j
+ *   surfaceImpedance(1_000_000, GROUNDS.sea); // 0.0023597 + 0.0023576j
  */
 export function surfaceImpedance(frequencyHz: number, ground: GroundConstants): Complex {
   const eta = complexPermittivity(frequencyHz, ground);

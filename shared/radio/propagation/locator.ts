@@ -24,7 +24,7 @@ const LOCATOR = /^[A-R]{2}(?:[0-9]{2}(?:[A-X]{2}(?:[0-9]{2})?)?)?$/i;
  * @returns The centre, degrees.
  * @throws {RangeError} If the text is not a locator.
  * @example
- *   locatorCentre('JN58td'); // 48.1458 north, 11.625 east
+ *   locatorCentre('JN58td'); // { latitude: 48.1458, longitude: 11.625 }
  */
 export function locatorCentre(locator: string): Place {
   if (!LOCATOR.test(locator)) {

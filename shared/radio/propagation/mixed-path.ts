@@ -1,6 +1,8 @@
 /**
  * Ground wave over a path of several kinds of ground: land and sea.
  *
+ * Source: G. Millington, Proc. IEE 96 III (1949), from memory, not re-read; the rest is arithmetic.
+ *
  * @module radio/propagation/mixed-path
  */
 import type { Ground } from '../site.ts';
@@ -74,6 +76,8 @@ export function scaledTo(sections: readonly PathSection[], length: Metres): Path
 /**
  * Length of all sections together.
  *
+ * @param sections The sections.
+ * @returns Metres.
  * @example
  *   totalLength([{ ground: 'sea', lengthM: 990 }]); // 990
  */

@@ -1,6 +1,8 @@
 /**
  * Man-made radio noise as a field strength.
  *
+ * Source: ITU-R P.372; field of the noise from memory, not re-read.
+ *
  * @module radio/propagation/noise
  */
 import type { NoiseClass, Site } from '../site.ts';

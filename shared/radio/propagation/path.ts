@@ -1,6 +1,8 @@
 /**
  * Geography: the path between two places, and the sun there.
  *
+ * Source: geographiclib-geodesic and suncalc; the middle on a sphere is arithmetic.
+ *
  * @module radio/propagation/path
  */
 import geodesy from 'geographiclib-geodesic';
@@ -79,7 +81,7 @@ export function pathBearing(from: Place, to: Place): number {
  * @param to The other end.
  * @returns The place midway.
  * @example
- *   pathMiddle({ latitude: 0, longitude: 0 }, { latitude: 0, longitude: 90 }); // 0, 45
+ *   pathMiddle({ latitude: 0, longitude: 0 }, { latitude: 0, longitude: 90 }); // { latitude: 0, longitude: 45 }
  */
 export function pathMiddle(from: Place, to: Place): Place {
   const [a, b] = [direction(from), direction(to)];

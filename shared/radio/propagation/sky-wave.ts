@@ -1,6 +1,8 @@
 /**
  * Sky wave of medium-wave stations at night.
  *
+ * Source: 47 CFR 73.190; ITU-R P.1147 from memory, not re-read; own estimate in critical hours.
+ *
  * @module radio/propagation/sky-wave
  */
 import type { Place } from './path.ts';

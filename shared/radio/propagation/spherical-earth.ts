@@ -1,6 +1,8 @@
 /**
  * Ground wave over the spherical earth: the residue series.
  *
+ * Source: ITU-R P.368, from memory, not re-read; checked with data published with NTIA's LFMF.
+ *
  * @module radio/propagation/spherical-earth
  */
 import {
@@ -36,7 +38,7 @@ interface Term {
  * @param refractivity Surface refractivity Ns, N-units, 250 to 400.
  * @returns Radius, metres.
  * @example
- *   effectiveEarthRadius(315); // 8729281
+ *   effectiveEarthRadius(315); // 8729.277e3
  */
 export function effectiveEarthRadius(refractivity: number): Metres {
   return metres(6_370_000 / (1 - 0.04665 * Math.exp(0.005577 * refractivity)));

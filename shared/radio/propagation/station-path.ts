@@ -1,6 +1,8 @@
 /**
  * The path from a station to the receiving site, and what 1 kW makes of it.
  *
+ * Source: the parts name theirs.
+ *
  * @module radio/propagation/station-path
  */
 import { GROUNDS } from './ground.ts';
@@ -113,6 +115,13 @@ export class StationPath {
   }
 }
 
-/** Whether there is a model of the sky wave on a frequency, hertz. */
+/**
+ * Whether there is a model of the sky wave on a frequency.
+ *
+ * @param frequencyHz Frequency, hertz.
+ * @returns Whether there is.
+ * @example
+ *   hasSkyWave(1_720_000); // false
+ */
 export const hasSkyWave = (frequencyHz: number): boolean =>
   frequencyHz >= SKY_WAVE_RANGE_HZ.low && frequencyHz <= SKY_WAVE_RANGE_HZ.high;

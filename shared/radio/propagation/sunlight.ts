@@ -1,6 +1,8 @@
 /**
  * Since when the sun is up at a place, and for how long still.
  *
+ * Source: suncalc.
+ *
  * @module radio/propagation/sunlight
  */
 import { type Place, sunAltitude, sunTimes } from './path.ts';

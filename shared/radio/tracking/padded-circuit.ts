@@ -1,6 +1,8 @@
 /**
  * Circuits on one gang: a plain one, and one padded to follow it at a constant distance.
  *
+ * Source: resonance; textbook theory of three-point tracking, from memory; checked with ngspice.
+ *
  * @module radio/tracking/padded-circuit
  */
 import type { TrackingConstants, TrackingCurve } from './tracking-curve.ts';
@@ -29,7 +31,14 @@ export interface PaddedCircuit extends PlainCircuit {
   readonly strayF: number;
 }
 
-/** `k = 1/(4 pi^2 L)`: the capacitance of a circuit is k over its frequency squared. */
+/**
+ * `k = 1/(4 pi^2 L)`: the capacitance of a circuit is k over its frequency squared.
+ *
+ * @param coilH Inductance L, henries.
+ * @returns k, farads times hertz squared.
+ * @example
+ *   resonanceConstant(205.1163e-6) / 550e3 ** 2; // 408.239e-12
+ */
 export function resonanceConstant(coilH: number): number {
   return 1 / (4 * Math.PI ** 2 * coilH);
 }
@@ -110,6 +119,10 @@ export function paddedCircuit(
  * @param strayF Stray across the gang, where the trimmer sits across the coil.
  * @param at For both settings: the gang's capacitance, and the frequency wanted.
  * @returns The circuit; a trimmer that is not above 0, or NaN, says that there is none.
+ * @example
+ *   const low = { gangF: 334.795e-12, hz: 1050e3 };
+ *   const high = { gangF: 54.768e-12, hz: 1850e3 };
+ *   refitted(436.837e-12, 'gang', 0, [low, high]).trimmerF; // 18.8e-12 for an IF of 450 kHz
  */
 export function refitted(
   padderF: number,
@@ -129,7 +142,15 @@ export function refitted(
   return { ...circuit, coilH };
 }
 
-/** Capacitance across the coil of a padded circuit at a setting of the gang, farads. */
+/**
+ * Capacitance across the coil of a padded circuit at a setting of the gang.
+ *
+ * @param circuit The circuit.
+ * @param gangF Capacitance of the gang, farads.
+ * @returns Farads.
+ * @example
+ *   capacitance(padded, 400e-12); // 214e-12
+ */
 export function capacitance(circuit: PaddedCircuit, gangF: number): number {
   const { padderF, trimmerF, trimmer, strayF } = circuit;
   const across = gangF + (trimmer === 'gang' ? trimmerF : strayF);
@@ -144,6 +165,8 @@ export function capacitance(circuit: PaddedCircuit, gangF: number): number {
  * @param padded The padded circuit.
  * @returns Frequency of the padded circuit against that of the plain one, as if the plain one were
  *   the signal circuit.
+ * @example
+ *   curveOfParts(plain, padded).oscillatorHz(1000e3); // 1455000
  */
 export function curveOfParts(plain: PlainCircuit, padded: PaddedCircuit): TrackingCurve {
   const k = resonanceConstant(plain.coilH);

@@ -1,6 +1,8 @@
 /**
  * What mistracking costs.
  *
+ * Source: own rule; losses as in `circuitRejection`.
+ *
  * @module radio/tracking/tracking-cost
  */
 import { FrontEnd } from '../circuits/front-end.ts';

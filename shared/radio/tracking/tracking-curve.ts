@@ -1,6 +1,8 @@
 /**
  * How a padded circuit follows a plain one on the same gang.
  *
+ * Source: textbook theory of three-point tracking, from memory; exact against a numeric solution.
+ *
  * @module radio/tracking/tracking-curve
  */
 

@@ -1,6 +1,8 @@
 /**
  * The best points for three-point tracking.
  *
+ * Source: own search for the least largest error (minimax).
+ *
  * @module radio/tracking/tracking-points
  */
 import { curveOf, trackingConstants, type TrackingCurve, trackingError } from './tracking-curve.ts';
@@ -30,8 +32,7 @@ export interface TrackedBand {
  * @throws {RangeError} If the band is upside down.
  *
  * @example
- *   bestTrackingPoints({ lowHz: 550e3, highHz: 1600e3, signedIfHz: 455e3 });
- *   // 606386, 1016923, 1514599
+ *   bestTrackingPoints(tracked); // [606386, 1016923, 1514599]
  */
 export function bestTrackingPoints(band: TrackedBand): TrackingPoints {
   const { lowHz, highHz } = band;
@@ -56,7 +57,16 @@ export function bestTrackingPoints(band: TrackedBand): TrackingPoints {
   return polished(best, band);
 }
 
-/** Largest tracking error over a band, with its sign. */
+/**
+ * Largest tracking error over a band.
+ *
+ * @param curve The curve.
+ * @param band The band.
+ * @returns Hertz, with its sign.
+ * @example
+ *   const points = trackingConstants([600e3, 1000e3, 1400e3], 455e3);
+ *   worstTrackingError(curveOf(points), tracked); // -11657
+ */
 export function worstTrackingError(curve: TrackingCurve, band: TrackedBand): number {
   const error = (hz: number): number => trackingError(curve, band.signedIfHz, hz);
   const step = (band.highHz - band.lowHz) / SECTIONS;

@@ -1,6 +1,8 @@
 /**
  * Design of the padded circuit by which oscillator and signal circuits follow each other.
  *
+ * Source: as in the parts; common practice for what is refused.
+ *
  * @module radio/tracking/tracking
  */
 import {
@@ -111,6 +113,9 @@ export function designTracking(input: TrackingInput): Tracking {
  * @param input The band, the IF, the gang and the points.
  * @returns The circuits and the curve; `refused` says why they cannot be built.
  * @throws {RangeError} If the band, the IF, the gang or the points cannot be.
+ * @example
+ *   trackedDesign({ ifHz: 455e3, lowHz: 550e3, highHz: 1600e3, oscillator: 'above', ...trackedGang })
+ *     .padded.padderF; // 436.837e-12
  */
 export function trackedDesign(input: TrackingInput): TrackedDesign {
   check(input);

@@ -1,6 +1,8 @@
 /**
  * Where tracking leaves the signal circuits while the dial shows a frequency.
  *
+ * Source: as in `trackingError`.
+ *
  * @module radio/tracking/tuning
  */
 import type { Band } from '../receiver.ts';
@@ -31,7 +33,8 @@ export interface TuningFound {
  * @throws {RangeError} If the tracking data cannot be.
  *
  * @example
- *   tuningOf(band, 455_000, 455_000).tuning?.(1_000_000); // 1000000 at a tracking point
+ *   const tracking = trackedGang;
+ *   tuningOf({ ...band, lowHz: 550e3, tracking }, 455e3, 455e3).tuning?.(1e6); // 1000000: a point
  */
 export function tuningOf(band: Band, presentHz: number, ifHz: number): TuningFound {
   const { tracking, lowHz, highHz, oscillator } = band;

@@ -1,6 +1,8 @@
 /**
  * Carriers in the IF amplifier while the dial stands still.
  *
+ * Source: arithmetic; levels as in `assess`.
+ *
  * @module radio/whistles/whistle-carriers
  */
 import type { BandScan } from '../assessment/band-scan.ts';

@@ -1,6 +1,8 @@
 /**
  * Possible causes of a whistle at a dial setting.
  *
+ * Source: arithmetic; the slope tells causes apart, common practice.
+ *
  * @module radio/whistles/whistle-causes
  */
 import type { BandScan } from '../assessment/band-scan.ts';
@@ -75,8 +77,8 @@ interface Reference {
  *
  * @example
  *   // Q 80, IF 455 kHz, oscillator above; 1521 kHz is 1 kHz from the image of 612 kHz.
- *   whistleCauses({ receiver, site, stations, fields, raster, dialHz: 612_000, pitchHz: null,
- *     pitchSlope: null }).causes[0]; // image, 1000 Hz, slope 2
+ *   whistleCauses({ ...imageAtSite, dialHz: 612_000, pitchHz: null, pitchSlope: null })
+ *     .causes[0]; // { cause: 'image', pitchHz: 1000, slope: 2 }
  */
 export function whistleCauses(input: WhistleInput): Whistles {
   const { receiver, dialHz } = input;

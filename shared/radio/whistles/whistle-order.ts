@@ -1,6 +1,8 @@
 /**
  * Order of the possible causes of a whistle.
  *
+ * Source: own rule.
+ *
  * @module radio/whistles/whistle-order
  */
 import type { WhistleCause } from './whistle-cause.ts';
@@ -30,6 +32,9 @@ const LEAST_SLOPE = 0.25;
  * @param heard Pitch and slope that were noted.
  * @param toleranceHz How far the dial may be read wrong, hertz.
  * @returns The causes, the most likely first.
+ * @example
+ *   const { causes } = whistleCauses({ ...imageAtSite, dialHz: 612_000, pitchHz: null, pitchSlope: null });
+ *   orderCauses(causes, { pitchHz: 1000, slope: 2 }, 0)[0].cause; // 'image'
  */
 export function orderCauses(
   causes: readonly WhistleCause[],

@@ -1,6 +1,8 @@
 /**
  * What to do at the bench to prove a cause of a whistle, in words.
  *
+ * Source: common practice.
+ *
  * @module radio/whistles/whistle-test
  */
 import { CAUTION } from '../caution.ts';
@@ -31,7 +33,7 @@ const TOUCHES: Readonly<Record<WhistleSource, boolean>> = {
  * @returns Sentences; with the usual caution where the set is touched.
  *
  * @example
- *   whistleTest(image, 2); // "Turn the dial by 100 Hz: the pitch moves by 200 Hz. ..."
+ *   whistleTest(image, 2).startsWith('Turn the dial by 100 Hz: the pitch moves by 200 Hz.'); // true
  */
 export function whistleTest(carrier: UnwantedCarrier, slope: number): string {
   const sentences = [tuning(slope), proof(carrier)];
