@@ -118,7 +118,7 @@ describe('moving an IF off a channel and keeping the plan', () => {
     await signIn(viewer, memberOf());
     const { pathname, search } = new URL(address);
     await viewer.goto(pathname + search);
-    await viewer.getByRole('heading', { name: 'What is heard, and why' }).waitFor();
+    await viewer.getByRole('heading', { name: 'The choice of IF' }).waitFor();
 
     const overflow = () =>
       viewer.evaluate(

@@ -6,13 +6,6 @@ import { PlansStore } from './plans/plans-store';
 /** The feature's only public file: `app.routes.ts` loads it lazily. */
 export const receiverRoutes: Routes = [
   {
-    path: '',
-    pathMatch: 'full',
-    canActivate: [signedInGuard],
-    title: $localize`Choice of IF`,
-    loadComponent: () => import('./receiver-page/receiver-page').then((m) => m.ReceiverPage),
-  },
-  {
     path: 'plans',
     canActivate: [signedInGuard],
     providers: [PlansStore],
@@ -31,6 +24,24 @@ export const receiverRoutes: Routes = [
         path: ':planId',
         title: $localize`Plan`,
         loadComponent: () => import('./plans/plan-page/plan-page').then((m) => m.PlanPage),
+      },
+    ],
+  },
+  {
+    path: '',
+    canActivate: [signedInGuard],
+    loadComponent: () => import('./receiver-page/receiver-page').then((m) => m.ReceiverPage),
+    children: [
+      {
+        path: '',
+        pathMatch: 'full',
+        title: $localize`Choice of IF`,
+        loadComponent: () => import('./choice-page/choice-page').then((m) => m.ChoicePage),
+      },
+      {
+        path: 'dial',
+        title: $localize`Dial`,
+        loadComponent: () => import('./dial-page/dial-page').then((m) => m.DialPage),
       },
     ],
   },

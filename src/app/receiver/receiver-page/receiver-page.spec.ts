@@ -5,6 +5,7 @@ import { TestBed } from '@angular/core/testing';
 import { provideRouter, Router, withComponentInputBinding } from '@angular/router';
 import { RouterTestingHarness } from '@angular/router/testing';
 
+import { ChoicePage } from '../choice-page/choice-page';
 import { ReceiverPage } from './receiver-page';
 import { ReceiverPageHarness } from './receiver-page-harness';
 
@@ -22,8 +23,8 @@ const receiver = {
   bands: [{ name: 'Range 4', lowHz: 600_000, highHz: 1_600_000, oscillator: 'above' }],
 };
 const site = { id: 4, name: 'Shed', editable: true, noise: 'rural', ituRegion: 2 };
-const region = { id: 2, name: 'Coast', ituRegion: 2, editable: true, editions: 1 };
 const raster = [{ lowHz: 540_000, highHz: 1_700_000, stepHz: 10_000 }];
+const region = { id: 2, name: 'Coast', ituRegion: 2, editable: true, editions: 1 };
 const edition = {
   id: 7,
   regionId: 2,
@@ -33,6 +34,8 @@ const edition = {
   source: 'list.csv',
   note: '',
   stations: 1,
+  raster,
+  editable: true,
   createdAt: when,
 };
 
@@ -89,7 +92,13 @@ async function open(address: string, sites: unknown[] = [site], editions: unknow
   TestBed.configureTestingModule({
     providers: [
       provideRouter(
-        [{ path: 'receivers/:id', component: ReceiverPage }],
+        [
+          {
+            path: 'receivers/:id',
+            component: ReceiverPage,
+            children: [{ path: '', component: ChoicePage }],
+          },
+        ],
         withComponentInputBinding(),
       ),
       provideHttpClient(),
@@ -104,7 +113,10 @@ async function open(address: string, sites: unknown[] = [site], editions: unknow
   flush('/api/receivers/1', receiver);
   flush('/api/sites?pageSize=500', listed(...sites));
   flush('/api/editions?pageSize=500', listed(...editions));
-  flush('/api/regions?pageSize=500', listed({ ...region, raster }));
+  flush(
+    '/api/regions?pageSize=500',
+    listed({ ...region, raster, rasters: [{ from: null, ranges: raster }] }),
+  );
   await router.fixture.whenStable();
   const loader = TestbedHarnessEnvironment.loader(router.fixture);
   const page = await loader.getHarness(ReceiverPageHarness);

@@ -8,23 +8,26 @@ import {
 } from '@angular/core';
 import { MatButtonModule } from '@angular/material/button';
 import { MatDialog } from '@angular/material/dialog';
-import { RouterLink } from '@angular/router';
+import { RouterLink, RouterOutlet } from '@angular/router';
 import { firstValueFrom } from 'rxjs';
 
 import type { Plan } from '../../../../shared/contracts/plan';
+import { ChartOrigin } from '../../charts/chart/chart-origin';
 import { kilohertz } from '../../charts/readings';
 import { FrequencyPipe } from '../../ui/frequency-pipe';
 import { Loading } from '../../ui/page-state/loading';
 import { ProblemNote } from '../../ui/page-state/problem-note';
 import { KeepPlan, type PlanToKeep } from '../keep-plan/keep-plan';
 import { Pickers } from '../pickers/pickers';
+import { SectionNav } from '../section-nav/section-nav';
 import { SiteInvitation } from '../site-invitation/site-invitation';
+import { TrialProgress } from '../trial-progress/trial-progress';
 import { TrialInputs } from '../trial/trial-inputs';
 import { TrialStore } from '../trial/trial-store';
-import { TrialView } from '../trial-view/trial-view';
+import { ReceiverOrigin } from './receiver-origin';
 import { ReceiverStore } from './receiver-store';
 
-/** One receiver: where to put its IF, and what is heard on its dial. */
+/** The frame around the sections of one receiver: where it stands, and what is on trial. */
 @Component({
   selector: 'app-receiver-page',
   templateUrl: './receiver-page.html',
@@ -36,10 +39,17 @@ import { ReceiverStore } from './receiver-store';
     Pickers,
     ProblemNote,
     RouterLink,
+    RouterOutlet,
+    SectionNav,
     SiteInvitation,
-    TrialView,
+    TrialProgress,
   ],
-  providers: [ReceiverStore, { provide: TrialInputs, useExisting: ReceiverStore }, TrialStore],
+  providers: [
+    ReceiverStore,
+    { provide: TrialInputs, useExisting: ReceiverStore },
+    { provide: ChartOrigin, useClass: ReceiverOrigin },
+    TrialStore,
+  ],
   changeDetection: ChangeDetectionStrategy.OnPush,
 })
 export class ReceiverPage {

@@ -1,31 +1,20 @@
 import { ChangeDetectionStrategy, Component, computed, inject } from '@angular/core';
-import { MatProgressBarModule } from '@angular/material/progress-bar';
 
-import { ProblemNote } from '../../ui/page-state/problem-note';
 import { advise } from '../advice/advice';
 import { AdvicePanel } from '../advice/advice-panel';
 import { ChoiceSection } from '../choice-section/choice-section';
-import { DialStrips } from '../dial-strips/dial-strips';
-import { ResponseTable } from '../response-table/response-table';
 import { rasterOn, shownAround } from '../trial/surroundings';
 import { TrialStore } from '../trial/trial-store';
 
-/** A receiver on trial: advice, choice of IF, dial, and what is heard, from the trial store given. */
+/** Section of a receiver: the advice, and where to put the IF. */
 @Component({
-  selector: 'app-trial-view',
-  templateUrl: './trial-view.html',
-  styleUrl: './trial-view.scss',
-  imports: [
-    AdvicePanel,
-    ChoiceSection,
-    DialStrips,
-    MatProgressBarModule,
-    ProblemNote,
-    ResponseTable,
-  ],
+  selector: 'app-choice-page',
+  templateUrl: './choice-page.html',
+  styleUrl: './choice-page.scss',
+  imports: [AdvicePanel, ChoiceSection],
   changeDetection: ChangeDetectionStrategy.OnPush,
 })
-export class TrialView {
+export class ChoicePage {
   protected readonly store = inject(TrialStore);
 
   protected readonly receiver = computed(() => this.store.setup()?.receiver);
@@ -38,9 +27,4 @@ export class TrialView {
     const [stations, period] = [this.store.stations(), this.store.period()];
     return advise({ answer, receiver, stations, channels, period });
   });
-
-  protected showWorking(id: string): void {
-    this.store.picked.set(id);
-    this.store.worked.set(id);
-  }
 }
