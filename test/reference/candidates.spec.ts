@@ -5,7 +5,13 @@ import { assess } from '../../shared/radio/assessment/assessment.ts';
 import { type Candidates, judgeCandidates } from '../../shared/radio/candidates/candidates.ts';
 import { defaultRaster } from '../../shared/radio/channels/raster.ts';
 import type { ItuRegion } from '../../shared/radio/site.ts';
-import { givenStations, oneBandReceiver, plainReceiver, siteIn } from '../support/plain-sets.ts';
+import {
+  givenStations,
+  oneBandReceiver,
+  plainBand,
+  plainReceiver,
+  siteIn,
+} from '../support/plain-sets.ts';
 
 const { guardBand, rasterDistances, dialEnds } = reference;
 
@@ -97,10 +103,11 @@ describe(`${rasterDistances.source} [${rasterDistances.mark}]`, () => {
 });
 
 describe(`${dialEnds.source} [${dialEnds.mark}]`, () => {
-  it('holds for a medium-wave band', () => {
+  it.each(dialEnds.checks)('$lowHz to $highHz, IF $ifHz', (check) => {
+    const { lowHz, highHz, ifHz, breakthroughHz } = check;
     const curve =
       assess({
-        receiver: plainReceiver(),
+        receiver: plainReceiver({ ifHz, bands: [plainBand({ lowHz, highHz })] }),
         site: siteIn(1),
         stations: [],
         fields: [],
@@ -115,7 +122,7 @@ describe(`${dialEnds.source} [${dialEnds.mark}]`, () => {
       curve.toSorted((a, b) => a[of] - b[of])[0]?.dialHz;
 
     expect(curve).toHaveLength(41);
-    expect(weakest('ifDb')).toBe(550_000);
-    expect(weakest('imageDb')).toBe(1_600_000);
+    expect(weakest('ifDb')).toBe(breakthroughHz);
+    expect(weakest('imageDb')).toBe(highHz);
   });
 });

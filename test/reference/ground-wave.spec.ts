@@ -6,6 +6,7 @@ import propagation from '../../datasets/reference/propagation.json' with { type:
 import { flatEarthAttenuation } from '../../shared/radio/propagation/flat-earth.ts';
 import { GROUNDS } from '../../shared/radio/propagation/ground.ts';
 import { groundWave } from '../../shared/radio/propagation/ground-wave.ts';
+import { ResidueSeries } from '../../shared/radio/propagation/spherical-earth.ts';
 import type { Ground } from '../../shared/radio/site.ts';
 import { hertz, metres } from '../../shared/radio/units.ts';
 
@@ -82,6 +83,21 @@ describe(`the flat earth against ${propagation.flatEarth.source} [C]`, () => {
       const attenuation = flatEarthAttenuation(hertz(frequencyHz), ground, metres(distanceM));
 
       expect(overPerfectGround + attenuation).toBeCloseTo(fieldDb, 3);
+    },
+  );
+});
+
+describe(`curvature: ${propagation.curvature.source} [${propagation.curvature.mark}]`, () => {
+  it.each(propagation.curvature.checks)(
+    '$frequencyHz Hz, $ground ground, $distanceM m: flat earth $leastDb to $mostDb dB high',
+    ({ frequencyHz, ground: kind, distanceM, leastDb, mostDb }) => {
+      const ground = GROUNDS[kind as Ground];
+      const [frequency, distance] = [hertz(frequencyHz), metres(distanceM)];
+      const series = new ResidueSeries(frequency, ground).attenuation(distance);
+      const high = flatEarthAttenuation(frequency, ground, distance) - series;
+
+      expect(high).toBeGreaterThan(leastDb);
+      expect(high).toBeLessThan(mostDb);
     },
   );
 });

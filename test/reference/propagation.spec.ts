@@ -7,10 +7,19 @@ import { millington } from '../../shared/radio/propagation/mixed-path.ts';
 import { noiseField } from '../../shared/radio/propagation/noise.ts';
 import { pathLength, sunTimes } from '../../shared/radio/propagation/path.ts';
 import type { Ground, NoiseClass } from '../../shared/radio/site.ts';
-import { skyWave } from '../../shared/radio/propagation/sky-wave.ts';
+import { geomagneticLatitude, skyWave } from '../../shared/radio/propagation/sky-wave.ts';
 import { hertz, type Metres, metres } from '../../shared/radio/units.ts';
 
-const { skyWave: sky, skyWaveP1147, mixedPath, noise, distance, locators, sun } = propagation;
+const {
+  skyWave: sky,
+  skyWaveP1147,
+  geomagneticLatitude: magnetic,
+  mixedPath,
+  noise,
+  distance,
+  locators,
+  sun,
+} = propagation;
 
 /** The rule speaks of 100 mV/m at 1 km, the engine of 1 kW e.m.r.p.: 300 mV/m. */
 const KILOWATT_DB = 20 * Math.log10(3);
@@ -36,6 +45,13 @@ describe(`sky wave, the other form: ${skyWaveP1147.source} [${skyWaveP1147.mark}
       expect(Math.abs(field - fieldDb)).toBeLessThan(0.0002);
     },
   );
+});
+
+describe(`geomagnetic latitude: ${magnetic.source} [${magnetic.mark}]`, () => {
+  it.each(magnetic.checks)('$latitude, $longitude: $degrees', ({ degrees, ...place }) => {
+    // Near the pole the arcsine is steep.
+    expect(geomagneticLatitude(place)).toBeCloseTo(degrees, 5);
+  });
 });
 
 describe(`mixed path: ${mixedPath.source} [${mixedPath.mark}]`, () => {

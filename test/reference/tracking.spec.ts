@@ -12,9 +12,14 @@ import {
   trackingConstants,
   trackingError,
 } from '../../shared/radio/tracking/tracking-curve.ts';
+import {
+  oscillatorFrequency,
+  productFrequencies,
+} from '../../shared/radio/mixing/superheterodyne.ts';
+import { resonanceConstant } from '../../shared/radio/tracking/padded-circuit.ts';
 import { circuitRejection } from '../../shared/radio/circuits/tuned-circuit.ts';
 
-const { curve, parts, best, loss, refit } = reference;
+const { curve, parts, best, loss, refit, trimmerPeaks } = reference;
 const POINTS = [600_000, 1_000_000, 1_400_000] as const;
 const MEDIUM_WAVE: TrackingInput = {
   lowHz: 550_000,
@@ -107,5 +112,24 @@ describe(`after a change of IF: ${refit.source} [${refit.mark}]`, () => {
     expect(100 * change).toBeCloseTo(check.coilPercent, 3);
     expect(pico(after.oscillatorTrimmerF)).toBeCloseTo(check.trimmerPf, 3);
     expect(trackingError(refittedCurve, check.ifHz, 1_000_000)).toBeCloseTo(check.errorHz, 0);
+  });
+});
+
+describe(`trimmer peaks: ${trimmerPeaks.source} [${trimmerPeaks.mark}]`, () => {
+  const { generatorHz, ifHz } = trimmerPeaks;
+
+  it.each([
+    { oscillator: 'above', rightHasLess: true },
+    { oscillator: 'below', rightHasLess: false },
+  ] as const)('oscillator $oscillator', ({ oscillator, rightHasLess }) => {
+    const right = oscillatorFrequency(generatorHz, ifHz, oscillator);
+    const peaks = [generatorHz - ifHz, generatorHz + ifHz];
+    const wrong = peaks.find((hz) => hz !== right) ?? NaN;
+    // At either the generator makes the IF; with one coil, capacitance goes by the square.
+    const farads = (hz: number): number => resonanceConstant(100e-6) / hz ** 2;
+
+    expect(peaks).toContain(right);
+    for (const hz of peaks) expect(productFrequencies(hz, ifHz, 1, 1)).toContain(generatorHz);
+    expect(farads(right) < farads(wrong)).toBe(rightHasLess);
   });
 });

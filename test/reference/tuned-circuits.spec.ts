@@ -6,7 +6,7 @@ import type { Trap } from '../../shared/radio/receiver.ts';
 import { trapFrequency, trapLoss } from '../../shared/radio/circuits/trap.ts';
 import { circuitRejection, detuning } from '../../shared/radio/circuits/tuned-circuit.ts';
 
-const { examinationItems, isolated, ifRejection, coupledPair, traps } = reference;
+const { examinationItems, isolated, ifRejection, coupledPair, traps, trapCosts } = reference;
 
 describe(`image rejection ratios as published [${examinationItems.mark}]`, () => {
   it.each(examinationItems.checks)(
@@ -58,5 +58,14 @@ describe(`wave traps: ${traps.source} [${traps.mark}]`, () => {
     const trap: Trap = { ...traps, kind: kind === 'parallel' ? 'parallel' : 'series' };
 
     expect(Math.abs(trapLoss(trap, frequencyHz) - lossDb)).toBeLessThan(0.001);
+  });
+});
+
+describe(`cost of a trap: ${trapCosts.source} [${trapCosts.mark}]`, () => {
+  it.each(trapCosts.checks)('coil of $inductanceH H: $lossDb dB', ({ inductanceH, lossDb }) => {
+    const capacitanceF = 1 / ((2 * Math.PI * trapCosts.frequencyHz) ** 2 * inductanceH);
+    const trap: Trap = { ...traps, kind: 'parallel', inductanceH, capacitanceF };
+
+    expect(Math.abs(trapLoss(trap, trapCosts.dialHz) - lossDb)).toBeLessThan(trapCosts.toleranceDb);
   });
 });

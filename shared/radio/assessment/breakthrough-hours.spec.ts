@@ -3,6 +3,7 @@ import { describe, expect, it } from 'vitest';
 import { plainBand, plainReceiver } from '../../../test/support/plain-sets.ts';
 import { assess } from './assessment.ts';
 import { breakthroughHours } from './breakthrough-hours.ts';
+import type { SkyWaveChoice } from '../propagation/sky-wave.ts';
 import { fieldStrengths } from '../propagation/field-strength.ts';
 import { defaultRaster } from '../channels/raster.ts';
 import type { Site } from '../site.ts';
@@ -96,6 +97,18 @@ describe('breakthroughHours', () => {
 
     for (const { rises, falls } of [given, polar]) expect([...rises, ...falls]).toEqual([]);
     expect(given.hours.every(({ breakthrough }) => breakthrough !== null)).toBe(true);
+  });
+
+  it('takes the sky wave that is chosen: more in a tenth of the nights, other by another form', () => {
+    const levels = (skyWave?: SkyWaveChoice): number =>
+      breakthroughHours({ receiver, site, raster, stations: [station({})], times, skyWave })
+        .hours[0]?.breakthrough?.levelDb ?? NaN;
+    const times = halfHoursOf('2026-03-20').slice(0, 1);
+    const usual = levels();
+
+    expect(levels({ form: 'cfr-73-190', nights: 50 })).toBe(usual);
+    expect(levels({ form: 'cfr-73-190', nights: 10 })).toBeGreaterThan(usual + 5);
+    expect(levels({ form: 'itu-r-p1147', nights: 50 })).not.toBe(usual);
   });
 
   it('hears nothing without stations', () => {

@@ -13,6 +13,7 @@ import type { Receiver } from '../receiver.ts';
 import { bandScans, WeightingTables } from './receiver-at-site.ts';
 import { ifSelectivity } from '../circuits/selectivity.ts';
 import type { Site } from '../site.ts';
+import type { SkyWaveChoice } from '../propagation/sky-wave.ts';
 import { Spectrum } from '../channels/spectrum.ts';
 import type { RasterRange, Station } from '../station.ts';
 
@@ -27,6 +28,8 @@ export interface BreakthroughHoursInput {
   readonly raster: readonly RasterRange[];
   /** Moments, in order. */
   readonly times: readonly Date[];
+  /** Which sky wave; left out, the usual one. */
+  readonly skyWave?: SkyWaveChoice | undefined;
   /** Called between products; it throws when nobody waits for the answer any more. */
   readonly checkpoint?: (() => void) | undefined;
 }
@@ -73,7 +76,7 @@ export interface BreakthroughHours {
  *     .rises.map((at) => at.toISOString()); // ['2026-03-21T00:00:00.000Z']
  */
 export function breakthroughHours(input: BreakthroughHoursInput): BreakthroughHours {
-  const fieldsAtSite = new FieldsAtSite(input.site, input.stations);
+  const fieldsAtSite = new FieldsAtSite(input.site, input.stations, input.skyWave);
   const judge = judgeOf(input);
   let last: { fields: readonly FieldStrength[]; judged: JudgedIf } | undefined;
   const hours = input.times.map((at): BreakthroughHour => {

@@ -186,7 +186,19 @@ class Bench {
   }
 }
 
-/** The receiver at each site in one period, ready to be judged at any IF. */
+/**
+ * The receiver at each site in one period, ready to be judged at any IF.
+ *
+ * @param asked Receiver, sites with their lists, and orders.
+ * @param period The period.
+ * @param selectivity Selectivity of the receiver's IF.
+ * @returns One for each site, in their order.
+ * @throws {RangeError} If a value is out of range; the message names it.
+ * @example
+ *   const { selectivity } = receiver;
+ *   const asked = { receiver, cases: [judged], ...orders };
+ *   listeningsOf(asked, 'night', ifSelectivity(selectivity, 560e3)).length; // 1
+ */
 export function listeningsOf(
   { receiver, cases, maxM, maxN, checkpoint }: Pick<CandidatesInput, 'receiver' | 'cases'> & Orders,
   period: Period,
