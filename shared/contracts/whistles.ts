@@ -53,9 +53,13 @@ export const whistlesAnswer = z.object({
     frequencyHz: z.int(),
     fieldDb: z.number(),
   }),
+  /** Noise at the dial setting, dB(uV/m). */
+  noiseDb: z.number(),
   skipped: z.array(z.object({ station: z.int(), reason: z.string() })),
   causes: z.array(whistleCause),
 });
+
+export type WhistlesAnswer = z.infer<typeof whistlesAnswer>;
 
 type Deep<T> = T extends object ? { -readonly [K in keyof T]: Deep<T[K]> } : T;
 type Answers<T extends Omit<z.output<typeof whistlesAnswer>, 'skipped'>> = T;

@@ -49,6 +49,8 @@ export interface ListenedTo {
 /** The answer. */
 export interface Whistles {
   readonly wanted: ListenedTo;
+  /** Noise at the dial setting in the set's bandwidth, dB(uV/m). */
+  readonly noiseDb: number;
   /** The most likely first. */
   readonly causes: readonly WhistleCause[];
 }
@@ -94,7 +96,8 @@ export function whistleCauses(input: WhistleInput): Whistles {
     .map((carrier) => causeOfBeat(carrier, reference, carrierDb, receiver.audioCornerHz))
     .filter(({ pitchHz, slope }) => pitchHz <= HIGHEST_PITCH_HZ && (pitchHz > 0 || slope > 0));
   const toleranceHz = tuningTolerance(scan.dial.band, dialHz);
-  return { wanted, causes: orderCauses(causes, input, toleranceHz).slice(0, MOST) };
+  const noiseDb = scan.dial.noiseDb[row] ?? NaN;
+  return { wanted, noiseDb, causes: orderCauses(causes, input, toleranceHz).slice(0, MOST) };
 }
 
 /** The first band that tunes the setting, its circuits where the tracking leaves them. */

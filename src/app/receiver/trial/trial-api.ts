@@ -17,6 +17,11 @@ import {
   fieldStrengthsAnswer,
   type FieldStrengthsInput,
 } from '../../../../shared/contracts/field-strengths';
+import {
+  whistlesAnswer,
+  type WhistlesAnswer,
+  type WhistlesInput,
+} from '../../../../shared/contracts/whistles';
 
 /** The computing calls a trial makes. */
 @Injectable({ providedIn: 'root' })
@@ -37,5 +42,11 @@ export class TrialApi {
     return this.http
       .post('/api/if-candidates', body)
       .pipe(map((answer) => candidatesAnswer.parse(answer)));
+  }
+
+  whistles(body: WhistlesInput): Observable<WhistlesAnswer> {
+    return this.http
+      .post('/api/whistles', body)
+      .pipe(map((answer) => whistlesAnswer.parse(answer)));
   }
 }
