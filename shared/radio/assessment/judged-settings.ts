@@ -1,6 +1,8 @@
 /**
  * How much there is to judge, before it is judged.
  *
+ * Source: own estimate.
+ *
  * @module radio/assessment/judged-settings
  */
 import { lowerBound } from '../channels/spectrum.ts';
@@ -22,7 +24,7 @@ import type { Orders } from './finding.ts';
  * @throws {RangeError} If the selectivity of the receiver is out of range.
  *
  * @example
- *   judgedSettings(receiver, [603_000, 1_521_000], { maxM: 1, maxN: 1 }); // 2: one image each
+ *   judgedSettings(receiver, [1_800_000], { maxM: 1, maxN: 1 }); // 1: its image, on 680 kHz
  */
 export function judgedSettings(
   receiver: Pick<Receiver, 'ifHz' | 'selectivity' | 'bands'>,
