@@ -32,7 +32,11 @@ export class Assessments {
     const { receiver, maxM, maxN, leaveOutBetterThan, limit } = request;
     const ask = { receiver, maxM, maxN, leaveOutBetterThan, limit };
     const time = receptionTimeOf(request.period);
-    return this.engine.run('assess', { list, time, skyWave: request.skyWave, ask }, signal);
+    return this.engine.run(
+      'assess',
+      { list, time, skyWave: request.skyWave, ask },
+      { signal, isVisitor: !actor },
+    );
   }
 
   async breakthroughHours(
@@ -43,7 +47,7 @@ export class Assessments {
     const list = await this.lists.find(actor, request);
     const { receiver, date } = request;
     const task = { list, receiver, times: momentsOf(date, list.columns.count) };
-    return this.engine.run('breakthroughHours', task, signal);
+    return this.engine.run('breakthroughHours', task, { signal, isVisitor: !actor });
   }
 
   async judgeCandidates(
@@ -57,7 +61,7 @@ export class Assessments {
     }
     const { receiver, periods, fromHz, toHz, stepHz } = request;
     const ask = { receiver, periods, fromHz, toHz, stepHz, ...CANDIDATE_ORDERS };
-    return this.engine.run('judgeCandidates', { lists, ask }, signal);
+    return this.engine.run('judgeCandidates', { lists, ask }, { signal, isVisitor: !actor });
   }
 }
 

@@ -46,6 +46,8 @@ export interface ListAtSite {
 }
 
 type FromList = 'site' | 'stations' | 'fields' | 'raster';
+/** What the thread adds by itself; it throws when nobody waits for the answer any more. */
+type Checkpoint = () => void;
 
 /** What each computation takes and answers. */
 export interface Tasks {
@@ -54,16 +56,19 @@ export interface Tasks {
       readonly list: ListAtSite;
       readonly time: ReceptionTime;
       readonly skyWave: SkyWaveChoice;
-      readonly ask: Omit<AssessmentInput, FromList | 'period'>;
+      readonly ask: Omit<AssessmentInput, FromList | 'period' | 'checkpoint'>;
     };
     answers: Assessment;
   };
   judgeCandidates: {
-    takes: { readonly lists: readonly ListAtSite[]; readonly ask: Omit<CandidatesInput, 'cases'> };
+    takes: {
+      readonly lists: readonly ListAtSite[];
+      readonly ask: Omit<CandidatesInput, 'cases' | 'checkpoint'>;
+    };
     answers: Candidates;
   };
   findCures: {
-    takes: { readonly list: ListAtSite; readonly ask: Omit<CuresInput, FromList> };
+    takes: { readonly list: ListAtSite; readonly ask: Omit<CuresInput, FromList | 'checkpoint'> };
     answers: Cures;
   };
   breakthroughHours: {
@@ -71,6 +76,7 @@ export interface Tasks {
       readonly list: ListAtSite;
       readonly receiver: AssessmentInput['receiver'];
       readonly times: readonly Date[];
+      readonly skyWave?: SkyWaveChoice | undefined;
     };
     answers: BreakthroughHours;
   };
@@ -111,28 +117,44 @@ const unpacked = new BoundedCache<Station[]>(KEPT_STATIONS);
 /** Fields at a moment, or of a sky wave that is not the usual one. */
 const unusual = new BoundedCache<FieldStrength[]>(KEPT_FIELDS);
 
-export function assess({ list, time, skyWave, ask }: Tasks['assess']['takes']): Assessment {
+export function assess(
+  { list, time, skyWave, ask }: Tasks['assess']['takes'],
+  checkpoint: Checkpoint,
+): Assessment {
   const { site, raster } = list;
   const stations = stationsOf(list);
   const fields = fieldsOf(list, time, skyWave);
-  return assessReceiver({ ...ask, site, raster, stations, fields, period: periodOf(site, time) });
+  return assessReceiver({
+    ...ask,
+    checkpoint,
+    site,
+    raster,
+    stations,
+    fields,
+    period: periodOf(site, time),
+  });
 }
 
-export function judgeCandidates({ lists, ask }: Tasks['judgeCandidates']['takes']): Candidates {
-  return judge({ ...ask, cases: lists.map((list) => caseOf(list, ask.periods)) });
+export function judgeCandidates(
+  { lists, ask }: Tasks['judgeCandidates']['takes'],
+  checkpoint: Checkpoint,
+): Candidates {
+  return judge({ ...ask, checkpoint, cases: lists.map((list) => caseOf(list, ask.periods)) });
 }
 
-export function findCures({ list, ask }: Tasks['findCures']['takes']): Cures {
-  return findAllCures({ ...ask, ...caseOf(list, ask.periods) });
+export function findCures(
+  { list, ask }: Tasks['findCures']['takes'],
+  checkpoint: Checkpoint,
+): Cures {
+  return findAllCures({ ...ask, checkpoint, ...caseOf(list, ask.periods) });
 }
 
-export function breakthroughHours({
-  list,
-  receiver,
-  times,
-}: Tasks['breakthroughHours']['takes']): BreakthroughHours {
+export function breakthroughHours(
+  { list, ...asked }: Tasks['breakthroughHours']['takes'],
+  checkpoint: Checkpoint,
+): BreakthroughHours {
   const { site, raster } = list;
-  return hoursOfBreakthrough({ receiver, site, raster, times, stations: stationsOf(list) });
+  return hoursOfBreakthrough({ ...asked, checkpoint, site, raster, stations: stationsOf(list) });
 }
 
 export function fieldStrengths({

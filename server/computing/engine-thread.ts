@@ -1,13 +1,10 @@
 import { move } from 'piscina';
 
 import { designTracking as design } from '../../shared/radio/tracking/tracking.ts';
+import { BEGUN, type Order, type Refused, STOP } from './engine-order.ts';
 import * as tasks from './engine-tasks.ts';
-
-/** A computation, and where it says that it has begun. */
-export interface Order {
-  readonly task: unknown;
-  readonly begun: Int32Array;
-}
+import type { Tasks } from './engine-tasks.ts';
+import { tooCostly, workloadOf } from './workload.ts';
 
 const encoder = new TextEncoder();
 
@@ -15,17 +12,27 @@ const encoder = new TextEncoder();
  * Runs a computation and answers it as JSON, so that the event loop need not write it out. The bytes
  * are moved to the other thread: copying the largest answers there would hold the loop.
  */
-function answered(compute: (task: never) => unknown) {
-  return ({ task, begun }: Order) => {
-    Atomics.store(begun, 0, 1);
-    return move(encoder.encode(JSON.stringify(compute(task as never))));
+function answered<K extends keyof Tasks>(
+  name: K,
+  compute: (task: Tasks[K]['takes'], checkpoint: () => void) => Tasks[K]['answers'],
+) {
+  return ({ task, mostSettings, flags }: Order) => {
+    Atomics.store(flags, BEGUN, 1);
+    const checkpoint = (): void => {
+      if (Atomics.load(flags, STOP) === 1) throw new Error('Nobody waits for the answer.');
+    };
+    checkpoint();
+    const issues = tooCostly(workloadOf(name, task), mostSettings);
+    if (issues.length > 0) return { issues } satisfies Refused;
+    const answer = compute(task as Tasks[K]['takes'], checkpoint);
+    return move(encoder.encode(JSON.stringify(answer)));
   };
 }
 
-export const assess = answered(tasks.assess);
-export const judgeCandidates = answered(tasks.judgeCandidates);
-export const findCures = answered(tasks.findCures);
-export const breakthroughHours = answered(tasks.breakthroughHours);
-export const fieldStrengths = answered(tasks.fieldStrengths);
-export const designTracking = answered(design);
-export const explainWhistle = answered(tasks.explainWhistle);
+export const assess = answered('assess', tasks.assess);
+export const judgeCandidates = answered('judgeCandidates', tasks.judgeCandidates);
+export const findCures = answered('findCures', tasks.findCures);
+export const breakthroughHours = answered('breakthroughHours', tasks.breakthroughHours);
+export const fieldStrengths = answered('fieldStrengths', tasks.fieldStrengths);
+export const designTracking = answered('designTracking', design);
+export const explainWhistle = answered('explainWhistle', tasks.explainWhistle);

@@ -52,6 +52,22 @@ const task = async (count: number): Promise<Tasks['assess']['takes']> => ({
   ask: { receiver, maxM: 3, maxN: 2, leaveOutBetterThan: null, limit: 10_000 },
 });
 
+const manyCandidates = async (
+  count: number,
+  candidates = 400,
+): Promise<Tasks['judgeCandidates']['takes']> => ({
+  lists: [await listOf(count)],
+  ask: {
+    receiver,
+    periods: ['night'],
+    fromHz: 450_000,
+    toHz: 450_000 + 50 * (candidates - 1),
+    stepHz: 50,
+    maxM: 3,
+    maxN: 2,
+  },
+});
+
 describe('Engine', () => {
   it('computes in a thread and answers JSON that can be read', async () => {
     engine = new Engine();
@@ -91,7 +107,7 @@ describe('Engine', () => {
     const each = await task(1000);
     const busy = Array.from({ length: 8 }, () => engine.run('assess', each));
     const leaving = new AbortController();
-    const waiting = engine.run('assess', each, leaving.signal);
+    const waiting = engine.run('assess', each, { signal: leaving.signal });
 
     leaving.abort();
 
@@ -99,14 +115,65 @@ describe('Engine', () => {
     await Promise.all(busy);
   });
 
-  it('ends what takes far too long, says so, and goes on', async () => {
-    engine = new Engine(4000);
+  it('stops what runs when its client leaves, long before it would have been done', async () => {
+    engine = new Engine();
+    await engine.run('assess', await task(1));
+    const costly = await manyCandidates(1500);
+    const leaving = new AbortController();
+    const begun = performance.now();
+    const whole = await engine.run('judgeCandidates', costly).then(() => performance.now() - begun);
+    const stoppedAt = performance.now();
+    const running = engine.run('judgeCandidates', costly, { signal: leaving.signal });
+
+    setTimeout(() => leaving.abort(), whole / 10);
+    await expect(running).rejects.toMatchObject({ status: 503 });
+
+    expect(performance.now() - stoppedAt).toBeLessThan(whole / 2);
+    expect((await engine.run('assess', await task(1))).read().bands).toHaveLength(1);
+  });
+
+  it('refuses what is far too much before it begins, and says what to leave out', async () => {
+    engine = new Engine();
+    const refused = engine.run('judgeCandidates', await manyCandidates(20_000));
+
+    await expect(refused).rejects.toMatchObject({
+      status: 400,
+      type: 'too-costly',
+      issues: [
+        { path: 'stepHz', message: expect.stringContaining('400 candidates') },
+        { path: 'stations', message: expect.stringContaining('closer than the channels') },
+      ],
+    });
+  });
+
+  it('stops what takes longer than the limit, says so, and goes on', async () => {
+    engine = new Engine(3000);
     await engine.run('assess', await task(1));
 
-    await expect(engine.run('assess', await task(100_000))).rejects.toMatchObject({
+    await expect(
+      engine.run('judgeCandidates', await manyCandidates(10_000, 20)),
+    ).rejects.toMatchObject({
       status: 400,
       type: 'too-costly',
     });
     expect((await engine.run('assess', await task(1))).read().bands).toHaveLength(1);
+  });
+
+  it('keeps the threads of members free however much visitors ask', async () => {
+    engine = new Engine();
+    const costly = await manyCandidates(1000, 50);
+    await engine.run('assess', await task(1));
+    const done: string[] = [];
+    const visitors = Array.from({ length: 4 }, () =>
+      engine.run('judgeCandidates', costly, { isVisitor: true }).then(
+        () => done.push('visitor'),
+        () => done.push('visitor'),
+      ),
+    );
+
+    await engine.run('assess', await task(1)).then(() => done.push('member'));
+    await Promise.all(visitors);
+
+    expect(done.indexOf('member')).toBeLessThanOrEqual(1);
   });
 });

@@ -2,12 +2,26 @@ import { availableParallelism } from 'node:os';
 
 import { Piscina } from 'piscina';
 
-import { OperationalError, UnavailableError } from '../http/errors.ts';
+import { type Issue, OperationalError, UnavailableError } from '../http/errors.ts';
 import type { Tasks } from './engine-tasks.ts';
-import type { Order } from './engine-thread.ts';
+import { BEGUN, type Order, type Refused, STOP } from './engine-order.ts';
 
 const MAX_WAITING = 200;
 const LIMIT_MS = 30_000;
+/** How long a thread may take to notice that it is to stop, before it is ended. */
+const GRACE_MS = 2000;
+const VISITORS_LIMIT_MS = 10_000;
+/** Dial settings that a request may have judged: 20 to 50 million are judged in a second. */
+const MOST_SETTINGS = 400_000_000;
+const VISITORS_SETTINGS = 100_000_000;
+
+/** Who asks. */
+export interface Caller {
+  /** Comes when the client leaves. */
+  readonly signal?: AbortSignal | undefined;
+  /** Nobody is signed in. */
+  readonly isVisitor?: boolean;
+}
 
 /** An answer of the engine as JSON text; typed, so that what needs it as an object may read it. */
 export interface Computed<T> {
@@ -20,20 +34,40 @@ class TooCostlyError extends OperationalError {
   readonly status = 400;
   readonly type = 'too-costly';
 
-  constructor() {
+  override readonly issues: readonly Issue[];
+
+  constructor(issues: readonly Issue[] = []) {
     super('This takes too long to compute. Leave out bands, stations or candidates.');
+    this.issues = issues;
   }
 }
 
-/** The radio engine in threads of its own: the event loop only hands over and takes back. */
+/** The flags of one computation, shared with its thread. */
+class Flags {
+  readonly shared = new Int32Array(new SharedArrayBuffer(8));
+
+  get hasBegun(): boolean {
+    return Atomics.load(this.shared, BEGUN) === 1;
+  }
+
+  get isToStop(): boolean {
+    return Atomics.load(this.shared, STOP) === 1;
+  }
+
+  stop(): void {
+    Atomics.store(this.shared, STOP, 1);
+  }
+}
+
+/**
+ * The radio engine in threads of its own: the event loop only hands over and takes back.
+ *
+ * Visitors share one thread that members never wait for, and get less time: whoever asks without
+ * signing in, from however many addresses, holds up nobody but other visitors.
+ */
 export class Engine {
-  private readonly pool = new Piscina({
-    filename: new URL('./engine-thread.mjs', import.meta.url).href,
-    minThreads: 0,
-    maxThreads: availableParallelism(),
-    maxQueue: MAX_WAITING,
-    idleTimeout: 10 * 60_000,
-  });
+  private readonly members = pool(availableParallelism());
+  private readonly visitors = pool(1);
   private readonly limitMs: number;
 
   constructor(limitMs = LIMIT_MS) {
@@ -41,40 +75,58 @@ export class Engine {
   }
 
   /**
-   * Runs a computation. When the signal comes while it waits, it is dropped; one that has begun is
-   * short as a rule, and ending its thread would cost more than letting it finish. At the limit of
-   * time its thread is ended.
+   * Runs a computation. When the signal comes, or the limit of time, it is dropped while it waits
+   * and stops at its next checkpoint when it runs; a thread that does not notice is ended.
    */
   async run<K extends keyof Tasks>(
     name: K,
     task: Tasks[K]['takes'],
-    signal?: AbortSignal,
+    { signal, isVisitor = false }: Caller = {},
   ): Promise<Computed<Tasks[K]['answers']>> {
-    if (this.pool.queueSize >= MAX_WAITING) throw new UnavailableError();
-    const order: Order = { task, begun: new Int32Array(new SharedArrayBuffer(4)) };
-    const waiting = new AbortController();
-    const hasBegun = () => Atomics.load(order.begun, 0) === 1;
-    const drop = () => {
-      if (!hasBegun()) waiting.abort();
+    const threads = isVisitor ? this.visitors : this.members;
+    if (threads.queueSize >= MAX_WAITING) throw new UnavailableError();
+    const flags = new Flags();
+    const mostSettings = isVisitor ? VISITORS_SETTINGS : MOST_SETTINGS;
+    const order: Order = { task, mostSettings, flags: flags.shared };
+    const ending = new AbortController();
+    const stop = () => {
+      flags.stop();
+      if (!flags.hasBegun) ending.abort();
     };
-    signal?.addEventListener('abort', drop, { once: true });
-    const limit = setTimeout(() => waiting.abort(), this.limitMs);
+    signal?.addEventListener('abort', stop, { once: true });
+    const limitMs = isVisitor ? Math.min(this.limitMs, VISITORS_LIMIT_MS) : this.limitMs;
+    const limit = setTimeout(stop, limitMs);
+    const grace = setTimeout(() => ending.abort(), limitMs + GRACE_MS);
     try {
-      const json = (await this.pool.run(order, { name, signal: waiting.signal })) as Uint8Array;
-      return {
-        json,
-        read: () => JSON.parse(new TextDecoder().decode(json)) as Tasks[K]['answers'],
-      };
+      return computed((await threads.run(order, { name, signal: ending.signal })) as Answer);
     } catch (error) {
-      if (!waiting.signal.aborted) throw error;
-      throw hasBegun() ? new TooCostlyError() : new UnavailableError();
+      if (!flags.isToStop) throw error;
+      const isLate = flags.hasBegun && signal?.aborted !== true;
+      throw isLate ? new TooCostlyError() : new UnavailableError();
     } finally {
       clearTimeout(limit);
-      signal?.removeEventListener('abort', drop);
+      clearTimeout(grace);
+      signal?.removeEventListener('abort', stop);
     }
   }
 
-  close(): Promise<void> {
-    return this.pool.close({ force: true });
+  async close(): Promise<void> {
+    await Promise.all([this.members, this.visitors].map((each) => each.close({ force: true })));
   }
 }
+
+type Answer = Uint8Array | Refused;
+
+function computed<T>(answer: Answer): Computed<T> {
+  if (!(answer instanceof Uint8Array)) throw new TooCostlyError(answer.issues);
+  return { json: answer, read: () => JSON.parse(new TextDecoder().decode(answer)) as T };
+}
+
+const pool = (maxThreads: number): Piscina =>
+  new Piscina({
+    filename: new URL('./engine-thread.mjs', import.meta.url).href,
+    minThreads: 0,
+    maxThreads,
+    maxQueue: MAX_WAITING,
+    idleTimeout: 10 * 60_000,
+  });

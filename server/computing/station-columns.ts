@@ -98,6 +98,12 @@ export function unpackStations({ count, numbers, details }: StationColumns): Sta
   }));
 }
 
+/** The frequencies alone, ascending, each once. */
+export function frequenciesOf({ count, numbers }: StationColumns): number[] {
+  const from = NAMES.indexOf('frequencyHz') * count;
+  return [...new Set(numbers.slice(from, from + count).sort())];
+}
+
 /** The names alone, in the stations' order. */
 export const unpackNames = ({ names }: StationColumns): string[] => unpackJson(names) as string[];
 

@@ -25,7 +25,7 @@ export class Cures {
     return this.engine.run(
       'findCures',
       { list, ask: { receiver, periods, ...CANDIDATE_ORDERS } },
-      signal,
+      { signal, isVisitor: !actor },
     );
   }
 }

@@ -22,6 +22,10 @@ export class FieldStrengths {
   ): Promise<Computed<Tasks['fieldStrengths']['answers']>> {
     const list = await this.lists.find(actor, request);
     const time = receptionTimeOf(request.period);
-    return this.engine.run('fieldStrengths', { list, time, skyWave: request.skyWave }, signal);
+    return this.engine.run(
+      'fieldStrengths',
+      { list, time, skyWave: request.skyWave },
+      { signal, isVisitor: !actor },
+    );
   }
 }

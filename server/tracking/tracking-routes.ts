@@ -13,9 +13,12 @@ export const trackingRoutes = (engine: Pick<Engine, 'run'>): Route[] => [
     answer: trackingAnswer,
     computing: true,
     faults: [429],
-    handle: async ({ body, response }) => {
+    handle: async ({ actor, body, response }) => {
       const signal = whenClientLeaves(response);
-      sendComputed(response, await engine.run('designTracking', body, signal));
+      sendComputed(
+        response,
+        await engine.run('designTracking', body, { signal, isVisitor: !actor }),
+      );
     },
   }),
 ];

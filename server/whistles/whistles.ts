@@ -24,6 +24,6 @@ export class Whistles {
     const { receiver, dialHz, pitchHz = null, pitchSlope = null } = request;
     const ask = { receiver, dialHz, pitchHz, pitchSlope };
     const time = receptionTimeOf(request.period);
-    return this.engine.run('explainWhistle', { list, time, ask }, signal);
+    return this.engine.run('explainWhistle', { list, time, ask }, { signal, isVisitor: !actor });
   }
 }
