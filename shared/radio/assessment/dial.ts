@@ -177,7 +177,8 @@ export class Dial {
    * @returns dB(uV/m).
    */
   hiddenDb(row: number, group: number, position: number): number {
-    if (this.isNear(row, group)) return this.hiddenUnder(row, this.bandWithout(row, group, position));
+    if (this.isNear(row, group))
+      return this.hiddenUnder(row, this.bandWithout(row, group, position));
     let hidden = this.hiddenDbs[row] ?? NaN;
     if (Number.isNaN(hidden)) {
       hidden = this.hiddenUnder(row, this.bandPower(row, group, position));
@@ -216,8 +217,8 @@ export class Dial {
     const { spectrum } = this;
     const distance = Math.abs((spectrum.hz[group] ?? NaN) - (this.hz[row] ?? NaN));
     const whole = this.wholeBand(row);
-    const own =
-      (spectrum.powers[0]?.[position] ?? NaN) * 10 ** (this.weightingDb(row, distance) / 10);
+    const ownDb = (spectrum.fieldDb[position] ?? NaN) + this.weightingDb(row, distance);
+    const own = 10 ** (ownDb / 10);
     // Where the interferer is most of the band, a difference would lose the rest in rounding.
     if (distance === 0 || !(own <= whole / 2)) return this.sumBand(row, group, position);
     return whole - own;

@@ -18,7 +18,7 @@ import type { CuresInput } from './cure-bench.ts';
 const MOST_CANDIDATES = 120;
 const FEWEST_JUDGED = 6;
 /** Dial settings judged for all candidates together: what bounds the time it takes. */
-const BUDGET = 30_000_000;
+const BUDGET = 15_000_000;
 /** Finer than an IF is aligned, hertz. */
 const FINEST_STEP_HZ = 100;
 
