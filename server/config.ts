@@ -4,10 +4,11 @@ import * as z from 'zod';
 
 const MIN_SECRET_LENGTH = 32;
 
-const flag = z
-  .enum(['true', 'false', '1', '0'], 'Give "true" or "false".')
-  .default('false')
-  .transform((value) => value === 'true' || value === '1');
+const flag = (preset: 'true' | 'false') =>
+  z
+    .enum(['true', 'false', '1', '0'], 'Give "true" or "false".')
+    .default(preset)
+    .transform((value) => value === 'true' || value === '1');
 
 const count = (preset: number) => z.coerce.number().int().min(1).max(1_000_000_000).default(preset);
 
@@ -24,6 +25,8 @@ const environment = z
     DATABASE_CONNECTIONS: count(10),
     /** Folder for what the server keeps in files: uploaded lists. */
     DATA_DIR: z.string().min(1).default('.data'),
+    /** Whether lists are checked and stored by a process of their own, as they should be. */
+    WORKER_PROCESS: flag('true'),
     /** Folder of the built client. */
     CLIENT_DIR: z.string().min(1).default('dist/client'),
     /** Signs sessions and request tokens; without it a development start makes its own. */
@@ -35,11 +38,11 @@ const environment = z
     SESSION_IDLE_HOURS: count(7 * 24),
     SESSION_ABSOLUTE_HOURS: count(30 * 24),
     /** Whether users come by https: cookies become Secure and browsers are told to stay on https. */
-    BEHIND_TLS: flag,
+    BEHIND_TLS: flag('false'),
     /** How many proxies in front are believed about the caller's address. */
     TRUSTED_PROXIES: z.coerce.number().int().min(0).max(10).default(0),
     /** Whether an empty database gets the demo club; never in production. */
-    DEMO_CLUB: flag,
+    DEMO_CLUB: flag('false'),
     /** Password of the demo accounts. */
     DEMO_PASSWORD: z.string().min(8).max(256).optional(),
     /** Failed sign-ins for one account in 15 minutes: stops guessing, forgives a bad memory. */

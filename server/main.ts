@@ -39,8 +39,7 @@ async function main(config: Config, log: Logger): Promise<void> {
 
   stopOnSignal(log, async () => {
     stopHousekeeping();
-    await drain(server);
-    await services.commits.settle();
+    await Promise.all([drain(server), services.importWorker.stop()]);
     await services.engine.close();
     await services.passwords.close();
     await database.close();

@@ -9,14 +9,21 @@ import { Engine } from './computing/engine.ts';
 import { ListsAtSites } from './computing/lists-at-sites.ts';
 import type { Config } from './config.ts';
 import { Cures } from './cures/cures.ts';
+import { EditionModel } from './editions/edition-model.ts';
 import { EditionWriter } from './editions/edition-writer.ts';
 import { Editions } from './editions/editions.ts';
+import { StationModel } from './editions/station-model.ts';
 import { FieldStrengths } from './field-strengths/field-strengths.ts';
 import { Idempotency } from './http/idempotency.ts';
 import { Limits } from './http/limits.ts';
-import { Commits } from './imports/commits.ts';
+import { failHopeless, hasWaitingJobs } from './imports/import-claims.ts';
+import { ImportJobs } from './imports/import-jobs.ts';
+import { ImportModel } from './imports/import-model.ts';
+import { ImportWatch } from './imports/import-watch.ts';
+import type { ImportWorker } from './imports/import-worker.ts';
 import { Imports } from './imports/imports.ts';
 import { Uploads } from './imports/uploads.ts';
+import { WorkerProcess } from './imports/worker-process.ts';
 import type { Logger } from './logger.ts';
 import { PlanShares } from './plans/plan-shares.ts';
 import { Plans } from './plans/plans.ts';
@@ -32,6 +39,34 @@ import { Workshops } from './workshops/workshops.ts';
 /** What the application is made of; one set for each process. */
 export type Services = ReturnType<typeof createServices>;
 
+/** What checking and storing lists needs, in whichever process that is done. */
+export function createImportTools(database: Sequelize, config: Pick<Config, 'DATA_DIR'>) {
+  ImportModel.register(database);
+  EditionModel.register(database);
+  StationModel.register(database);
+  return {
+    database,
+    regions: new Regions(database),
+    editions: new EditionWriter(database),
+    uploads: new Uploads(join(config.DATA_DIR, 'uploads')),
+  };
+}
+
+function createImportWorker(
+  tools: ReturnType<typeof createImportTools>,
+  watch: ImportWatch,
+  { WORKER_PROCESS }: Config,
+  log: Logger,
+): ImportWorker {
+  const onChange = () => watch.look();
+  if (!WORKER_PROCESS) return new ImportJobs(tools, log, onChange);
+  const findWork = async () => {
+    await failHopeless();
+    return (await hasWaitingJobs()) || tools.editions.hasHidden();
+  };
+  return new WorkerProcess(log, findWork, onChange);
+}
+
 /** Builds every service and hands each the others it needs. */
 export function createServices(database: Sequelize, config: Config, log: Logger) {
   const passwords = new Passwords();
@@ -41,9 +76,9 @@ export function createServices(database: Sequelize, config: Config, log: Logger)
   const regions = new Regions(database);
   const editions = new Editions(database, regions);
   const lists = new ListsAtSites(editions);
-  const uploads = new Uploads(join(config.DATA_DIR, 'uploads'));
-  const editionWriter = new EditionWriter(database);
-  const commits = new Commits(database, editionWriter, uploads, log);
+  const importTools = createImportTools(database, config);
+  const importWatch = new ImportWatch();
+  const importWorker = createImportWorker(importTools, importWatch, config, log);
   const engine = new Engine();
   const assessments = new Assessments(lists, engine);
   const receivers = new Receivers(database, accounts);
@@ -61,9 +96,16 @@ export function createServices(database: Sequelize, config: Config, log: Logger)
     sites,
     regions,
     editions,
-    uploads,
-    imports: new Imports(database, regions, editionWriter, uploads, commits),
-    commits,
+    uploads: importTools.uploads,
+    imports: new Imports(
+      database,
+      regions,
+      importTools.editions,
+      importTools.uploads,
+      importWorker,
+      importWatch,
+    ),
+    importWorker,
     fieldStrengths: new FieldStrengths(lists, engine),
     cures: new Cures(lists, engine),
     whistles: new Whistles(lists, engine),

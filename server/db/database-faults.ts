@@ -41,6 +41,7 @@ function isLostConnection(error: unknown): boolean {
 
 const LOST = new Set([
   'ER_CMD_CONNECTION_CLOSED',
+  'ER_CONNECTION_KILLED',
   'ER_CONNECTION_TIMEOUT',
   'ER_SOCKET_UNEXPECTED_CLOSE',
   'ER_SOCKET_TIMEOUT',

@@ -47,7 +47,7 @@ export async function loadDemoClub(
 
 /** Takes the region's list in by the same way as an uploaded one. */
 async function addRegion(
-  { regions, imports, commits, uploads }: Services,
+  { regions, imports, uploads }: Services,
   workshopId: number,
   { edition, ...draft }: Club['regions'][number],
 ): Promise<void> {
@@ -60,7 +60,7 @@ async function addRegion(
   const { faults } = await imports.check(actor, regionId, id, { label, date });
   if (faults.length > 0) throw new Error(`${edition.file}: ${JSON.stringify(faults[0])}`);
   await imports.commit(actor, regionId, id);
-  await commits.settle();
+  await imports.settled(id);
   const { state, reason } = await imports.state(actor, regionId, id);
   if (state !== 'committed') throw new Error(`${edition.file}: ${state}, ${reason ?? ''}`);
 }

@@ -12,6 +12,7 @@ export class EditionModel extends Model<
   InferCreationAttributes<EditionModel>
 > {
   declare id: CreationOptional<number>;
+  /** In the database null once the edition was undone: only the writer, which clears it, meets that. */
   declare regionId: number;
   declare label: string;
   declare date: string;
@@ -25,7 +26,7 @@ export class EditionModel extends Model<
     EditionModel.init(
       {
         id: { type: DataTypes.INTEGER.UNSIGNED, autoIncrement: true, primaryKey: true },
-        regionId: { type: DataTypes.INTEGER.UNSIGNED, allowNull: false },
+        regionId: { type: DataTypes.INTEGER.UNSIGNED, allowNull: true },
         label: { type: DataTypes.STRING(120), allowNull: false },
         date: { type: DataTypes.DATEONLY, allowNull: false },
         source: { type: DataTypes.STRING(255), allowNull: false },

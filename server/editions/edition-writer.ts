@@ -1,6 +1,7 @@
 import type { Connection } from 'mariadb';
 import { type InferAttributes, QueryTypes, type Sequelize, type Transaction } from 'sequelize';
 
+import { inTransaction } from '../db/transaction.ts';
 import { EditionModel } from './edition-model.ts';
 import { StationModel } from './station-model.ts';
 
@@ -39,16 +40,20 @@ const COLUMNS = [
   'fingerprint',
 ] as const satisfies readonly (keyof NewStation)[];
 
-const INSERT = `
+/** What is stored of a station, in the order of the statement below. */
+export type StationValues = readonly (string | number | null)[];
+
+const insertInto = (editionId: number): string => `
   INSERT INTO stations (edition_id, name, call_sign, frequency_hz, latitude, longitude,
     power_day_w, power_night_w, hours, note, identity, fingerprint, pattern_db)
-  VALUES (?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?)`;
+  VALUES (${editionId}, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?)`;
 
 /** Everything that a station is in another edition as well. */
 const KEPT = `name, call_sign, frequency_hz, latitude, longitude, power_day_w, power_night_w,
   pattern_db, hours, note, identity, fingerprint`;
 
 const MARKS_AT_ONCE = 20_000;
+const CLEARED_AT_ONCE = 5000;
 
 /** Writes whole editions and takes them back; the caller's transaction makes it all or nothing. */
 export class EditionWriter {
@@ -91,20 +96,19 @@ export class EditionWriter {
     return row.id;
   }
 
+  valuesOf(station: NewStation): StationValues {
+    return [...COLUMNS.map((name) => station[name]), station.patternDb?.join(',') ?? null];
+  }
+
   /** Adds stations by the connector's own batch: several times faster than one statement a row. */
   async append(
     editionId: number,
-    stations: readonly NewStation[],
+    stations: readonly StationValues[],
     transaction: Transaction,
   ): Promise<void> {
     if (stations.length === 0) return;
     const { connection } = transaction as unknown as { connection: Connection };
-    const rows = stations.map((station) => [
-      editionId,
-      ...COLUMNS.map((name) => station[name]),
-      station.patternDb?.join(',') ?? null,
-    ]);
-    await connection.batch(INSERT, rows);
+    await connection.batch(insertInto(editionId), stations);
   }
 
   /** An edition of a region by its name; null when the region has no such edition. */
@@ -132,8 +136,37 @@ export class EditionWriter {
     await EditionModel.update({ stations }, { where: { id: editionId }, transaction });
   }
 
-  async remove(editionId: number): Promise<void> {
-    await StationModel.destroy({ where: { editionId } });
-    await EditionModel.destroy({ where: { id: editionId } });
+  /** Takes an edition out of its region: from then on nobody sees it. */
+  async hide(editionId: number): Promise<void> {
+    await this.database.query('UPDATE editions SET region_id = NULL WHERE id = ?', {
+      replacements: [editionId],
+      type: QueryTypes.UPDATE,
+    });
+  }
+
+  async hasHidden(): Promise<boolean> {
+    const [hidden] = await this.database.query(
+      'SELECT id FROM editions WHERE region_id IS NULL LIMIT 1',
+      { type: QueryTypes.SELECT },
+    );
+    return hidden !== undefined;
+  }
+
+  /**
+   * Takes some thousand stations of a hidden edition away, at last the edition; false when there is
+   * none, or when others are at it.
+   */
+  clearSome(): Promise<boolean> {
+    return inTransaction(this.database, async () => {
+      const [hidden] = await this.database.query<{ id: number }>(
+        'SELECT id FROM editions WHERE region_id IS NULL LIMIT 1 FOR UPDATE SKIP LOCKED',
+        { type: QueryTypes.SELECT },
+      );
+      if (!hidden) return false;
+      const where = { editionId: hidden.id };
+      const cleared = await StationModel.destroy({ where, limit: CLEARED_AT_ONCE });
+      if (cleared < CLEARED_AT_ONCE) await EditionModel.destroy({ where: hidden });
+      return true;
+    });
   }
 }

@@ -1,30 +1,48 @@
-import { literal, Op, type Transaction, UniqueConstraintError, type WhereOptions } from 'sequelize';
+import {
+  literal,
+  Op,
+  QueryTypes,
+  type Sequelize,
+  type Transaction,
+  UniqueConstraintError,
+  type WhereOptions,
+} from 'sequelize';
 
 import type { ImportCheck } from '../../shared/contracts/list-import.ts';
+import { inTransaction } from '../db/transaction.ts';
 import { ImportModel } from './import-model.ts';
 import type { Proposed } from './list-proposal.ts';
 import type { ListReading } from './list-reading.ts';
 
-/** What a check found, with what it was made by. */
-export interface CheckResult {
+/** What a check is to be made by. */
+export interface CheckOrder {
   readonly reading: ListReading;
   readonly sample: string[][];
   readonly headerKey: string;
   readonly label: string;
   readonly date: string;
+}
+
+/** What a check found. */
+export interface CheckResult {
   readonly counts: ImportCheck['rows'];
   readonly faults: ImportCheck['faults'];
   readonly findings: Pick<ImportCheck, 'causes' | 'remarks'>;
   readonly baseEditionId: number | null;
 }
 
+/** A worker that dies three times over the same list would do so again. */
+const MAX_ATTEMPTS = 3;
 const LEASE = literal('NOW(3) + INTERVAL 20 SECOND');
-const EXPIRED = { [Op.lt]: literal('NOW(3)') };
+const AT_WORK = ['checking', 'committing'] as const;
 const FREE = { worker: null, leaseUntil: null, committingRegionId: null };
+/** No worker has it, or the one that had it counts as dead. */
+const UNHELD = { [Op.or]: [{ leaseUntil: null }, { leaseUntil: { [Op.lt]: literal('NOW(3)') } }] };
 
 /*
- * Every change of state is one conditional UPDATE: of two processes or two librarians only one gets
- * the row. A worker holds a lease by the database's clock; one that dies loses it.
+ * A check or a commit is a job that waits in the table until a worker takes it. Every change of
+ * state is one conditional UPDATE: of two processes or two librarians only one gets the row. A
+ * worker holds a lease by the database's clock; one that dies loses it to the next.
  */
 
 /** Keeps how the file is to be taken apart; what was found by an earlier way is no longer true. */
@@ -34,37 +52,32 @@ export const layOut = (id: number, proposed: Proposed): Promise<boolean> =>
     { id, state: ['uploaded', 'ready', 'failed'] },
   );
 
-/** Marks the import as being checked; false when its state does not allow it. */
-export const claimCheck = (id: number, worker: string): Promise<boolean> =>
+/** Asks for a check; false when the import's state does not allow it. */
+export const queueCheck = (id: number, order: CheckOrder): Promise<boolean> =>
   change(
-    { state: 'checking', worker, leaseUntil: LEASE },
     {
-      id,
-      [Op.or]: [
-        { state: ['uploaded', 'ready', 'failed'] },
-        { state: 'checking', leaseUntil: EXPIRED },
-      ],
+      ...FREE,
+      ...order,
+      state: 'checking',
+      attempts: 0,
+      counts: null,
+      faults: null,
+      findings: null,
+      progress: 0,
+      reason: null,
     },
+    { id, state: ['uploaded', 'ready', 'failed'] },
   );
 
-export const finishCheck = (id: number, worker: string, result: CheckResult): Promise<boolean> =>
-  change(
-    { ...FREE, ...result, state: 'ready', progress: 0, reason: null },
-    { id, worker, state: 'checking' },
-  );
-
-/** A check that could not be finished leaves the import as it was uploaded. */
-export const dropCheck = (id: number, worker: string): Promise<boolean> =>
-  change({ ...FREE, state: 'uploaded', counts: null }, { id, worker, state: 'checking' });
-
-/** Marks the import as being committed; false when its state or another import forbids it. */
-export async function claimCommit(id: number, regionId: number, worker: string): Promise<boolean> {
+/** Asks for a commit; false when the import's state or another import forbids it. */
+export async function queueCommit(id: number, regionId: number): Promise<boolean> {
   try {
     return await change(
       {
         state: 'committing',
-        worker,
-        leaseUntil: LEASE,
+        worker: null,
+        leaseUntil: null,
+        attempts: 0,
         committingRegionId: regionId,
         progress: 0,
         reason: null,
@@ -77,13 +90,29 @@ export async function claimCommit(id: number, regionId: number, worker: string):
   }
 }
 
-/** Gives an import back that was claimed and not begun. */
-export const dropCommit = (id: number, worker: string): Promise<boolean> =>
-  change({ ...FREE, state: 'ready' }, { id, worker, state: 'committing' });
+/** Takes the job that has waited longest; null when none waits. */
+export function takeJob(database: Sequelize, worker: string): Promise<ImportModel | null> {
+  return inTransaction(database, async () => {
+    const [next] = await database.query<{ id: number }>(
+      `SELECT id FROM imports
+       WHERE state IN ('checking', 'committing') AND attempts < ${MAX_ATTEMPTS}
+         AND (lease_until IS NULL OR lease_until < NOW(3))
+       ORDER BY updated_at LIMIT 1 FOR UPDATE SKIP LOCKED`,
+      { type: QueryTypes.SELECT },
+    );
+    if (!next) return null;
+    const attempts = literal('attempts + 1');
+    await ImportModel.update({ worker, leaseUntil: LEASE, attempts }, { where: next });
+    return ImportModel.findByPk(next.id);
+  });
+}
 
 /** Says how far the worker is and that it lives; false when it has lost the import. */
 export const beat = (id: number, worker: string, progress: number): Promise<boolean> =>
-  change({ progress, leaseUntil: LEASE }, { id, worker, state: 'committing' }, null);
+  change({ progress, leaseUntil: LEASE }, { id, worker, state: AT_WORK }, null);
+
+export const finishCheck = (id: number, worker: string, result: CheckResult): Promise<boolean> =>
+  change({ ...FREE, ...result, state: 'ready', progress: 0 }, { id, worker, state: 'checking' });
 
 /** Part of the transaction that stores the edition: both are there or neither. */
 export const finishCommit = (
@@ -98,28 +127,53 @@ export const finishCommit = (
     transaction,
   );
 
-export const failCommit = (id: number, worker: string, reason: string): Promise<boolean> =>
-  change({ ...FREE, state: 'failed', reason }, { id, worker, state: 'committing' }, null);
+/** A check that cannot be finished leaves the import as it was uploaded. */
+export const failCheck = (where: { id: number; worker: string }, reason: string) =>
+  change({ ...FREE, state: 'uploaded', reason }, { ...where, state: 'checking' });
 
-/** Imports whose worker died while committing: its transaction is gone, so nothing was stored. */
-export const failExpired = (): Promise<boolean> =>
+export const failCommit = (where: { id: number; worker: string }, reason: string) =>
+  change({ ...FREE, state: 'failed', reason }, { ...where, state: 'committing' });
+
+/** Leaves a job to the next worker; one that was only told to stop has not failed at it. */
+export const giveBack = (id: number, worker: string, isStopped: boolean): Promise<boolean> =>
   change(
     {
-      ...FREE,
-      state: 'failed',
-      reason: 'The server stopped while storing the list. Nothing was stored; commit it again.',
+      worker: null,
+      leaseUntil: null,
+      ...(isStopped && { attempts: literal('attempts - 1') }),
     },
-    { state: 'committing', leaseUntil: EXPIRED },
+    { id, worker, state: AT_WORK },
   );
 
-/** Cancels what is not committed; a worker that is storing notices and takes everything back. */
+/** The worker is known to be dead: its jobs need not wait until their leases end. */
+export const releaseJobsOf = (worker: string): Promise<boolean> =>
+  change({ worker: null, leaseUntil: null }, { worker, state: AT_WORK });
+
+/** Ends the jobs that no worker has survived. */
+export async function failHopeless(): Promise<void> {
+  const hopeless = { ...UNHELD, attempts: { [Op.gte]: MAX_ATTEMPTS } };
+  const again = 'was stopped each time. Nothing was stored';
+  await change(
+    { ...FREE, state: 'failed', reason: `Storing the list ${again}; commit it again.` },
+    { state: 'committing', ...hopeless },
+  );
+  await change(
+    { ...FREE, state: 'uploaded', reason: `Checking the list ${again}; check it again.` },
+    { state: 'checking', ...hopeless },
+  );
+}
+
+export const hasWaitingJobs = async (): Promise<boolean> =>
+  (await ImportModel.count({ where: { state: AT_WORK, ...UNHELD } })) > 0;
+
+/** Cancels what is not committed; a worker that is at it notices and takes everything back. */
 export const cancel = (id: number): Promise<boolean> =>
   change(
     { ...FREE, state: 'cancelled', faults: null },
     { id, state: ['uploaded', 'checking', 'ready', 'committing', 'failed'] },
   );
 
-/** Part of the transaction that removes the edition. */
+/** Part of the transaction that hides the edition. */
 export const undo = (id: number): Promise<boolean> =>
   change({ ...FREE, state: 'undone', editionId: null }, { id, state: 'committed' });
 

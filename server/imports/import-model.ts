@@ -40,9 +40,12 @@ export class ImportModel extends Model<
   /** Who checks or commits, and until when it counts as alive. */
   declare worker: CreationOptional<string | null>;
   declare leaseUntil: CreationOptional<Date | null>;
+  /** How many workers have taken the job. */
+  declare attempts: CreationOptional<number>;
   declare progress: number;
   declare reason: CreationOptional<string | null>;
   declare createdAt: CreationOptional<Date>;
+  declare updatedAt: CreationOptional<Date>;
 
   static register(sequelize: Sequelize): void {
     ImportModel.init(
@@ -65,9 +68,11 @@ export class ImportModel extends Model<
         committingRegionId: { type: DataTypes.INTEGER.UNSIGNED, allowNull: true, unique: true },
         worker: { type: DataTypes.CHAR(36), allowNull: true },
         leaseUntil: { type: DataTypes.DATE(3), allowNull: true },
+        attempts: { type: DataTypes.TINYINT.UNSIGNED, allowNull: false, defaultValue: 0 },
         progress: { type: DataTypes.DOUBLE, allowNull: false },
         reason: { type: DataTypes.STRING(500), allowNull: true },
         createdAt: { type: DataTypes.DATE(3), allowNull: false },
+        updatedAt: { type: DataTypes.DATE(3), allowNull: false },
       },
       { sequelize, tableName: 'imports' },
     );

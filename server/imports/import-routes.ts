@@ -12,6 +12,7 @@ import {
 } from '../../shared/contracts/list-import.ts';
 import { pageOf, pageQuery } from '../../shared/contracts/paging.ts';
 import { route, type Route } from '../http/route.ts';
+import { sendEvents } from './import-events.ts';
 import type { Imports } from './imports.ts';
 import { csvWriter, rejectsName } from './list-rejects.ts';
 import type { Uploads } from './uploads.ts';
@@ -52,6 +53,19 @@ export const importRoutes = (imports: Imports, uploads: Uploads): Route[] => [
     answer: importState,
     faults: [404],
     handle: ({ actor, id }) => imports.state(actor, id(), id('importId')),
+  }),
+  route({
+    method: 'get',
+    path: `${one}/events`,
+    summary: 'An import as server-sent events, as long as it is being checked or stored',
+    access: 'member',
+    produces: 'text/event-stream',
+    faults: [404],
+    handle: async ({ actor, id, response }) => {
+      const importId = id('importId');
+      const changes = await imports.changes(actor, id(), importId);
+      await sendEvents(response, changes, () => imports.state(actor, id(), importId));
+    },
   }),
   route({
     method: 'put',

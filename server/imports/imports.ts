@@ -1,5 +1,3 @@
-import { randomUUID } from 'node:crypto';
-
 import { Op, QueryTypes, type Sequelize } from 'sequelize';
 
 import type {
@@ -15,24 +13,15 @@ import { inTransaction } from '../db/transaction.ts';
 import type { Actor } from '../http/actor.ts';
 import { ConflictError, NotFoundError } from '../http/errors.ts';
 import { checkOrder, proposeAnew } from './check-order.ts';
-import {
-  cancel,
-  claimCheck,
-  dropCheck,
-  failExpired,
-  finishCheck,
-  layOut,
-  undo,
-} from './import-claims.ts';
+import { BadListError } from './bad-list-error.ts';
+import { cancel, layOut, queueCheck, queueCommit, undo } from './import-claims.ts';
 import { ImportModel } from './import-model.ts';
 import { toProposal, toState } from './import-answers.ts';
-import { checkList } from './list-check.ts';
 import { proposeList } from './list-proposal.ts';
-import type { ListReading } from './list-reading.ts';
 import { rejectedRows } from './list-rejects.ts';
-import { type EditionMarks, tallyBeside } from './list-tally.ts';
 import { busy } from './import-busy.ts';
-import type { Commits } from './commits.ts';
+import type { ImportWatch } from './import-watch.ts';
+import type { ImportWorker } from './import-worker.ts';
 import type { ReceivedFile, Uploads } from './uploads.ts';
 
 /** What the imports need of the regions. */
@@ -41,14 +30,15 @@ interface RegionRegister {
 }
 
 /** What the imports need of the editions. */
-interface EditionStore extends EditionMarks {
+interface EditionStore {
   latest(regionId: number): Promise<number | null>;
   named(id: number, regionId: number): Promise<{ id: number; label: string; date: string } | null>;
-  remove(editionId: number): Promise<void>;
+  hide(editionId: number): Promise<void>;
 }
 
 const MAX_OPEN = 50;
 const KEPT_DAYS = 7;
+const NO_FINDINGS = { causes: [], remarks: [] };
 
 /** Takes lists in: upload, check, commit as a job, cancel and undo. */
 export class Imports {
@@ -56,21 +46,23 @@ export class Imports {
   private readonly regions: RegionRegister;
   private readonly editions: EditionStore;
   private readonly uploads: Uploads;
-  private readonly commits: Pick<Commits, 'begin'>;
+  private readonly worker: Pick<ImportWorker, 'wake'>;
+  private readonly watch: ImportWatch;
 
   constructor(
     database: Sequelize,
     regions: RegionRegister,
     editions: EditionStore,
     uploads: Uploads,
-    commits: Pick<Commits, 'begin'>,
+    worker: Pick<ImportWorker, 'wake'>,
+    watch: ImportWatch,
   ) {
     this.database = database;
     this.regions = regions;
     this.editions = editions;
     this.uploads = uploads;
-    this.commits = commits;
-    ImportModel.register(database);
+    this.worker = worker;
+    this.watch = watch;
   }
 
   /** Refuses an upload before its body is read. */
@@ -79,8 +71,10 @@ export class Imports {
     const open = await ImportModel.count({
       where: { regionId, state: ['uploaded', 'checking', 'ready', 'failed'] },
     });
-    if (open < MAX_OPEN) return;
-    throw new ConflictError(`This region has ${open} open imports. Cancel some first.`);
+    if (open >= MAX_OPEN) {
+      throw new ConflictError(`This region has ${open} open imports. Cancel some first.`);
+    }
+    this.worker.wake(); // By the time the file is here the worker is awake.
   }
 
   async take(regionId: number, file: ReceivedFile): Promise<ImportProposal> {
@@ -108,7 +102,6 @@ export class Imports {
     { page, pageSize }: PageQuery,
   ): Promise<Page<ImportState>> {
     await this.regions.get(actor, regionId);
-    await failExpired();
     const { rows, count } = await ImportModel.findAndCountAll({
       where: { regionId },
       order: [['id', 'DESC']],
@@ -135,40 +128,59 @@ export class Imports {
     return toProposal(await this.find(actor, regionId, id));
   }
 
-  /** Reads the whole file by the asked matching and says what storing it would do. */
+  /** Has the whole file read by the asked matching; answers what storing it would do. */
   async check(
     actor: Actor,
     regionId: number,
     id: number,
     asked: ImportMatching,
   ): Promise<ImportCheck> {
+    const before = await this.find(actor, regionId, id);
+    const path = this.uploads.path(before.storedName);
+    const order = await checkOrder(this.editions, path, before, asked, await this.today());
+    if (!(await queueCheck(id, order))) throw busy(await this.find(actor, regionId, id));
+    this.worker.wake();
+    await this.watch.settled(id);
     const row = await this.find(actor, regionId, id);
-    const path = this.uploads.path(row.storedName);
-    const order = await checkOrder(this.editions, path, row, asked, await this.today());
-    const worker = randomUUID();
-    if (!(await claimCheck(id, worker))) throw busy(await this.find(actor, regionId, id));
-    try {
-      const { raster } = await this.regions.get(actor, regionId);
-      const { baseEditionId, ...found } = await this.compare(row, order.reading, raster);
-      const isKept = await finishCheck(id, worker, {
-        ...order,
-        counts: found.rows,
-        faults: found.faults,
-        findings: { causes: found.causes, remarks: found.remarks },
-        baseEditionId,
-      });
-      if (!isKept) throw busy(await this.find(actor, regionId, id));
-      return found;
-    } catch (error) {
-      await dropCheck(id, worker);
-      throw error;
-    }
+    if (row.state === 'uploaded' && row.reason) throw new BadListError(row.reason);
+    if (row.state !== 'ready' || !row.counts) throw busy(row);
+    return { rows: row.counts, faults: row.faults ?? [], ...(row.findings ?? NO_FINDINGS) };
   }
 
-  /** Begins to store the list; the job goes on when the request is over. */
+  /**
+   * Has a checked list stored; that goes on when the request is over.
+   * @throws {ConflictError} If its state, another import or another edition forbids it.
+   */
   async commit(actor: Actor, regionId: number, id: number): Promise<ImportState> {
-    await this.commits.begin(await this.find(actor, regionId, id));
+    const row = await this.find(actor, regionId, id);
+    const { counts } = row;
+    if (counts && counts.new + counts.changed + counts.same === 0) {
+      throw new ConflictError(
+        'No row of the list can be stored. Mend the file and upload it again.',
+      );
+    }
+    await inTransaction(this.database, async () => {
+      if (!(await queueCommit(id, regionId))) throw await this.whyNotCommitted(row);
+      if ((await this.editions.latest(regionId)) !== row.baseEditionId) {
+        throw new ConflictError(
+          'Another edition was stored or undone since this list was checked. Check it again.',
+          'edition-changed',
+        );
+      }
+    });
+    this.worker.wake();
     return this.state(actor, regionId, id);
+  }
+
+  /** Waits until no worker is at the import any more. */
+  settled(id: number): Promise<void> {
+    return this.watch.settled(id);
+  }
+
+  /** The import whenever it changes, as long as the actor may see it. */
+  async changes(actor: Actor, regionId: number, id: number) {
+    await this.find(actor, regionId, id);
+    return this.watch.follow(id);
   }
 
   async rejects(actor: Actor, regionId: number, id: number) {
@@ -191,15 +203,16 @@ export class Imports {
       if (await cancel(id)) return true;
       const { editionId } = await this.find(actor, regionId, id);
       if (!(await undo(id))) return false;
-      if (editionId !== null) await this.editions.remove(editionId);
+      if (editionId !== null) await this.editions.hide(editionId);
       return true;
     });
-    if (isUndone) await this.uploads.remove(row.storedName);
+    if (!isUndone) return;
+    await this.uploads.remove(row.storedName);
+    this.worker.wake();
   }
 
-  /** Ends what was left lying: dead workers' imports, old uploads, files without an import. */
+  /** Ends what was left lying: old uploads, files without an import. */
   async tidy(): Promise<void> {
-    await failExpired();
     const old = await ImportModel.findAll({
       attributes: ['id'],
       where: {
@@ -210,26 +223,29 @@ export class Imports {
     for (const { id } of old) await cancel(id);
     await this.uploads.sweep(async (names) => {
       const rows = await ImportModel.findAll({
-        attributes: ['storedName'],
+        attributes: ['storedName', 'state'],
         where: { storedName: [...names], state: { [Op.notIn]: ['cancelled', 'undone'] } },
       });
-      return new Set(rows.map(({ storedName }) => storedName));
+      return new Map(rows.map(({ storedName, state }) => [storedName, state !== 'committed']));
     });
   }
 
   private async find(actor: Actor, regionId: number, id: number): Promise<ImportModel> {
     await this.regions.get(actor, regionId);
-    await failExpired();
     const row = await ImportModel.findOne({ where: { id, regionId } });
     if (!row) throw new NotFoundError('import', id);
     return row;
   }
 
-  private async compare(row: ImportModel, reading: ListReading, raster: Region['raster']) {
-    const baseEditionId = await this.editions.latest(row.regionId);
-    const tally = await tallyBeside(this.editions, reading, baseEditionId, raster);
-    const found = await checkList(this.uploads.path(row.storedName), reading, tally);
-    return { ...found, baseEditionId };
+  private async whyNotCommitted(before: ImportModel): Promise<ConflictError> {
+    const row = (await ImportModel.findByPk(before.id)) ?? before;
+    const isNext = row.state === 'ready' || row.state === 'failed';
+    if (isNext && row.counts) {
+      return new ConflictError('Another list is being stored in this region. Wait for it.');
+    }
+    return isNext || row.state === 'uploaded'
+      ? new ConflictError('Check the list first: say how its columns are to be read.')
+      : busy(row);
   }
 
   private async today(): Promise<string> {

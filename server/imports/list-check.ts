@@ -97,15 +97,21 @@ class RowJudge {
   }
 }
 
-/** Counts what storing the list would do beside the edition the tally knows, and names all faults. */
+/**
+ * Counts what storing the list would do beside the edition the tally knows, and names all faults.
+ * @param follow Is shown each row as it was judged, and waited for where it answers a promise.
+ */
 export async function checkList(
   path: string,
   reading: ListReading,
   tally: RowTally,
+  follow: (judged: JudgedRow) => Promise<void> | undefined,
 ): Promise<ImportCheck> {
   const faults: ImportFault[] = [];
   const causes = new Map<string, ImportCause>();
   for await (const judged of judgedRows(path, reading, tally)) {
+    const pause = follow(judged);
+    if (pause) await pause;
     if (!('faults' in judged)) continue;
     for (const fault of judged.faults) {
       if (faults.length < FAULTS_ANSWERED) faults.push(fault);

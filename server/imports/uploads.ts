@@ -6,7 +6,12 @@ import { basename, join } from 'node:path';
 import type { Request, Response } from 'express';
 import multer, { diskStorage, MulterError } from 'multer';
 
-import { InvalidError, TooLargeError, UnsupportedMediaError } from '../http/errors.ts';
+import {
+  InvalidError,
+  TooLargeError,
+  UnavailableError,
+  UnsupportedMediaError,
+} from '../http/errors.ts';
 
 /** A file that was received, under a name of ours. */
 export interface ReceivedFile {
@@ -16,18 +21,29 @@ export interface ReceivedFile {
 }
 
 export const MAX_UPLOAD_BYTES = 128 * 1024 * 1024;
+const SPOOL_ENDING = '.spool';
+const UUID_LENGTH = 36;
 const ORPHAN_AGE_MS = 3_600_000;
+/** Of 128 MB in that time even a slow line is capable; one that is held open costs a place. */
+const LONGEST_UPLOAD_MS = 10 * 60_000;
+const MAX_RECEIVING = 8;
 const MULTIPART_OVERHEAD = 65_536;
+
+/** The upload that a file of the folder belongs to. */
+const storedNameOf = (name: string): string => name.slice(0, UUID_LENGTH);
 
 /** The folder of uploaded lists. */
 export class Uploads {
   private readonly folder: string;
   private readonly maxBytes: number;
+  private readonly limitMs: number;
+  private receiving = 0;
   private readonly read: ReturnType<multer.Multer['single']>;
 
-  constructor(folder: string, maxBytes = MAX_UPLOAD_BYTES) {
+  constructor(folder: string, maxBytes = MAX_UPLOAD_BYTES, limitMs = LONGEST_UPLOAD_MS) {
     this.folder = folder;
     this.maxBytes = maxBytes;
+    this.limitMs = limitMs;
     mkdirSync(folder, { recursive: true, mode: 0o700 });
     this.read = multer({
       storage: diskStorage({
@@ -52,12 +68,17 @@ export class Uploads {
     if (Number(request.get('Content-Length')) > this.maxBytes + MULTIPART_OVERHEAD) {
       throw this.tooLarge();
     }
-    await new Promise<void>((resolve, reject) => {
-      this.read(request, response, (error?: Error | 'router' | 'route' | null) => {
-        if (error instanceof Error) reject(this.refusal(error));
-        else resolve();
-      });
-    });
+    if (this.receiving >= MAX_RECEIVING) {
+      throw new UnavailableError('Many lists are being uploaded. Try again shortly.');
+    }
+    this.receiving += 1;
+    const limit = setTimeout(() => request.destroy(), this.limitMs);
+    try {
+      await this.readFile(request, response);
+    } finally {
+      clearTimeout(limit);
+      this.receiving -= 1;
+    }
     if (!request.file) {
       throw new InvalidError({ path: 'file', message: 'Send the list in the field "file".' });
     }
@@ -65,21 +86,49 @@ export class Uploads {
     return { storedName: request.file.filename, fileName: fileName || 'list.csv' };
   }
 
-  async remove(storedName: string): Promise<void> {
-    await rm(this.path(storedName), { force: true });
+  /** Where the good rows of a checked list wait to be stored. */
+  spool(storedName: string): string {
+    return `${this.path(storedName)}${SPOOL_ENDING}`;
   }
 
-  /** Removes files that no import names: what a process left behind that was killed. */
-  async sweep(isNamed: (names: readonly string[]) => Promise<ReadonlySet<string>>): Promise<void> {
+  async remove(storedName: string): Promise<void> {
+    await rm(this.path(storedName), { force: true });
+    await this.removeSpool(storedName);
+  }
+
+  async removeSpool(storedName: string): Promise<void> {
+    await rm(this.spool(storedName), { force: true });
+  }
+
+  /**
+   * Removes what a process left behind that was killed.
+   * @param findKept Which of the uploads are still needed, and whether they are yet to be stored.
+   */
+  async sweep(
+    findKept: (storedNames: readonly string[]) => Promise<ReadonlyMap<string, boolean>>,
+  ): Promise<void> {
     const names = await readdir(this.folder);
-    const named = await isNamed(names);
-    for (const name of names.filter((each) => !named.has(each))) {
+    const kept = await findKept([...new Set(names.map(storedNameOf))]);
+    for (const name of names) {
+      const isToBeStored = kept.get(storedNameOf(name));
+      const isUpload = name === storedNameOf(name);
+      const isSpool = name === `${storedNameOf(name)}${SPOOL_ENDING}`;
+      if (isToBeStored === undefined ? false : isUpload || (isSpool && isToBeStored)) continue;
       const age = await stat(this.path(name)).then(
         ({ mtimeMs }) => Date.now() - mtimeMs,
         () => 0,
       );
-      if (age > ORPHAN_AGE_MS) await this.remove(name);
+      if (age > ORPHAN_AGE_MS) await rm(this.path(name), { force: true });
     }
+  }
+
+  private readFile(request: Request, response: Response): Promise<void> {
+    return new Promise((resolve, reject) => {
+      this.read(request, response, (error?: Error | 'router' | 'route' | null) => {
+        if (error instanceof Error) reject(this.refusal(error));
+        else resolve();
+      });
+    });
   }
 
   private refusal(error: Error): Error {

@@ -41,6 +41,12 @@ export class Regions {
     return toRegion(actor, await find(actor, id));
   }
 
+  /** The raster in force, for work done in nobody's name; empty where the region is gone. */
+  async rasterOf(id: number): Promise<Region['raster']> {
+    const row = await RegionModel.findByPk(id);
+    return row ? rangesToday(row.rasters) : [];
+  }
+
   /** The workshop's regions by id, for what belongs to them. */
   async byId(actor: Actor): Promise<ReadonlyMap<number, Region>> {
     const rows = await RegionModel.findAll({ where: { workshopId: actor.workshopId } });
@@ -105,13 +111,16 @@ function filled({ name, ituRegion, raster, rasters }: RegionDraft, before?: Regi
 
 const always = (ranges: DatedRaster['ranges']): DatedRaster[] => [{ from: null, ranges }];
 
+const rangesToday = (rasters: readonly DatedRaster[]): DatedRaster['ranges'] =>
+  rangesInForce(rasters, new Date().toISOString().slice(0, 10));
+
 function toRegion(actor: Actor, row: RegionModel): Region {
   const { id, name, ituRegion, rasters } = row;
   return {
     id,
     name,
     ituRegion,
-    raster: rangesInForce(rasters, new Date().toISOString().slice(0, 10)),
+    raster: rangesToday(rasters),
     rasters,
     editable: hasRole(actor, 'librarian'),
     editions: Number(row.get('editions') ?? 0),

@@ -1,7 +1,7 @@
 import { readdirSync, rmSync } from 'node:fs';
 import { join } from 'node:path';
 
-import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { afterAll, beforeAll, describe, expect, it, vi } from 'vitest';
 
 import { importCheck, importState } from '../../shared/contracts/list-import.ts';
 import { listedStation } from '../../shared/contracts/station-list.ts';
@@ -343,6 +343,7 @@ describe('DELETE of an import', () => {
 
     expect((await librarian.get(path)).body).toMatchObject({ state: 'undone', editionId: null });
     await librarian.get(`/api/editions/${editionId}`).expect(404);
+    await vi.waitUntil(async () => (await rowsOf(server, `editions WHERE id = ${editionId}`)) === 0);
     expect(await rowsOf(server, `stations WHERE edition_id = ${editionId}`)).toBe(0);
   });
 });

@@ -47,6 +47,7 @@ export async function startApiServer(
     NODE_ENV: 'test',
     DATABASE_URL: databaseUrl,
     DATA_DIR: dataFolder,
+    WORKER_PROCESS: 'false',
     LIMIT_SIGN_IN: UNLIMITED,
     LIMIT_SIGN_IN_ADDRESS: UNLIMITED,
     LIMIT_REGISTER: UNLIMITED,
@@ -74,7 +75,7 @@ export async function startApiServer(
     close: async () => {
       server.closeAllConnections();
       await new Promise((resolve) => server.close(resolve));
-      await services.commits.settle();
+      await services.importWorker.stop();
       await services.engine.close();
       await services.passwords.close();
       await database.close();
