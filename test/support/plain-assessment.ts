@@ -333,10 +333,16 @@ function breakthrough(
   return worst;
 }
 
-/** Every response of every station in every band, hidden ones too, in no promised order. */
-export function plainResponses(it: PlainCase): PlainResponse[] {
+/**
+ * Every response of every station in every band, hidden ones too, in no promised order.
+ * @param interferers The stations whose products are followed; left out, all of the list.
+ */
+export function plainResponses(
+  it: PlainCase,
+  interferers: readonly PlainStation[] = it.stations,
+): PlainResponse[] {
   return it.receiver.bands.flatMap((band, bandIndex) =>
-    it.stations.flatMap((station) => {
+    interferers.flatMap((station) => {
       const all: PlainResponse[] = [];
       for (let n = 1; n <= it.maxN; n++) {
         const still = breakthrough(it, bandIndex, station, n);
