@@ -95,7 +95,7 @@ const againstBare = ({ name, ms, bareMs }: Measured): Verdict => {
 
 /** Measures and answers the lines to print. */
 export function run(): Verdict[] {
-  const small = againstBareLoop(5_000, 9);
+  const small = againstBareLoop(5_000, 25);
   const memory = megabytesOf(() => assessment(seededStations(100_000)));
   const large = againstBareLoop(100_000, 3);
   const growth = large.perJudged / small.perJudged;
