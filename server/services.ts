@@ -52,19 +52,21 @@ export function createImportTools(database: Sequelize, config: Pick<Config, 'DAT
   };
 }
 
-function createImportWorker(
-  tools: ReturnType<typeof createImportTools>,
-  watch: ImportWatch,
-  { WORKER_PROCESS }: Config,
-  log: Logger,
-): ImportWorker {
+/** How lists come in, and who does the work: a process of its own, or this one. */
+function createImports(database: Sequelize, config: Config, log: Logger, regions: Regions) {
+  const tools = createImportTools(database, config);
+  const { editions, uploads } = tools;
+  const watch = new ImportWatch();
   const onChange = () => watch.look();
-  if (!WORKER_PROCESS) return new ImportJobs(tools, log, onChange);
   const findWork = async () => {
     await failHopeless();
-    return (await hasWaitingJobs()) || tools.editions.hasHidden();
+    return (await hasWaitingJobs()) || editions.hasHidden();
   };
-  return new WorkerProcess(log, findWork, onChange);
+  const importWorker: ImportWorker = config.WORKER_PROCESS
+    ? new WorkerProcess(log, findWork, onChange)
+    : new ImportJobs(tools, log, onChange);
+  const imports = new Imports(database, regions, editions, uploads, importWorker, watch);
+  return { uploads, imports, importWorker };
 }
 
 /** Builds every service and hands each the others it needs. */
@@ -76,9 +78,6 @@ export function createServices(database: Sequelize, config: Config, log: Logger)
   const regions = new Regions(database);
   const editions = new Editions(database, regions);
   const lists = new ListsAtSites(editions);
-  const importTools = createImportTools(database, config);
-  const importWatch = new ImportWatch();
-  const importWorker = createImportWorker(importTools, importWatch, config, log);
   const engine = new Engine();
   const assessments = new Assessments(lists, engine);
   const receivers = new Receivers(database, accounts);
@@ -96,16 +95,7 @@ export function createServices(database: Sequelize, config: Config, log: Logger)
     sites,
     regions,
     editions,
-    uploads: importTools.uploads,
-    imports: new Imports(
-      database,
-      regions,
-      importTools.editions,
-      importTools.uploads,
-      importWorker,
-      importWatch,
-    ),
-    importWorker,
+    ...createImports(database, config, log, regions),
     fieldStrengths: new FieldStrengths(lists, engine),
     cures: new Cures(lists, engine),
     whistles: new Whistles(lists, engine),

@@ -69,11 +69,14 @@ export class ImportJobs implements ImportWorker {
   private async work(): Promise<void> {
     for (let seen = -1; seen !== this.wakings && !this.isStopping;) {
       seen = this.wakings;
-      while (!this.isStopping && (await this.next()));
+      let isMore = true;
+      while (isMore) isMore = await this.next();
     }
   }
 
+  /** Does one thing that waits; false when nothing does, or it is time to stop. */
   private async next(): Promise<boolean> {
+    if (this.isStopping) return false;
     const job = await takeJob(this.tools.database, this.worker);
     if (!job) return this.tools.editions.clearSome();
     this.onChange(job.id);

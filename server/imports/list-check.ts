@@ -105,7 +105,7 @@ export async function checkList(
   path: string,
   reading: ListReading,
   tally: RowTally,
-  follow: (judged: JudgedRow) => Promise<void> | undefined,
+  follow: (judged: JudgedRow) => Promise<void> | undefined = () => undefined,
 ): Promise<ImportCheck> {
   const faults: ImportFault[] = [];
   const causes = new Map<string, ImportCause>();

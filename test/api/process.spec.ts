@@ -4,13 +4,9 @@ import supertest from 'supertest';
 import { afterAll, afterEach, beforeAll, describe, expect, it } from 'vitest';
 
 import { ApiClient } from '../support/api-client.ts';
+import { listening, stop } from '../support/launch-server.ts';
 import { sentReceiver } from '../support/receivers.ts';
-import {
-  listening,
-  type ServerProcesses,
-  serverProcesses,
-  stop,
-} from '../support/server-process.ts';
+import { type ServerProcesses, serverProcesses } from '../support/server-process.ts';
 
 const credentials = { email: 'ada@example.org', password: 'a soldering iron' };
 let processes: ServerProcesses;
