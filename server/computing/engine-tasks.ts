@@ -102,6 +102,8 @@ export interface Tasks {
 interface Named {
   readonly name: string;
   readonly frequencyHz: number;
+  readonly latitude: number | null;
+  readonly longitude: number | null;
 }
 
 interface Skipped {
@@ -168,6 +170,8 @@ export function fieldStrengths({
     ...field,
     name: names[index] ?? '',
     frequencyHz: stations[index]?.frequencyHz ?? 0,
+    latitude: stations[index]?.latitude ?? null,
+    longitude: stations[index]?.longitude ?? null,
   }));
   return { fields };
 }

@@ -21,6 +21,9 @@ export const fieldStrength = z.object({
   station: z.int(),
   name: z.string(),
   frequencyHz: z.int(),
+  /** Where the station is, degrees; null: not known. */
+  latitude: z.number().nullable(),
+  longitude: z.number().nullable(),
   distanceM: z.number().nullable(),
   groundDb: z.number().nullable(),
   skyDb: z.number().nullable(),

@@ -43,6 +43,16 @@ export const receiverRoutes: Routes = [
         title: $localize`Dial`,
         loadComponent: () => import('./dial-page/dial-page').then((m) => m.DialPage),
       },
+      {
+        path: 'rejection',
+        title: $localize`Rejection`,
+        loadComponent: () => import('./rejection-page/rejection-page').then((m) => m.RejectionPage),
+      },
+      {
+        path: 'whistle',
+        title: $localize`Whistle`,
+        loadComponent: () => import('./whistle-page/whistle-page').then((m) => m.WhistlePage),
+      },
     ],
   },
 ];

@@ -1,18 +1,12 @@
-import {
-  ChangeDetectionStrategy,
-  Component,
-  computed,
-  input,
-  model,
-  output,
-  signal,
-} from '@angular/core';
+import { ChangeDetectionStrategy, Component, computed, input, model, output } from '@angular/core';
 import { MatButtonToggleModule } from '@angular/material/button-toggle';
 
+import { ifHarmonics } from '../../../../shared/radio/mixing/harmonic-whistles';
 import type { Receiver } from '../../../../shared/radio/receiver';
 import { BandStrip } from '../../charts/band-strip/band-strip';
 import { type JudgedBand, loudness } from '../../charts/band-strip/strip-layout';
 import { type StationAtSite } from '../../charts/choice-chart/choice-layout';
+import { disturbanceSentence } from './disturbance-words';
 
 /** The dial of the set: one strip for each band, all with the same scale of levels. */
 @Component({
@@ -27,15 +21,26 @@ export class DialStrips {
   readonly receiver = input.required<Receiver>();
   readonly stations = input.required<readonly StationAtSite[]>();
   readonly noise = input.required<(hz: number) => number | null>();
+  readonly isLog = model(true);
   readonly picked = model<string | null>(null);
+  /** Dial setting pointed at, hertz. */
+  readonly pointerHz = model<number | null>(null);
+  readonly pointerSettled = output();
   readonly working = output<string>();
 
-  protected readonly isLog = signal(true);
   protected readonly loudness = computed(() => loudness(this.bands()));
   protected readonly strips = computed(() =>
     this.bands().flatMap((band, at) => {
       const own = this.receiver().bands[at];
-      return own ? { band, range: { low: own.lowHz, high: own.highHz } } : [];
+      if (!own) return [];
+      const { lowHz, highHz } = own;
+      const { bfo } = this.receiver();
+      return {
+        band,
+        range: { low: lowHz, high: highHz },
+        beatHarmonics: bfo ? ifHarmonics(bfo.centreHz, lowHz, highHz) : [],
+        disturbs: disturbanceSentence(band.oscillatorHz, this.stations(), this.noise()),
+      };
     }),
   );
 }

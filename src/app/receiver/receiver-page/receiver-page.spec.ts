@@ -65,6 +65,8 @@ const field = {
   station: 9,
   name: 'Alder',
   frequencyHz: 560_000,
+  latitude: null,
+  longitude: null,
   distanceM: 12_000,
   groundDb: 80,
   skyDb: null,

@@ -1,48 +1,50 @@
-import { ChangeDetectionStrategy, Component, input, model } from '@angular/core';
-import { MatCheckboxModule } from '@angular/material/checkbox';
+import { ChangeDetectionStrategy, Component, input, output } from '@angular/core';
+import { MatButtonModule } from '@angular/material/button';
 import { MatChipsModule } from '@angular/material/chips';
+import { MatFormFieldModule } from '@angular/material/form-field';
+import { MatInputModule } from '@angular/material/input';
+import { MatSlideToggleModule } from '@angular/material/slide-toggle';
 
-import { type Cause } from '../../charts/cause-mark';
+import { gradeWord } from '../../charts/band-strip/grade-word';
 import { CauseSign } from '../../charts/cause-sign';
+import { type DialView, type GradeName } from '../address/dial-view';
 import { type causesHeard } from './response-rows';
 
-/** Which causes are listed, and whether what is hidden is. */
+const GRADES: readonly GradeName[] = [
+  'very-annoying',
+  'annoying',
+  'slightly-annoying',
+  'perceptible',
+  'imperceptible',
+];
+
+/** Which responses are shown: by cause, grade and station, and whether what is hidden is. */
 @Component({
   selector: 'app-response-filter',
-  template: `
-    <mat-chip-listbox
-      multiple
-      aria-label="Heard as"
-      i18n-aria-label
-      [value]="causes()"
-      (change)="causes.set($event.value ?? [])"
-    >
-      @for (each of heard(); track each.look.cause) {
-        <mat-chip-option [value]="each.look.cause">
-          <app-cause-sign [look]="each.look" />
-          {{ each.look.label }} {{ each.count }}
-        </mat-chip-option>
-      }
-    </mat-chip-listbox>
-    <mat-checkbox [checked]="isHiddenShown()" (change)="isHiddenShown.set($event.checked)" i18n>
-      What is hidden as well
-    </mat-checkbox>
-  `,
-  styles: `
-    :host {
-      display: flex;
-      flex-wrap: wrap;
-      align-items: center;
-      gap: 4px 16px;
-      margin-bottom: 8px;
-    }
-  `,
-  imports: [CauseSign, MatCheckboxModule, MatChipsModule],
+  templateUrl: './response-filter.html',
+  styleUrl: './response-filter.scss',
+  imports: [
+    CauseSign,
+    MatButtonModule,
+    MatChipsModule,
+    MatFormFieldModule,
+    MatInputModule,
+    MatSlideToggleModule,
+  ],
   changeDetection: ChangeDetectionStrategy.OnPush,
 })
 export class ResponseFilter {
   readonly heard = input.required<ReturnType<typeof causesHeard>>();
-  /** None chosen: all. */
-  readonly causes = model.required<readonly Cause[]>();
-  readonly isHiddenShown = model.required<boolean>();
+  readonly view = input.required<DialView>();
+  readonly leftOut = input.required<number>();
+  readonly changed = output<Partial<DialView>>();
+
+  protected readonly grades = GRADES.map((grade) => ({
+    grade,
+    word: gradeWord({ grade, hidden: null }),
+  }));
+
+  protected clear(): void {
+    this.changed.emit({ causes: [], grades: [], station: '', isHiddenShown: true });
+  }
 }

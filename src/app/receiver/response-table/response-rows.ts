@@ -1,4 +1,4 @@
-import { type Cause, causeMarks } from '../../charts/cause-mark';
+import { type CauseMark, causeMark, causeMarks } from '../../charts/cause-mark';
 import { gradeWord } from '../../charts/band-strip/grade-word';
 import {
   type JudgedBand,
@@ -6,7 +6,6 @@ import {
   overNoise,
   responseMark,
 } from '../../charts/band-strip/strip-layout';
-import { causeMark, type CauseMark } from '../../charts/cause-mark';
 import { kilohertz, tenths } from '../../charts/readings';
 
 /** A response as a row of the table. */
@@ -23,25 +22,10 @@ export interface ResponseRow {
   readonly grade: string;
 }
 
-/** Which responses are listed. */
-export interface ResponseFilter {
-  /** None chosen: all. */
-  readonly causes: readonly Cause[];
-  readonly isHiddenShown: boolean;
-}
-
-const isListed = ({ cause, hidden }: JudgedResponse, filter: ResponseFilter): boolean =>
-  (filter.causes.length === 0 || filter.causes.includes(cause)) &&
-  (filter.isHiddenShown || hidden === null);
-
 /** The responses of all bands, the worst first; those without a level last. */
-export function responseRows(bands: readonly JudgedBand[], filter: ResponseFilter): ResponseRow[] {
+export function responseRows(bands: readonly JudgedBand[]): ResponseRow[] {
   return bands
-    .flatMap((band) =>
-      band.responses
-        .filter((response) => isListed(response, filter))
-        .map((response) => row(band.name, response)),
-    )
+    .flatMap((band) => band.responses.map((response) => row(band.name, response)))
     .sort((a, b) => (a.response.ratioDb ?? Infinity) - (b.response.ratioDb ?? Infinity));
 }
 

@@ -42,6 +42,8 @@ export class SectionNav {
   protected readonly sections = [
     { path: './', name: $localize`Choice of IF` },
     { path: 'dial', name: $localize`Dial` },
+    { path: 'rejection', name: $localize`Rejection` },
+    { path: 'whistle', name: $localize`Whistle` },
   ];
   protected readonly matching = {
     paths: 'exact',
