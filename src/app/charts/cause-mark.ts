@@ -27,10 +27,12 @@ export interface CauseMark {
   readonly dash: string;
   /** Outline around (0, 0). */
   readonly path: string;
+  readonly shape: SymbolType;
   readonly isHollow: boolean;
 }
 
-const AREA = 64;
+/** Of a mark, square CSS pixels. */
+export const MARK_AREA = 64;
 
 function mark(
   cause: Cause,
@@ -40,8 +42,8 @@ function mark(
   shape: SymbolType,
   isHollow = false,
 ): CauseMark {
-  const path = symbol(shape, AREA)() ?? '';
-  return { cause, label, colour: hueColour(hue), dash, path, isHollow };
+  const path = symbol(shape, MARK_AREA)() ?? '';
+  return { cause, label, colour: hueColour(hue), dash, path, shape, isHollow };
 }
 
 /** The marks in the order they are listed to people. */

@@ -20,11 +20,11 @@ import { RangeBars } from '../range-bars/range-bars';
 import { bandUnit } from '../readings';
 import { type Window } from '../zoom-window';
 import { DialGlass } from './dial-glass';
-import { DialPointer } from './dial-pointer';
 import { HeardMarks } from './heard-marks';
 import {
   breakthroughCurves,
   dialScale,
+  harmonicLabels,
   heardMarks,
   type JudgedBand,
   responseMark,
@@ -40,7 +40,7 @@ import { stripColumns, stripReadout, stripRows, stripSentence } from './strip-wo
   selector: 'app-band-strip',
   templateUrl: './band-strip.html',
   styleUrl: './band-strip.scss',
-  imports: [Chart, DialGlass, DialPointer, HeardMarks, Plot, PlotLabels, RangeBars],
+  imports: [Chart, DialGlass, HeardMarks, Plot, PlotLabels, RangeBars],
   changeDetection: ChangeDetectionStrategy.OnPush,
 })
 export class BandStrip {
@@ -53,12 +53,6 @@ export class BandStrip {
   /** Levels over the noise, the same for every band of the receiver. */
   readonly loudness = input.required<ScaleLinear<number, number>>();
   readonly isLog = input(false);
-  /** Harmonics of the beat oscillator on the band. */
-  readonly beatHarmonics = input<readonly { harmonic: number; dialHz: number }[]>([]);
-  /** Where the pointer stands, hertz; null: there is none. */
-  readonly pointerHz = model<number | null>(null);
-  /** The pointer was let go. */
-  readonly pointerSettled = output();
   /** What Enter does with a response, in words; empty where nobody listens to `working`. */
   readonly leadsOn = input($localize`Enter shows the working.`);
   readonly picked = model<string | null>(null);
@@ -87,28 +81,22 @@ export class BandStrip {
   protected readonly x = computed(() =>
     dialScale(...this.shown(), this.frame().innerWidth, this.isLog()),
   );
-  /** The pointer stands on this band. */
-  protected readonly pointer = computed(() => {
-    const hz = this.pointerHz();
-    const { low, high } = this.range();
-    return hz !== null && hz >= low && hz <= high ? hz : null;
-  });
   private readonly unit = computed(() => bandUnit(this.range().high));
   protected readonly levels = computed(() =>
     this.loudness()
       .ticks(3)
       .map((value) => ({ value, y: this.loudness()(value) })),
   );
-  protected readonly heard = computed(() =>
-    // What is hidden is drawn first, so that it never covers what is heard.
-    heardMarks(this.band(), this.x(), this.loudness()).sort(
-      (a, b) => Number(a.response.hidden === null) - Number(b.response.hidden === null),
-    ),
-  );
+  protected readonly heard = computed(() => heardMarks(this.band(), this.x(), this.loudness()));
   protected readonly breakthroughs = computed(() =>
     breakthroughCurves(this.band(), this.x(), this.loudness(), this.noise()),
   );
   protected readonly wanted = computed(() => wantedMarks(this.stations(), this.x(), this.noise()));
+  protected readonly wantedPath = computed(() =>
+    this.wanted()
+      .map(({ x, y }) => `M${x.toFixed(2)},${STRIP.heard + STRIP.glass}V${y.toFixed(2)}`)
+      .join(''),
+  );
   protected readonly marks = computed<PlotMark[]>(() => [...this.heard(), ...this.wanted()]);
   protected readonly order = computed(() => [
     ...this.band().responses.flatMap((each) =>
@@ -121,17 +109,14 @@ export class BandStrip {
       value: station.frequencyHz,
     })),
   ]);
-  protected readonly harmonics = computed(() => {
-    const [low, high] = this.shown();
-    const own = this.band().harmonics.map((each) => ({ ...each, of: 'IF' }));
-    const beat = this.beatHarmonics().map((each) => ({ ...each, of: $localize`BFO` }));
-    return [...own, ...beat]
-      .filter(({ dialHz }) => dialHz >= low && dialHz <= high)
-      .map(({ harmonic, dialHz, of }) => ({
-        text: $localize`${harmonic}:order: × ${of}:source:`,
-        x: this.x()(dialHz),
-      }));
-  });
+  protected readonly harmonics = computed(() =>
+    this.band()
+      .harmonics.filter(({ dialHz }) => dialHz >= this.shown()[0] && dialHz <= this.shown()[1])
+      .map(({ harmonic, dialHz }) => ({ harmonic, x: this.x()(dialHz) })),
+  );
+  protected readonly harmonicLabels = computed(() =>
+    harmonicLabels(this.harmonics(), this.frame().innerWidth),
+  );
   protected readonly labels = computed(() =>
     stripLabels(
       this.heard(),

@@ -184,3 +184,18 @@ export function stripLabels(
     }));
   return placeLabels([...loudest, ...strongest], [0, width], taken);
 }
+
+/** Orders of the harmonics of the IF over the strip, the lowest first where they crowd. */
+export const harmonicLabels = (
+  harmonics: readonly { readonly harmonic: number; readonly x: number }[],
+  width: number,
+): PlacedLabel[] =>
+  placeLabels(
+    harmonics.map(({ harmonic, x }) => ({
+      id: String(harmonic),
+      text: $localize`${harmonic}:order: × IF`,
+      weight: -harmonic,
+      spots: [{ x, y: 2 }],
+    })),
+    [0, width],
+  );

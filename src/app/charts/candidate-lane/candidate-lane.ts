@@ -10,11 +10,12 @@ import {
 import { scaleLinear } from 'd3';
 
 import { formatFrequency } from '../../ui/frequency-pipe';
+import { Chart } from '../chart/chart';
 import { frame, NARROW } from '../frame';
 import { observeWidth } from '../observe-width';
 import { Plot } from '../plot/plot';
 import { type Readout } from '../plot/plot-mark';
-import { tenths, whole } from '../readings';
+import { kilohertz, tenths, whole } from '../readings';
 import { type Window } from '../zoom-window';
 
 const HEIGHT = 84;
@@ -32,7 +33,7 @@ export interface CandidateMark {
   selector: 'app-candidate-lane',
   templateUrl: './candidate-lane.html',
   styleUrl: './candidate-lane.scss',
-  imports: [Plot],
+  imports: [Chart, Plot],
   changeDetection: ChangeDetectionStrategy.OnPush,
 })
 export class CandidateLane {
@@ -47,7 +48,29 @@ export class CandidateLane {
 
   private readonly width = observeWidth();
   protected readonly picked = signal<string | null>(null);
-  protected readonly label = $localize`What each candidate leaves to be desired, in decibels; shorter is better`;
+  protected readonly heading = $localize`What each candidate leaves to be desired`;
+  protected readonly sentence = computed(() => {
+    const at = (hz: number | null) => this.candidates().find(({ ifHz }) => ifHz === hz);
+    const [best, now] = [at(this.bestHz()), at(this.presentHz())];
+    const said = ({ ifHz, deficitDb }: CandidateMark) =>
+      $localize`${tenths(deficitDb)}:level: dB at ${kilohertz(ifHz)}:frequency: kHz`;
+    return [
+      best ? $localize`Advised: ${said(best)}:best:.` : '',
+      now ? $localize`As it is: ${said(now)}:now:.` : '',
+      $localize`Shorter is better.`,
+    ]
+      .filter(Boolean)
+      .join(' ');
+  });
+  protected readonly table = () => ({
+    columns: [$localize`IF, kHz`, $localize`Left to be desired, dB`, $localize`Within reach`],
+    rows: this.candidates()
+      .toSorted((a, b) => a.ifHz - b.ifHz)
+      .map(({ ifHz, deficitDb, isReachable }) => ({
+        id: String(ifHz),
+        cells: [kilohertz(ifHz), tenths(deficitDb), isReachable ? $localize`yes` : $localize`no`],
+      })),
+  });
   protected readonly leadsOn = $localize`Enter puts it on trial.`;
   protected readonly frame = computed(() => {
     const isNarrow = this.width() < NARROW;

@@ -21,6 +21,7 @@ import {
   stationMark,
   stemLabels,
   stems,
+  thinned,
 } from './choice-layout';
 import { ChoiceStems } from './choice-stems';
 import { IfMarker } from './if-marker';
@@ -94,8 +95,9 @@ export class ChoiceChart {
   protected readonly stems = computed(() =>
     stems(this.heard(), this.x(), this.y(), this.rejection(), this.trialHz()),
   );
+  protected readonly drawn = computed(() => thinned(this.stems()));
   protected readonly labels = computed(() =>
-    stemLabels(this.stems(), this.frame().innerWidth, this.isNarrow()),
+    stemLabels(this.drawn(), this.frame().innerWidth, this.isNarrow()),
   );
   protected readonly passband = computed(() =>
     passbandPath(this.shown(), this.x(), this.y(), this.rejection(), this.trialHz()),
@@ -129,6 +131,8 @@ export class ChoiceChart {
   protected readonly trial = computed(() => ({
     x: this.x()(this.trialHz()),
     isShown: this.isShown(this.trialHz()),
+    // The marker covers this on the page; a saved picture has no marker.
+    text: kilohertz(this.trialHz()),
   }));
   protected readonly axisLabel = $localize`kHz`;
   protected readonly levelLabel = $localize`field at the site, dB(µV/m)`;

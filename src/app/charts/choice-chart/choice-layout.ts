@@ -75,6 +75,21 @@ export function stems(
     });
 }
 
+/** Above so many stems those that share a pixel are drawn as one: the strongest hides the others. */
+const CROWDED = 500;
+
+/** The stems to draw; each is still read out. */
+export function thinned(all: readonly Stem[]): readonly Stem[] {
+  if (all.length <= CROWDED) return all;
+  const tallest = new Map<number, Stem>();
+  for (const stem of all) {
+    const pixel = Math.round(stem.x);
+    const other = tallest.get(pixel);
+    if (!other || stem.y < other.y) tallest.set(pixel, stem);
+  }
+  return [...tallest.values()];
+}
+
 /** Half the size of a stem's head with its outline. */
 const HEAD = 5;
 

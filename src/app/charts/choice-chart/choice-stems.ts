@@ -1,28 +1,21 @@
-import { ChangeDetectionStrategy, Component, input } from '@angular/core';
+import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
+import { symbolCircle } from 'd3';
 
+import { shapesAt } from '../shapes';
 import { type Stem } from './choice-layout';
 
-/** Stations as stems: thin up to their field, thick up to what the passband lets through. */
+const HEAD_AREA = 38;
+
+/**
+ * Stations as stems: thin up to their field, thick up to what the passband lets through. One path
+ * for all of a kind: thousands are drawn anew while the marker moves.
+ */
 @Component({
   selector: 'svg:g[appChoiceStems]',
   template: `
-    @for (stem of stems(); track stem.id) {
-      <svg:line
-        class="stem"
-        [attr.x1]="stem.x"
-        [attr.x2]="stem.x"
-        [attr.y1]="stem.y"
-        [attr.y2]="foot()"
-      />
-      <svg:line
-        class="passed"
-        [attr.x1]="stem.x"
-        [attr.x2]="stem.x"
-        [attr.y1]="stem.passedY"
-        [attr.y2]="foot()"
-      />
-      <svg:circle r="3.5" [attr.cx]="stem.x" [attr.cy]="stem.y" />
-    }
+    <svg:path class="stem" [attr.d]="whole()" />
+    <svg:path class="passed" [attr.d]="passed()" />
+    <svg:path class="head" [attr.d]="heads()" />
   `,
   styles: `
     .stem {
@@ -34,7 +27,7 @@ import { type Stem } from './choice-layout';
       stroke-width: 3;
     }
 
-    circle {
+    .head {
       fill: var(--fallow-ground);
       stroke: var(--fallow-ink);
       stroke-width: 1.5;
@@ -46,4 +39,15 @@ export class ChoiceStems {
   readonly stems = input.required<readonly Stem[]>();
   /** Where the stems stand, CSS pixels. */
   readonly foot = input.required<number>();
+
+  protected readonly whole = computed(() => this.upTo(({ y }) => y));
+  protected readonly passed = computed(() => this.upTo(({ passedY }) => passedY));
+  protected readonly heads = computed(() => shapesAt(symbolCircle, HEAD_AREA, this.stems()));
+
+  private upTo(top: (stem: Stem) => number): string {
+    const foot = this.foot();
+    return this.stems()
+      .map((stem) => `M${stem.x.toFixed(2)},${foot}V${top(stem).toFixed(2)}`)
+      .join('');
+  }
 }
