@@ -1,8 +1,8 @@
 import type { RequestHandler } from 'express';
 import helmet from 'helmet';
 
-/** Policies by which Angular and its CDK mark what they made themselves as trusted. */
-const TRUSTED_TYPES = ['angular', 'angular#bundler', 'angular#components'];
+/** Policies by which Angular, its CDK and the client's worker mark what is their own as trusted. */
+const TRUSTED_TYPES = ['angular', 'angular#bundler', 'angular#components', 'fallow#worker'];
 
 /** Headers for every answer. Over plain http nothing may send browsers to https. */
 export function securityHeaders({ BEHIND_TLS }: { readonly BEHIND_TLS: boolean }): RequestHandler {
@@ -32,6 +32,7 @@ function policy(styles: string[], isBehindTls: boolean): Record<string, string[]
   return {
     'default-src': ["'self'"],
     'script-src': ["'self'"],
+    'worker-src': ["'self'"],
     'script-src-attr': ["'none'"],
     'style-src': styles,
     'img-src': ["'self'", 'data:'],

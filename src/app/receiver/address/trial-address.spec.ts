@@ -4,13 +4,20 @@ import { addressParams, readAddress, type TrialAddress } from './trial-address';
 
 describe('the address of a trial', () => {
   it('says site, edition, period and IF', () => {
-    const params = convertToParamMap({ site: '3', edition: '7', period: 'day', if: '554000' });
+    const params = convertToParamMap({
+      site: '3',
+      edition: '7',
+      period: 'day',
+      if: '554000',
+      mark: 'station-3',
+    });
 
     expect(readAddress(params)).toEqual({
       siteId: 3,
       source: { kind: 'edition', editionId: 7 },
       period: 'day',
       ifHz: 554_000,
+      picked: 'station-3',
     });
   });
 
@@ -22,16 +29,24 @@ describe('the address of a trial', () => {
       source: undefined,
       period: 'night',
       ifHz: undefined,
+      picked: undefined,
     });
   });
 
   it.each<TrialAddress>([
-    { siteId: 3, source: { kind: 'edition', editionId: 7 }, period: 'day', ifHz: 554_000 },
+    {
+      siteId: 3,
+      source: { kind: 'edition', editionId: 7 },
+      period: 'day',
+      ifHz: 554_000,
+      picked: 'response|3||1|1|612000|Range 4',
+    },
     {
       siteId: 4,
       source: { kind: 'every-channel', fieldDb: 72.5 },
       period: 'night',
       ifHz: undefined,
+      picked: undefined,
     },
   ])('reads back what it writes', (address) => {
     const said = Object.entries(addressParams(address)).flatMap(([key, value]) =>

@@ -9,6 +9,8 @@ export interface TrialAddress {
   readonly source: StationSource | undefined;
   readonly period: Period;
   readonly ifHz: number | undefined;
+  /** Mark that is picked in the charts and tables. */
+  readonly picked: string | undefined;
 }
 
 function wholeNumber(text: string | null): number | undefined {
@@ -30,6 +32,7 @@ export function readAddress(params: ParamMap): TrialAddress {
     source: sourceFrom(params),
     period: params.get('period') === 'day' ? 'day' : 'night',
     ifHz: wholeNumber(params.get('if')),
+    picked: params.get('mark') ?? undefined,
   };
 }
 
@@ -39,6 +42,7 @@ export function addressParams(change: Partial<TrialAddress>): Params {
   if ('siteId' in change) params['site'] = change.siteId ?? null;
   if ('period' in change) params['period'] = change.period;
   if ('ifHz' in change) params['if'] = change.ifHz ?? null;
+  if ('picked' in change) params['mark'] = change.picked ?? null;
   if ('source' in change) {
     const { source } = change;
     params['edition'] = source?.kind === 'edition' ? source.editionId : null;

@@ -1,8 +1,8 @@
 import { HttpClient } from '@angular/common/http';
 import { computed, effect, inject, Injectable, linkedSignal, untracked } from '@angular/core';
-import { toSignal } from '@angular/core/rxjs-interop';
+import { takeUntilDestroyed, toObservable, toSignal } from '@angular/core/rxjs-interop';
 import { ActivatedRoute, Router } from '@angular/router';
-import { firstValueFrom } from 'rxjs';
+import { debounceTime, firstValueFrom } from 'rxjs';
 
 import { pageOf } from '../../../../shared/contracts/paging';
 import { type Plan, plan, type PlanInput } from '../../../../shared/contracts/plan';
@@ -17,6 +17,8 @@ import { ASSUMED_FIELD_DB, type StationSource } from '../trial/station-source';
 import type { TrialInputs, TrialSetup } from '../trial/trial-inputs';
 
 const MOST = 500;
+/** Keys may go through many marks: the address follows when they rest. */
+const PICKED_MS = 300;
 
 /** A stored receiver on trial: what is chosen stands in the address. */
 @Injectable()
@@ -48,6 +50,8 @@ export class ReceiverStore implements TrialInputs {
   });
   readonly period = computed<Period>(() => this.address().period);
   readonly trialHz = linkedSignal(() => this.address().ifHz ?? this.receiver.value()?.ifHz ?? 0);
+  private readonly addressed = computed(() => this.address().picked ?? null);
+  readonly picked = linkedSignal(() => this.addressed());
   readonly setup = computed<TrialSetup | null>(() => {
     const [receiver, site] = [this.receiver.value(), this.site()];
     const { source } = this.address();
@@ -63,6 +67,11 @@ export class ReceiverStore implements TrialInputs {
   });
 
   constructor() {
+    toObservable(this.picked)
+      .pipe(debounceTime(PICKED_MS), takeUntilDestroyed())
+      .subscribe((picked) => {
+        if (picked !== this.addressed()) void this.go({ picked: picked ?? undefined }, true);
+      });
     effect(() => {
       const missing = this.missing();
       if (Object.keys(missing).length > 0) untracked(() => void this.go(missing, true));

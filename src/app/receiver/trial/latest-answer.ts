@@ -11,6 +11,7 @@ import { takeUntilDestroyed, toObservable } from '@angular/core/rxjs-interop';
 import {
   catchError,
   debounceTime,
+  identity,
   map,
   merge,
   type Observable,
@@ -39,17 +40,19 @@ interface State<A> {
 }
 
 /** Long enough to let a marker pass by, short enough not to be noticed. */
-const SETTLE_MS = 120;
+export const SETTLE_MS = 120;
 
 /**
  * Asks a question whenever it changes and settles. An answer that comes after a newer question was
  * asked is dropped, never shown. Call while the component or store is made.
  * @param question What to ask; null: nothing, and no answer is kept.
- * @param ask Asks it.
+ * @param ask Asks it; may answer more than once, each time better.
+ * @param settleMs How long a question must stand before it is asked; 0: it is asked at once.
  */
 export function latestAnswer<Q, A>(
   question: Signal<Q | null>,
   ask: (question: Q) => Observable<A>,
+  settleMs = SETTLE_MS,
 ): LatestAnswer<A> {
   const idle: State<A> = { value: undefined, isLoading: false, problem: undefined };
   const state = signal<State<A>>(idle);
@@ -62,7 +65,7 @@ export function latestAnswer<Q, A>(
       tap((asked) => {
         state.update(({ value }) => ({ value, isLoading: asked !== null, problem: undefined }));
       }),
-      debounceTime(SETTLE_MS),
+      settleMs > 0 ? debounceTime(settleMs) : identity,
       switchMap((asked) => (asked === null ? of(idle) : stated(ask(asked)))),
       takeUntilDestroyed(inject(DestroyRef)),
     )

@@ -21,6 +21,8 @@ export abstract class TrialInputs {
   abstract readonly period: Signal<Period>;
   /** The IF on trial, hertz. */
   abstract readonly trialHz: WritableSignal<number>;
+  /** Mark picked in any chart or table. */
+  abstract readonly picked: WritableSignal<string | null>;
   /** Writes the IF on trial into the address. */
   abstract settle(): void;
 }

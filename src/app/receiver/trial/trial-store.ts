@@ -1,13 +1,26 @@
-import { computed, inject, Injectable, signal } from '@angular/core';
-import { map } from 'rxjs';
+import { computed, inject, Injectable, signal, untracked } from '@angular/core';
+import {
+  catchError,
+  EMPTY,
+  map,
+  merge,
+  type Observable,
+  share,
+  switchMap,
+  takeUntil,
+  timer,
+} from 'rxjs';
 
+import type { Assessment, AssessmentInput } from '../../../../shared/contracts/assessment';
 import type { Period } from '../../../../shared/radio/site';
 import { candidateRange, reachOf } from './candidate-range';
-import { latestAnswer } from './latest-answer';
+import { latestAnswer, SETTLE_MS } from './latest-answer';
 import { sourceFields } from './station-source';
 import { noiseAt } from './surroundings';
 import { TrialApi } from './trial-api';
+import { TrialEngine } from './trial-engine';
 import { TrialInputs, type TrialSetup } from './trial-inputs';
+import type { HeldList, TrialQuestion } from './trial-messages';
 
 const PERIODS: Period[] = ['day', 'night'];
 /** Responses drawn for a band: the worst of them, hidden ones too. */
@@ -20,6 +33,7 @@ const sameText = (one: unknown, other: unknown): boolean =>
 @Injectable()
 export class TrialStore {
   private readonly api = inject(TrialApi);
+  private readonly engine = inject(TrialEngine);
   private readonly inputs = inject(TrialInputs);
 
   readonly setup = this.inputs.setup;
@@ -34,7 +48,7 @@ export class TrialStore {
   });
 
   /** Mark picked in any chart or table. */
-  readonly picked = signal<string | null>(null);
+  readonly picked = this.inputs.picked;
   /** Response whose working is shown. */
   readonly worked = signal<string | null>(null);
 
@@ -76,7 +90,14 @@ export class TrialStore {
     (body) => this.api.assess(body).pipe(map(({ verdict }) => verdict)),
   );
 
-  /** The set with the IF on trial. */
+  /** The list of the fields as they stand, for judging on the client; null while it changes. */
+  private readonly list = computed<HeldList | null>(() => {
+    const [setup, answer] = [this.setup(), this.fields.value()];
+    if (!setup || !answer || this.fields.isLoading()) return null;
+    return { site: setup.site, raster: setup.raster, fields: answer.fields };
+  });
+
+  /** The set with the IF on trial: judged here at once, then as the server judges it. */
   readonly judged = latestAnswer(
     computed(
       () => {
@@ -85,7 +106,8 @@ export class TrialStore {
       },
       { equal: sameText },
     ),
-    (body) => this.api.assess(body),
+    (question) => this.judge(question),
+    0,
   );
 
   /** The IF on trial as a candidate, when it is none of the round ones. */
@@ -147,6 +169,23 @@ export class TrialStore {
 
   settle(): void {
     this.inputs.settle();
+  }
+
+  private judge(question: AssessmentInput & TrialQuestion): Observable<Assessment> {
+    const confirmed = timer(SETTLE_MS).pipe(
+      switchMap(() => this.api.assess(question)),
+      share(),
+    );
+    const list = untracked(this.list);
+    const { receiver, period, limit } = question;
+    const tried = list ? this.engine.assess(list, { receiver, period, limit }) : EMPTY;
+    return merge(
+      tried.pipe(
+        takeUntil(confirmed),
+        catchError(() => EMPTY),
+      ),
+      confirmed,
+    );
   }
 
   private onTrial({ receiver }: TrialSetup) {
