@@ -34,6 +34,7 @@ export class WorkerProcess implements ImportWorker {
     this.onChange = onChange;
     this.timer = setInterval(() => void this.look(), LOOK_EVERY_MS);
     this.timer.unref();
+    void this.look();
   }
 
   wake(): void {
