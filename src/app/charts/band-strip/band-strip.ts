@@ -20,6 +20,7 @@ import { RangeBars } from '../range-bars/range-bars';
 import { bandUnit } from '../readings';
 import { type Window } from '../zoom-window';
 import { DialGlass } from './dial-glass';
+import { DialPointer } from './dial-pointer';
 import { HeardMarks } from './heard-marks';
 import {
   breakthroughCurves,
@@ -30,6 +31,7 @@ import {
   responseMark,
   STRIP,
   STRIP_HEIGHT,
+  type StripHarmonic,
   stripLabels,
   wantedMarks,
 } from './strip-layout';
@@ -40,7 +42,7 @@ import { stripColumns, stripReadout, stripRows, stripSentence } from './strip-wo
   selector: 'app-band-strip',
   templateUrl: './band-strip.html',
   styleUrl: './band-strip.scss',
-  imports: [Chart, DialGlass, HeardMarks, Plot, PlotLabels, RangeBars],
+  imports: [Chart, DialGlass, DialPointer, HeardMarks, Plot, PlotLabels, RangeBars],
   changeDetection: ChangeDetectionStrategy.OnPush,
 })
 export class BandStrip {
@@ -53,6 +55,12 @@ export class BandStrip {
   /** Levels over the noise, the same for every band of the receiver. */
   readonly loudness = input.required<ScaleLinear<number, number>>();
   readonly isLog = input(false);
+  /** Harmonics of the beat oscillator on the band. */
+  readonly beatHarmonics = input<readonly { harmonic: number; dialHz: number }[]>([]);
+  /** Where the pointer stands, hertz; null: there is none. */
+  readonly pointerHz = model<number | null>(null);
+  /** The pointer was let go. */
+  readonly pointerSettled = output();
   /** What Enter does with a response, in words; empty where nobody listens to `working`. */
   readonly leadsOn = input($localize`Enter shows the working.`);
   readonly picked = model<string | null>(null);
@@ -81,6 +89,12 @@ export class BandStrip {
   protected readonly x = computed(() =>
     dialScale(...this.shown(), this.frame().innerWidth, this.isLog()),
   );
+  /** The pointer stands on this band. */
+  protected readonly pointer = computed(() => {
+    const hz = this.pointerHz();
+    const { low, high } = this.range();
+    return hz !== null && hz >= low && hz <= high ? hz : null;
+  });
   private readonly unit = computed(() => bandUnit(this.range().high));
   protected readonly levels = computed(() =>
     this.loudness()
@@ -109,11 +123,17 @@ export class BandStrip {
       value: station.frequencyHz,
     })),
   ]);
-  protected readonly harmonics = computed(() =>
-    this.band()
-      .harmonics.filter(({ dialHz }) => dialHz >= this.shown()[0] && dialHz <= this.shown()[1])
-      .map(({ harmonic, dialHz }) => ({ harmonic, x: this.x()(dialHz) })),
-  );
+  protected readonly harmonics = computed<StripHarmonic[]>(() => {
+    const [low, high] = this.shown();
+    const own = this.band().harmonics.map((each) => ({ ...each, of: 'IF' }));
+    const beat = this.beatHarmonics().map((each) => ({ ...each, of: $localize`BFO` }));
+    return [...own, ...beat]
+      .filter(({ dialHz }) => dialHz >= low && dialHz <= high)
+      .map(({ harmonic, dialHz, of }) => {
+        const text = $localize`${harmonic}:order: × ${of}:source:`;
+        return { id: text, text, order: harmonic, x: this.x()(dialHz) };
+      });
+  });
   protected readonly harmonicLabels = computed(() =>
     harmonicLabels(this.harmonics(), this.frame().innerWidth),
   );

@@ -185,17 +185,25 @@ export function stripLabels(
   return placeLabels([...loudest, ...strongest], [0, width], taken);
 }
 
-/** Orders of the harmonics of the IF over the strip, the lowest first where they crowd. */
-export const harmonicLabels = (
-  harmonics: readonly { readonly harmonic: number; readonly x: number }[],
-  width: number,
-): PlacedLabel[] =>
+/** A harmonic of the set's own on the dial. */
+export interface StripHarmonic {
+  readonly id: string;
+  readonly text: string;
+  readonly order: number;
+  readonly x: number;
+}
+
+/** Orders of the harmonics over the strip, the lowest first where they crowd. */
+export const harmonicLabels = (harmonics: readonly StripHarmonic[], width: number): PlacedLabel[] =>
   placeLabels(
-    harmonics.map(({ harmonic, x }) => ({
-      id: String(harmonic),
-      text: $localize`${harmonic}:order: × IF`,
-      weight: -harmonic,
-      spots: [{ x, y: 2 }],
+    harmonics.map(({ id, text, order, x }) => ({
+      id,
+      text,
+      weight: -order,
+      spots: [
+        { x, y: 2 },
+        { x, y: 16 },
+      ],
     })),
     [0, width],
   );

@@ -16,6 +16,8 @@ const fieldOf = (station: number, frequencyHz: number, fieldDb: number | null) =
   station,
   name: `Station ${station}`,
   frequencyHz,
+  latitude: null,
+  longitude: null,
   distanceM: 50_000,
   groundDb: fieldDb,
   skyDb: null,
