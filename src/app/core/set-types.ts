@@ -11,12 +11,13 @@ export const setTypes: readonly SetType[] = data.setTypes;
 
 /** A whole receiver of a type, for somebody who knows nothing else about the set yet. */
 export function typicalReceiver(type: SetType): ReceiverDraft {
-  const { ifHz, b6Hz, b60Hz, strayDb, signalToOscillatorDb, bands } = type;
+  const { ifHz, b6Hz, b60Hz, strayDb, signalToOscillatorDb, loop, bands } = type;
   return receiverDraft.parse({
     ifHz,
     selectivity: { kind: 'widths', b6Hz, b60Hz },
     strayDb,
     signalToOscillatorDb,
+    aerial: loop ? { kind: 'loop' } : null,
     bands,
   });
 }

@@ -100,6 +100,30 @@ describe('setting up a receiver', () => {
     expect(await (await input('IF')).getValue()).toBe('500');
   });
 
+  it('keeps an aerial, a second conversion and a band that mixes with a harmonic as they are', async () => {
+    const { calls, input, press, load } = await arrange('/receivers/3/set-up');
+    const [band] = kestrel.bands;
+    if (!band) throw new Error('The receiver has no band.');
+    await load({
+      ...kestrel,
+      aerial: { kind: 'primary', resonanceHz: 380_000, q: 30 },
+      secondConversion: { ifHz: 85_000, oscillator: 'below' },
+      bands: [{ ...band, oscillatorHarmonic: 2 }],
+    });
+
+    await (await input('Resonance of the primary')).setValue('300');
+    await (await input('Second IF')).setValue('50');
+    await (await input('Harmonic of the oscillator')).setValue('3');
+    await press('Save');
+
+    const { request } = calls.expectOne({ url: '/api/receivers/3', method: 'PUT' });
+    expect(request.body).toMatchObject({
+      aerial: { kind: 'primary', resonanceHz: 300_000, q: 30 },
+      secondConversion: { ifHz: 50_000, oscillator: 'below' },
+      bands: [{ oscillatorHarmonic: 3 }],
+    });
+  });
+
   it('says everything that is wrong, and opens what hides it', async () => {
     const { calls, loader, input, press, load } = await arrange('/receivers/3/set-up');
     await load();

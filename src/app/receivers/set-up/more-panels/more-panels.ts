@@ -5,11 +5,14 @@ import { map, startWith, switchMap } from 'rxjs';
 
 import type { SetType } from '../../../core/set-types';
 import type { FormIssue } from '../../../ui/form-problems/form-issues';
+import { AerialFields } from '../aerial-fields/aerial-fields';
+import { BandDetails } from '../band-details/band-details';
 import { BfoFields } from '../bfo-fields/bfo-fields';
 import { CircuitFields } from '../circuit-fields/circuit-fields';
 import { FilterFields } from '../filter-fields/filter-fields';
 import { MixerFields } from '../mixer-fields/mixer-fields';
 import type { ReceiverControls } from '../receiver-form/controls';
+import { SecondConversionFields } from '../second-conversion-fields/second-conversion-fields';
 import { SelectivityFields } from '../selectivity-fields/selectivity-fields';
 import { TrapFields } from '../trap-fields/trap-fields';
 import { isUntouched, type Panel, panelOf, panelsOf, summaries } from './panels';
@@ -18,11 +21,14 @@ import { isUntouched, type Panel, panelOf, panelsOf, summaries } from './panels'
 @Component({
   selector: 'app-more-panels',
   imports: [
+    AerialFields,
+    BandDetails,
     BfoFields,
     CircuitFields,
     FilterFields,
     MatExpansionModule,
     MixerFields,
+    SecondConversionFields,
     SelectivityFields,
     TrapFields,
   ],
@@ -40,10 +46,13 @@ export class MorePanels {
   protected readonly panels: readonly { name: Panel; title: string }[] = [
     { name: 'selectivity', title: $localize`Selectivity and audio` },
     { name: 'circuits', title: $localize`Tuned circuits` },
+    { name: 'bands', title: $localize`Oscillator, listening and dial of each band` },
+    { name: 'aerial', title: $localize`Aerial` },
     { name: 'mixer', title: $localize`Stray pick-up and mixer` },
     { name: 'filter', title: $localize`Fixed filter` },
     { name: 'bfo', title: $localize`BFO` },
     { name: 'trap', title: $localize`Wave trap` },
+    { name: 'second', title: $localize`Second conversion` },
   ];
   protected readonly opened = linkedSignal(() => new Set(panelsOf(this.issues())));
   private readonly summaries = toSignal(

@@ -6,6 +6,9 @@ describe('the panels of a set-up', () => {
     ['selectivity.b60Hz', 'selectivity'],
     ['strayDb.if', 'mixer'],
     ['trap.q', 'trap'],
+    ['aerial.resonanceHz', 'aerial'],
+    ['secondConversion.ifHz', 'second'],
+    ['bands.1.tuningToleranceHz', 'bands'],
     ['bands.2.lowHz', undefined],
     ['name', undefined],
   ])('hide %s in %s', (path, panel) => {

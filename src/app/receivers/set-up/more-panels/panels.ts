@@ -3,7 +3,8 @@ import { formatFrequency } from '../../../ui/frequency-pipe';
 import type { ReceiverControls, ReceiverFields } from '../receiver-form/controls';
 
 /** The parts of the set-up that open on demand. */
-export type Panel = 'selectivity' | 'circuits' | 'mixer' | 'filter' | 'bfo' | 'trap';
+export type Panel =
+  'selectivity' | 'circuits' | 'bands' | 'aerial' | 'mixer' | 'filter' | 'bfo' | 'trap' | 'second';
 
 const panelOfField: Readonly<Record<string, Panel>> = {
   selectivity: 'selectivity',
@@ -15,12 +16,22 @@ const panelOfField: Readonly<Record<string, Panel>> = {
   fixedFilter: 'filter',
   bfo: 'bfo',
   trap: 'trap',
+  aerial: 'aerial',
+  secondConversion: 'second',
+};
+
+const panelOfBand: Readonly<Record<string, Panel>> = {
+  circuits: 'circuits',
+  oscillatorHarmonic: 'bands',
+  assumedWantedDb: 'bands',
+  tuningToleranceHz: 'bands',
+  dialStepHz: 'bands',
 };
 
 /** The panel that hides a field, if one does. */
 export function panelOf(path: string): Panel | undefined {
   const [part = '', , below] = path.split('.');
-  return part === 'bands' && below === 'circuits' ? 'circuits' : panelOfField[part];
+  return part === 'bands' ? panelOfBand[below ?? ''] : panelOfField[part];
 }
 
 /** The panels that hide what is wrong. */
@@ -31,6 +42,7 @@ export const panelsOf = (issues: readonly FormIssue[]): Panel[] =>
 export function isUntouched(panel: Panel, { controls }: ReceiverControls): boolean {
   if (panel === 'selectivity') return controls.selectivity.pristine;
   if (panel === 'mixer') return controls.strayDb.pristine;
+  if (panel === 'aerial') return controls.aerial.pristine;
   return (
     panel === 'circuits' && controls.bands.controls.every((row) => row.controls.circuits.pristine)
   );
@@ -38,7 +50,7 @@ export function isUntouched(panel: Panel, { controls }: ReceiverControls): boole
 
 /** What a closed panel holds, in a few words. */
 export function summaries(fields: ReceiverFields): Record<Panel, string> {
-  const { selectivity, strayDb, fixedFilter, bfo, trap, bands } = fields;
+  const { selectivity, strayDb, fixedFilter, bfo, trap, aerial, secondConversion, bands } = fields;
   const none = $localize`none`;
   return {
     selectivity: widths(selectivity),
@@ -49,6 +61,9 @@ export function summaries(fields: ReceiverFields): Record<Panel, string> {
     filter: fixedFilter.fitted ? frequency(fixedFilter.centreHz) : none,
     bfo: bfo.fitted ? frequency(bfo.centreHz) : none,
     trap: trap.fitted ? $localize`fitted` : none,
+    aerial: aerialWords(aerial),
+    second: secondConversion.fitted ? frequency(secondConversion.ifHz) : none,
+    bands: harmonics(bands),
   };
 }
 
@@ -58,6 +73,18 @@ function widths({ other, b6Hz, b60Hz }: ReceiverFields['selectivity']): string {
   return other === null
     ? $localize`${frequency(b6Hz)}:b6: at −6 dB, ${frequency(b60Hz)}:b60: at −60 dB`
     : $localize`known in another way`;
+}
+
+function aerialWords({ kind, resonanceHz }: ReceiverFields['aerial']): string {
+  if (kind === 'loop') return $localize`loop or ferrite rod`;
+  if (kind === 'plain') return $localize`primary not known`;
+  return $localize`primary resonant on ${frequency(resonanceHz)}:resonance:`;
+}
+
+function harmonics(bands: ReceiverFields['bands']): string {
+  return bands.some(({ oscillatorHarmonic }) => (oscillatorHarmonic ?? 1) > 1)
+    ? $localize`a harmonic of the oscillator on some`
+    : $localize`the oscillator’s fundamental on all`;
 }
 
 function circuits(bands: ReceiverFields['bands']): string {

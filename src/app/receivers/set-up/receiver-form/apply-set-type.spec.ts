@@ -23,6 +23,16 @@ describe('the type of set', () => {
     expect(bands.map(({ name }) => name)).toEqual(communications.bands.map(({ name }) => name));
   });
 
+  it('brings the loop of a portable along, and takes it away with the type', () => {
+    const form = receiverControls();
+
+    applySetType(form, typeOf('portable'));
+    expect(form.getRawValue().aerial.kind).toBe('loop');
+
+    applySetType(form, communications);
+    expect(form.getRawValue().aerial.kind).toBe('plain');
+  });
+
   it('leaves alone what the user has changed', () => {
     const form = receiverControls();
     applySetType(form, communications);

@@ -7,7 +7,7 @@ import { fieldsOf, writeFields } from './fields';
 /** Fills in what is typical of a type of set, and leaves alone what the user has changed. */
 export function applySetType(form: ReceiverControls, type: SetType): void {
   const typical = fieldsOf(typicalReceiver(type));
-  const { bands, ifHz, selectivity, strayDb, signalToOscillatorDb } = form.controls;
+  const { bands, ifHz, selectivity, strayDb, signalToOscillatorDb, aerial } = form.controls;
   const isUntouched = bands.pristine;
   if (isUntouched) writeFields(form, { bands: typical.bands });
   else applyCircuits(form, type);
@@ -16,6 +16,7 @@ export function applySetType(form: ReceiverControls, type: SetType): void {
     [selectivity, typical.selectivity],
     [strayDb, typical.strayDb],
     [signalToOscillatorDb, typical.signalToOscillatorDb],
+    [aerial, typical.aerial],
   ] as const) {
     if (control.pristine) (control as AbstractControl).patchValue(value);
   }

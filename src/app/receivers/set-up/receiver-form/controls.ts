@@ -80,6 +80,32 @@ const filterControls = () =>
     widthHz: fittedNumber($localize`Give the filter's width.`),
   });
 
+/** Needed only while the aerial is coupled by a resonant primary. */
+function neededOfPrimary(message: string): ValidatorFn {
+  const check = needed(message);
+  return (control) => (control.parent?.get('kind')?.value === 'primary' ? check(control) : null);
+}
+
+const aerialControls = () =>
+  new FormGroup({
+    kind: held<'plain' | 'primary' | 'loop'>('plain'),
+    resonanceHz: held<number | null>(
+      null,
+      neededOfPrimary($localize`Give the frequency the primary resonates on, with the aerial.`),
+    ),
+    q: held<number | null>(
+      null,
+      neededOfPrimary($localize`Give the Q of the primary, with the usual dummy aerial about 30.`),
+    ),
+  });
+
+const secondConversionControls = () =>
+  new FormGroup({
+    fitted: held(false),
+    ifHz: fittedNumber($localize`Give the second IF, for example 85 kHz.`),
+    oscillator: held<Band['oscillator']>('above'),
+  });
+
 const selectivityControls = () =>
   new FormGroup({
     /** A selectivity known in another way than by two widths, carried along unchanged. */
@@ -116,8 +142,8 @@ export const receiverControls = () =>
     fixedFilter: filterControls(),
     bfo: bfoControls(),
     trap: trapControls(),
-    aerial: held<ReceiverDraft['aerial']>(null),
-    secondConversion: held<ReceiverDraft['secondConversion']>(null),
+    aerial: aerialControls(),
+    secondConversion: secondConversionControls(),
   });
 export type ReceiverControls = ReturnType<typeof receiverControls>;
 /** What stands in the fields, complete or not. */

@@ -11,7 +11,8 @@ import {
 
 /** What the fields say, as the contract wants it; it may still be incomplete or wrong. */
 export function receiverOf(fields: ReceiverFields): unknown {
-  const { selectivity, strayDb, fixedFilter, bfo, trap, ...rest } = fields;
+  const { selectivity, strayDb, fixedFilter, bfo, trap, secondConversion, aerial, ...rest } =
+    fields;
   const { other, ...widths } = selectivity;
   return {
     ...rest,
@@ -20,7 +21,14 @@ export function receiverOf(fields: ReceiverFields): unknown {
     fixedFilter: whenFitted(fixedFilter),
     bfo: whenFitted(bfo),
     trap: whenFitted(trap),
+    aerial: aerialOf(aerial),
+    secondConversion: whenFitted(secondConversion),
   };
+}
+
+function aerialOf({ kind, ...primary }: ReceiverFields['aerial']): object | null {
+  if (kind === 'plain') return null;
+  return kind === 'loop' ? { kind } : { kind, ...primary };
 }
 
 const whenFitted = <T extends { fitted: boolean }>({ fitted, ...parts }: T) =>
@@ -30,7 +38,8 @@ type Patch = Parameters<ReceiverControls['patchValue']>[0];
 
 /** A receiver as the fields show it. */
 export function fieldsOf(receiver: ReceiverDraft): Patch {
-  const { selectivity, strayDb, fixedFilter, bfo, trap, ...rest } = receiver;
+  const { selectivity, strayDb, fixedFilter, bfo, trap, secondConversion, aerial, ...rest } =
+    receiver;
   return {
     ...rest,
     bands: rest.bands.map((band) => ({ ...band, circuits: [...band.circuits] })),
@@ -42,6 +51,8 @@ export function fieldsOf(receiver: ReceiverDraft): Patch {
     fixedFilter: { fitted: fixedFilter !== null, ...fixedFilter },
     bfo: { fitted: bfo !== null, ...bfo },
     trap: { fitted: trap !== null, ...trap },
+    aerial: aerial ?? { kind: 'plain' },
+    secondConversion: { fitted: secondConversion !== null, ...secondConversion },
   };
 }
 
