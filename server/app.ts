@@ -6,6 +6,7 @@ import { accountRoutes } from './accounts/account-routes.ts';
 import { assessmentRoutes } from './assessments/assessment-routes.ts';
 import type { Config } from './config.ts';
 import { cureRoutes } from './cures/cure-routes.ts';
+import { correctionRoutes } from './editions/correction-routes.ts';
 import { editionRoutes } from './editions/edition-routes.ts';
 import { fieldStrengthRoutes } from './field-strengths/field-strength-routes.ts';
 import { authentication } from './http/authentication.ts';
@@ -46,7 +47,8 @@ export function apiRoutes(services: Services): Route[] {
     ...receiverRoutes(receivers),
     ...siteRoutes(sites),
     ...regionRoutes(regions),
-    ...editionRoutes(editions),
+    ...editionRoutes(editions, services),
+    ...correctionRoutes(services.corrections),
     ...importRoutes(imports, uploads),
     ...fieldStrengthRoutes(fieldStrengths),
     ...assessmentRoutes(assessments),

@@ -5,8 +5,10 @@ import type { Sequelize } from 'sequelize';
 import { Accounts } from './accounts/accounts.ts';
 import { Passwords } from './accounts/passwords.ts';
 import { Assessments } from './assessments/assessments.ts';
+import { BoundedCache } from './computing/bounded-cache.ts';
 import { Engine } from './computing/engine.ts';
 import { ListsAtSites } from './computing/lists-at-sites.ts';
+import { StationOrders } from './computing/station-orders.ts';
 import type { Config } from './config.ts';
 import { Cures } from './cures/cures.ts';
 import { EditionModel } from './editions/edition-model.ts';
@@ -21,6 +23,13 @@ import { ImportJobs } from './imports/import-jobs.ts';
 import { ImportModel } from './imports/import-model.ts';
 import { ImportWatch } from './imports/import-watch.ts';
 import type { ImportWorker } from './imports/import-worker.ts';
+import { Corrections } from './editions/corrections.ts';
+import { EditionDifferences, type KeptDifferences } from './editions/edition-differences.ts';
+import { EditionStations } from './editions/edition-stations.ts';
+import { EditionVerdicts, type VerdictSources } from './editions/edition-verdicts.ts';
+import { StationLists, type StationListSources } from './editions/station-lists.ts';
+import { StationPages } from './editions/station-pages.ts';
+import { identityOf } from './imports/fingerprint.ts';
 import { Imports } from './imports/imports.ts';
 import { Uploads } from './imports/uploads.ts';
 import { WorkerProcess } from './imports/worker-process.ts';
@@ -68,6 +77,10 @@ function createImports(database: Sequelize, config: Config, log: Logger, regions
   const imports = new Imports(database, regions, editions, uploads, importWorker, watch);
   return { uploads, imports, importWorker };
 }
+/** Listings whose length and stretches are remembered. */
+const KEPT_WALKS = 1000;
+/** Stations that differ between editions, remembered in all. */
+const KEPT_DIFFERENCES = 400_000;
 
 /** Builds every service and hands each the others it needs. */
 export function createServices(database: Sequelize, config: Config, log: Logger) {
@@ -76,12 +89,24 @@ export function createServices(database: Sequelize, config: Config, log: Logger)
   const accounts = new Accounts(database, passwords, workshops);
   const sessions = new Sessions(database, config, accounts, workshops);
   const regions = new Regions(database);
-  const editions = new Editions(database, regions);
-  const lists = new ListsAtSites(editions);
+  const { editions, corrections, stations, lists } = editionsOf(database, {
+    regions,
+    people: accounts,
+    writer: new EditionWriter(database),
+  });
   const engine = new Engine();
   const assessments = new Assessments(lists, engine);
   const receivers = new Receivers(database, accounts);
   const sites = new Sites(database);
+  const views = editionViews(database, {
+    editions,
+    stations,
+    lists,
+    receivers,
+    sites,
+    engine,
+    people: accounts,
+  });
   return {
     idempotency: new Idempotency(database),
     limits: new Limits(database, config),
@@ -95,6 +120,9 @@ export function createServices(database: Sequelize, config: Config, log: Logger)
     sites,
     regions,
     editions,
+    corrections,
+    stations,
+    ...views,
     ...createImports(database, config, log, regions),
     fieldStrengths: new FieldStrengths(lists, engine),
     cures: new Cures(lists, engine),
@@ -105,9 +133,38 @@ export function createServices(database: Sequelize, config: Config, log: Logger)
       receivers,
       sites,
       editions,
+      stations,
       assessments,
       workshops,
       people: accounts,
     }),
+  };
+}
+
+/** The editions with what was corrected of them by hand, and the lists that computing takes. */
+function editionsOf(
+  database: Sequelize,
+  { regions, people, writer }: { regions: Regions; people: Accounts; writer: EditionWriter },
+) {
+  const editions = new Editions(database, regions, writer);
+  const corrections = new Corrections(database, { regions, people, identityOf });
+  const stations = new EditionStations(editions, corrections);
+  return { editions, corrections, stations, lists: new ListsAtSites(stations) };
+}
+
+/** What is made of editions: lists by pages, comparisons, verdicts. */
+function editionViews(
+  database: Sequelize,
+  sources: Omit<StationListSources, 'pages' | 'orders'> &
+    Omit<VerdictSources, 'differences' | 'stations'> & { readonly editions: Editions },
+) {
+  const { editions, stations } = sources;
+  const kept = new BoundedCache<KeptDifferences>(KEPT_DIFFERENCES);
+  const differences = new EditionDifferences(database, editions, stations, kept);
+  const pages = new StationPages(database, new BoundedCache(KEPT_WALKS));
+  return {
+    stationLists: new StationLists({ ...sources, pages, orders: new StationOrders() }),
+    differences,
+    verdicts: new EditionVerdicts({ ...sources, differences }),
   };
 }

@@ -8,6 +8,7 @@ import {
   type BreakthroughHours,
 } from '../../shared/radio/assessment/breakthrough-hours.ts';
 import {
+  CANDIDATE_ORDERS,
   type CandidateCase,
   type Candidates,
   type CandidatesInput,
@@ -19,6 +20,8 @@ import {
   type FieldStrength,
   fieldStrengths as compute,
 } from '../../shared/radio/propagation/field-strength.ts';
+import type { DialTotal } from '../../shared/radio/assessment/dial-totals.ts';
+import type { Verdict } from '../../shared/radio/assessment/verdict.ts';
 import type { Period, ReceptionTime, Site } from '../../shared/radio/site.ts';
 import { type SkyWaveChoice, USUAL_SKY_WAVE } from '../../shared/radio/propagation/sky-wave.ts';
 import type { RasterRange, Station } from '../../shared/radio/station.ts';
@@ -31,7 +34,8 @@ import {
 } from '../../shared/radio/whistles/whistle-causes.ts';
 import { BoundedCache } from './bounded-cache.ts';
 import { placeKey } from './list-key.ts';
-import { keptFields, type SharedFields } from './shared-fields.ts';
+import { keptColumns, keptFields, type SharedFields } from './shared-fields.ts';
+import { pickAmong, type PickedStations, type StationPick } from './station-picking.ts';
 import { type StationColumns, unpackNames, unpackStations } from './station-columns.ts';
 
 /** The stations of a request and the site they are received at. */
@@ -88,6 +92,15 @@ export interface Tasks {
     };
     answers: { readonly fields: readonly (FieldStrength & Named)[] };
   };
+  judgeBriefly: {
+    takes: {
+      readonly list: ListAtSite;
+      readonly period: Period;
+      readonly receiver: AssessmentInput['receiver'];
+    };
+    answers: BriefJudgement;
+  };
+  pickStations: { takes: StationPick; answers: PickedStations };
   designTracking: { takes: TrackingInput; answers: Tracking };
   explainWhistle: {
     takes: {
@@ -97,6 +110,13 @@ export interface Tasks {
     };
     answers: Whistles & { readonly skipped: readonly Skipped[] };
   };
+}
+
+/** A verdict, and by which stations it comes about. */
+export interface BriefJudgement {
+  readonly verdict: Verdict;
+  /** What is heard at the settings where a station is harmed. */
+  readonly harm: readonly Pick<DialTotal, 'dialHz' | 'ratioDb' | 'stations'>[];
 }
 
 interface Named {
@@ -135,6 +155,36 @@ export function assess(
     fields,
     period: periodOf(site, time),
   });
+}
+
+/** The verdict as an assessment gives it, without the responses. */
+export function judgeBriefly(
+  { list, period, receiver }: Tasks['judgeBriefly']['takes'],
+  checkpoint: Checkpoint,
+): BriefJudgement {
+  const ask = {
+    receiver,
+    ...CANDIDATE_ORDERS,
+    leaveOutBetterThan: 'very-annoying' as const,
+    limit: 1,
+  };
+  const { verdict, bands } = assess(
+    { list, time: period, skyWave: USUAL_SKY_WAVE, ask },
+    checkpoint,
+  );
+  const harmed = new Set(verdict.harmed.map(({ dialHz }) => dialHz));
+  const harm = bands
+    .flatMap(({ totals }) => totals)
+    .filter(({ dialHz }) => harmed.has(dialHz))
+    .map(({ dialHz, ratioDb, stations }) => ({ dialHz, ratioDb, stations }));
+  return { verdict, harm };
+}
+
+export function pickStations(pick: StationPick): PickedStations {
+  const { list, period } = pick;
+  const make = () => compute(list.site, stationsOf(list), period);
+  if (!list.kept) throw new RangeError('list: stations are picked from an edition only');
+  return pickAmong(pick, keptColumns(list.kept[period], make));
 }
 
 export function judgeCandidates(

@@ -3,6 +3,8 @@ import { tsImport } from 'tsx/esm/api';
 // A thread does not inherit the loader that lets Node.js run TypeScript.
 export const {
   assess,
+  judgeBriefly,
+  pickStations,
   judgeCandidates,
   findCures,
   breakthroughHours,

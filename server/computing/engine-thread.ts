@@ -30,6 +30,8 @@ function answered<K extends keyof Tasks>(
 }
 
 export const assess = answered('assess', tasks.assess);
+export const judgeBriefly = answered('judgeBriefly', tasks.judgeBriefly);
+export const pickStations = answered('pickStations', tasks.pickStations);
 export const judgeCandidates = answered('judgeCandidates', tasks.judgeCandidates);
 export const findCures = answered('findCures', tasks.findCures);
 export const breakthroughHours = answered('breakthroughHours', tasks.breakthroughHours);

@@ -1,9 +1,9 @@
 import type { Site } from '../../shared/radio/site.ts';
 
-/** What is on a list: an edition, and which version of it, counted up whenever its content changes. */
+/** What is on a list: an edition, and which version of it, another whenever its content changes. */
 export interface ListContent {
   readonly editionId: number;
-  readonly version: number;
+  readonly version: string;
 }
 
 /** Names a content. Ids are never given twice, so a deleted edition's name is never asked for again. */

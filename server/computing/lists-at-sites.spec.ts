@@ -30,17 +30,19 @@ const station: Station = {
 function shelf() {
   let isThere = true;
   let read = 0;
+  const readAll = () => {
+    read += 1;
+    return Promise.resolve([station]);
+  };
   return {
     readings: () => read,
     remove: () => {
       isThere = false;
     },
-    rasterOf: (_: Actor, id: number) =>
-      isThere ? Promise.resolve([]) : Promise.reject(new NotFoundError('edition', id)),
-    everyStation: () => {
-      read += 1;
-      return Promise.resolve([station]);
-    },
+    computedWith: (_: Actor, id: number) =>
+      isThere
+        ? Promise.resolve({ raster: [], version: '', read: readAll })
+        : Promise.reject(new NotFoundError('edition', id)),
   };
 }
 
@@ -82,14 +84,17 @@ describe('ListsAtSites', () => {
 
   it('tries again when an edition could not be read', async () => {
     const editions = shelf();
-    const failing: Pick<ReturnType<typeof shelf>, 'rasterOf' | 'everyStation'> = {
-      ...editions,
-      everyStation: () => Promise.reject(new Error('gone away')),
-    };
-    const lists = new ListsAtSites(failing);
+    let isBroken = true;
+    const gone = () => Promise.reject(new Error('gone away'));
+    const lists = new ListsAtSites({
+      computedWith: async (who, id) => {
+        const opened = await editions.computedWith(who, id);
+        return isBroken ? { ...opened, read: gone } : opened;
+      },
+    });
     await expect(lists.find(actor, { site, editionId: 5 })).rejects.toThrow('gone away');
 
-    failing.everyStation = editions.everyStation;
+    isBroken = false;
 
     expect((await lists.find(actor, { site, editionId: 5 })).columns.count).toBe(1);
   });

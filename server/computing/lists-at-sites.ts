@@ -14,8 +14,19 @@ import { packStations, type StationColumns } from './station-columns.ts';
 
 /** What is needed of the editions. */
 interface EditionShelf {
-  rasterOf(actor: Actor, editionId: number): Promise<readonly RasterRange[]>;
-  everyStation(editionId: number): Promise<Station[]>;
+  computedWith(
+    actor: Actor,
+    editionId: number,
+    corrections?: 'applied' | 'none',
+  ): Promise<EditionContent>;
+}
+
+/** What computing takes of an edition. */
+export interface EditionContent {
+  readonly raster: readonly RasterRange[];
+  /** Equal for the same stations. */
+  readonly version: string;
+  read(): Promise<Station[]>;
 }
 
 /** A site and where its stations come from: exactly one of the three, as the contracts hold. */
@@ -24,13 +35,12 @@ export interface ListRequest {
   readonly editionId?: number | undefined;
   readonly stations?: readonly SentStation[] | undefined;
   readonly everyChannelDb?: number | undefined;
+  /** Left out: an edition is taken as corrected by hand. */
+  readonly corrections?: 'applied' | 'none';
 }
 
 const KEPT_STATIONS = 1_000_000;
 const KEPT_FIELDS = 2_000_000;
-
-/** Content of an edition as it was imported. */
-const AS_IMPORTED = 0;
 
 /**
  * Finds the stations of a request. What was read of an edition is kept in memory within bounds, and
@@ -52,13 +62,14 @@ export class ListsAtSites {
    * @throws {InvalidError} If the site lacks what the fields of its stations need.
    */
   async find(actor: Actor | undefined, request: ListRequest, path = 'site'): Promise<ListAtSite> {
-    const { site, editionId } = request;
+    const { site, editionId, corrections } = request;
     if (editionId === undefined) return sentList(request, path);
     if (!actor) throw new UnauthenticatedError('Sign in to compute with an edition.');
-    const raster = await this.editions.rasterOf(actor, editionId);
+    const opened = await this.editions.computedWith(actor, editionId, corrections);
+    const { raster, version } = opened;
     demandPlace(site, path);
-    const content = contentKey({ editionId, version: AS_IMPORTED });
-    const columns = await this.stations(editionId, content);
+    const content = contentKey({ editionId, version });
+    const columns = await this.stations(content, () => opened.read());
     const kept = this.fields.remember(placeKey(content, site), 2 * columns.count, () => ({
       day: roomForFields(columns.count),
       night: roomForFields(columns.count),
@@ -67,16 +78,16 @@ export class ListsAtSites {
   }
 
   /** Read once, also when several ask at the same time. */
-  private stations(editionId: number, content: string): Promise<StationColumns> {
+  private stations(content: string, read: EditionContent['read']): Promise<StationColumns> {
     const found = this.kept.get(content) ?? this.reading.get(content);
     if (found) return Promise.resolve(found);
-    const reading = this.read(editionId, content).finally(() => this.reading.delete(content));
+    const reading = this.read(content, read).finally(() => this.reading.delete(content));
     this.reading.set(content, reading);
     return reading;
   }
 
-  private async read(editionId: number, content: string): Promise<StationColumns> {
-    const columns = await packStations(await this.editions.everyStation(editionId));
+  private async read(content: string, read: EditionContent['read']): Promise<StationColumns> {
+    const columns = await packStations(await read());
     this.kept.set(content, columns, columns.count);
     return columns;
   }

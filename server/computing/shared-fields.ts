@@ -9,7 +9,7 @@ export interface SharedFields {
   readonly state: Int32Array;
   /** The columns of `NAMES`, one behind the other. */
   readonly numbers: Float64Array;
-  readonly notes: Uint16Array;
+  readonly notes: Uint32Array;
 }
 
 const NAMES = ['distanceM', 'groundDb', 'skyDb', 'fieldDb'] as const;
@@ -23,7 +23,7 @@ const PATIENCE_MS = 5000;
 export const roomForFields = (count: number): SharedFields => ({
   state: new Int32Array(new SharedArrayBuffer(4)),
   numbers: new Float64Array(new SharedArrayBuffer(8 * NAMES.length * count)),
-  notes: new Uint16Array(new SharedArrayBuffer(2 * count)),
+  notes: new Uint32Array(new SharedArrayBuffer(4 * count)),
 });
 
 /** The fields kept there, made where nobody has made them. For threads: it may wait for another. */
@@ -32,11 +32,24 @@ export function keptFields(
   stations: readonly Station[],
   make: () => readonly FieldStrength[],
 ): FieldStrength[] {
+  ensureFilled(shared, make);
+  return read(shared, stations);
+}
+
+/** Distance and field alone, as they are kept: NaN where there is none. For threads. */
+export function keptColumns(shared: SharedFields, make: () => readonly FieldStrength[]) {
+  ensureFilled(shared, make);
+  const count = shared.notes.length;
+  const column = (name: (typeof NAMES)[number]) =>
+    shared.numbers.subarray(NAMES.indexOf(name) * count, (NAMES.indexOf(name) + 1) * count);
+  return { distanceM: column('distanceM'), fieldDb: column('fieldDb') };
+}
+
+function ensureFilled(shared: SharedFields, make: () => readonly FieldStrength[]): void {
   const { state } = shared;
   const found = Atomics.compareExchange(state, 0, EMPTY, BEING_FILLED);
   if (found === BEING_FILLED) Atomics.wait(state, 0, BEING_FILLED, PATIENCE_MS);
   if (Atomics.load(state, 0) !== READY) fill(shared, make);
-  return read(shared, stations);
 }
 
 function fill({ state, numbers, notes }: SharedFields, make: () => readonly FieldStrength[]): void {

@@ -12,13 +12,13 @@ export interface StationColumns {
   readonly numbers: Float64Array;
   /** The stations' names as JSON in UTF-8: only some answers want them. */
   readonly names: Uint8Array;
-  /** Path and pattern of the few stations that have any, by their index, as JSON in UTF-8. */
+  /** Path, pattern and silence of the few stations that have any, by their index, as JSON in UTF-8. */
   readonly details: Uint8Array;
 }
 
 const encoder = new TextEncoder();
 
-type Details = Pick<Station, 'path' | 'patternDb'>;
+type Details = Pick<Station, 'path' | 'patternDb' | 'offAir'>;
 
 const NAMES = [
   'id',
@@ -72,8 +72,11 @@ function encodeNames(stations: readonly Station[], hasOthersBefore: boolean): Ui
 }
 
 const detailed = (stations: readonly Station[], from: number): [number, Details][] =>
-  stations.flatMap(({ path = null, patternDb = null }, index): [number, Details][] =>
-    (path ?? patternDb) ? [[from + index, { path, patternDb }]] : [],
+  stations.flatMap(
+    ({ path = null, patternDb = null, offAir = false }, index): [number, Details][] =>
+      path || patternDb || offAir
+        ? [[from + index, { path, patternDb, ...(offAir && { offAir }) }]]
+        : [],
   );
 
 /** The stations, with their names left out. */
@@ -98,11 +101,16 @@ export function unpackStations({ count, numbers, details }: StationColumns): Sta
   }));
 }
 
+/** One column as it lies there; NaN where a station has no such value. */
+export const columnOf = (
+  { count, numbers }: StationColumns,
+  name: (typeof NAMES)[number],
+): Float64Array => numbers.subarray(NAMES.indexOf(name) * count, (NAMES.indexOf(name) + 1) * count);
+
 /** The frequencies alone, ascending, each once. */
-export function frequenciesOf({ count, numbers }: StationColumns): number[] {
-  const from = NAMES.indexOf('frequencyHz') * count;
-  return [...new Set(numbers.slice(from, from + count).sort())];
-}
+export const frequenciesOf = (columns: StationColumns): number[] => [
+  ...new Set(columnOf(columns, 'frequencyHz').slice().sort()),
+];
 
 /** The names alone, in the stations' order. */
 export const unpackNames = ({ names }: StationColumns): string[] => unpackJson(names) as string[];

@@ -29,6 +29,10 @@ export function workloadOf(name: keyof Tasks, task: unknown): Workload | null {
       const { list, ask } = task as Tasks['assess']['takes'];
       return { receiver: ask.receiver, lists: [list], orders: ask, times: 1 };
     }
+    case 'judgeBriefly': {
+      const { list, receiver } = task as Tasks['judgeBriefly']['takes'];
+      return { receiver, lists: [list], orders: USUAL, times: 1 };
+    }
     case 'judgeCandidates': {
       const { lists, ask } = task as Tasks['judgeCandidates']['takes'];
       const candidates = Math.floor((ask.toHz - ask.fromHz) / ask.stepHz) + 1;

@@ -1,16 +1,14 @@
-import { Op, type Sequelize } from 'sequelize';
+import { Op, QueryTypes, type Sequelize } from 'sequelize';
 
 import type { Page, PageQuery } from '../../shared/contracts/paging.ts';
 import { rangesInForce } from '../../shared/contracts/raster.ts';
-import type { Edition, Region } from '../../shared/contracts/region.ts';
-import type { ListedStation, StationQuery } from '../../shared/contracts/station-list.ts';
-import { nearestChannel } from '../../shared/radio/channels/raster.ts';
-import type { Station } from '../../shared/radio/station.ts';
+import type { Edition, EditionChange, Region } from '../../shared/contracts/region.ts';
+import { inTransaction } from '../db/transaction.ts';
 import type { Actor } from '../http/actor.ts';
-import { NotFoundError } from '../http/errors.ts';
+import { ConflictError, NotFoundError } from '../http/errors.ts';
 import { EditionModel } from './edition-model.ts';
+import type { EditionWriter } from './edition-writer.ts';
 import { StationModel } from './station-model.ts';
-import { matchesSearch } from './station-search.ts';
 
 /** What the editions need of the regions they belong to. */
 interface RegionRegister {
@@ -18,12 +16,21 @@ interface RegionRegister {
   byId(actor: Actor): Promise<ReadonlyMap<number, Region>>;
 }
 
+const NEWEST: [string, string][] = [
+  ['date', 'DESC'],
+  ['id', 'DESC'],
+];
+
 /** Keeps the editions of the regions' lists. */
 export class Editions {
+  private readonly database: Sequelize;
   private readonly regions: RegionRegister;
+  private readonly writer: Pick<EditionWriter, 'hide'>;
 
-  constructor(database: Sequelize, regions: RegionRegister) {
+  constructor(database: Sequelize, regions: RegionRegister, writer: Pick<EditionWriter, 'hide'>) {
+    this.database = database;
     this.regions = regions;
+    this.writer = writer;
     EditionModel.register(database);
     StationModel.register(database);
   }
@@ -38,60 +45,46 @@ export class Editions {
     return page(new Map([[region.id, region]]), query);
   }
 
+  /** The edition; another workshop's is not found. */
   async get(actor: Actor, id: number): Promise<Edition> {
     const { row, region } = await this.find(actor, id);
     return toEdition(row, region);
   }
 
-  async stations(actor: Actor, id: number, query: StationQuery): Promise<Page<ListedStation>> {
-    const { row: edition, region } = await this.find(actor, id);
-    const raster = rangesInForce(region.rasters, edition.date);
-    const { rows, count } = await StationModel.findAndCountAll({
-      where: { [Op.and]: [{ editionId: id }, matchesSearch(query.search)] },
-      order: [
-        ['frequencyHz', 'ASC'],
-        ['id', 'ASC'],
-      ],
-      limit: query.pageSize,
-      offset: (query.page - 1) * query.pageSize,
-    });
-    return { items: rows.map((row) => toStation(row, raster)), total: count };
+  /** The edition of the same region that stood before, if any. */
+  async before(actor: Actor, { id, regionId, date }: Edition): Promise<Edition | null> {
+    const region = await this.regions.get(actor, regionId);
+    const isEarlier = { [Op.or]: [{ date: { [Op.lt]: date } }, { date, id: { [Op.lt]: id } }] };
+    const row = await EditionModel.findOne({ where: { regionId, ...isEarlier }, order: NEWEST });
+    return row && toEdition(row, region);
   }
 
-  async rasterOf(actor: Actor, id: number): Promise<Region['raster']> {
+  async change(actor: Actor, id: number, change: EditionChange): Promise<Edition> {
     const { row, region } = await this.find(actor, id);
-    return rangesInForce(region.rasters, row.date);
+    return toEdition(await row.update(change), region);
   }
 
-  /** Every station of an edition as the engine computes with it, in the order of the list. */
-  async everyStation(id: number): Promise<Station[]> {
-    const stations: Station[] = [];
-    let after = 0;
-    for (;;) {
-      // A thousand at a time: reading a long list must not hold up other requests.
-      const rows = await StationModel.findAll({
-        attributes: [...COMPUTED_WITH],
-        where: { editionId: id, id: { [Op.gt]: after } },
-        order: [['id', 'ASC']],
-        limit: READ_AT_ONCE,
-        raw: true,
-      });
-      for (const row of rows) stations.push(toComputedWith(row));
-      if (rows.length < READ_AT_ONCE) return stations;
-      after = rows.at(-1)?.id ?? after;
-    }
-  }
-
-  /** Some stations of an edition, as lists name them. */
-  async named(id: number, stationIds: readonly number[]): Promise<StationModel[]> {
-    return StationModel.findAll({
-      attributes: ['id', 'name', 'callSign', 'frequencyHz'],
-      where: { editionId: id, id: { [Op.in]: [...stationIds] } },
+  /** Takes an edition away at once, its stations in the background; not while a plan names it. */
+  async remove(actor: Actor, id: number): Promise<void> {
+    await inTransaction(this.database, async () => {
+      await this.find(actor, id);
+      const plans = await this.plansNaming(id);
+      if (plans.length > 0) throw new PlansNameIt(plans);
+      await this.writer.hide(id);
     });
   }
 
-  /** The edition with the region it belongs to; another workshop's is not found. */
-  async find(actor: Actor, id: number): Promise<{ row: EditionModel; region: Region }> {
+  private plansNaming(id: number): Promise<NamingPlan[]> {
+    return this.database.query<NamingPlan>(
+      `SELECT plans.id, plans.receiver_id AS receiverId, plans.name,
+         receivers.name AS receiverName
+       FROM plans JOIN receivers ON receivers.id = plans.receiver_id
+       WHERE plans.edition_id = ? ORDER BY plans.id LIMIT 20 FOR UPDATE`,
+      { replacements: [id], type: QueryTypes.SELECT },
+    );
+  }
+
+  private async find(actor: Actor, id: number): Promise<{ row: EditionModel; region: Region }> {
     const row = await EditionModel.findByPk(id);
     const region = row && (await this.regions.byId(actor)).get(row.regionId);
     if (!row || !region) throw new NotFoundError('edition', id);
@@ -99,29 +92,25 @@ export class Editions {
   }
 }
 
-const READ_AT_ONCE = 1000;
-const COMPUTED_WITH = [
-  'id',
-  'name',
-  'frequencyHz',
-  'latitude',
-  'longitude',
-  'powerDayW',
-  'powerNightW',
-  'patternDb',
-] as const;
+interface NamingPlan {
+  readonly id: number;
+  readonly receiverId: number;
+  readonly name: string;
+  readonly receiverName: string;
+}
 
-const toComputedWith = (row: StationModel): Station => ({
-  id: row.id,
-  name: row.name,
-  frequencyHz: row.frequencyHz,
-  latitude: row.latitude,
-  longitude: row.longitude,
-  powerDayW: row.powerDayW,
-  powerNightW: row.powerNightW,
-  fieldDb: null,
-  patternDb: row.patternDb?.split(',').map(Number) ?? null,
-});
+class PlansNameIt extends ConflictError {
+  constructor(plans: readonly NamingPlan[]) {
+    const named = plans.map(
+      ({ name, receiverName }) => `“${name}” of ${receiverName || 'a receiver without a name'}`,
+    );
+    super(
+      `Plans were judged against this edition: ${named.join(', ')}. Delete them first, or keep it.`,
+      'edition-in-plans',
+      { plans },
+    );
+  }
+}
 
 async function page(
   regions: ReadonlyMap<number, Region>,
@@ -129,10 +118,7 @@ async function page(
 ): Promise<Page<Edition>> {
   const { rows, count } = await EditionModel.findAndCountAll({
     where: { regionId: { [Op.in]: [...regions.keys()] } },
-    order: [
-      ['date', 'DESC'],
-      ['id', 'DESC'],
-    ],
+    order: NEWEST,
     limit: pageSize,
     offset: (number - 1) * pageSize,
   });
@@ -151,23 +137,4 @@ const toEdition = (row: EditionModel, region: Region | undefined): Edition => ({
   raster: rangesInForce(region?.rasters ?? [], row.date),
   editable: region?.editable ?? false,
   createdAt: row.createdAt.toISOString(),
-});
-
-const toStation = (row: StationModel, raster: Region['raster']): ListedStation => ({
-  id: row.id,
-  name: row.name,
-  callSign: row.callSign,
-  frequencyHz: row.frequencyHz,
-  latitude: row.latitude,
-  longitude: row.longitude,
-  powerDayW: row.powerDayW,
-  powerNightW: row.powerNightW,
-  hours: row.hours,
-  note: row.note,
-  patternDb: null,
-  onRaster: nearestChannel(raster, row.frequencyHz) === row.frequencyHz,
-  offAir: false,
-  corrections: [],
-  distanceM: null,
-  fieldDb: null,
 });

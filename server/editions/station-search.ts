@@ -1,20 +1,4 @@
-import { Op, type WhereOptions } from 'sequelize';
-
 const HZ_PER_UNIT: Readonly<Record<string, number>> = { hz: 1, khz: 1e3, mhz: 1e6 };
-
-/** Condition for stations whose name or call sign holds the text, or whose frequency it is. */
-export function matchesSearch(text: string): WhereOptions {
-  if (text === '') return {};
-  const pattern = `%${text.replace(/[\\%_]/g, '\\$&')}%`;
-  const frequencyHz = searchedFrequency(text);
-  return {
-    [Op.or]: [
-      { name: { [Op.like]: pattern } },
-      { callSign: { [Op.like]: pattern } },
-      ...(frequencyHz === null ? [] : [{ frequencyHz }]),
-    ],
-  };
-}
 
 /** Frequency meant by "612", "612 kHz", "0,612 MHz" or "612000 Hz"; null when the text is none. */
 export function searchedFrequency(text: string): number | null {

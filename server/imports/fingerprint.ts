@@ -9,7 +9,11 @@ const SEPARATOR = '\u001f';
 const known = (value: number | null): string => (value === null ? '' : String(value));
 
 /** By what a station is recognised in the next edition: call sign, else name, and frequency. */
-export const identityOf = ({ callSign, name, frequencyHz }: StationRow): string =>
+export const identityOf = ({
+  callSign,
+  name,
+  frequencyHz,
+}: Pick<StationRow, 'callSign' | 'name' | 'frequencyHz'>): string =>
   digest((callSign || name).toLowerCase() + SEPARATOR + String(frequencyHz));
 
 /** Equal for two rows exactly when everything they say is equal. */

@@ -1,8 +1,3 @@
-import { Readable } from 'node:stream';
-import { pipeline } from 'node:stream/promises';
-
-import type { Response } from 'express';
-
 import {
   importCheck,
   importLayout,
@@ -11,10 +6,11 @@ import {
   importState,
 } from '../../shared/contracts/list-import.ts';
 import { pageOf, pageQuery } from '../../shared/contracts/paging.ts';
+import { sendCsv } from '../http/csv-answer.ts';
 import { route, type Route } from '../http/route.ts';
 import { sendEvents } from './import-events.ts';
 import type { Imports } from './imports.ts';
-import { csvWriter, rejectsName } from './list-rejects.ts';
+import { rejectsName } from './list-rejects.ts';
 import type { Uploads } from './uploads.ts';
 
 const list = '/api/regions/:id/imports';
@@ -119,13 +115,3 @@ export const importRoutes = (imports: Imports, uploads: Uploads): Route[] => [
     handle: ({ actor, id }) => imports.remove(actor, id(), id('importId')),
   }),
 ];
-
-async function sendCsv(
-  response: Response,
-  name: string,
-  rows: AsyncIterable<string[]>,
-  delimiter: string,
-): Promise<void> {
-  response.attachment(name).type('text/csv; charset=utf-8');
-  await pipeline(Readable.from(rows), csvWriter(delimiter), response);
-}

@@ -1,5 +1,3 @@
-import { stringify } from 'csv-stringify';
-
 import { judgedRows } from './list-check.ts';
 import type { ListReading } from './list-reading.ts';
 import { RowTally } from './row-tally.ts';
@@ -35,21 +33,4 @@ export async function* rejectedRows(path: string, reading: ListReading): AsyncGe
     );
     yield [String(line), faults.join('; '), ...cells];
   }
-}
-
-/** Turns rows into the text of a CSV file. */
-export const csvWriter = (delimiter: string) =>
-  stringify({
-    bom: true,
-    delimiter,
-    record_delimiter: 'windows',
-    quoted_match: /[\r\n]/,
-    cast: { string: defuse },
-  });
-
-const PLAIN_NUMBER = /^[-+]?[\d\s.,]*\d[\d\s.,]*(?:e[-+]?\d+)?$/i;
-
-/** Keeps a spreadsheet from running a cell. */
-export function defuse(cell: string): string {
-  return /^[=+\-@\t\r]/.test(cell) && !PLAIN_NUMBER.test(cell) ? `'${cell}` : cell;
 }

@@ -38,7 +38,7 @@ const LENGTHS = { name: 200, callSign: 40, hours: 200, note: 1000 } as const;
 /** Breaks, tabs, other control characters and repeated spaces. */
 const UNTIDY = /[\p{Cc}\s]{2}|[\p{Cc}\u00a0]/u;
 /** As our own exports keep a spreadsheet from running a cell. */
-const DEFUSED = /^'(?=[=+\-@])/;
+const DEFUSED = /^'(?='*[=+\-@])/;
 const DECIMAL_WORDS = { '.': 'a decimal point', ',': 'a decimal comma' } as const;
 const NOWHERE = { latitude: null, longitude: null } as const;
 

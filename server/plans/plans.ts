@@ -36,7 +36,13 @@ export interface PlanSources {
   readonly editions: {
     get(actor: Actor, id: number): Promise<Edition>;
     list(actor: Actor, query: PageQuery): Promise<Page<Edition>>;
-    named(id: number, stationIds: readonly number[]): Promise<(PlanStation & { id: number })[]>;
+  };
+  readonly stations: {
+    named(
+      actor: Actor,
+      editionId: number,
+      ids: readonly number[],
+    ): Promise<(PlanStation & { id: number })[]>;
   };
   readonly assessments: Judge;
   readonly workshops: { nameOf(id: number): Promise<string> };
@@ -98,7 +104,7 @@ export class Plans {
         savedReceiver: draft.receiver && saved,
         results,
       },
-      working: { stations: await this.stations(site, draft, ids), judged },
+      working: { stations: await this.stations(actor, site, draft, ids), judged },
     });
     return toWholePlan(actor, row, await this.surroundings(actor, receiver, [row]));
   }
@@ -159,6 +165,7 @@ export class Plans {
 
   /** The stations a plan names, in the order of their ids. */
   private async stations(
+    actor: Actor,
     site: SiteDraft,
     { editionId, everyChannelDb }: PlanDraft,
     ids: readonly number[],
@@ -166,7 +173,7 @@ export class Plans {
     const list =
       editionId === null
         ? stationsOnEveryChannel(defaultRaster(site.ituRegion), everyChannelDb ?? 0)
-        : await this.sources.editions.named(editionId, ids);
+        : await this.sources.stations.named(actor, editionId, ids);
     const byId = new Map<number, { name: string; frequencyHz: number; callSign?: string }>(
       list.map((each) => [each.id, each]),
     );

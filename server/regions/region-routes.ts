@@ -1,11 +1,22 @@
 import { pageOf, pageQuery } from '../../shared/contracts/paging.ts';
+import { suppliedRaster } from '../../shared/contracts/raster.ts';
 import { region, regionDraft } from '../../shared/contracts/region.ts';
 import { route, type Route } from '../http/route.ts';
 import type { Regions } from './regions.ts';
+import { suppliedRasters } from './supplied-rasters.ts';
 
 const path = '/api/regions';
 
 export const regionRoutes = (regions: Regions): Route[] => [
+  route({
+    method: 'get',
+    path: '/api/rasters',
+    summary: 'Rasters of the ITU Regions to begin with, each with its source',
+    access: 'member',
+    query: pageQuery,
+    answer: pageOf(suppliedRaster),
+    handle: ({ query }) => suppliedRasters(query),
+  }),
   route({
     method: 'get',
     path,
@@ -37,7 +48,8 @@ export const regionRoutes = (regions: Regions): Route[] => [
   route({
     method: 'put',
     path: `${path}/:id`,
-    summary: 'Change name, ITU Region and raster of a region',
+    summary:
+      'Change name, ITU Region and rasters of a region; an edition is judged by the one of its date',
     access: 'librarian',
     body: regionDraft,
     answer: region,

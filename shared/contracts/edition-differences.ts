@@ -9,9 +9,13 @@ export const differenceKind = z.enum(
 );
 export type DifferenceKind = z.infer<typeof differenceKind>;
 
-/** What changed in an edition `against` an earlier one of the same region. */
+/** What changed in an edition `against` another of the same region; left out: the one before it. */
 export const differencesQuery = pageQuery.extend({
-  against: z.coerce.number('Give the id of the edition to compare with.').int().positive(),
+  against: z.coerce
+    .number('Give the id of the edition to compare with.')
+    .int()
+    .positive()
+    .optional(),
   kind: differenceKind.optional(),
 });
 export type DifferencesQuery = z.output<typeof differencesQuery>;

@@ -8,7 +8,8 @@ const MAX_RECEIVERS = 20;
 
 /** Judges a page of the workshop's receivers with an edition and with the one it is compared to. */
 export const verdictsRequest = z.strictObject({
-  against: resourceId,
+  /** Left out: the edition before. */
+  against: resourceId.optional(),
   siteId: resourceId,
   period: period.default('night'),
   page: z.int().min(1).max(1_000_000).default(1),
@@ -44,7 +45,8 @@ export const receiverVerdicts = z.object({
   after: verdictFigures.nullable(),
   /** Another number harmed, other stations harmed, or a deficit that differs by 1 dB or more. */
   changed: z.boolean(),
-  /** Stations that differ between the editions and are heard where somebody is harmed. */
+  /** Stations that differ between the editions and are heard where somebody is harmed, or on an
+   * empty dial the loudest. */
   causes: z.array(
     namedStation.extend({
       /** The edition in which it is heard so. */
@@ -52,7 +54,8 @@ export const receiverVerdicts = z.object({
       kinds: z.array(differenceKind),
       /** The setting where it does the most harm. */
       dialHz: z.int(),
-      ratioDb: z.number(),
+      /** What it leaves the station wanted there; null: an empty dial. */
+      ratioDb: z.number().nullable(),
     }),
   ),
   /** Why it could not be judged; else null. */

@@ -24,6 +24,8 @@ export interface Station {
   readonly path?: readonly PathSection[] | null;
   /** Gains of the aerial, dB, every 10 degrees from north; otherwise the same all round. */
   readonly patternDb?: readonly number[] | null;
+  /** Found silent by somebody who listened; it has no field then. */
+  readonly offAir?: boolean;
 }
 
 /** A part of the spectrum divided into equal channels. */

@@ -211,7 +211,8 @@ describe('a pattern', () => {
     const { path, complete } = await upload(librarian, await addRegion(librarian), list);
     await librarian.put(path, {}).expect(200);
 
-    const [station] = await server.services.editions.everyStation(await stored(path));
+    const { body } = await librarian.get(`/api/editions/${await stored(path)}/stations`);
+    const [station] = body.items;
 
     expect(complete).toBe(true);
     expect(station?.patternDb).toEqual(gains);

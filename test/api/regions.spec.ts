@@ -1,6 +1,8 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 
+import { type SuppliedRaster, suppliedRaster } from '../../shared/contracts/raster.ts';
 import { region } from '../../shared/contracts/region.ts';
+import { defaultRaster } from '../../shared/radio/channels/raster.ts';
 import type { ApiClient } from '../support/api-client.ts';
 import { type ApiServer, startApiServer } from '../support/api-server.ts';
 import { club } from '../support/club.ts';
@@ -32,6 +34,28 @@ describe('POST /api/regions', () => {
     ['ituRegion', { ituRegion: 4 }],
     ['raster.0.highHz', { raster: [{ lowHz: 600_000, highHz: 500_000, stepHz: 9000 }] }],
     ['raster.0.stepHz', { raster: [{ lowHz: 500_000, highHz: 600_000, stepHz: 0 }] }],
+    ['raster.0.stepHz', { raster: [{ lowHz: 500_000, highHz: 600_000, stepHz: 9000 }] }],
+    [
+      'raster.1.lowHz',
+      {
+        raster: [
+          { lowHz: 500_000, highHz: 600_000, stepHz: 10_000 },
+          { lowHz: 600_000, highHz: 700_000, stepHz: 10_000 },
+        ],
+      },
+    ],
+    ['rasters', { rasters: [] }],
+    ['rasters.0.from', { rasters: [{ from: 'ever', ranges: [] }] }],
+    [
+      'rasters.1.from',
+      {
+        rasters: [
+          { from: null, ranges: [] },
+          { from: null, ranges: [] },
+        ],
+      },
+    ],
+    ['rasters', { raster: [], rasters: [{ from: null, ranges: [] }] }],
     ['colour', { colour: 'green' }],
   ])('with a bad %s, answers 400 and names it', async (path, change) => {
     const draft = { name: 'Vale', ituRegion: 1, ...change };
@@ -55,6 +79,27 @@ describe('a region', () => {
     await admin.get(`/api/regions/${id}`).expect(404);
     await admin.get(`/api/editions/${editionId}`).expect(404);
     expect(await rowsOf(server, `stations WHERE edition_id = ${editionId}`)).toBe(0);
+  });
+
+  it('keeps dated rasters until others are given or the ITU Region changes', async () => {
+    const path = `/api/regions/${await addRegion(admin)}`;
+    const wide = [{ lowHz: 540_000, highHz: 1_600_000, stepHz: 10_000 }];
+    const rasters = [
+      { from: '2000-01-01', ranges: [] },
+      { from: null, ranges: wide },
+    ];
+    const put = async (change: object) =>
+      (await admin.put(path, { name: 'Vale', ituRegion: 1, ...change }).expect(200)).body;
+
+    const dated = await put({ rasters });
+    const renamed = await put({ name: 'Dale' });
+    const single = await put({ raster: wide });
+    const moved = await put({ ituRegion: 2 });
+
+    expect(dated).toMatchObject({ raster: [], rasters: [rasters[1], rasters[0]] });
+    expect(renamed.rasters).toEqual(dated.rasters);
+    expect(single).toMatchObject({ raster: wide, rasters: [{ from: null, ranges: wide }] });
+    expect(moved.raster).toMatchObject([{ highHz: 1_700_000 }]);
   });
 
   it('of another workshop is not there', async () => {
@@ -82,6 +127,23 @@ describe('a region', () => {
     await member.post('/api/regions', { name: 'Mine', ituRegion: 1 }).expect(403);
     await member.put(`/api/regions/${id}`, { name: 'Mine', ituRegion: 1 }).expect(403);
     await member.delete(`/api/regions/${id}`).expect(403);
+  });
+});
+
+describe('GET /api/rasters', () => {
+  it('offers those of the ITU Regions with their source, the latest as regions begin with', async () => {
+    const { body } = await admin.get('/api/rasters').expect(200);
+    const supplied: SuppliedRaster[] = body.items.map((each: unknown) =>
+      suppliedRaster.parse(each),
+    );
+
+    expect(supplied).toHaveLength(body.total);
+    for (const ituRegion of [1, 2, 3] as const) {
+      const latest = supplied.filter(({ ituRegions }) => ituRegions.includes(ituRegion)).at(-1);
+      expect(latest?.ranges).toEqual(defaultRaster(ituRegion));
+      expect(latest?.source).toContain('ITU');
+    }
+    await (await server.visitor()).get('/api/rasters').expect(401);
   });
 });
 

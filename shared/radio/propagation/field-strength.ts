@@ -37,6 +37,7 @@ export interface FieldStrength {
 export const FIELD_NOTES = {
   given: 'The field is as given; no propagation was computed.',
   silent: 'The station is silent in this period.',
+  offAir: 'The station is off the air: somebody who listened found it silent.',
   noStationPlace: 'The station has no place.',
   noPower: 'The station has no power for this period.',
   noSitePlace: 'The site has no place.',
@@ -116,6 +117,7 @@ export class FieldsAtSite {
 
   /** The field of one station at a time. */
   of(station: Station, time: ReceptionTime, path = this.pathFrom(station)): FieldStrength {
+    if (station.offAir) return withoutWaves(station, path, null, [FIELD_NOTES.offAir]);
     if (station.fieldDb !== null) {
       return withoutWaves(station, path, station.fieldDb, [FIELD_NOTES.given]);
     }

@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 
-import { defuse } from './list-rejects.ts';
+import { defuse } from './csv-answer.ts';
 
 describe('defuse', () => {
   it.each(['=HYPERLINK("x")', '+cmd', '-cmd|x', '@SUM(A1)', '\t=1', '+', '-x', '=1'])(

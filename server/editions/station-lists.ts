@@ -1,0 +1,163 @@
+import type { Page } from '../../shared/contracts/paging.ts';
+import type { Edition } from '../../shared/contracts/region.ts';
+import { bareSite, type SiteDraft, type StoredSite } from '../../shared/contracts/site.ts';
+import type {
+  ListedStation,
+  StationQuery,
+  StationRecord,
+} from '../../shared/contracts/station-list.ts';
+import { nearestChannel } from '../../shared/radio/channels/raster.ts';
+import { USUAL_SKY_WAVE } from '../../shared/radio/propagation/sky-wave.ts';
+import type { Engine } from '../computing/engine.ts';
+import type { ListsAtSites } from '../computing/lists-at-sites.ts';
+import type { StationOrders } from '../computing/station-orders.ts';
+import type { Actor } from '../http/actor.ts';
+import type { CorrectedList } from './corrected-list.ts';
+import { authorsOf } from './corrections.ts';
+import type { EditionStations } from './edition-stations.ts';
+import type { Ordering, PagedList, StationPages } from './station-pages.ts';
+
+/** What lists of stations need of the other resources. */
+export interface StationListSources {
+  readonly stations: EditionStations;
+  readonly pages: StationPages;
+  readonly sites: { get(actor: Actor, id: number): Promise<StoredSite> };
+  readonly people: { namesOf(ids: readonly number[]): Promise<ReadonlyMap<number, string>> };
+  readonly lists: Pick<ListsAtSites, 'find'>;
+  readonly orders: Pick<StationOrders, 'roomFor'>;
+  readonly engine: Pick<Engine, 'run'>;
+}
+
+interface Opened {
+  readonly edition: Edition;
+  readonly corrected: CorrectedList | null;
+}
+
+interface Found {
+  readonly ids: readonly number[];
+  readonly total: number;
+}
+
+/** Lists the stations of an edition: searched, filtered, sorted, by pages. */
+export class StationLists {
+  private readonly sources: StationListSources;
+
+  constructor(sources: StationListSources) {
+    this.sources = sources;
+  }
+
+  async page(
+    actor: Actor,
+    editionId: number,
+    query: StationQuery,
+    signal?: AbortSignal,
+  ): Promise<Page<ListedStation>> {
+    const { stations, sites } = this.sources;
+    const opened = await stations.open(actor, editionId, query.corrections);
+    const site =
+      query.site === undefined ? null : bareSite.parse(await sites.get(actor, query.site));
+    const found =
+      site && dependsOnSite(query)
+        ? await this.pick(actor, opened, site, query, signal)
+        : await this.sources.pages.page(pagedList(opened), query, orderingOf(query));
+    const records = await stations.byId(editionId, found.ids, opened.corrected);
+    const shown = found.ids.flatMap((id) => records.get(id) ?? []);
+    const items = await this.present(opened, shown);
+    const fields = site ? await this.measure(actor, site, items, query, signal) : [];
+    return {
+      items: items.map((item, index) => ({ ...item, ...fields[index] })),
+      total: found.total,
+    };
+  }
+
+  /** What depends on where one listens is picked in a thread, from fields that all of them share. */
+  private async pick(
+    actor: Actor,
+    opened: Opened,
+    site: SiteDraft,
+    query: StationQuery,
+    signal?: AbortSignal,
+  ): Promise<Found> {
+    const { lists, pages, orders, engine } = this.sources;
+    const { sort, period, page, pageSize } = query;
+    const corrections = query.corrections;
+    const list = await lists.find(actor, { site, editionId: opened.edition.id, corrections });
+    const isNarrowed = query.search !== '' || query.only !== undefined;
+    const picked = await engine.run(
+      'pickStations',
+      {
+        list,
+        period,
+        order: orders.roomFor(list, period, sort),
+        sort,
+        descending: isDescending(query),
+        among: isNarrowed ? await pages.ids(pagedList(opened), query) : null,
+        fromHz: query.fromHz ?? 0,
+        toHz: query.toHz ?? Infinity,
+        maxDistanceM: query.maxDistanceM ?? Infinity,
+        minFieldDb: query.minFieldDb ?? -Infinity,
+        offset: (page - 1) * pageSize,
+        limit: pageSize,
+      },
+      { signal },
+    );
+    return picked.read();
+  }
+
+  /** Distance and field of the stations of one page. */
+  private async measure(
+    actor: Actor,
+    site: SiteDraft,
+    items: readonly ListedStation[],
+    { period }: StationQuery,
+    signal?: AbortSignal,
+  ): Promise<Pick<ListedStation, 'distanceM' | 'fieldDb'>[]> {
+    const { lists, engine } = this.sources;
+    const stations = items.map((item) => ({ ...item, fieldDb: null, path: null }));
+    const list = await lists.find(actor, { site, stations });
+    const task = { list, time: period, skyWave: USUAL_SKY_WAVE };
+    const { fields } = (await engine.run('fieldStrengths', task, { signal })).read();
+    return fields.map(({ distanceM, fieldDb }) => ({ distanceM, fieldDb }));
+  }
+
+  private async present(
+    { edition, corrected }: Opened,
+    records: readonly StationRecord[],
+  ): Promise<ListedStation[]> {
+    const marked = records.map(({ id }) => corrected?.stations.get(id));
+    const authors = marked.flatMap((each) => authorsOf(each?.corrections ?? []));
+    const names = authors.length === 0 ? null : await this.sources.people.namesOf(authors);
+    return records.map((record, index) => ({
+      ...record,
+      onRaster: nearestChannel(edition.raster, record.frequencyHz) === record.frequencyHz,
+      offAir: marked[index]?.offAir ?? false,
+      corrections: (marked[index]?.corrections ?? []).map(({ id, kind, date, note, authorId }) => ({
+        id,
+        kind,
+        date,
+        note,
+        authorName: names?.get(authorId ?? 0) ?? '',
+      })),
+      distanceM: null,
+      fieldDb: null,
+    }));
+  }
+}
+
+const pagedList = ({ edition, corrected }: Opened): PagedList => ({
+  editionId: edition.id,
+  stations: edition.stations,
+  raster: edition.raster,
+  corrected,
+});
+
+const dependsOnSite = ({ sort, maxDistanceM, minFieldDb }: StationQuery): boolean =>
+  sort === 'distance' || sort === 'field' || maxDistanceM !== undefined || minFieldDb !== undefined;
+
+const isDescending = ({ sort, direction }: StationQuery): boolean =>
+  (direction ?? (sort === 'power' || sort === 'field' ? 'desc' : 'asc')) === 'desc';
+
+const orderingOf = (query: StationQuery): Ordering => ({
+  sort: query.sort === 'name' || query.sort === 'power' ? query.sort : 'frequency',
+  descending: isDescending(query),
+});
