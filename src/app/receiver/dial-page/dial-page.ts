@@ -7,6 +7,7 @@ import { dialParams, type DialView, readDialView } from '../address/dial-view';
 import { verdictSentences } from '../advice/verdict-words';
 import { DialStrips } from '../dial-strips/dial-strips';
 import type { LedgerContext } from '../ledger/ledger-facts';
+import { openLedger } from '../ledger/open-ledger';
 import { HeardHere } from '../pointer/heard-here';
 import { PointerStore } from '../pointer/pointer-store';
 import { ResponseFilter } from '../response-table/response-filter';
@@ -15,7 +16,6 @@ import { ResponseTable } from '../response-table/response-table';
 import { TrialStore } from '../trial/trial-store';
 import { TrialInput } from '../trial-input/trial-input';
 import { filteredBands, leftOut } from './filtered-bands';
-import { openLedger } from './open-ledger';
 
 const sameMark = (one: LedgerContext | null, other: LedgerContext | null) =>
   one?.response === other?.response;

@@ -36,14 +36,18 @@ export function ledgerFacts(context: LedgerContext): LedgerFact[] {
   const { response, nameOf, station, service } = context;
   const { wantedStation, secondStation } = response;
   const wanted = wantedStation === null ? $localize`an assumed field` : nameOf(wantedStation);
-  const frequency = station ? formatFrequency(station.frequencyHz) : '\u2013';
   return [
-    { label: $localize`Station`, value: `${nameOf(response.station)}, ${frequency}` },
+    {
+      label: $localize`Station`,
+      value: [nameOf(response.station), station && formatFrequency(station.frequencyHz)]
+        .filter((each) => each !== undefined)
+        .join(', '),
+    },
     ...(secondStation === undefined
       ? []
       : [{ label: $localize`With`, value: nameOf(secondStation) }]),
     { label: $localize`Path`, value: pathWords(context) },
-    { label: $localize`Waves`, value: waveWords(station) },
+    ...(station ? [{ label: $localize`Waves`, value: waveWords(station) }] : []),
     { label: $localize`Beat`, value: formatFrequency(response.beatHz) },
     { label: $localize`Wanted`, value: wanted },
     {
@@ -62,8 +66,7 @@ function pathWords({ response, station, place }: LedgerContext): string {
   return $localize`${far}:distance:, bearing ${Math.round(bearing) % 360}:bearing:° from the aerial`;
 }
 
-function waveWords(station: LedgerContext['station']): string {
-  if (!station) return '\u2013';
+function waveWords(station: NonNullable<LedgerContext['station']>): string {
   if (station.groundDb === null) return station.notes.join(' ') || $localize`as given`;
   const ground = $localize`ground ${field(station.groundDb)}:ground:`;
   const sky =

@@ -2,7 +2,9 @@ import { ChangeDetectionStrategy, Component, computed, input, signal } from '@an
 
 import type { ReadablePlan } from '../../../../../shared/contracts/plan';
 import type { Period } from '../../../../../shared/radio/site';
-import type { JudgedBand } from '../../../charts/band-strip/strip-layout';
+import { type JudgedBand, responseMark } from '../../../charts/band-strip/strip-layout';
+import type { LedgerContext } from '../../ledger/ledger-facts';
+import { openLedger } from '../../ledger/open-ledger';
 import { ResponseTable } from '../../response-table/response-table';
 import { stationName } from '../plan-words';
 import { PlanDial } from './plan-dial';
@@ -47,6 +49,30 @@ export class PlanHeard {
     const plan = this.plan();
     return (place: number) => stationName(plan, place);
   });
+
+  private readonly context = computed<LedgerContext | null>(() => {
+    const id = this.worked();
+    for (const [at, { name, responses }] of this.bands().entries()) {
+      const response = responses.find((each) => responseMark(name, each) === id);
+      if (!response) continue;
+      const service = this.plan().receiver.bands[at]?.service ?? 'broadcast';
+      return {
+        response,
+        band: name,
+        service,
+        nameOf: this.nameOf(),
+        station: undefined,
+        place: null,
+      };
+    }
+    return null;
+  });
+
+  constructor() {
+    openLedger(this.context, () => {
+      this.worked.set(null);
+    });
+  }
 
   protected showWorking(id: string): void {
     this.picked.set(id);

@@ -1,7 +1,7 @@
 import { effect, inject, Injector, type Signal, ViewContainerRef } from '@angular/core';
 import { MatDialog, type MatDialogRef } from '@angular/material/dialog';
 
-import type { LedgerContext } from '../ledger/ledger-facts';
+import type { LedgerContext } from './ledger-facts';
 
 /**
  * Shows the working as long as there is one to show: what the address names decides, not a press.
@@ -19,7 +19,7 @@ export function openLedger(context: Signal<LedgerContext | null>, closed: () => 
       if (!wanted) shown?.close();
       if (!wanted || shown) return;
       const data = wanted;
-      void import('../ledger/ledger').then(({ Ledger }) => {
+      void import('./ledger').then(({ Ledger }) => {
         if (wanted !== data || shown) return;
         shown = dialog.open(Ledger, { data, viewContainerRef, width: '52rem', maxWidth: '96vw' });
         shown.afterClosed().subscribe(() => {
