@@ -53,6 +53,12 @@ export const receiverRoutes: Routes = [
         title: $localize`Whistle`,
         loadComponent: () => import('./whistle-page/whistle-page').then((m) => m.WhistlePage),
       },
+      {
+        path: 'trial',
+        title: $localize`Set-up on trial`,
+        loadComponent: () =>
+          import('./set-up-trial/set-up-trial-page').then((m) => m.SetUpTrialPage),
+      },
     ],
   },
 ];

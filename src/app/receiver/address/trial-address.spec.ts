@@ -10,9 +10,11 @@ describe('the address of a trial', () => {
       period: 'day',
       if: '554000',
       mark: 'station-3',
+      set: '{}',
     });
 
     expect(readAddress(params)).toEqual({
+      setUp: '{}',
       siteId: 3,
       source: { kind: 'edition', editionId: 7 },
       period: 'day',
@@ -25,6 +27,7 @@ describe('the address of a trial', () => {
     const params = convertToParamMap({ site: '-3', every: 'loud', period: 'dusk', if: '1e3' });
 
     expect(readAddress(params)).toEqual({
+      setUp: undefined,
       siteId: undefined,
       source: undefined,
       period: 'night',
@@ -35,6 +38,7 @@ describe('the address of a trial', () => {
 
   it.each<TrialAddress>([
     {
+      setUp: '{"strayDb.if":80}',
       siteId: 3,
       source: { kind: 'edition', editionId: 7 },
       period: 'day',
@@ -42,6 +46,7 @@ describe('the address of a trial', () => {
       picked: 'response|3||1|1|612000|Range 4',
     },
     {
+      setUp: undefined,
       siteId: 4,
       source: { kind: 'every-channel', fieldDb: 72.5 },
       period: 'night',

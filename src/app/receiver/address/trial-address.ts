@@ -5,6 +5,8 @@ import type { StationSource } from '../trial/station-source';
 
 /** What the address of a receiver's page says; what it does not say is undefined. */
 export interface TrialAddress {
+  /** What of the set-up is on trial, as text. */
+  readonly setUp: string | undefined;
   readonly siteId: number | undefined;
   readonly source: StationSource | undefined;
   readonly period: Period;
@@ -28,6 +30,7 @@ function sourceFrom(params: ParamMap): StationSource | undefined {
 /** Reads an address; what makes no sense counts as not said. */
 export function readAddress(params: ParamMap): TrialAddress {
   return {
+    setUp: params.get('set') ?? undefined,
     siteId: wholeNumber(params.get('site')),
     source: sourceFrom(params),
     period: params.get('period') === 'day' ? 'day' : 'night',
@@ -39,6 +42,7 @@ export function readAddress(params: ParamMap): TrialAddress {
 /** Query parameters that say a change; null takes one out of the address. */
 export function addressParams(change: Partial<TrialAddress>): Params {
   const params: Params = {};
+  if ('setUp' in change) params['set'] = change.setUp ?? null;
   if ('siteId' in change) params['site'] = change.siteId ?? null;
   if ('period' in change) params['period'] = change.period;
   if ('ifHz' in change) params['if'] = change.ifHz ?? null;

@@ -20,6 +20,8 @@ import { ProblemNote } from '../../ui/page-state/problem-note';
 import { KeepPlan, type PlanToKeep } from '../keep-plan/keep-plan';
 import { Pickers } from '../pickers/pickers';
 import { SectionNav } from '../section-nav/section-nav';
+import { SetUpTrial } from '../set-up-trial/set-up-trial';
+import { TrialBar } from '../set-up-trial/trial-bar';
 import { SiteInvitation } from '../site-invitation/site-invitation';
 import { TrialProgress } from '../trial-progress/trial-progress';
 import { TrialInputs } from '../trial/trial-inputs';
@@ -42,6 +44,7 @@ import { ReceiverStore } from './receiver-store';
     RouterOutlet,
     SectionNav,
     SiteInvitation,
+    TrialBar,
     TrialProgress,
   ],
   providers: [
@@ -49,6 +52,7 @@ import { ReceiverStore } from './receiver-store';
     { provide: TrialInputs, useExisting: ReceiverStore },
     { provide: ChartOrigin, useClass: ReceiverOrigin },
     TrialStore,
+    SetUpTrial,
   ],
   changeDetection: ChangeDetectionStrategy.OnPush,
 })
@@ -111,7 +115,9 @@ export class ReceiverPage {
         everyChannelDb: source.kind === 'every-channel' ? source.fieldDb : null,
         period: this.store.period(),
         ifHz,
+        receiver: this.store.setUpOnTrial(),
       },
+      draftName: `plan.${receiver.id}.${site.id}.${ifHz}`,
       keep: (draft) => this.store.keep(draft),
     };
   }

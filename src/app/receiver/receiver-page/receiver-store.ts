@@ -6,13 +6,20 @@ import { debounceTime, firstValueFrom } from 'rxjs';
 
 import { pageOf } from '../../../../shared/contracts/paging';
 import { type Plan, plan, type PlanInput } from '../../../../shared/contracts/plan';
-import { bareReceiver, storedReceiver } from '../../../../shared/contracts/receiver';
+import {
+  bareReceiver,
+  type ReceiverDraft,
+  receiverDraft,
+  storedReceiver,
+} from '../../../../shared/contracts/receiver';
 import { type Edition, edition, type Region, region } from '../../../../shared/contracts/region';
 import { type NamedSite, type StoredSite, storedSite } from '../../../../shared/contracts/site';
 import { defaultRaster } from '../../../../shared/radio/channels/raster';
 import type { Period } from '../../../../shared/radio/site';
 import { remote } from '../../core/remote';
 import { addressParams, readAddress, type TrialAddress } from '../address/trial-address';
+import { applyChanges, type Changes } from '../set-up-trial/changes';
+import { ChangesAddress } from '../set-up-trial/changes-address';
 import { ASSUMED_FIELD_DB, type StationSource } from '../trial/station-source';
 import type { TrialInputs, TrialSetup } from '../trial/trial-inputs';
 
@@ -29,6 +36,8 @@ export class ReceiverStore implements TrialInputs {
   private readonly params = toSignal(this.route.paramMap, { requireSync: true });
   private readonly query = toSignal(this.route.queryParamMap, { requireSync: true });
 
+  private readonly changesAddress = inject(ChangesAddress);
+
   readonly id = computed(() => this.params().get('id') ?? '');
   readonly address = computed(() => readAddress(this.query()));
   readonly receiver = remote(
@@ -44,6 +53,25 @@ export class ReceiverStore implements TrialInputs {
   });
   readonly regions = remote(() => `/api/regions?pageSize=${MOST}`, pageOf(region));
 
+  /** The receiver as saved, and what the address changes of it; null: it cannot be read. */
+  private readonly saved = computed(() => {
+    const receiver = this.receiver.value();
+    return receiver && bareReceiver.parse(receiver);
+  });
+  private readonly tried = computed(() => {
+    const saved = this.saved();
+    return saved && changed(saved, this.changesAddress.read(this.address().setUp));
+  });
+  /** The address asks for a set-up that is not known here or could not be built. */
+  readonly isTrialLost = computed(() => this.tried() === null);
+  /** The receiver with what is on trial of its set-up, still with its present IF. */
+  readonly trialReceiver = computed(() => this.tried() ?? this.saved());
+  /** Null: the set-up is as saved. */
+  readonly setUpOnTrial = computed(() => {
+    const [saved, tried] = [this.saved(), this.tried()];
+    return tried && JSON.stringify(tried) !== JSON.stringify(saved) ? tried : null;
+  });
+
   readonly site = computed(() => {
     const { siteId } = this.address();
     return this.sites.value()?.items.find(({ id }) => id === siteId);
@@ -53,11 +81,12 @@ export class ReceiverStore implements TrialInputs {
   private readonly addressed = computed(() => this.address().picked ?? null);
   readonly picked = linkedSignal(() => this.addressed());
   readonly setup = computed<TrialSetup | null>(() => {
-    const [receiver, site] = [this.receiver.value(), this.site()];
+    const [receiver, saved, site] = [this.trialReceiver(), this.saved(), this.site()];
     const { source } = this.address();
     const raster = this.raster();
-    if (!receiver || !site || !source || !raster) return null;
-    return { receiver: bareReceiver.parse(receiver), site: bareSite(site), source, raster };
+    if (!receiver || !saved || !site || !source || !raster) return null;
+    const trial = this.setUpOnTrial() ? { saved } : {};
+    return { receiver, ...trial, site: bareSite(site), source, raster };
   });
 
   private readonly raster = computed(() => {
@@ -125,6 +154,12 @@ export class ReceiverStore implements TrialInputs {
       ...(this.address().source === undefined ? { source } : {}),
     };
   }
+}
+
+/** Null where the changes cannot be read or make no receiver. */
+function changed(saved: ReceiverDraft, changes: Changes | null): ReceiverDraft | null {
+  const made = changes && receiverDraft.safeParse(applyChanges(saved, changes));
+  return made?.data ?? null;
 }
 
 const bareSite = ({ id: _id, name: _name, editable: _editable, ...site }: StoredSite) => site;

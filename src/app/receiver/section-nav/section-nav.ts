@@ -44,6 +44,7 @@ export class SectionNav {
     { path: 'dial', name: $localize`Dial` },
     { path: 'rejection', name: $localize`Rejection` },
     { path: 'whistle', name: $localize`Whistle` },
+    { path: 'trial', name: $localize`Set-up on trial` },
   ];
   protected readonly matching = {
     paths: 'exact',

@@ -9,6 +9,8 @@ import type { StationSource } from './station-source';
 /** What is judged, wherever it comes from: a stored receiver or one that a visitor describes. */
 export interface TrialSetup {
   readonly receiver: ReceiverDraft;
+  /** The receiver as saved, where another set-up is on trial. */
+  readonly saved?: ReceiverDraft;
   readonly site: SiteDraft;
   readonly source: StationSource;
   readonly raster: readonly RasterRange[];

@@ -40,7 +40,9 @@ export class TrialStore {
   readonly period = this.inputs.period;
   readonly trialHz = this.inputs.trialHz;
   readonly presentHz = computed(() => this.setup()?.receiver.ifHz ?? 0);
-  readonly isMoved = computed(() => this.trialHz() !== this.presentHz());
+  readonly isMoved = computed(
+    () => this.trialHz() !== this.presentHz() || this.setup()?.saved !== undefined,
+  );
   /** How far the IF can be moved. */
   readonly reach = computed(() => {
     const receiver = this.setup()?.receiver;
@@ -83,7 +85,8 @@ export class TrialStore {
       () => {
         const setup = this.setup();
         if (!setup) return null;
-        return { ...place(setup), receiver: setup.receiver, period: this.period(), limit: 1 };
+        const receiver = setup.saved ?? setup.receiver;
+        return { ...place(setup), receiver, period: this.period(), limit: 1 };
       },
       { equal: sameText },
     ),

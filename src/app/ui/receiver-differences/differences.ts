@@ -95,7 +95,7 @@ const words: Readonly<Record<string, string>> = {
 };
 
 /** "bands.0.highHz" reads "band 1, to". */
-function fieldWords(path: string): string {
+export function fieldWords(path: string): string {
   return path
     .split('.')
     .map((step) => (/^\d+$/u.test(step) ? ` ${Number(step) + 1}` : `, ${words[step] ?? step}`))
@@ -103,7 +103,7 @@ function fieldWords(path: string): string {
     .replace(/^, /u, '');
 }
 
-function valueWords(path: string, value: Leaf | undefined): string {
+export function valueWords(path: string, value: Leaf | undefined): string {
   if (value === undefined) return '–';
   if (typeof value !== 'number') return String(value);
   if (path.endsWith('Hz')) return formatFrequency(value);
