@@ -81,9 +81,10 @@ describe('plans', () => {
     const working = page.getByRole('button', { name: 'Show the working' }).first();
     await working.click();
 
-    const ledger = page.getByRole('table', { name: 'The working, term by term' });
+    const ledger = page.getByRole('dialog');
     await ledger.getByText('Wanted to unwanted').waitFor();
-    await working.click();
+    await page.keyboard.press('Escape');
+    await ledger.waitFor({ state: 'detached' });
     expect(await page.getByText('a station', { exact: true }).count()).toBe(0);
   });
 

@@ -1,10 +1,13 @@
-import { ChangeDetectionStrategy, Component, computed, input, signal } from '@angular/core';
+import { ChangeDetectionStrategy, Component, computed, inject, input } from '@angular/core';
+import { toSignal } from '@angular/core/rxjs-interop';
+import { ActivatedRoute, Router } from '@angular/router';
 
 import type { ReadablePlan } from '../../../../../shared/contracts/plan';
 import type { Period } from '../../../../../shared/radio/site';
 import { type JudgedBand, responseMark } from '../../../charts/band-strip/strip-layout';
+import { dialParams, type DialView, readDialView } from '../../address/dial-view';
+import { openLedger } from '../../dial-page/open-ledger';
 import type { LedgerContext } from '../../ledger/ledger-facts';
-import { openLedger } from '../../ledger/open-ledger';
 import { ResponseTable } from '../../response-table/response-table';
 import { stationName } from '../plan-words';
 import { PlanDial } from './plan-dial';
@@ -32,13 +35,21 @@ export class PlanHeard {
   readonly plan = input.required<ReadablePlan>();
   readonly period = input.required<Period>();
 
-  /** Mark picked in dial or table, and the response whose working is open. */
-  protected readonly picked = signal<string | null>(null);
-  protected readonly worked = signal<string | null>(null);
+  private readonly route = inject(ActivatedRoute);
+  private readonly router = inject(Router);
+  private readonly query = toSignal(this.route.queryParamMap, { requireSync: true });
+  /** What the address says is picked, and whose working is open. */
+  protected readonly view = computed(() => readDialView(this.query()));
 
   protected readonly judgement = computed(() => this.plan().judged?.[this.period()]);
   protected readonly bands = computed<JudgedBand[]>(() =>
     (this.judgement()?.bands ?? []).map((band) => ({ ...band, totals: [] })),
+  );
+  protected readonly heard = computed(() =>
+    this.bands().map((band) => ({
+      ...band,
+      responses: band.responses.filter(({ hidden }) => hidden === null),
+    })),
   );
   /** Responses there were, and those the plan holds. */
   protected readonly counts = computed(() => ({
@@ -50,32 +61,45 @@ export class PlanHeard {
     return (place: number) => stationName(plan, place);
   });
 
-  private readonly context = computed<LedgerContext | null>(() => {
-    const id = this.worked();
+  private readonly worked = computed(() => this.contextOf(this.view().working), {
+    equal: (one, other) => one?.response === other?.response,
+  });
+
+  constructor() {
+    openLedger(this.worked, () => {
+      this.go({ working: null });
+    });
+  }
+
+  /** Writes a choice into the address; the page follows it. */
+  protected go(change: Partial<DialView>, replaceUrl = false): void {
+    void this.router.navigate([], {
+      relativeTo: this.route,
+      queryParams: dialParams(change),
+      queryParamsHandling: 'merge',
+      replaceUrl,
+      scroll: 'manual',
+    });
+  }
+
+  private contextOf(id: string | null): LedgerContext | null {
     for (const [at, { name, responses }] of this.bands().entries()) {
       const response = responses.find((each) => responseMark(name, each) === id);
       if (!response) continue;
       const service = this.plan().receiver.bands[at]?.service ?? 'broadcast';
-      return {
-        response,
-        band: name,
-        service,
-        nameOf: this.nameOf(),
-        station: undefined,
-        place: null,
-      };
+      const station = this.stationAt(response.station);
+      return { response, band: name, service, nameOf: this.nameOf(), station, place: null };
     }
     return null;
-  });
-
-  constructor() {
-    openLedger(this.context, () => {
-      this.worked.set(null);
-    });
   }
 
-  protected showWorking(id: string): void {
-    this.picked.set(id);
-    this.worked.set(id);
+  /** Of its stations a plan keeps names and frequencies; of their fields those of the responses. */
+  private stationAt(place: number): LedgerContext['station'] {
+    const found = this.plan().stations[place];
+    if (!found) return undefined;
+    const { name, frequencyHz } = found;
+    const unknown = { latitude: null, longitude: null, groundDb: null, skyDb: null };
+    const notes = [$localize`not kept with the plan`];
+    return { station: place, name, frequencyHz, ...unknown, distanceM: null, fieldDb: null, notes };
   }
 }
