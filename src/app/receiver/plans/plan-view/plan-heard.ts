@@ -6,7 +6,7 @@ import type { ReadablePlan } from '../../../../../shared/contracts/plan';
 import type { Period } from '../../../../../shared/radio/site';
 import { type JudgedBand, responseMark } from '../../../charts/band-strip/strip-layout';
 import { dialParams, type DialView, readDialView } from '../../address/dial-view';
-import { openLedger } from '../../dial-page/open-ledger';
+import { openLedger } from '../../ledger/open-ledger';
 import type { LedgerContext } from '../../ledger/ledger-facts';
 import { ResponseTable } from '../../response-table/response-table';
 import { stationName } from '../plan-words';
