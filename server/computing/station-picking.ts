@@ -23,6 +23,9 @@ export interface StationPick {
 export interface PickedStations {
   readonly ids: number[];
   readonly total: number;
+  /** Of each of them; null: not known. */
+  readonly distanceM: (number | null)[];
+  readonly fieldDb: (number | null)[];
 }
 
 /** Distance and field of the list's stations, in its order; NaN: none. */
@@ -43,11 +46,19 @@ export function pickAmong(asked: StationPick, measured: Measured): PickedStation
   let total = 0;
   for (const index of inOrder(pick)) {
     if (!passes(index)) continue;
-    if (total >= pick.offset && picked.length < pick.limit) picked.push(ids[index] ?? 0);
+    if (total >= pick.offset && picked.length < pick.limit) picked.push(index);
     total += 1;
   }
-  return { ids: picked, total };
+  const known = (values: Float64Array) => picked.map((index) => knownOrNull(values[index]));
+  return {
+    ids: picked.map((index) => ids[index] ?? 0),
+    total,
+    distanceM: known(measured.distanceM),
+    fieldDb: known(measured.fieldDb),
+  };
 }
+
+const knownOrNull = (value = NaN): number | null => (Number.isNaN(value) ? null : value);
 
 function arrange(pick: Pick): void {
   const { indices, ready } = pick.order;

@@ -5,6 +5,9 @@ import { edition, editionChange } from '../../shared/contracts/region.ts';
 import {
   correctionsQuery,
   listedStation,
+  oneStationQuery,
+  placesQuery,
+  stationPlaces,
   stationQuery,
 } from '../../shared/contracts/station-list.ts';
 import { whenClientLeaves } from '../http/computed-answer.ts';
@@ -91,6 +94,28 @@ const stationRoutes = ({ stations, stationLists }: EditionViews): Route[] => [
     faults: [404],
     handle: ({ actor, id, query, response }) =>
       stationLists.page(actor, id(), query, whenClientLeaves(response)),
+  }),
+  route({
+    method: 'get',
+    path: `${one}/stations/places`,
+    summary:
+      'The strongest stations found that have a place, as a map shows them; 20000 at the most',
+    access: 'member',
+    query: placesQuery,
+    answer: stationPlaces,
+    faults: [404],
+    handle: ({ actor, id, query, response }) =>
+      stationLists.places(actor, id(), query, whenClientLeaves(response)),
+  }),
+  route({
+    method: 'get',
+    path: `${one}/stations/:stationId`,
+    summary: 'A station of an edition, with what was corrected of it',
+    access: 'member',
+    query: oneStationQuery,
+    answer: listedStation,
+    faults: [404],
+    handle: ({ actor, id, query }) => stationLists.one(actor, id(), id('stationId'), query),
   }),
   route({
     method: 'get',

@@ -1,10 +1,14 @@
 import type { Page } from '../../shared/contracts/paging.ts';
 import type { Edition } from '../../shared/contracts/region.ts';
 import { bareSite, type SiteDraft, type StoredSite } from '../../shared/contracts/site.ts';
-import type {
-  ListedStation,
-  StationQuery,
-  StationRecord,
+import {
+  type ListedStation,
+  MOST_PLACES,
+  type OneStationQuery,
+  type PlacesQuery,
+  type StationPlaces,
+  type StationQuery,
+  type StationRecord,
 } from '../../shared/contracts/station-list.ts';
 import { nearestChannel } from '../../shared/radio/channels/raster.ts';
 import { USUAL_SKY_WAVE } from '../../shared/radio/propagation/sky-wave.ts';
@@ -12,6 +16,7 @@ import type { Engine } from '../computing/engine.ts';
 import type { ListsAtSites } from '../computing/lists-at-sites.ts';
 import type { StationOrders } from '../computing/station-orders.ts';
 import type { Actor } from '../http/actor.ts';
+import { NotFoundError } from '../http/errors.ts';
 import type { CorrectedList } from './corrected-list.ts';
 import { authorsOf } from './corrections.ts';
 import type { EditionStations } from './edition-stations.ts';
@@ -36,6 +41,8 @@ interface Opened {
 interface Found {
   readonly ids: readonly number[];
   readonly total: number;
+  readonly distanceM?: readonly (number | null)[];
+  readonly fieldDb?: readonly (number | null)[];
 }
 
 /** Lists the stations of an edition: searched, filtered, sorted, by pages. */
@@ -52,10 +59,9 @@ export class StationLists {
     query: StationQuery,
     signal?: AbortSignal,
   ): Promise<Page<ListedStation>> {
-    const { stations, sites } = this.sources;
+    const { stations } = this.sources;
     const opened = await stations.open(actor, editionId, query.corrections);
-    const site =
-      query.site === undefined ? null : bareSite.parse(await sites.get(actor, query.site));
+    const site = await this.siteOf(actor, query);
     const found =
       site && dependsOnSite(query)
         ? await this.pick(actor, opened, site, query, signal)
@@ -68,6 +74,58 @@ export class StationLists {
       items: items.map((item, index) => ({ ...item, ...fields[index] })),
       total: found.total,
     };
+  }
+
+  /** One station, with what a list says of it. */
+  async one(
+    actor: Actor,
+    editionId: number,
+    stationId: number,
+    query: OneStationQuery,
+  ): Promise<ListedStation> {
+    const { stations } = this.sources;
+    const opened = await stations.open(actor, editionId, query.corrections);
+    const site = await this.siteOf(actor, query);
+    const records = await stations.byId(editionId, [stationId], opened.corrected);
+    const [item] = await this.present(opened, [...records.values()]);
+    if (!item) throw new NotFoundError('station', stationId);
+    const [field] = site ? await this.measure(actor, site, [item], query) : [];
+    return { ...item, ...field };
+  }
+
+  /** The strongest stations that are found, as a map shows them. */
+  async places(
+    actor: Actor,
+    editionId: number,
+    query: PlacesQuery,
+    signal?: AbortSignal,
+  ): Promise<StationPlaces> {
+    const { stations, pages } = this.sources;
+    const opened = await stations.open(actor, editionId, query.corrections);
+    const site = await this.siteOf(actor, query);
+    const strongest: StationQuery = {
+      ...query,
+      sort: site ? 'field' : 'power',
+      page: 1,
+      pageSize: MOST_PLACES,
+    };
+    const found: Found = site
+      ? await this.pick(actor, opened, site, strongest, signal)
+      : await pages.page(pagedList(opened), strongest, orderingOf(strongest));
+    const records = await stations.byId(editionId, found.ids, opened.corrected);
+    const shown = found.ids.flatMap((id, at) => placeOf(opened, records.get(id), found, at) ?? []);
+    return {
+      items: shown,
+      total: found.total,
+      withoutPlace: found.ids.length - shown.length,
+    };
+  }
+
+  private async siteOf(
+    actor: Actor,
+    { site }: Pick<StationQuery, 'site'>,
+  ): Promise<SiteDraft | null> {
+    return site === undefined ? null : bareSite.parse(await this.sources.sites.get(actor, site));
   }
 
   /** What depends on where one listens is picked in a thread, from fields that all of them share. */
@@ -109,7 +167,7 @@ export class StationLists {
     actor: Actor,
     site: SiteDraft,
     items: readonly ListedStation[],
-    { period }: StationQuery,
+    { period }: Pick<StationQuery, 'period'>,
     signal?: AbortSignal,
   ): Promise<Pick<ListedStation, 'distanceM' | 'fieldDb'>[]> {
     const { lists, engine } = this.sources;
@@ -124,11 +182,14 @@ export class StationLists {
     { edition, corrected }: Opened,
     records: readonly StationRecord[],
   ): Promise<ListedStation[]> {
+    const { stations } = this.sources;
+    const official = await stations.byId(edition.id, changedAmong(records, corrected), null);
     const marked = records.map(({ id }) => corrected?.stations.get(id));
     const authors = marked.flatMap((each) => authorsOf(each?.corrections ?? []));
     const names = authors.length === 0 ? null : await this.sources.people.namesOf(authors);
     return records.map((record, index) => ({
       ...record,
+      official: official.get(record.id) ?? null,
       onRaster: nearestChannel(edition.raster, record.frequencyHz) === record.frequencyHz,
       offAir: marked[index]?.offAir ?? false,
       corrections: (marked[index]?.corrections ?? []).map(({ id, kind, date, note, authorId }) => ({
@@ -150,6 +211,34 @@ const pagedList = ({ edition, corrected }: Opened): PagedList => ({
   raster: edition.raster,
   corrected,
 });
+
+/** Those of which a correction changed what the list says. */
+const changedAmong = (
+  records: readonly StationRecord[],
+  corrected: CorrectedList | null,
+): number[] =>
+  records.flatMap(({ id }) =>
+    corrected?.stations.get(id)?.corrections.some(({ kind }) => kind === 'changed') ? id : [],
+  );
+
+/** Null for a station without a place. */
+function placeOf(
+  { edition, corrected }: Opened,
+  record: StationRecord | undefined,
+  { distanceM, fieldDb }: Found,
+  at: number,
+): StationPlaces['items'][number] | null {
+  if (record?.latitude == null || record.longitude === null) return null;
+  const { id, name, callSign, frequencyHz, latitude, longitude, powerDayW, powerNightW } = record;
+  return {
+    ...{ id, frequencyHz, latitude, longitude, powerDayW, powerNightW },
+    name: name || callSign,
+    onRaster: nearestChannel(edition.raster, frequencyHz) === frequencyHz,
+    offAir: corrected?.stations.get(id)?.offAir ?? false,
+    distanceM: distanceM?.[at] ?? null,
+    fieldDb: fieldDb?.[at] ?? null,
+  };
+}
 
 const dependsOnSite = ({ sort, maxDistanceM, minFieldDb }: StationQuery): boolean =>
   sort === 'distance' || sort === 'field' || maxDistanceM !== undefined || minFieldDb !== undefined;

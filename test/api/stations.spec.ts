@@ -1,6 +1,11 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 
-import { type ListedStation, listedStation } from '../../shared/contracts/station-list.ts';
+import {
+  type ListedStation,
+  listedStation,
+  type StationPlaces,
+  stationPlaces,
+} from '../../shared/contracts/station-list.ts';
 import type { ApiClient } from '../support/api-client.ts';
 import { type ApiServer, startApiServer } from '../support/api-server.ts';
 import { addRegion, cleanList, HEADER, importList } from '../support/lists.ts';
@@ -143,5 +148,75 @@ describe('GET /api/editions/:id/stations', () => {
     await person.get(`/api/editions/${editionId}/stations?site=${theirs}`).expect(404);
     await stranger.get(`/api/editions/${editionId}/stations?site=${theirs}`).expect(404);
     await stranger.get(`/api/editions/${editionId}/stations.csv`).expect(404);
+  });
+});
+
+describe('GET /api/editions/:id/stations/places', () => {
+  const placesAsked = async (query: string): Promise<StationPlaces> => {
+    const { body } = await person
+      .get(`/api/editions/${editionId}/stations/places?${query}`)
+      .expect(200);
+    return stationPlaces.parse(body);
+  };
+
+  it('gives the strongest first, by power without a site, and says how many have no place', async () => {
+    const { items, total, withoutPlace } = await placesAsked('');
+
+    expect(items.map(({ name }) => name)).toEqual(['Brook', 'Vale', 'Abbey', 'Éclair', 'Dune']);
+    expect(items[0]).toMatchObject({ powerDayW: 200_000, onRaster: true, fieldDb: null });
+    expect({ total, withoutPlace }).toEqual({ total: 6, withoutPlace: 1 });
+  });
+
+  it('at a site gives the fields and distances that the list gives', async () => {
+    const listed = new Map((await asked(`site=${site}&period=day`)).map((each) => [each.id, each]));
+
+    const { items } = await placesAsked(`site=${site}&period=day`);
+
+    expect(items).toHaveLength(5);
+    for (const { id, fieldDb, distanceM } of items) {
+      const each = listed.get(id);
+      expect(fieldDb ?? -999).toBeCloseTo(each?.fieldDb ?? -999, 1);
+      expect(distanceM ?? -999).toBeCloseTo(each?.distanceM ?? -999, -2);
+    }
+  });
+
+  it('takes the filter of the list', async () => {
+    const { items } = await placesAsked(`site=${site}&maxDistanceM=20000&fromHz=910000`);
+
+    expect(items.map(({ name }) => name)).toEqual(['Dune']);
+    await person.get(`/api/editions/${editionId}/stations/places?maxDistanceM=20000`).expect(400);
+  });
+});
+
+describe('GET /api/editions/:id/stations/:stationId', () => {
+  it('says of one station what the list says of it', async () => {
+    const [first] = await asked(`site=${site}&search=abbey`);
+
+    const { body } = await person
+      .get(`/api/editions/${editionId}/stations/${first?.id}?site=${site}`)
+      .expect(200);
+
+    expect(listedStation.parse(body)).toEqual(first);
+    await person.get(`/api/editions/${editionId}/stations/999999`).expect(404);
+  });
+
+  it('keeps the imported values of a changed one beside the corrected', async () => {
+    const { body: edition } = await person.get(`/api/editions/${editionId}`).expect(200);
+    const [dune] = await asked('search=dune');
+    const fields = { powerDayW: 2000, powerNightW: 500 };
+    const { body: made } = await person
+      .post(`/api/regions/${edition.regionId}/corrections`, {
+        kind: 'changed',
+        stationId: dune?.id,
+        fields,
+      })
+      .expect(201);
+
+    const { body } = await person.get(`/api/editions/${editionId}/stations/${dune?.id}`);
+    const [listed] = await asked('search=dune');
+    await person.delete(`/api/regions/${edition.regionId}/corrections/${made.id}`).expect(204);
+
+    expect(body).toMatchObject({ ...fields, official: { powerDayW: null, powerNightW: null } });
+    expect(listed?.official).toMatchObject({ name: 'Dune', powerDayW: null });
   });
 });

@@ -1,7 +1,14 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 
-import { pathBearing, pathLength, pathMiddle, sunTimes } from './path.ts';
+import {
+  pathBearing,
+  pathLength,
+  pathMiddle,
+  subsolarPoint,
+  sunAltitude,
+  sunTimes,
+} from './path.ts';
 
 const anyPlace = fc.record({
   latitude: fc.double({ min: -90, max: 90, noNaN: true }),
@@ -134,5 +141,43 @@ describe('pathBearing', () => {
       }),
     );
     expect(() => pathBearing({ latitude: 91, longitude: 0 }, origin)).toThrow(RangeError);
+  });
+});
+
+describe('subsolarPoint', () => {
+  // From memory of almanacs, not re-read: equinox and solstices of 2026; the equation of time is
+  // +16.4 minutes at the beginning of November and -14.2 minutes in the middle of February.
+  it.each([
+    ['2026-03-20T14:46:00Z', 0],
+    ['2026-06-21T08:25:00Z', 23.44],
+    ['2026-12-21T20:50:00Z', -23.44],
+  ])('lies on %s at latitude %d', (at, latitude) => {
+    expect(subsolarPoint(new Date(at)).latitude).toBeCloseTo(latitude, 1);
+  });
+
+  it.each([
+    ['2026-11-03T12:00:00Z', -16.4 / 4],
+    ['2026-02-11T12:00:00Z', 14.2 / 4],
+    ['2026-11-03T00:00:00Z', 180 - 16.4 / 4],
+  ])('lies on %s at longitude %d', (at, longitude) => {
+    expect(subsolarPoint(new Date(at)).longitude).toBeCloseTo(longitude, 1);
+  });
+
+  it('has the sun overhead at any moment, and moves on westward', () => {
+    const first = Date.UTC(2000, 0, 1);
+    fc.assert(
+      fc.property(fc.integer({ min: 0, max: 36_525 * 24 * 60 }), (minutes) => {
+        const at = new Date(first + minutes * 60_000);
+        const place = subsolarPoint(at);
+        const later = subsolarPoint(new Date(at.getTime() + 60_000));
+
+        expect(sunAltitude(place, at)).toBeGreaterThan(89.95);
+        expect((place.longitude - later.longitude + 360) % 360).toBeCloseTo(0.25, 2);
+      }),
+    );
+  });
+
+  it('refuses what is no moment', () => {
+    expect(() => subsolarPoint(new Date(NaN))).toThrow(RangeError);
   });
 });

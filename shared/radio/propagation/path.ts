@@ -119,6 +119,39 @@ export function sunTimes(place: Place, date: Date): SunTimes {
 export const sunAltitude = ({ latitude, longitude }: Place, at: Date): number =>
   getPosition(at, latitude, longitude).altitude;
 
+/**
+ * The place where the sun stands overhead.
+ *
+ * The sun's direction at a place on the equator from which it is up gives the place to a degree,
+ * refraction being what is left; seen from there, the sun is so high that refraction is nothing.
+ * Within 0.02 degree.
+ *
+ * @param at The moment.
+ * @returns The place; its latitude is the sun's declination.
+ * @throws {RangeError} If the moment is no valid date.
+ * @example
+ *   subsolarPoint(new Date('2026-06-21T12:00:00Z')).latitude; // 23.44
+ */
+export function subsolarPoint(at: Date): Place {
+  if (Number.isNaN(at.getTime())) throw new RangeError('time: not a valid date');
+  const isUp = getPosition(at, 0, 0).altitude > 0;
+  return towardsSun(towardsSun({ latitude: 0, longitude: isUp ? 0 : 180 }, at), at);
+}
+
+/** Where the sun is overhead, by its altitude and azimuth at a place, on a sphere. */
+function towardsSun({ latitude, longitude }: Place, at: Date): Place {
+  const { altitude, azimuth } = getPosition(at, latitude, longitude);
+  const [up, level] = [Math.sin(altitude * DEGREE), Math.cos(altitude * DEGREE)];
+  const north = level * Math.cos(azimuth * DEGREE);
+  const east = level * Math.sin(azimuth * DEGREE);
+  const [across, high] = [Math.cos(latitude * DEGREE), Math.sin(latitude * DEGREE)];
+  const turned = longitude + Math.atan2(east, up * across - north * high) / DEGREE;
+  return {
+    latitude: Math.asin(up * high + north * across) / DEGREE,
+    longitude: ((((turned + 180) % 360) + 360) % 360) - 180,
+  };
+}
+
 function direction({ latitude, longitude }: Place): [number, number, number] {
   const across = Math.cos(latitude * DEGREE);
   return [
