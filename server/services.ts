@@ -84,60 +84,58 @@ const KEPT_DIFFERENCES = 400_000;
 
 /** Builds every service and hands each the others it needs. */
 export function createServices(database: Sequelize, config: Config, log: Logger) {
-  const passwords = new Passwords();
-  const workshops = new Workshops(database);
-  const accounts = new Accounts(database, passwords, workshops);
-  const sessions = new Sessions(database, config, accounts, workshops);
+  const people = peopleOf(database, config);
+  const { accounts, workshops } = people;
   const regions = new Regions(database);
-  const { editions, corrections, stations, lists } = editionsOf(database, {
+  const { lists, ...edited } = editionsOf(database, {
     regions,
     people: accounts,
     writer: new EditionWriter(database),
   });
-  const engine = new Engine();
-  const assessments = new Assessments(lists, engine);
+  const computing = computingOf(lists);
   const receivers = new Receivers(database, accounts);
-  const sites = new Sites(database);
-  const views = editionViews(database, {
-    editions,
-    stations,
-    lists,
-    receivers,
-    sites,
-    engine,
-    people: accounts,
-  });
+  const kept = { receivers, sites: new Sites(database), people: accounts };
+  const { editions, stations } = edited;
   return {
     idempotency: new Idempotency(database),
     limits: new Limits(database, config),
-    passwords,
-    accounts,
-    workshops,
-    members: new Members(accounts),
-    sessions,
-    door: new SessionDoor(sessions, config),
+    ...people,
     receivers,
-    sites,
+    sites: kept.sites,
     regions,
-    editions,
-    corrections,
-    stations,
-    ...views,
+    ...edited,
+    ...editionViews(database, { editions, stations, lists, engine: computing.engine, ...kept }),
     ...createImports(database, config, log, regions),
+    ...computing,
+    plans: new Plans(database, new PlanShares(database), {
+      editions,
+      stations,
+      assessments: computing.assessments,
+      workshops,
+      ...kept,
+    }),
+  };
+}
+
+/** Who works here, and how they come in. */
+function peopleOf(database: Sequelize, config: Config) {
+  const passwords = new Passwords();
+  const workshops = new Workshops(database);
+  const accounts = new Accounts(database, passwords, workshops);
+  const sessions = new Sessions(database, config, accounts, workshops);
+  const door = new SessionDoor(sessions, config);
+  return { passwords, workshops, accounts, members: new Members(accounts), sessions, door };
+}
+
+/** The engine, and what it computes over a list at a site. */
+function computingOf(lists: ListsAtSites) {
+  const engine = new Engine();
+  return {
+    engine,
+    assessments: new Assessments(lists, engine),
     fieldStrengths: new FieldStrengths(lists, engine),
     cures: new Cures(lists, engine),
     whistles: new Whistles(lists, engine),
-    engine,
-    assessments,
-    plans: new Plans(database, new PlanShares(database), {
-      receivers,
-      sites,
-      editions,
-      stations,
-      assessments,
-      workshops,
-      people: accounts,
-    }),
   };
 }
 
