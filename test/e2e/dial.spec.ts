@@ -51,7 +51,7 @@ describe('finding out what is heard on a dial', () => {
   it('goes from section to section with site, list and time, and back', async () => {
     await expect.poll(() => query().get('site')).not.toBeNull();
     const chosen = query().toString();
-    await page.getByRole('link', { name: 'Dial', exact: true }).click();
+    await page.getByRole('tab', { name: 'Dial', exact: true }).click();
     await page.getByRole('heading', { name: 'What is heard, and why' }).waitFor();
 
     expect(new URL(page.url()).pathname).toMatch(/^\/receivers\/\d+\/dial$/);
@@ -124,13 +124,13 @@ describe('finding out what is heard on a dial', () => {
   });
 
   it('filters by what the address says', async () => {
-    await page.getByRole('option', { name: /^image \d+/ }).click();
+    await page.getByRole('option', { name: /^IF breakthrough \d+/ }).click();
 
-    await expect.poll(() => query().get('cause')).toBe('image');
+    await expect.poll(() => query().get('cause')).toBe('breakthrough');
     const causes = page.locator('app-response-table tbody td:nth-of-type(3)');
     await expect
       .poll(async () => new Set((await causes.allInnerTexts()).map((text) => text.trim())))
-      .toEqual(new Set(['image']));
+      .toEqual(new Set(['IF breakthrough']));
     await page.getByRole('button', { name: 'Show all', exact: true }).click();
     await expect.poll(() => query().get('cause')).toBeNull();
   });
