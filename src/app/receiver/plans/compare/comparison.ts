@@ -81,7 +81,7 @@ function ofVerdict([first, second]: Plans, period: Period): ComparedTerm[] {
   return [
     term($localize`Stations heard well`, [from.usable, to.usable], true, String),
     term($localize`Stations harmed`, [from.harmed.length, to.harmed.length], false, String),
-    term($localize`Missing to clean reception, dB`, [from.deficitDb, to.deficitDb], false, tenths),
+    term($localize`Missing in this period, dB`, [from.deficitDb, to.deficitDb], false, tenths),
     term(
       $localize`Loudest on an empty dial, dB over the noise`,
       [from.emptyDial?.overNoiseDb ?? 0, to.emptyDial?.overNoiseDb ?? 0],
