@@ -70,7 +70,7 @@ describe('finding out what is heard on a dial', () => {
     for (let step = 0; step < 400 && !/Heard as: image/.test(await said()); step++) {
       await page.keyboard.press('ArrowRight');
     }
-    expect(await said()).toMatch(/at dial [\d.]+ kHz.*Heard as: image/);
+    expect(await said()).toMatch(/at dial [\d.]+.kHz.*Heard as: image/);
 
     await page.keyboard.press('Enter');
     await working().waitFor();
@@ -107,12 +107,12 @@ describe('finding out what is heard on a dial', () => {
     await field.fill('1,0 MHz');
     await field.press('Enter');
     await expect.poll(() => query().get('dial')).toBe('1000000');
-    await page.getByText(/^At 1000 kHz /).waitFor();
+    await page.getByText(/^At 1000.kHz /).waitFor();
 
     const pointer = page.getByRole('slider', { name: /^Pointer of the dial/ }).first();
     await pointer.press('ArrowRight');
     await expect.poll(() => query().get('dial')).toBe('1001000');
-    await page.getByText(/^At 1001 kHz /).waitFor();
+    await page.getByText(/^At 1001.kHz /).waitFor();
 
     const flag = await pointer.locator('.flag').boundingBox();
     if (!flag) throw new Error('The pointer is not shown.');
@@ -179,7 +179,7 @@ describe('finding out what is heard on a dial', () => {
     await visitor.getByRole('combobox', { name: 'Where' }).click();
     await visitor.getByRole('option', { name: /Region 1/ }).click();
 
-    await visitor.getByRole('heading', { name: /^The dial with an IF of 465 kHz/ }).waitFor();
+    await visitor.getByRole('heading', { name: /^The dial with an IF of 465.kHz/ }).waitFor();
     const answers = await visitor.getByRole('status').allInnerTexts();
     expect(answers.join(' ')).toMatch(/465/);
     await visitor.getByRole('application', { name: /kHz/ }).first().waitFor();

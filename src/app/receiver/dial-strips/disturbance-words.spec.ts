@@ -16,7 +16,7 @@ describe('what the oscillator may disturb', () => {
     ];
 
     expect(disturbanceSentence(range, stations, () => 16)).toBe(
-      'The oscillator runs on 1005 kHz to 2055 kHz and radiates there. Near by it may whistle on 2 stations that are heard well here, of which Birch on 1500 kHz is the strongest.',
+      'The oscillator runs on 1005\u00a0kHz to 2055\u00a0kHz and radiates there. Near by it may whistle on 2 stations that are heard well here, of which Birch on 1500\u00a0kHz is the strongest.',
     );
   });
 

@@ -11,11 +11,11 @@ describe('the ledger in words', () => {
     ];
 
     expect(ledgerLines({ ledger }).map(({ label, value }) => `${label}: ${value}`)).toEqual([
-      'Field of the station at the aerial: 90.0 dB(µV/m)',
+      'Field of the station at the aerial, E: 90.0 dB(µV/m)',
       'Signal circuit 1: −44.4 dB',
-      'Interference: 45.6 dB(µV/m)',
+      'Interference, I: 45.6 dB(µV/m)',
       'Wanted to unwanted: 0.4 dB',
-      'The band itself, in any set: –',
+      'The band itself, in any set, B: –',
     ]);
   });
 

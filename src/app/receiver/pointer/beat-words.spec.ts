@@ -29,9 +29,9 @@ const nameOf = (id: number) => (id === 3 ? 'Alder' : 'Birch');
 describe('beats in words', () => {
   it('name the cause and where it comes from', () => {
     expect(beatCause(image)).toBe('image');
-    expect(beatOrigin(image, nameOf)).toBe('Alder on 1521 kHz');
+    expect(beatOrigin(image, nameOf)).toBe('Alder on 1521\u00a0kHz');
     expect(beatCause(own)).toBe('harmonic of the IF');
-    expect(beatOrigin(own, nameOf)).toBe('the set itself, on 1521 kHz');
+    expect(beatOrigin(own, nameOf)).toBe('the set itself, on 1521\u00a0kHz');
     expect(beatOrigin({ ...image, secondStation: 5 }, nameOf)).toBe('Alder with Birch');
   });
 
@@ -55,7 +55,7 @@ describe('beats in words', () => {
     const answer = { wanted, noiseDb: 16.4, skipped: [], causes: [own, image] };
 
     expect(pointerSentence(answer, 612_000, nameOf)).toBe(
-      'At 612 kHz the set hears Birch, 44 dB over the noise. Strongest beside it: Alder on 1521 kHz (image), 1000 Hz, plain, −14.3 dB to the programme.',
+      'At 612\u00a0kHz the set hears Birch, 44 dB over the noise. Strongest beside it: Alder on 1521\u00a0kHz (image), 1000 Hz, plain, −14.3 dB to the programme.',
     );
     expect(
       pointerSentence(

@@ -25,7 +25,7 @@ describe('causes of a whistle in words', () => {
 
     expect(first).toMatchObject({
       cause: 'image',
-      origin: 'Alder on 1521 kHz',
+      origin: 'Alder on 1521\u00a0kHz',
       pitch: '1000 Hz',
       slope: 'moves 2 Hz a hertz of dial',
       strength: 'level not known',
