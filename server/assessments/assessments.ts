@@ -45,8 +45,8 @@ export class Assessments {
     signal?: AbortSignal,
   ): Promise<Computed<BreakthroughHours>> {
     const list = await this.lists.find(actor, request);
-    const { receiver, date } = request;
-    const task = { list, receiver, times: momentsOf(date, list.columns.count) };
+    const { receiver, date, skyWave } = request;
+    const task = { list, receiver, skyWave, times: momentsOf(date, list.columns.count) };
     return this.engine.run('breakthroughHours', task, { signal, isVisitor: !actor });
   }
 

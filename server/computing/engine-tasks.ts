@@ -80,7 +80,7 @@ export interface Tasks {
       readonly list: ListAtSite;
       readonly receiver: AssessmentInput['receiver'];
       readonly times: readonly Date[];
-      readonly skyWave?: SkyWaveChoice | undefined;
+      readonly skyWave: SkyWaveChoice;
     };
     answers: BreakthroughHours;
   };

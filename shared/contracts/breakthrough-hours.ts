@@ -3,6 +3,7 @@ import * as z from 'zod';
 import { grade } from './assessment.ts';
 import { receiverDraft } from './receiver.ts';
 import { site } from './site.ts';
+import { skyWaveChoice } from './sky-wave.ts';
 import { hasOneSource, oneSourceIssue, stationSourceFields } from './station.ts';
 
 /** A receiver at a site through one day, 0 to 24 hours UTC. */
@@ -11,6 +12,7 @@ export const breakthroughHoursRequest = z
     receiver: receiverDraft,
     site,
     ...stationSourceFields,
+    skyWave: skyWaveChoice,
     date: z.iso
       .date({ abort: true, error: 'Give a date, like 2026-12-21.' })
       .refine((text) => text >= '1900' && text < '2101', 'Give a year from 1900 to 2100.'),

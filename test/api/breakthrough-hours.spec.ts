@@ -44,6 +44,24 @@ describe('POST /api/breakthrough-hours', () => {
     expect(rises.map((at) => at.slice(0, 12))).toEqual(['2026-03-20T1']);
   });
 
+  it('computes the sky wave that is asked for: more in 10 % of the nights, and by either form', async () => {
+    const atMidnight = async (skyWave: object | undefined) => {
+      const { body } = await visitor
+        .post('/api/breakthrough-hours', asked({ skyWave }))
+        .expect(200);
+      return breakthroughHoursAnswer.parse(body).hours[0]?.breakthrough?.levelDb ?? NaN;
+    };
+    const [usual, said, tenth, other] = await Promise.all(
+      [undefined, { nights: 50 }, { nights: 10 }, { form: 'itu-r-p1147' }].map(atMidnight),
+    );
+
+    expect(said).toBe(usual);
+    // 0.2 |geomagnetic latitude| - 2, some 56 degrees here; a little less, the ground wave added.
+    expect((tenth ?? NaN) - (usual ?? NaN)).toBeCloseTo(9, 0);
+    expect(other).not.toBeCloseTo(usual ?? NaN, 1);
+    expect(other).toBeGreaterThan((usual ?? NaN) - 4);
+  });
+
   it('computes with an edition of one’s own, and hides that of others', async () => {
     const librarian = await server.newcomer();
     const editionId = await importList(librarian, await addRegion(librarian), cleanList(50));
@@ -64,6 +82,8 @@ describe('POST /api/breakthrough-hours', () => {
     ['date', { date: '9999-01-01' }],
     ['date', { date: '2026-03-20T00:00:00Z' }],
     ['stations', { stations: undefined }],
+    ['skyWave.nights', { skyWave: { nights: 20 } }],
+    ['skyWave.form', { skyWave: { form: 'other' } }],
     ['site.latitude', { site: { ...SITE, latitude: null } }],
   ])('names %s when it is wrong', async (path, change) => {
     const { body } = await visitor.post('/api/breakthrough-hours', asked(change)).expect(400);

@@ -106,7 +106,7 @@ function judgeOf(input: BreakthroughHoursInput): (fields: readonly FieldStrength
 }
 
 const sameFields = (one: readonly FieldStrength[], other: readonly FieldStrength[]): boolean =>
-  one.every(({ fieldDb }, index) => fieldDb === other[index]?.fieldDb);
+  one.every((field, index) => field === other[index]);
 
 function heardAt(worst: WorstOnBand | null): HeardAtHour | null {
   if (worst === null) return null;

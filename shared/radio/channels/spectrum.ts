@@ -122,10 +122,10 @@ interface Heard {
 
 /** A field that was given counts as received by ground wave. */
 function heardStations(stations: readonly Station[], fields: readonly FieldStrength[]): Heard {
-  const byId = new Map(fields.map((field) => [field.station, field]));
+  const fieldOf = lookUp(fields);
   const heard: Heard = { ids: [], hz: [], fieldDb: [], groundDb: [], given: [], distanceM: [] };
-  for (const { id, frequencyHz, fieldDb: given } of stations) {
-    const field = byId.get(id);
+  for (const [place, { id, frequencyHz, fieldDb: given }] of stations.entries()) {
+    const field = fieldOf(id, place);
     const fieldDb = given ?? field?.fieldDb ?? null;
     if (fieldDb === null) continue;
     heard.ids.push(id);
@@ -136,6 +136,19 @@ function heardStations(stations: readonly Station[], fields: readonly FieldStren
     heard.distanceM.push(field?.distanceM ?? null);
   }
   return heard;
+}
+
+/** Finds a station's field: as a rule at its own place, else by number. */
+function lookUp(
+  fields: readonly FieldStrength[],
+): (id: number, place: number) => FieldStrength | undefined {
+  let byId: Map<number, FieldStrength> | undefined;
+  return (id, place) => {
+    const here = fields[place];
+    if (here?.station === id) return here;
+    byId ??= new Map(fields.map((field) => [field.station, field]));
+    return byId.get(id);
+  };
 }
 
 /** Places in the list by frequency, then strongest first, then by number. */

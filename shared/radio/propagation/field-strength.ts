@@ -98,7 +98,7 @@ export class FieldsAtSite {
   private readonly stations: readonly Station[];
   private readonly choice: SkyWaveChoice;
   private readonly choiceNotes: readonly string[];
-  private paths: readonly (StationPath | null)[] | undefined;
+  private followed: readonly Followed[] | undefined;
 
   /** Takes what `fieldStrengths` takes, and throws what it throws. */
   constructor(site: Site, stations: readonly Station[], choice: SkyWaveChoice = USUAL_SKY_WAVE) {
@@ -109,10 +109,21 @@ export class FieldsAtSite {
     this.choiceNotes = notesOnChoice(choice);
   }
 
-  /** The fields at a time, as `fieldStrengths` gives them; the paths are kept for other times. */
+  /** The fields at a time, as `fieldStrengths` gives them; a field is the same one until it changes. */
   at(time: ReceptionTime): FieldStrength[] {
-    const paths = (this.paths ??= this.stations.map((station) => this.pathFrom(station)));
-    return this.stations.map((station, index) => this.of(station, time, paths[index] ?? null));
+    this.followed ??= this.stations.map((station) => ({ station, path: this.pathFrom(station) }));
+    return this.followed.map((followed) => this.follow(followed, time));
+  }
+
+  /** Power and what is left of the sky wave are all that changes with time. */
+  private follow(followed: Followed, time: ReceptionTime): FieldStrength {
+    const { station, path, field } = followed;
+    const power = powerOf(station, path, time);
+    const fade = path && hasSkyWave(station.frequencyHz) ? path.skyFade(time) : null;
+    if (field && power === followed.power && fade === followed.fade) return field;
+    followed.power = power;
+    followed.fade = fade;
+    return (followed.field = this.of(station, time, path));
   }
 
   /** The field of one station at a time. */
@@ -147,11 +158,23 @@ export class FieldsAtSite {
   /** Ground wave of 1 kW; null where a place or the ground is not known. */
   private groundWave(station: Station, path: StationPath | null): Decibels | null {
     if (!path) return null;
-    const { frequencyHz } = station;
-    if (station.path) return this.groundWaves.fieldOver(station.path, frequencyHz, path.distance);
-    if (this.ground === null) return null;
-    return this.groundWaves.field(this.ground, frequencyHz, path.distance);
+    const { frequencyHz, path: sections } = station;
+    const { ground, groundWaves } = this;
+    if (sections) {
+      return path.groundWave((length) => groundWaves.fieldOver(sections, frequencyHz, length));
+    }
+    if (ground === null) return null;
+    return path.groundWave((length) => groundWaves.field(ground, frequencyHz, length));
   }
+}
+
+/** A station through several times, with the field last worked out and what it came of. */
+interface Followed {
+  readonly station: Station;
+  readonly path: StationPath | null;
+  power?: number | null;
+  fade?: number | null;
+  field?: FieldStrength;
 }
 
 /** A field that was given, or none. */

@@ -1,14 +1,8 @@
 import fc from 'fast-check';
+import { getPosition } from 'suncalc';
 import { describe, expect, it } from 'vitest';
 
-import {
-  pathBearing,
-  pathLength,
-  pathMiddle,
-  subsolarPoint,
-  sunAltitude,
-  sunTimes,
-} from './path.ts';
+import { pathBearing, pathLength, pathMiddle, subsolarPoint, sunHeight, sunTimes } from './path.ts';
 
 const anyPlace = fc.record({
   latitude: fc.double({ min: -90, max: 90, noNaN: true }),
@@ -171,7 +165,7 @@ describe('subsolarPoint', () => {
         const place = subsolarPoint(at);
         const later = subsolarPoint(new Date(at.getTime() + 60_000));
 
-        expect(sunAltitude(place, at)).toBeGreaterThan(89.95);
+        expect(getPosition(at, place.latitude, place.longitude).altitude).toBeGreaterThan(89.95);
         expect((place.longitude - later.longitude + 360) % 360).toBeCloseTo(0.25, 2);
       }),
     );
@@ -179,5 +173,27 @@ describe('subsolarPoint', () => {
 
   it('refuses what is no moment', () => {
     expect(() => subsolarPoint(new Date(NaN))).toThrow(RangeError);
+  });
+});
+
+describe('sunHeight', () => {
+  it('is the altitude of suncalc above the refraction of the air, at any place and moment', () => {
+    const first = Date.UTC(2000, 0, 1);
+    fc.assert(
+      fc.property(anyPlace, fc.integer({ min: 0, max: 36_525 * 24 * 60 }), (place, minutes) => {
+        const at = new Date(first + minutes * 60_000);
+        const { altitude } = getPosition(at, place.latitude, place.longitude);
+
+        // From 10 degrees up, refraction is less than 0.1 degree; it only ever lifts the sun.
+        const height = sunHeight(place, at);
+        expect(height).toBeLessThan(altitude + 0.03);
+        if (altitude > 10) expect(height).toBeGreaterThan(altitude - 0.13);
+        else expect(height).toBeGreaterThan(altitude - 0.6);
+      }),
+    );
+  });
+
+  it('refuses what is no moment', () => {
+    expect(() => sunHeight({ latitude: 0, longitude: 0 }, new Date(NaN))).toThrow(RangeError);
   });
 });

@@ -108,18 +108,6 @@ export function sunTimes(place: Place, date: Date): SunTimes {
 }
 
 /**
- * Altitude of the middle of the sun's disc above the horizon, refraction counted in.
- *
- * @param place The place.
- * @param at The moment.
- * @returns Altitude, degrees; negative below the horizon.
- * @example
- *   sunAltitude({ latitude: 0, longitude: 0 }, new Date('2026-03-20T12:07:00Z')); // 89.9
- */
-export const sunAltitude = ({ latitude, longitude }: Place, at: Date): number =>
-  getPosition(at, latitude, longitude).altitude;
-
-/**
  * The place where the sun stands overhead.
  *
  * The sun's direction at a place on the equator from which it is up gives the place to a degree,
@@ -137,6 +125,31 @@ export function subsolarPoint(at: Date): Place {
   const isUp = getPosition(at, 0, 0).altitude > 0;
   return towardsSun(towardsSun({ latitude: 0, longitude: isUp ? 0 : 180 }, at), at);
 }
+
+/**
+ * Height of the middle of the sun's disc above the horizon, without refraction. Cheap for many
+ * places at one moment: the sun's own place is worked out but once.
+ *
+ *     sin h = sin a sin d + cos a cos d cos(b - s),  the sun overhead at latitude d, longitude s
+ *
+ * @param place The place.
+ * @param at The moment.
+ * @returns Height, degrees, within 0.02; negative below the horizon.
+ * @throws {RangeError} If the moment is no valid date.
+ * @example
+ *   sunHeight({ latitude: 0, longitude: 0 }, new Date('2026-03-20T12:07:00Z')); // 89.9
+ */
+export function sunHeight({ latitude, longitude }: Place, at: Date): number {
+  const time = at.getTime();
+  if (overhead.time !== time) overhead = { time, ...subsolarPoint(at) };
+  const [a, d] = [latitude * DEGREE, overhead.latitude * DEGREE];
+  const turned = Math.cos((longitude - overhead.longitude) * DEGREE);
+  const sine = Math.sin(a) * Math.sin(d) + Math.cos(a) * Math.cos(d) * turned;
+  return Math.asin(Math.max(-1, Math.min(1, sine))) / DEGREE;
+}
+
+/** The sun's place at the moment last asked about. */
+let overhead = { time: NaN, latitude: 0, longitude: 0 };
 
 /** Where the sun is overhead, by its altitude and azimuth at a place, on a sphere. */
 function towardsSun({ latitude, longitude }: Place, at: Date): Place {

@@ -60,6 +60,7 @@ export class StationPath {
   private middlePlace: Place | undefined;
   private magnetic: number | undefined;
   private nightSky: Decibels | undefined;
+  private ground: Decibels | undefined;
   private sunAtStation: Sunlight | undefined;
   private sunAtMiddle: Sunlight | undefined;
 
@@ -84,6 +85,11 @@ export class StationPath {
   /** Bearing of the site from the station, degrees from north. */
   get bearing(): number {
     return (this.towards ??= pathBearing(this.from, this.to));
+  }
+
+  /** Ground wave of 1 kW, dB(uV/m): the same at any time, so worked out by the first who asks. */
+  groundWave(workOut: (distance: Metres) => Decibels): Decibels {
+    return (this.ground ??= workOut(this.distance));
   }
 
   /** Sky wave of 1 kW at a time, dB(uV/m); null when there is none. */

@@ -5,7 +5,7 @@
  *
  * @module radio/propagation/sunlight
  */
-import { type Place, sunAltitude, sunTimes } from './path.ts';
+import { type Place, sunHeight, sunTimes } from './path.ts';
 import type { Period } from '../site.ts';
 import { CRITICAL_HOURS } from './sky-wave.ts';
 
@@ -14,7 +14,7 @@ const DAY_MS = 24 * HOUR_MS;
 const DEGREE = Math.PI / 180;
 
 /** Below this altitude, degrees, the sun is down at any place, its disc and refraction allowed for. */
-const SURELY_DOWN = -1.5;
+const SURELY_DOWN = -2;
 /** Above this one it is up; the disc, refraction and the times' 2 minutes come to far less. */
 const SURELY_UP = 1.5;
 /** It climbs by less than this in the critical hours at the equator, by the cosine of it elsewhere. */
@@ -59,7 +59,7 @@ export class Sunlight {
     if (Number.isNaN(at.getTime())) throw new RangeError('time: not a valid date');
     const time = at.getTime();
     if (this.known && isOnDay(this.known, time)) return hoursOnDay(this.known, time);
-    const altitude = sunAltitude(this.place, at);
+    const altitude = sunHeight(this.place, at);
     if (altitude < SURELY_DOWN) return 0;
     if (altitude > SURELY_UP + CLIMB * Math.cos(this.place.latitude * DEGREE)) return Infinity;
     return this.hoursByEvents(at);
@@ -75,7 +75,7 @@ export class Sunlight {
    *   new Sunlight({ latitude: 0, longitude: 0 }).isUp(new Date('2026-03-20T12:00:00Z')); // true
    */
   isUp(at: Date): boolean {
-    if (!this.known && sunAltitude(this.place, at) > SURELY_UP) return true;
+    if (!this.known && sunHeight(this.place, at) > SURELY_UP) return true;
     return this.hours(at) > 0;
   }
 
