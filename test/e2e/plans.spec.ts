@@ -14,6 +14,7 @@ import {
 
 const RECEIVER = 'Fennimore 12-valve communications receiver, IF 560';
 const GUARDED = 'Into the guard band';
+const SCREENED = 'Better screened';
 const AS_IT_IS = 'Left where it is';
 const NARROW: Screen = { width: 320, height: 800, scheme: 'light' };
 const SCREENS = [
@@ -88,8 +89,42 @@ describe('plans', () => {
     expect(await page.getByText('a station', { exact: true }).count()).toBe(0);
   });
 
+  it('come from a set-up on trial as well: undone, redone, reloaded, kept and dropped', async () => {
+    await page.getByRole('link', { name: 'Put on trial again' }).click();
+    await page.getByRole('tab', { name: 'Set-up on trial' }).click();
+    addresses.set('trial', page.url());
+    const stray = page.getByRole('textbox', { name: 'stray pick-up, at the IF' });
+    const saved = await stray.inputValue();
+    const changed = page.getByText(/On trial, not saved: 1 field/);
+
+    await stray.fill('91 dB');
+    await stray.press('Enter');
+    await changed.waitFor();
+    await page.getByRole('heading', { name: 'The set-up on trial' }).click();
+    await page.keyboard.press('Control+z');
+    await expect.poll(() => stray.inputValue()).toBe(saved);
+    await page.getByRole('button', { name: 'Redo' }).click();
+    await expect.poll(() => stray.inputValue()).toBe('91');
+    await page.reload();
+    await expect.poll(() => stray.inputValue()).toBe('91');
+    addresses.set('trial', page.url());
+
+    await page.getByRole('button', { name: 'Keep as a plan' }).click();
+    await page.getByLabel('Name of the plan').fill(SCREENED);
+    await page.getByRole('button', { name: 'Keep the plan' }).click();
+    await page.getByRole('link', { name: 'Open the plan' }).waitFor();
+    await page.getByRole('button', { name: 'Drop the trial' }).click();
+    await expect.poll(() => stray.inputValue()).toBe(saved);
+    await page.getByRole('link', { name: 'Open the plan' }).click();
+    await page.getByRole('heading', { name: 'Set-up on trial' }).waitFor();
+    expect(await page.getByRole('row', { name: /stray pick-up, at the IF/ }).innerText()).toContain(
+      '91',
+    );
+  });
+
   it('are compared: what got better, what worse, in words and marks', async () => {
     await page.getByRole('link', { name: 'All plans' }).click();
+    await page.getByRole('checkbox').first().waitFor();
     addresses.set('list', page.url());
     await page.getByRole('checkbox', { name: `Choose ${GUARDED} to compare` }).check();
     await page.getByRole('checkbox', { name: `Choose ${AS_IT_IS} to compare` }).check();
@@ -138,6 +173,7 @@ describe('plans', () => {
     await signIn(viewer, member());
     await look('plan', addresses.get('plan') ?? '', 'The dial');
     await look('plans', addresses.get('list') ?? '', GUARDED);
+    await look('set-up-trial', addresses.get('trial') ?? '', 'The set-up on trial');
     await look('plans-compared', addresses.get('comparison') ?? '', 'Every term');
     await viewer.context().close();
   });
