@@ -1,11 +1,5 @@
 import { ChangeDetectionStrategy, Component, computed, effect, inject } from '@angular/core';
-import {
-  type AbstractControl,
-  FormControl,
-  FormGroup,
-  ReactiveFormsModule,
-  type ValidationErrors,
-} from '@angular/forms';
+import { FormControl, FormGroup, ReactiveFormsModule, type ValidationErrors } from '@angular/forms';
 import { MatButtonModule } from '@angular/material/button';
 import { RouterLink } from '@angular/router';
 import * as z from 'zod';
@@ -51,7 +45,9 @@ export class WhistlePage {
   protected readonly pointer = inject(PointerStore);
 
   protected readonly form = new FormGroup({
-    dialHz: new FormControl<number | null>(null, (control) => this.outside(control)),
+    dialHz: new FormControl<number | null>(null, ({ value }) =>
+      this.outside(value as number | null),
+    ),
     pitchHz: new FormControl<number | null>(null),
     pitchSlope: new FormControl<number | null>(null),
   });
@@ -77,7 +73,7 @@ export class WhistlePage {
     await this.submission.send(this.form.getRawValue(), (valid) => this.pointer.ask(valid));
   }
 
-  private outside({ value }: AbstractControl<number | null>): ValidationErrors | null {
+  private outside(value: number | null): ValidationErrors | null {
     return value === null || this.pointer.isTuned(value)
       ? null
       : { problem: $localize`Give a frequency that a band of the set tunes.` };
