@@ -8,16 +8,23 @@ import { describe, expect, it } from 'vitest';
 import { assess, type Assessment } from '../../shared/radio/assessment/assessment.ts';
 import type { Response } from '../../shared/radio/assessment/response.ts';
 import { plainResponses, plainVerdict } from '../support/plain-assessment.ts';
-import { plainCase, receivers, sites, stationLists } from '../support/random-cases.ts';
+import {
+  crowdedLists,
+  plainCase,
+  receivers,
+  sites,
+  stationLists,
+} from '../support/random-cases.ts';
 
-const cases = fc.record({
-  receiver: receivers,
-  site: sites,
-  stations: stationLists,
-  period: fc.constantFrom('day' as const, 'night' as const),
-  maxM: fc.integer({ min: 0, max: 5 }),
-  maxN: fc.integer({ min: 1, max: 3 }),
-});
+const casesOf = (stations: typeof stationLists) =>
+  fc.record({
+    receiver: receivers,
+    site: sites,
+    stations,
+    period: fc.constantFrom('day' as const, 'night' as const),
+    maxM: fc.integer({ min: 0, max: 5 }),
+    maxN: fc.integer({ min: 1, max: 3 }),
+  });
 
 /** What identifies a response. */
 function key(
@@ -37,7 +44,10 @@ function answered(all: Assessment): Map<string, Response> {
   );
 }
 
-describe('assess', () => {
+describe.each([
+  ['a list all over the bands', casesOf(stationLists)],
+  ['several stations on each of a few frequencies', casesOf(crowdedLists)],
+])('assess with %s', (_, cases) => {
   it('answers what multiplying out every product answers', () => {
     fc.assert(
       fc.property(cases, (drawn) => {

@@ -99,24 +99,35 @@ const frequency = fc.oneof(
   fc.integer({ min: 100_000, max: 9_000_000 }),
 );
 
+const listOn = (drawn: fc.Arbitrary<number>): fc.Arbitrary<Station[]> =>
+  fc
+    .array(fc.record({ frequencyHz: drawn, fieldDb: fc.integer({ min: 0, max: 105 }) }), {
+      minLength: 1,
+      maxLength: 25,
+    })
+    .map((list) =>
+      list.map(({ frequencyHz, fieldDb }, id) => ({
+        id,
+        name: `station ${id}`,
+        frequencyHz,
+        latitude: null,
+        longitude: null,
+        powerDayW: null,
+        powerNightW: null,
+        fieldDb,
+      })),
+    );
+
 /** Stations whose fields are given. */
-export const stationLists: fc.Arbitrary<Station[]> = fc
-  .array(fc.record({ frequencyHz: frequency, fieldDb: fc.integer({ min: 0, max: 105 }) }), {
+export const stationLists: fc.Arbitrary<Station[]> = listOn(frequency);
+
+/** Several stations on each of a few frequencies, some of which lie within one IF's width. */
+export const crowdedLists: fc.Arbitrary<Station[]> = fc
+  .array(fc.record({ hz: frequency, offHz: fc.constantFrom(0, 1_000, 4_500, 9_000) }), {
     minLength: 1,
-    maxLength: 25,
+    maxLength: 4,
   })
-  .map((drawn) =>
-    drawn.map(({ frequencyHz, fieldDb }, id) => ({
-      id,
-      name: `station ${id}`,
-      frequencyHz,
-      latitude: null,
-      longitude: null,
-      powerDayW: null,
-      powerNightW: null,
-      fieldDb,
-    })),
-  );
+  .chain((few) => listOn(fc.constantFrom(...few.flatMap(({ hz, offHz }) => [hz, hz + offHz]))));
 
 interface Drawn {
   readonly receiver: Receiver;
