@@ -27,6 +27,14 @@ describe('groupFaults', () => {
     expect(groups).toHaveLength(2);
   });
 
+  it('counts what is not told one by one', () => {
+    const cause = { column: 'Lat', expected: 'degrees', count: 3000, lines: [2] };
+
+    const [group] = groupFaults([fault(2, 'Lat', 'degrees')], [cause]);
+
+    expect(group).toMatchObject({ count: 3000, faults: [{ line: 2 }] });
+  });
+
   it('makes nothing of nothing', () => {
     expect(groupFaults([])).toEqual([]);
   });

@@ -15,6 +15,7 @@ import {
 } from 'rxjs';
 
 import {
+  type ImportLayout,
   type ImportMatching,
   type ImportProposal,
   importProposal,
@@ -100,6 +101,12 @@ export class ImportStore {
       map(toUpload),
       filter((upload) => upload !== null),
     );
+  }
+
+  /** Takes the file apart otherwise; what it holds is proposed anew. */
+  async layOut(layout: ImportLayout): Promise<void> {
+    await firstValueFrom(this.http.put(`${this.address() ?? ''}/reading`, layout));
+    this.refresh();
   }
 
   /** Says how the list is to be read, and has it checked. */

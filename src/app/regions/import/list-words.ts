@@ -18,6 +18,7 @@ export const FIELDS: readonly { readonly value: ImportField; readonly words: str
   { value: 'powerNight', words: $localize`Power by night` },
   { value: 'hours', words: $localize`Hours of service` },
   { value: 'note', words: $localize`Note` },
+  { value: 'pattern', words: $localize`Pattern of the aerial, by bearing` },
 ];
 
 /** A unit as people read it. */
@@ -26,6 +27,8 @@ export const unitWords = (unit: ImportUnit): string => UNITS[unit] ?? unit;
 const UNITS: Readonly<Partial<Record<ImportUnit, string>>> = {
   degrees: $localize`degrees`,
   dms: $localize`degrees, minutes, seconds`,
+  dB: $localize`dB over the power`,
+  relative: $localize`field relative to the strongest, 0 to 1`,
 };
 
 /** What parts the cells of a row, in words. */
@@ -44,8 +47,18 @@ export function delimiterWords(delimiter: string): string {
   }
 }
 
-/** Headers of the columns whose unit has to be asked for. */
+/** The decimal mark, in words. */
+export const markWords = (mark: string): string =>
+  mark === ',' ? $localize`comma: 1,5` : $localize`point: 1.5`;
+
+/** Headers of the columns whose unit has to be asked for; of a pattern only the first. */
 export const openUnits = (columns: readonly ImportColumn[]): string[] =>
   columns
     .filter(({ field, unit }) => field !== null && unit === null && importUnitsOf[field].length > 0)
+    .filter(
+      (column, index, open) => index === open.findIndex((each) => isSameQuestion(each, column)),
+    )
     .map(({ header }) => header);
+
+const isSameQuestion = (a: ImportColumn, b: ImportColumn): boolean =>
+  a === b || (a.field === 'pattern' && b.field === 'pattern');

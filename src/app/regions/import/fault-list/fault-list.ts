@@ -1,7 +1,7 @@
 import { DecimalPipe } from '@angular/common';
 import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
 
-import type { ImportFault } from '../../../../../shared/contracts/list-import';
+import type { ImportCause, ImportFault } from '../../../../../shared/contracts/list-import';
 import { groupFaults } from '../fault-groups';
 
 /** Rows shown of one cause; the download has them all. */
@@ -17,12 +17,13 @@ const SHOWN = 50;
 })
 export class FaultList {
   readonly faults = input.required<readonly ImportFault[]>();
+  readonly causes = input<readonly ImportCause[]>([]);
 
   protected readonly groups = computed(() =>
-    groupFaults(this.faults()).map((group) => ({
+    groupFaults(this.faults(), this.causes()).map((group) => ({
       ...group,
       shown: group.faults.slice(0, SHOWN),
-      left: Math.max(0, group.faults.length - SHOWN),
+      left: group.count - Math.min(group.faults.length, SHOWN),
     })),
   );
 }

@@ -1,7 +1,8 @@
 import { ComponentHarness } from '@angular/cdk/testing';
 import { MatButtonHarness } from '@angular/material/button/testing';
-import { MatInputHarness } from '@angular/material/input/testing';
-import { MatNativeSelectHarness } from '@angular/material/input/testing';
+import { MatFormFieldHarness } from '@angular/material/form-field/testing';
+import { MatInputHarness, MatNativeSelectHarness } from '@angular/material/input/testing';
+import { MatRadioButtonHarness } from '@angular/material/radio/testing';
 import { MatStepperHarness } from '@angular/material/stepper/testing';
 
 /** The guided import as a person works with it. */
@@ -27,6 +28,18 @@ export class ImportPageHarness extends ComponentHarness {
   async choose(select: string, option: string): Promise<void> {
     const named = MatNativeSelectHarness.with({ selector: `[aria-label="${select}"]` });
     await (await this.locatorFor(named)()).selectOptions({ text: option });
+  }
+
+  async chooseLabelled(label: string, option: string): Promise<void> {
+    const fields = await this.locatorForAll(
+      MatFormFieldHarness.with({ floatingLabelText: label }),
+    )();
+    const select = await fields[0]?.getControl(MatNativeSelectHarness);
+    await select?.selectOptions({ text: option });
+  }
+
+  async pick(radio: string): Promise<void> {
+    await (await this.locatorFor(MatRadioButtonHarness.with({ label: radio }))()).check();
   }
 
   async type(label: string, text: string): Promise<void> {

@@ -25,6 +25,7 @@ const region = (editable: boolean) => ({
   name: 'Vale',
   ituRegion: 1,
   raster: [],
+  rasters: [],
   editable,
   editions: 0,
 });
@@ -34,6 +35,8 @@ class FakeImport {
   state = 'uploaded';
   label: string | null = null;
   columns: unknown = COLUMNS;
+  /** What else the proposal says. */
+  found: Record<string, unknown> = {};
 
   readonly server = new FakeServer()
     .on('GET /api/regions/1', () => region(true))
@@ -43,6 +46,10 @@ class FakeImport {
       this.label ??= 'vale';
       this.columns = MATCHED;
       return { rows: ROWS, faults: [FAULT] };
+    })
+    .on(`PUT ${IMPORT}/reading`, () => {
+      this.found = { ...this.found, encoding: 'ISO-8859-2', sample: [['612', 'F\u010de']] };
+      return this.answer().proposal;
     })
     .on(`POST ${IMPORT}/commit`, () => (this.state = 'committed'))
     .on(`DELETE ${IMPORT}`, () => {
@@ -58,6 +65,8 @@ class FakeImport {
       progress: 0,
       rows: isChecked ? ROWS : null,
       faults: this.state === 'ready' ? [FAULT] : [],
+      causes: isChecked ? [{ column: 'Freq', expected: FAULT.expected, count: 2, lines: [3] }] : [],
+      remarks: isChecked ? [{ message: 'Comments were passed over.', count: 1, lines: [9] }] : [],
       editionId: this.state === 'committed' ? 5 : null,
       reason: null,
       label: this.label,
@@ -71,6 +80,7 @@ class FakeImport {
         columns: this.columns,
         sample: [['612', 'Ferry Point']],
         complete: false,
+        ...this.found,
       },
     };
   }
@@ -116,12 +126,78 @@ describe('ImportPage', () => {
 
     await page.press('Check every row');
 
-    expect(list.server.sent(`PUT ${IMPORT}`)).toEqual([{ columns: MATCHED }]);
+    expect(list.server.sent(`PUT ${IMPORT}`)).toEqual([{ columns: MATCHED, addsTo: null }]);
     expect(await page.step()).toBe('Check');
     const text = await page.text();
     expect(text).toContain('3 of 5 rows can be stored; 2 are rejected.');
     expect(text).toContain('Freq: expected is a frequency in kHz');
     expect(text).toContain('6l2');
+    expect(text).toMatch(/Comments were passed over\.\s+Line 9\./);
+  });
+
+  it('takes the file apart as chosen, and the sample follows', async () => {
+    const { page, list } = await open('/regions/1/import/7');
+
+    await page.chooseLabelled('Encoding', 'ISO-8859-2');
+
+    expect(list.server.sent(`PUT ${IMPORT}/reading`).at(-1)).toEqual({ encoding: 'ISO-8859-2' });
+    expect(await page.text()).toContain('F\u010de');
+    expect(await page.text()).toContain('was read as ISO-8859-2');
+  });
+
+  it('says why a file cannot be read in the encoding that was chosen', async () => {
+    const list = new FakeImport();
+    list.server.on(`PUT ${IMPORT}/reading`, () =>
+      problemOf(400, 'Some values are not valid.', [
+        { path: 'encoding', message: 'The file is not UTF-8.' },
+      ]),
+    );
+    const { page } = await open('/regions/1/import/7', list);
+
+    await page.chooseLabelled('Encoding', 'UTF-8');
+
+    expect(await page.text()).toContain('The file is not UTF-8.');
+  });
+
+  it('asks what the letter O means where the file leaves it open', async () => {
+    const list = new FakeImport();
+    list.found = { letterO: 'open' };
+    const { page } = await open('/regions/1/import/7', list);
+
+    await page.chooseLabelled('The letter O beside a longitude means', 'East (German: Ost)');
+    await page.press('Check every row');
+
+    expect(list.server.sent(`PUT ${IMPORT}`)).toMatchObject([{ letterO: 'east' }]);
+  });
+
+  it('adds mended rows to their edition, unless one says they are the whole list', async () => {
+    const list = new FakeImport();
+    list.found = { completes: { editionId: 5, label: 'Spring' } };
+    const { page } = await open('/regions/1/import/7', list);
+    expect(await page.text()).toContain('They complete Spring');
+
+    await page.press('Check every row');
+    list.state = 'uploaded';
+    await page.goTo('Columns');
+    await page.pick('They are the whole list');
+    await page.press('Check every row');
+
+    expect(list.server.sent(`PUT ${IMPORT}`)).toMatchObject([{ addsTo: 5 }, { addsTo: null }]);
+  });
+
+  it('asks for the unit of a pattern once, for all its bearings', async () => {
+    const list = new FakeImport();
+    const bearings = ['az0', 'az90', 'az180', 'az270'];
+    list.columns = bearings.map((header) => ({ header, field: 'pattern', unit: null }));
+    const { page } = await open('/regions/1/import/7', list);
+    expect(await page.text()).toContain('and 3 more bearings');
+
+    await page.choose('Unit of az0', 'dB over the power');
+    await page.press('Check every row');
+
+    expect(list.server.sent(`PUT ${IMPORT}`)).toMatchObject([
+      { columns: bearings.map((header) => ({ header, field: 'pattern', unit: 'dB' })) },
+    ]);
   });
 
   it('stays with the columns when the server asks for something', async () => {

@@ -32,6 +32,14 @@ export class RowCounts {
       { words: $localize`as before`, value: rows.same },
       { words: $localize`said twice`, value: rows.duplicate },
       { words: $localize`rejected`, value: rows.rejected },
+      ...[
+        { words: $localize`kept from the edition`, value: rows.kept },
+        { words: $localize`gone since`, value: rows.gone },
+        { words: $localize`read with another row`, value: rows.merged },
+        { words: $localize`off the raster`, value: rows.offRaster },
+        { words: $localize`without place`, value: rows.withoutPlace },
+        { words: $localize`without power`, value: rows.withoutPower },
+      ].filter(({ value }) => value > 0),
     ];
   });
 }
