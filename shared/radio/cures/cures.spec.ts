@@ -86,6 +86,57 @@ describe('findCures', () => {
     expect(costDb).toBeCloseTo(trapLoss(trap?.trap ?? expect.fail(), 600_000), 9);
   });
 
+  it('costs nothing where it is judged by what a wanted station loses, but for a trap', () => {
+    const cures = curesOf(narrowOn(560_000), [
+      [560_000, 90],
+      [612_000, 80],
+    ]);
+
+    for (const { kind, costDb } of cures) {
+      if (kind === 'trap' || kind === 'move-if-and-trap') expect(costDb).toBeGreaterThan(0);
+      else expect(costDb).toBe(0);
+    }
+    // Felt at the lowest usable station, though channels lie below it.
+    const { trap, costDb } = only(cures, 'trap');
+    expect(costDb).toBeCloseTo(trapLoss(trap?.trap ?? expect.fail(), 612_000), 9);
+  });
+
+  it('gains in the three stations that an assessment finds worst, by the ratios it finds', () => {
+    const list = [
+      [560_000, 90],
+      [561_000, 84],
+      [563_000, 88],
+      [1_730_000, 95],
+    ] as const;
+    const receiver = narrowOn(560_000);
+    const { stations, fields } = givenStations(list);
+    const ratiosOf = (set: Receiver): Map<number, number> => {
+      const { bands } = assess({
+        ...{ receiver: set, site: siteIn(2), stations, fields, raster: defaultRaster(2) },
+        ...{ period: 'night', ...ORDERS, leaveOutBetterThan: null, limit: 10_000 },
+      });
+      const worst = new Map<number, number>();
+      for (const { station, ratioDb, hidden } of bands.flatMap(({ responses }) => responses)) {
+        if (ratioDb === null || hidden !== null) continue;
+        worst.set(station, Math.min(ratioDb, worst.get(station) ?? Infinity));
+      }
+      return worst;
+    };
+    const before = [...ratiosOf(receiver)].sort((a, b) => a[1] - b[1]).slice(0, 3);
+
+    for (const { kind, gainDb, trap, ifHz } of curesOf(receiver, list)) {
+      expect(gainDb.map(({ station }) => station)).toEqual(before.map(([station]) => station));
+      gainDb.forEach(({ beforeDb }, at) => expect(beforeDb).toBeCloseTo(before[at]?.[1] ?? NaN, 6));
+      if (kind !== 'trap' && kind !== 'move-if') continue;
+      const cured = { ...receiver, ifHz: ifHz ?? receiver.ifHz, trap: trap?.trap ?? null };
+      const after = ratiosOf(cured);
+      for (const { station, afterDb } of gainDb) {
+        if (afterDb === null) expect(after.has(station)).toBe(false);
+        else expect(after.get(station)).toBeCloseTo(afterDb, 6);
+      }
+    }
+  });
+
   it('offers the other side on each band where the oscillator can run there', () => {
     const bands = [
       plainBand({ name: 'long wave', lowHz: 150_000, highHz: 285_000 }),
