@@ -28,7 +28,6 @@ export interface CheckTools {
 }
 
 export const MAX_ROWS = 2_000_000;
-const ROWS_BETWEEN_BEATS = 1000;
 
 /** Checks a claimed import; the rows that are good are kept ready for storing. */
 export async function runCheck(tools: CheckTools, row: ImportModel, pulse: Pulse): Promise<void> {
@@ -56,11 +55,12 @@ export async function judgeIntoSpool(
   const spool = await SpoolWriter.begin(uploads.spool(row.storedName), row.reading);
   const progress = new ReadProgress(await sizeOf(path), pulse);
   try {
-    const check = await checkList(path, row.reading, tally, (judged) => {
-      const pause = progress.count(judged);
-      const station = 'station' in judged ? judged.station : null;
-      const kept = station ? spool.add(editions.valuesOf(station)) : undefined;
-      return kept && pause ? Promise.all([kept, pause]).then(() => undefined) : (kept ?? pause);
+    const check = await checkList(path, row.reading, tally, async ({ judged, bytes }) => {
+      for (const one of judged) {
+        if ('station' in one && one.station) spool.add(editions.valuesOf(one.station));
+      }
+      await spool.flush();
+      await progress.count(judged.length, bytes);
     });
     await spool.finish(replacedBy(tally));
     return check;
@@ -82,25 +82,20 @@ const sizeOf = (path: string): Promise<number> =>
 
 /** How far through the file the rows have come, told now and then. */
 class ReadProgress {
-  private readonly bytes: number;
+  private readonly size: number;
   private readonly pulse: Pulse;
   private rows = 0;
-  private characters = 0;
 
-  constructor(bytes: number, pulse: Pulse) {
-    this.bytes = bytes;
+  constructor(size: number, pulse: Pulse) {
+    this.size = size;
     this.pulse = pulse;
   }
 
-  count({ row }: JudgedRow): Promise<void> | undefined {
-    this.rows += 1;
-    if (this.rows > MAX_ROWS) {
-      throw new BadListError(
-        `The list has more than ${MAX_ROWS} rows. Split it, or leave out what you do not receive.`,
-      );
-    }
-    for (const cell of row.cells) this.characters += cell.length + 1;
-    if (this.rows % ROWS_BETWEEN_BEATS !== 0) return undefined;
-    return this.pulse.beat(this.characters / this.bytes);
+  count(rows: number, bytes: number): Promise<void> {
+    this.rows += rows;
+    if (this.rows <= MAX_ROWS) return this.pulse.beat(bytes / this.size);
+    throw new BadListError(
+      `The list has more than ${MAX_ROWS} rows. Split it, or leave out what you do not receive.`,
+    );
   }
 }

@@ -14,8 +14,8 @@ async function rowsOf(text: string): Promise<[number, readonly string[]][]> {
   const path = join(folder, 'list.csv');
   writeFileSync(path, text);
   const rows: [number, readonly string[]][] = [];
-  for await (const { line, cells } of csvRows(path, { encoding: 'UTF-8', delimiter: ',' })) {
-    rows.push([line, cells]);
+  for await (const part of csvRows(path, { encoding: 'UTF-8', delimiter: ',' })) {
+    for (const { line, cells } of part.rows) rows.push([line, cells]);
   }
   return rows;
 }

@@ -19,6 +19,13 @@ export interface CsvRow {
   readonly cells: readonly string[];
 }
 
+/** Rows that follow each other, and how many bytes of the file were read up to their end. */
+export interface CsvPart {
+  readonly rows: readonly CsvRow[];
+  readonly bytes: number;
+}
+
+const ROWS_AT_ONCE = 500;
 const BREAK = /\r\n|\n|\r/g;
 const MAX_ROW_CHARACTERS = 131_072;
 export const MAX_COLUMNS = 200;
@@ -34,25 +41,34 @@ export const csvOptions = (delimiter: string): Options => ({
 });
 
 /**
- * Rows of a file, the header first; rows whose cells are all blank are passed over.
+ * Rows of a file, the header first, some hundred at a time; rows whose cells are all blank are passed
+ * over.
  * @throws {BadListError} If a quotation mark is never closed or a row is far too long or wide.
  */
-export async function* csvRows(path: string, layout: CsvLayout): AsyncGenerator<CsvRow> {
+export async function* csvRows(path: string, layout: CsvLayout): AsyncGenerator<CsvPart> {
+  const file = createReadStream(path);
   const parser = parse(csvOptions(layout.delimiter));
-  // Failures of the file reach the loop below through the parser, which the pipeline destroys.
-  pipeline(createReadStream(path), iconv.decodeStream(layout.encoding), parser, () => undefined);
+  // The parser reads UTF-8 by itself. Failures of the file reach the loop below through the parser,
+  // which the pipeline destroys.
+  const decoding = layout.encoding === 'UTF-8' ? [] : [iconv.decodeStream(layout.encoding)];
+  pipeline([file, ...decoding, parser], () => undefined);
   let line = 1;
+  let rows: CsvRow[] = [];
   try {
     for await (const cells of parser as AsyncIterable<string[]>) {
       checkWidth(cells, line);
-      if (cells.some((cell) => cell !== '' && cell.trim() !== '')) yield { line, cells };
+      if (cells.some((cell) => cell !== '' && cell.trim() !== '')) rows.push({ line, cells });
       line += linesOf(cells);
+      if (rows.length < ROWS_AT_ONCE) continue;
+      yield { rows, bytes: file.bytesRead };
+      rows = [];
     }
   } catch (error) {
     throw refusal(error, line);
   } finally {
     parser.destroy();
   }
+  yield { rows, bytes: file.bytesRead };
 }
 
 /**

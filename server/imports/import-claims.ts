@@ -163,8 +163,11 @@ export async function failHopeless(): Promise<void> {
   );
 }
 
-export const hasWaitingJobs = async (): Promise<boolean> =>
-  (await ImportModel.count({ where: { state: AT_WORK, ...UNHELD } })) > 0;
+/** Whether there is a job that a worker could take. */
+export async function hasWaitingJobs(): Promise<boolean> {
+  const attempts = { [Op.lt]: MAX_ATTEMPTS };
+  return (await ImportModel.count({ where: { state: AT_WORK, attempts, ...UNHELD } })) > 0;
+}
 
 /** Cancels what is not committed; a worker that is at it notices and takes everything back. */
 export const cancel = (id: number): Promise<boolean> =>

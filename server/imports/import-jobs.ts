@@ -6,7 +6,7 @@ import { isDatabaseAway } from '../db/database-faults.ts';
 import type { Logger } from '../logger.ts';
 import { BadListError } from './bad-list-error.ts';
 import { runCheck } from './check-job.ts';
-import { failCheck, failCommit, giveBack, takeJob } from './import-claims.ts';
+import { failCheck, failCommit, giveBack, hasWaitingJobs, takeJob } from './import-claims.ts';
 import type { ImportModel } from './import-model.ts';
 import type { ImportWorker } from './import-worker.ts';
 import { JobLost, Pulse, WorkerStopped } from './pulse.ts';
@@ -21,6 +21,7 @@ export interface JobTools extends StoreTools {
 /** A long list must not keep a short one waiting. */
 const LANES = 2;
 const DATABASE_PATIENCE_MS = 20_000;
+const LOCKED_MS = 50;
 
 /** Does what waits in the table of imports: checks and stores lists, clears undone editions. */
 export class ImportJobs implements ImportWorker {
@@ -78,10 +79,17 @@ export class ImportJobs implements ImportWorker {
   private async next(): Promise<boolean> {
     if (this.isStopping) return false;
     const job = await takeJob(this.tools.database, this.worker);
-    if (!job) return this.tools.editions.clearSome();
+    if (!job) return (await this.isHeldBack()) || this.tools.editions.clearSome();
     this.onChange(job.id);
     await this.run(job);
     this.onChange(job.id);
+    return true;
+  }
+
+  /** A job that could not be taken as somebody has its row locked for a moment is waited for. */
+  private async isHeldBack(): Promise<boolean> {
+    if (!(await hasWaitingJobs())) return false;
+    await wait(LOCKED_MS);
     return true;
   }
 

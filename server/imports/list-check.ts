@@ -15,6 +15,12 @@ export type JudgedRow =
   | { readonly row: CsvRow; readonly station: (StationRow & KnownRow) | null }
   | { readonly row: CsvRow; readonly faults: readonly ImportFault[] };
 
+/** Rows that follow each other, judged, and how many bytes of the file were read for them. */
+export interface JudgedPart {
+  readonly judged: readonly JudgedRow[];
+  readonly bytes: number;
+}
+
 /**
  * The list, row by row: the station, null where the row adds none (it says again what another row
  * has said, or belongs to a station told by another row), or what is wrong with the row.
@@ -23,13 +29,19 @@ export async function* judgedRows(
   path: string,
   reading: ListReading,
   tally: RowTally,
-): AsyncGenerator<JudgedRow> {
+): AsyncGenerator<JudgedPart> {
   const judge = new RowJudge(reading, tally);
-  for await (const row of csvRows(path, reading)) {
-    const judged = row.line < reading.dataLine ? judge.pass(row) : judge.judge(row);
-    if (judged) yield judged;
+  let read = 0;
+  for await (const { rows, bytes } of csvRows(path, reading)) {
+    const judged: JudgedRow[] = [];
+    for (const row of rows) {
+      const one = row.line < reading.dataLine ? judge.pass(row) : judge.judge(row);
+      if (one) judged.push(one);
+    }
+    read = bytes;
+    yield { judged, bytes };
   }
-  yield* judge.rest();
+  yield { judged: [...judge.rest()], bytes: read };
 }
 
 /** Judges the rows of one list, one after the other. */
@@ -99,21 +111,19 @@ class RowJudge {
 
 /**
  * Counts what storing the list would do beside the edition the tally knows, and names all faults.
- * @param follow Is shown each row as it was judged, and waited for where it answers a promise.
+ * @param follow Is shown the rows as they were judged, and waited for.
  */
 export async function checkList(
   path: string,
   reading: ListReading,
   tally: RowTally,
-  follow: (judged: JudgedRow) => Promise<void> | undefined = () => undefined,
+  follow: (part: JudgedPart) => Promise<void> = () => Promise.resolve(),
 ): Promise<ImportCheck> {
   const faults: ImportFault[] = [];
   const causes = new Map<string, ImportCause>();
-  for await (const judged of judgedRows(path, reading, tally)) {
-    const pause = follow(judged);
-    if (pause) await pause;
-    if (!('faults' in judged)) continue;
-    for (const fault of judged.faults) {
+  for await (const part of judgedRows(path, reading, tally)) {
+    await follow(part);
+    for (const fault of part.judged.flatMap(faultsOf)) {
       if (faults.length < FAULTS_ANSWERED) faults.push(fault);
       count(causes, fault);
     }
@@ -121,6 +131,8 @@ export async function checkList(
   const commonest = [...causes.values()].sort((a, b) => b.count - a.count);
   return { rows: tally.rows, faults, causes: commonest, remarks: tally.remarks };
 }
+
+const faultsOf = (row: JudgedRow): readonly ImportFault[] => ('faults' in row ? row.faults : []);
 
 function count(causes: Map<string, ImportCause>, { line, column, expected }: ImportFault): void {
   const key = `${column}\u001f${expected}`;

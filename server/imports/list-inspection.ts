@@ -25,8 +25,8 @@ const DETECTION_ROWS = 540;
 const SAMPLE_ROWS = 10;
 
 /**
- * Finds out how a file is to be read, as far as nobody has said so. The whole file is gone through
- * once, so that one which cannot be taken apart is refused here.
+ * Finds out how a file is to be read, as far as nobody has said so: its encoding by all of its bytes,
+ * everything else by its first rows.
  * @throws {BadListError} If it is no list.
  * @throws {InvalidError} If it is not in the encoding that was asked for.
  */
@@ -60,11 +60,12 @@ function letterOOf(columns: readonly ImportColumn[], rows: readonly string[][]):
 }
 
 async function firstRows(path: string, layout: CsvLayout): Promise<CsvRow[]> {
-  const rows: CsvRow[] = [];
-  for await (const row of csvRows(path, layout)) {
-    if (rows.length <= DETECTION_ROWS) rows.push(row);
+  const first: CsvRow[] = [];
+  for await (const { rows } of csvRows(path, layout)) {
+    first.push(...rows);
+    if (first.length > DETECTION_ROWS) break;
   }
-  return rows;
+  return first.slice(0, DETECTION_ROWS + 1);
 }
 
 /** The file's first whole lines, as text. */

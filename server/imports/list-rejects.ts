@@ -1,4 +1,4 @@
-import { judgedRows } from './list-check.ts';
+import { type JudgedRow, judgedRows } from './list-check.ts';
 import type { ListReading } from './list-reading.ts';
 import { RowTally } from './row-tally.ts';
 
@@ -25,12 +25,15 @@ export const rejectedImport = (fileName: string): number | null => {
  */
 export async function* rejectedRows(path: string, reading: ListReading): AsyncGenerator<string[]> {
   yield [...REJECT_HEADERS, ...reading.columns.map(({ header }) => header)];
-  for await (const judged of judgedRows(path, reading, new RowTally())) {
-    if (!('faults' in judged)) continue;
-    const { line, cells } = judged.row;
-    const faults = judged.faults.map(
-      ({ column, value, expected }) => `${column}: "${value}" is not ${expected}`,
-    );
-    yield [String(line), faults.join('; '), ...cells];
+  for await (const { judged } of judgedRows(path, reading, new RowTally())) {
+    for (const row of judged) if ('faults' in row) yield rejected(row);
   }
 }
+
+const rejected = ({ row, faults }: Extract<JudgedRow, { faults: unknown }>): string[] => [
+  String(row.line),
+  faults
+    .map(({ column, value, expected }) => `${column}: "${value}" is not ${expected}`)
+    .join('; '),
+  ...row.cells,
+];

@@ -37,14 +37,17 @@ export class SpoolWriter {
     return writer;
   }
 
-  /** Keeps a station; answers a promise where that takes time. */
-  add(station: StationValues): Promise<void> | undefined {
+  add(station: StationValues): void {
     this.stations.push(station);
-    return this.stations.length < ROWS_AT_ONCE ? undefined : this.flush();
+  }
+
+  /** Writes what has come together, once that is worth a line. */
+  async flush(): Promise<void> {
+    if (this.stations.length >= ROWS_AT_ONCE) await this.writeStations();
   }
 
   async finish(replaced: readonly number[]): Promise<void> {
-    await this.flush();
+    await this.writeStations();
     await this.writeLine({ replaced } satisfies SpoolPart);
     await this.file.close();
     await rename(this.part, this.path);
@@ -55,7 +58,7 @@ export class SpoolWriter {
     await rm(this.part, { force: true });
   }
 
-  private async flush(): Promise<void> {
+  private async writeStations(): Promise<void> {
     const { stations } = this;
     this.stations = [];
     await this.writeLine({ stations } satisfies SpoolPart);

@@ -16,7 +16,7 @@ import { anyFreePort } from '../../server/dev/free-port.ts';
 import { databaseUrl, launchMariaDB } from '../../server/dev/private-mariadb.ts';
 import { runningProcesses } from '../../server/dev/process-table.ts';
 import { ApiClient } from '../support/api-client.ts';
-import { launch, listening, stop } from '../support/launch-server.ts';
+import { launch, listening, type ServerProcess, stop } from '../support/launch-server.ts';
 import { held, told, type Verdict } from './measure.ts';
 
 const ROWS = Number(process.env['IMPORT_ROWS'] ?? 100_000);
@@ -40,6 +40,27 @@ const list = [
 const residentMb = (pid: number): number =>
   Number(/^VmRSS:\s*(\d+)/m.exec(readFileSync(`/proc/${pid}/status`, 'utf8'))?.[1] ?? 0) / 1024;
 
+/** Processor time a process has taken, seconds; a hundredth is the least that the kernel tells. */
+function processorSeconds(pid: number): number {
+  const told = readFileSync(`/proc/${pid}/stat`, 'utf8');
+  const fields = told.slice(told.lastIndexOf(')') + 2).split(' ');
+  return (Number(fields[11]) + Number(fields[12])) / 100;
+}
+
+interface Took {
+  readonly seconds: number;
+  /** Processor time, which others on the machine do not lengthen. */
+  readonly processor: number;
+}
+
+/** How long something takes, and how much of the processors the named processes need for it. */
+async function taken(pids: readonly number[], work: () => Promise<unknown>): Promise<Took> {
+  const sum = () => pids.reduce((total, pid) => total + processorSeconds(pid), 0);
+  const before = sum();
+  const seconds = await timed(work);
+  return { seconds, processor: sum() - before };
+}
+
 async function timed(work: () => Promise<unknown>): Promise<number> {
   const begun = performance.now();
   await work();
@@ -47,15 +68,16 @@ async function timed(work: () => Promise<unknown>): Promise<number> {
 }
 
 /** What the least costs: parsing without judging, and inserting without anything else. */
-async function bareSeconds(url: string) {
+async function bareSeconds(url: string, pids: readonly number[]) {
   let rows: string[][] = [];
-  const parsing = await timed(async () => {
+  const parsing = await taken(pids, () => {
     rows = parse(list, { from_line: 2 });
+    return Promise.resolve();
   });
   const connection = await createConnection(url);
   try {
     await connection.query('CREATE TABLE bare LIKE stations');
-    const inserting = await timed(async () => {
+    const inserting = await taken(pids, async () => {
       await connection.beginTransaction();
       for (let at = 0; at < rows.length; at += 2000) {
         const batch = rows.slice(at, at + 2000).map(([name, khz, lat, lon, day, night, note]) => {
@@ -81,10 +103,10 @@ async function bareSeconds(url: string) {
 /** Reads at a fixed rate until told to stop; answers how long each took, in order. */
 function readMeanwhile(person: ApiClient, path: string) {
   const tookMs: number[] = [];
-  let isOver = false;
+  const end = new AbortController();
   const reading = (async () => {
     const underWay: Promise<void>[] = [];
-    while (!isOver) {
+    while (!end.signal.aborted) {
       const begun = performance.now();
       underWay.push(
         person.get(path).then(() => {
@@ -96,21 +118,23 @@ function readMeanwhile(person: ApiClient, path: string) {
     await Promise.all(underWay);
   })();
   return async (): Promise<readonly number[]> => {
-    isOver = true;
+    end.abort();
     await reading;
     return tookMs.sort((a, b) => a - b);
   };
 }
 
+/** The API process and its worker. */
+const withChildren = (apiPid: number): readonly number[] => [
+  apiPid,
+  ...runningProcesses()
+    .filter(({ parentPid }) => parentPid === apiPid)
+    .map(({ pid }) => pid),
+];
+
 /** Memory of API and worker, sampled; answers the growth over what they had at first, megabytes. */
-function watchMemory(apiPid: number) {
-  const pids = () => [
-    apiPid,
-    ...runningProcesses()
-      .filter(({ parentPid }) => parentPid === apiPid)
-      .map(({ pid }) => pid),
-  ];
-  const sum = () => pids().reduce((total, pid) => total + residentMb(pid), 0);
+function watchMemory(pids: readonly number[]) {
+  const sum = () => pids.reduce((total, pid) => total + residentMb(pid), 0);
   const idle = sum();
   let most = idle;
   const timer = setInterval(() => (most = Math.max(most, sum())), 50);
@@ -136,20 +160,31 @@ async function upload(person: ApiClient, regionId: number, content: string): Pro
   return `/api/regions/${regionId}/imports/${body.id}`;
 }
 
-async function takeIn(person: ApiClient, regionId: number, content: string) {
+async function takeIn(
+  person: ApiClient,
+  regionId: number,
+  content: string,
+  pids: readonly number[] = [],
+) {
   let path = '';
-  const uploading = await timed(async () => {
+  const uploading = await taken(pids, async () => {
     path = await upload(person, regionId, content);
   });
-  const checking = await timed(() => person.put(path, {}).expect(200));
-  const storing = await timed(async () => {
+  const checking = await taken(pids, () => person.put(path, {}).expect(200));
+  const storing = await taken(pids, async () => {
     await person.post(`${path}/commit`).expect(202);
     await untilState(person, path, 'committed');
   });
   return { path, uploading, checking, storing };
 }
 
-async function measure(url: string, api: ReturnType<typeof launch>): Promise<Verdict[]> {
+const shown = ({ seconds, processor }: Took): string =>
+  `${seconds.toFixed(2)} s (${processor.toFixed(2)} s)`;
+
+const sumOf = (parts: readonly Took[], what: keyof Took): number =>
+  parts.reduce((sum, part) => sum + part[what], 0);
+
+async function measure(url: string, api: ServerProcess, mariadbPid: number): Promise<Verdict[]> {
   const person = await ApiClient.open((await listening(api)).url);
   await person.post('/api/accounts', {
     email: 'ada@example.org',
@@ -159,27 +194,31 @@ async function measure(url: string, api: ReturnType<typeof launch>): Promise<Ver
   const { body: region } = await person.post('/api/regions', { name: 'Vale', ituRegion: 1 });
   // A short list first: the worker is awake, as it is after a club's first upload.
   await takeIn(person, region.id, list.split('\n').slice(0, 2000).join('\n'));
-  const bare = await bareSeconds(url);
-  const bareS = bare.parsing + bare.inserting;
+  const ours = withChildren(api.child.pid ?? 0);
+  const all = [...ours, mariadbPid];
+  const bare = await bareSeconds(url, [process.pid, mariadbPid]);
 
-  const memory = watchMemory(api.child.pid ?? 0);
+  const memory = watchMemory(ours);
   const stopReading = readMeanwhile(person, '/api/regions');
-  const { path, uploading, checking, storing } = await takeIn(person, region.id, list);
+  const { path, uploading, checking, storing } = await takeIn(person, region.id, list, all);
   const reads = await stopReading();
   const { idle, growth } = memory();
   const undoing = await timed(() => person.delete(path).expect(204));
-  const whole = uploading + checking + storing;
-  const ratio = whole / bareS;
+  const phases = [uploading, checking, storing];
+  const whole = sumOf(phases, 'seconds');
+  const alone = [bare.parsing, bare.inserting];
+  const ratio = whole / sumOf(alone, 'seconds');
+  const processorRatio = sumOf(phases, 'processor') / sumOf(alone, 'processor');
   // Time and memory are meant for 100,000 rows; of a longer list they may grow with it.
   const share100k = Math.max(1, ROWS / 100_000);
   const p99 = reads[Math.floor(0.99 * (reads.length - 1))] ?? 0;
   return [
     told(
-      `${ROWS} rows, ${(list.length / 1e6).toFixed(1)} MB: upload ${uploading.toFixed(2)} s, check ${checking.toFixed(2)} s, store ${storing.toFixed(2)} s`,
+      `${ROWS} rows, ${(list.length / 1e6).toFixed(1)} MB, in brackets the processor time: upload ${shown(uploading)}, check ${shown(checking)}, store ${shown(storing)}; alone: csv-parse ${shown(bare.parsing)}, insert ${shown(bare.inserting)}`,
     ),
     held(`file to committed: ${whole.toFixed(2)} s`, whole, 10 * share100k, 's'),
     held(
-      `over csv-parse ${bare.parsing.toFixed(2)} s and insert ${bare.inserting.toFixed(2)} s alone: ${ratio.toFixed(2)}`,
+      `time over csv-parse and insert alone: ${ratio.toFixed(2)} (of processor time, with the reads meanwhile: ${processorRatio.toFixed(2)})`,
       ratio,
       2,
     ),
@@ -208,7 +247,7 @@ export async function run(): Promise<Verdict[]> {
   const url = databaseUrl(database, port);
   const api = launch({ DATABASE_URL: url, DATA_DIR: join(root, 'files') });
   try {
-    return await measure(url, api);
+    return await measure(url, api, mariadb.pid ?? 0);
   } finally {
     await stop(api.child);
     await endProcess(mariadb, 10_000);
