@@ -8,6 +8,8 @@ describe('the address of a trial', () => {
       site: '3',
       edition: '7',
       period: 'day',
+      at: '2026-12-21T12:30:00Z',
+      also: '4.e8_5.a70',
       if: '554000',
       mark: 'station-3',
       set: '{}',
@@ -18,19 +20,33 @@ describe('the address of a trial', () => {
       siteId: 3,
       source: { kind: 'edition', editionId: 7 },
       period: 'day',
+      at: '2026-12-21T12:30:00Z',
+      others: [
+        { siteId: 4, source: { kind: 'edition', editionId: 8 } },
+        { siteId: 5, source: { kind: 'every-channel', fieldDb: 70 } },
+      ],
       ifHz: 554_000,
       picked: 'station-3',
     });
   });
 
   it('reads nonsense as not said', () => {
-    const params = convertToParamMap({ site: '-3', every: 'loud', period: 'dusk', if: '1e3' });
+    const params = convertToParamMap({
+      site: '-3',
+      every: 'loud',
+      period: 'dusk',
+      if: '1e3',
+      at: 'noon',
+      also: '4_e7.x',
+    });
 
     expect(readAddress(params)).toEqual({
       setUp: undefined,
       siteId: undefined,
       source: undefined,
       period: 'night',
+      at: undefined,
+      others: [],
       ifHz: undefined,
       picked: undefined,
     });
@@ -42,6 +58,8 @@ describe('the address of a trial', () => {
       siteId: 3,
       source: { kind: 'edition', editionId: 7 },
       period: 'day',
+      at: '2026-12-21T12:30:00Z',
+      others: [{ siteId: 9, source: { kind: 'every-channel', fieldDb: -3.5 } }],
       ifHz: 554_000,
       picked: 'response|3||1|1|612000|Range 4',
     },
@@ -50,6 +68,8 @@ describe('the address of a trial', () => {
       siteId: 4,
       source: { kind: 'every-channel', fieldDb: 72.5 },
       period: 'night',
+      at: undefined,
+      others: [],
       ifHz: undefined,
       picked: undefined,
     },

@@ -1,7 +1,9 @@
 import type { ParamMap, Params } from '@angular/router';
 
+import { instant } from '../../../../shared/contracts/quantities';
 import type { Period } from '../../../../shared/radio/site';
 import type { StationSource } from '../trial/station-source';
+import { casesText, type PlaceAndList, readCases } from './cases-address';
 
 /** What the address of a receiver's page says; what it does not say is undefined. */
 export interface TrialAddress {
@@ -10,6 +12,10 @@ export interface TrialAddress {
   readonly siteId: number | undefined;
   readonly source: StationSource | undefined;
   readonly period: Period;
+  /** The moment that is judged, ISO 8601; undefined: day or night everywhere. */
+  readonly at: string | undefined;
+  /** Further sites with their lists that one IF is to serve as well. */
+  readonly others: readonly PlaceAndList[];
   readonly ifHz: number | undefined;
   /** Mark that is picked in the charts and tables. */
   readonly picked: string | undefined;
@@ -34,6 +40,8 @@ export function readAddress(params: ParamMap): TrialAddress {
     siteId: wholeNumber(params.get('site')),
     source: sourceFrom(params),
     period: params.get('period') === 'day' ? 'day' : 'night',
+    at: instant.safeParse(params.get('at')).data,
+    others: readCases(params.get('also')),
     ifHz: wholeNumber(params.get('if')),
     picked: params.get('mark') ?? undefined,
   };
@@ -45,6 +53,8 @@ export function addressParams(change: Partial<TrialAddress>): Params {
   if ('setUp' in change) params['set'] = change.setUp ?? null;
   if ('siteId' in change) params['site'] = change.siteId ?? null;
   if ('period' in change) params['period'] = change.period;
+  if ('at' in change) params['at'] = change.at ?? null;
+  if ('others' in change) params['also'] = casesText(change.others ?? []);
   if ('ifHz' in change) params['if'] = change.ifHz ?? null;
   if ('picked' in change) params['mark'] = change.picked ?? null;
   if ('source' in change) {

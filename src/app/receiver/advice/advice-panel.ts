@@ -1,5 +1,6 @@
 import { ChangeDetectionStrategy, Component, computed, inject, input } from '@angular/core';
 import { MatButtonModule } from '@angular/material/button';
+import { RouterLink } from '@angular/router';
 
 import { kilohertz } from '../../charts/readings';
 import { Icon } from '../../ui/icon/icon';
@@ -16,7 +17,7 @@ const isOfSurroundings = (path: string): boolean => /^(site|stations)\b/.test(pa
   selector: 'app-advice-panel',
   templateUrl: './advice-panel.html',
   styleUrl: './advice-panel.scss',
-  imports: [Caution, Icon, MatButtonModule],
+  imports: [Caution, Icon, MatButtonModule, RouterLink],
   changeDetection: ChangeDetectionStrategy.OnPush,
   host: { 'aria-live': 'polite' },
 })
@@ -42,6 +43,11 @@ export class AdvicePanel {
     this.warnings().filter(({ path }) => isOfSurroundings(path)),
   );
   protected readonly onTrial = computed(() => kilohertz(this.store.trialHz()));
+  /** The list that stations were left out of; null: none is used. */
+  protected readonly editionId = computed(() => {
+    const source = this.store.setup()?.source;
+    return source?.kind === 'edition' ? source.editionId : null;
+  });
   protected readonly skipped = computed(() => {
     const counts = new Map<string, number>();
     for (const { reason } of this.store.judged.value()?.skipped ?? []) {

@@ -115,4 +115,41 @@ describe('the advice', () => {
       text: 'No station is in reach by day: nothing here decides between one IF and another.',
     });
   });
+
+  it('names the bands that can be left alone', () => {
+    const band = { oscillator: 'above', lowHz: 600_000, highHz: 1_600_000, name: 'MW' } as const;
+    const withShortWave = receiverDraft.parse({
+      ...receiver,
+      bands: [band, { ...band, name: 'SW', lowHz: 6_000_000, highHz: 18_000_000 }],
+    });
+    const answer = { present: onChannel, candidates: [between], ranking: '' };
+
+    expect(advise(grounds(answer, { receiver: withShortWave })).text).toContain(
+      'retune the BFO; realign the oscillator on MW; leave SW alone.',
+    );
+  });
+
+  it('tells a broad set that it gains nothing by moving', () => {
+    const broad = receiverDraft.parse({
+      ...receiver,
+      selectivity: { kind: 'widths', b6Hz: 8000, b60Hz: 45_000 },
+    });
+    const answer = {
+      present: onChannel,
+      candidates: [{ ...between, deficitDb: 39.8 }],
+      ranking: '',
+    };
+
+    expect(advise(grounds(answer, { receiver: broad })).text).toMatch(
+      /^Leave it where it is, on 560 kHz: the set is too broad to gain anything by moving: midway between two channels its IF takes only \d+ dB off them\.$/,
+    );
+  });
+
+  it('says for how many sites the IF is the best where it is worst', () => {
+    const answer = { present: onChannel, candidates: [between], ranking: '' };
+
+    expect(advise(grounds(answer, { sites: 3 })).text).toContain(
+      'Of all IFs it is the best where it is worst, over 3 sites.',
+    );
+  });
 });

@@ -3,6 +3,8 @@ import type { Receiver } from '../../../../shared/radio/receiver';
 import type { Period } from '../../../../shared/radio/site';
 import type { StationAtSite } from '../../charts/choice-chart/choice-layout';
 import { kilohertz, whole } from '../../charts/readings';
+import { passband } from '../trial/surroundings';
+import { bandsToRealign } from './bands-to-realign';
 
 /** What to do about the IF, in words made from the numbers. */
 export interface Advice {
@@ -20,10 +22,15 @@ export interface AdviceGrounds {
   /** Channels of the raster around the IF, hertz. */
   readonly channels: readonly number[];
   readonly period: Period;
+  /** At how many sites one IF is to serve; left out: one. */
+  readonly sites?: number;
 }
 
 /** A gain smaller than this is none: it is smaller than what the numbers know. */
 const LEAST_GAIN_DB = 1;
+
+/** An IF that takes less than this off from midway between two channels does not part them. */
+const NARROW_DB = 15;
 
 const byPeriod = (period: Period): string =>
   period === 'day' ? $localize`by day` : $localize`by night`;
@@ -39,7 +46,7 @@ export function advise(grounds: AdviceGrounds): Advice {
   }
   if (!best) return stay(present, $localize`no other IF is within reach.`);
   const gain = present.deficitDb - best.deficitDb;
-  if (best.ifHz === present.ifHz || gain < LEAST_GAIN_DB) return stay(present, whyStay(present));
+  if (best.ifHz === present.ifHz || gain < LEAST_GAIN_DB) return stay(present, whyStay(grounds));
   return { kind: 'move', text: moveText(grounds, best, gain), ifHz: best.ifHz };
 }
 
@@ -48,16 +55,30 @@ function stay({ ifHz }: Candidate, reason: string): Advice {
   return { kind: 'stay', text, ifHz };
 }
 
-function whyStay({ deficitDb }: Candidate): string {
-  return deficitDb < LEAST_GAIN_DB
-    ? $localize`the set harms no station from there.`
-    : $localize`no IF within reach leaves ${LEAST_GAIN_DB}:gain: dB less to be desired.`;
+function whyStay({ answer, receiver, channels }: AdviceGrounds): string {
+  const { deficitDb } = answer.present;
+  if (deficitDb < LEAST_GAIN_DB) return $localize`the set harms no station from there.`;
+  const broad = broadness(receiver, channels);
+  return broad === null
+    ? $localize`no IF within reach leaves ${LEAST_GAIN_DB}:gain: dB less to be desired.`
+    : $localize`the set is too broad to gain anything by moving: midway between two channels its IF takes only ${whole(broad)}:level: dB off them.`;
+}
+
+/** What the IF takes off two channels from midway between them, where that is little; else null. */
+function broadness(receiver: Receiver, channels: readonly number[]): number | null {
+  const steps = channels.flatMap((hz, at) => (at === 0 ? [] : hz - (channels[at - 1] ?? hz)));
+  if (steps.length === 0) return null;
+  const taken = passband(receiver, receiver.ifHz)(Math.min(...steps) / 2);
+  return taken < NARROW_DB ? taken : null;
 }
 
 function moveText(grounds: AdviceGrounds, best: Candidate, gain: number): string {
   const sentences = [
     reasonToMove(grounds),
-    $localize`Set it to ${target(best)}:target:: ${gainText(grounds, best, gain)}:gain:; ${afterwards(grounds.receiver)}:afterwards:.`,
+    $localize`Set it to ${target(best)}:target:: ${gainText(grounds, best, gain)}:gain:; ${afterwards(grounds.receiver, best.ifHz)}:afterwards:.`,
+    (grounds.sites ?? 1) > 1
+      ? $localize`Of all IFs it is the best where it is worst, over ${grounds.sites}:count: sites.`
+      : '',
   ];
   return sentences.filter((each) => each !== '').join(' ');
 }
@@ -98,8 +119,19 @@ function gainText({ period }: AdviceGrounds, best: Candidate, gain: number): str
   return sigma === null ? lessText : $localize`${lessText}:change: (±${whole(sigma)}:sigma:)`;
 }
 
-/** What else must follow the IF. */
-const afterwards = ({ bfo }: Receiver): string =>
-  bfo
-    ? $localize`retune the BFO and realign the oscillator of each band`
-    : $localize`realign the oscillator of each band`;
+/** What else must follow the IF, and what need not. */
+function afterwards(receiver: Receiver, ifHz: number): string {
+  const { realign, leave } = bandsToRealign(receiver, ifHz - receiver.ifHz);
+  const oscillators =
+    leave.length === 0
+      ? $localize`realign the oscillator of each band`
+      : $localize`realign the oscillator on ${listed(realign)}:bands:`;
+  return [
+    ...(receiver.bfo ? [$localize`retune the BFO`] : []),
+    ...(realign.length > 0 ? [oscillators] : []),
+    ...(leave.length > 0 ? [$localize`leave ${listed(leave)}:bands: alone`] : []),
+  ].join(leave.length > 0 ? '; ' : $localize` and `);
+}
+
+const listed = (names: readonly string[]): string =>
+  new Intl.ListFormat('en-GB', { type: 'conjunction' }).format(names);

@@ -1,5 +1,6 @@
 import { ChangeDetectionStrategy, Component } from '@angular/core';
 
+import { CAUTION } from '../../../../shared/radio/caution';
 import { Icon } from '../../ui/icon/icon';
 
 /** Stands wherever the page tells someone to touch a set. */
@@ -8,11 +9,7 @@ import { Icon } from '../../ui/icon/icon';
   imports: [Icon],
   template: `
     <app-icon name="warning" />
-    <p i18n>
-      Aligning means working inside the set: high tension, and in some sets mains on the chassis.
-      Capacitors hold 250–400 V after it is switched off: discharge and measure. Isolation
-      transformer, insulated tools, one hand. Follow local codes and licensed practice.
-    </p>
+    <p>{{ caution }}</p>
   `,
   styles: `
     :host {
@@ -24,4 +21,6 @@ import { Icon } from '../../ui/icon/icon';
   `,
   changeDetection: ChangeDetectionStrategy.OnPush,
 })
-export class Caution {}
+export class Caution {
+  protected readonly caution = CAUTION;
+}

@@ -66,11 +66,13 @@ describe('the columns of the candidates', () => {
 describe('sortedCandidates', () => {
   const low = { ...candidate, ifHz: 550_000, trackingCostDb: 2, deficitDb: 9 };
   const high = { ...candidate, ifHz: 560_000, trackingCostDb: 1, deficitDb: 1 };
-  const ifs = (active: string, direction: 'asc' | 'desc' | '') =>
-    sortedCandidates([candidate, low, high], columns, active, direction).map(({ ifHz }) => ifHz);
+  const ifs = (active?: string, direction: 'asc' | 'desc' = 'asc') =>
+    sortedCandidates([candidate, low, high], columns, active ? { active, direction } : null).map(
+      ({ ifHz }) => ifHz,
+    );
 
   it('keeps the ranking until a column is chosen', () => {
-    expect(ifs('', '')).toEqual([555_000, 550_000, 560_000]);
+    expect(ifs()).toEqual([555_000, 550_000, 560_000]);
   });
 
   it('sorts by any column, what is missing last either way', () => {

@@ -2,6 +2,7 @@ import type { Candidate } from '../../../../shared/contracts/candidates';
 import type { Receiver } from '../../../../shared/radio/receiver';
 import type { Period } from '../../../../shared/radio/site';
 import { change, kilohertz, percent, tenths } from '../../charts/readings';
+import type { CandidateSort } from '../address/choice-view';
 
 /** A term by which candidates are told apart. */
 export interface CandidateColumn {
@@ -10,6 +11,8 @@ export interface CandidateColumn {
   /** Sorts by this; null goes last. */
   readonly value: (candidate: Candidate) => number | null;
   readonly text: (candidate: Candidate) => string;
+  /** Which end is the better one; a list is sorted from there. */
+  readonly best: 'low' | 'high';
 }
 
 const NOTHING = '\u2013';
@@ -33,6 +36,7 @@ function ratio(
   return {
     key,
     label,
+    best: 'high',
     value: worst,
     text: (candidate) => {
       const found = worst(candidate);
@@ -69,16 +73,18 @@ const heardColumns = (period: Period): readonly CandidateColumn[] => [
   {
     key: 'deficit',
     label: $localize`Left to be desired, dB`,
+    best: 'low',
     value: ({ deficitDb }) => deficitDb,
     text: ({ deficitDb }) => tenths(deficitDb),
   },
   {
     key: 'change',
-    label: $localize`Breakthrough against now`,
+    label: $localize`Break\u00ADthrough against now`,
+    best: 'low',
     value: (candidate) => candidate[period]?.breakthroughChangeDb ?? null,
     text: (candidate) => changeText(candidate, period),
   },
-  ratio('breakthrough', $localize`Worst breakthrough, ratio dB`, period),
+  ratio('breakthrough', $localize`Worst break\u00ADthrough, ratio dB`, period),
   ratio('image', $localize`Worst image, ratio dB`, period),
   ratio('products', $localize`Worst product, ratio dB`, period),
 ];
@@ -88,6 +94,7 @@ const frequencyColumns: readonly CandidateColumn[] = [
   {
     key: 'harmonic',
     label: $localize`Nearest harmonic whistle, kHz`,
+    best: 'high',
     value: (candidate) => nearestBeat(candidate)?.beatHz ?? null,
     text: (candidate) => {
       const beat = nearestBeat(candidate);
@@ -99,18 +106,21 @@ const frequencyColumns: readonly CandidateColumn[] = [
   {
     key: 'raster',
     label: $localize`To the raster: IF, twice, thrice, kHz`,
+    best: 'high',
     value: ({ rasterDistanceHz }) => rasterDistanceHz.if,
     text: ({ rasterDistanceHz: d }) => [d.if, d.twice, d.thrice].map(khz).join(' / '),
   },
   {
     key: 'intermodulation',
-    label: $localize`Intermodulation, pairs`,
+    label: $localize`Inter\u00ADmodulation, pairs`,
+    best: 'low',
     value: ({ intermodulation }) => intermodulation.count,
     text: ({ intermodulation }) => String(intermodulation.count),
   },
   {
     key: 'window',
     label: $localize`Holds from – to, kHz`,
+    best: 'high',
     value: ({ windowHz }) => windowHz && windowHz.high - windowHz.low,
     text: ({ windowHz }) =>
       windowHz ? `${kilohertz(windowHz.low)} – ${kilohertz(windowHz.high)}` : NOTHING,
@@ -122,24 +132,28 @@ const effortColumns: readonly CandidateColumn[] = [
   {
     key: 'bfo',
     label: $localize`BFO moves, kHz`,
+    best: 'low',
     value: ({ bfoShiftHz }) => bfoShiftHz && Math.abs(bfoShiftHz),
     text: ({ bfoShiftHz }) => khz(bfoShiftHz),
   },
   {
     key: 'capacitance',
     label: $localize`IF capacitance`,
+    best: 'low',
     value: ({ capacitanceChange }) => Math.abs(capacitanceChange),
     text: ({ capacitanceChange }) => percent(capacitanceChange),
   },
   {
     key: 'tracking',
     label: $localize`Tracking costs, dB`,
+    best: 'low',
     value: ({ trackingCostDb }) => trackingCostDb,
     text: ({ trackingCostDb }) => (trackingCostDb === null ? NOTHING : tenths(trackingCostDb)),
   },
   {
     key: 'reach',
     label: $localize`Within reach`,
+    best: 'low',
     value: ({ reachable }) => Number(!reachable.ok),
     text: ({ reachable }) => (reachable.ok ? $localize`yes` : (reachable.reason ?? $localize`no`)),
   },
@@ -149,14 +163,14 @@ const effortColumns: readonly CandidateColumn[] = [
 export function sortedCandidates(
   candidates: readonly Candidate[],
   columns: readonly CandidateColumn[],
-  active: string,
-  direction: 'asc' | 'desc' | '',
+  sort: CandidateSort | null,
 ): Candidate[] {
+  const { active, direction } = sort ?? {};
   const read =
     active === 'if'
       ? ({ ifHz }: Candidate) => ifHz
       : columns.find(({ key }) => key === active)?.value;
-  if (!read || direction === '') return [...candidates];
+  if (!read) return [...candidates];
   const sign = direction === 'asc' ? 1 : -1;
   return [...candidates].sort((a, b) => {
     const [left, right] = [read(a), read(b)];

@@ -1,4 +1,5 @@
 import { ChangeDetectionStrategy, Component, computed, inject, signal } from '@angular/core';
+import { MatButtonModule } from '@angular/material/button';
 import { MatButtonToggleModule } from '@angular/material/button-toggle';
 import { MatFormFieldModule } from '@angular/material/form-field';
 import { MatInputModule } from '@angular/material/input';
@@ -16,7 +17,13 @@ const EVERY_CHANNEL = 0;
   selector: 'app-pickers',
   templateUrl: './pickers.html',
   styleUrl: './pickers.scss',
-  imports: [MatButtonToggleModule, MatFormFieldModule, MatInputModule, MatSelectModule],
+  imports: [
+    MatButtonModule,
+    MatButtonToggleModule,
+    MatFormFieldModule,
+    MatInputModule,
+    MatSelectModule,
+  ],
   changeDetection: ChangeDetectionStrategy.OnPush,
 })
 export class Pickers {
@@ -34,6 +41,12 @@ export class Pickers {
   protected readonly fieldText = computed(() => {
     const source = this.source();
     return source?.kind === 'every-channel' ? formatQuantity(source.fieldDb, 'field') : '';
+  });
+
+  /** The moment that is judged, as people write it; empty: day or night everywhere. */
+  protected readonly moment = computed(() => {
+    const { at } = this.store.address();
+    return at === undefined ? '' : new Date(at).toISOString().slice(0, 16).replace('T', ' ');
   });
 
   protected chooseList(editionId: number): void {

@@ -57,7 +57,7 @@ export class PointerStore {
         if (!setup || dialHz === null || !this.isTuned(dialHz)) return null;
         const receiver = { ...setup.receiver, ifHz: this.trial.trialHz() };
         const { pitchHz, pitchSlope } = this.asked();
-        const period = this.trial.period();
+        const period = this.trial.time();
         const where = { site: setup.site, ...sourceFields(setup.source), period };
         return { receiver, ...where, dialHz, pitchHz, pitchSlope };
       },

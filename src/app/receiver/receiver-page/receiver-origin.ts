@@ -1,8 +1,12 @@
 import { computed, inject, Injectable } from '@angular/core';
 
+import type { Period } from '../../../../shared/radio/site';
 import { type ChartOrigin } from '../../charts/chart/chart-origin';
 import { kilohertz } from '../../charts/readings';
 import { ReceiverStore } from './receiver-store';
+
+const byDayOrNight = (period: Period): string =>
+  period === 'day' ? $localize`day` : $localize`night`;
 
 /** What the charts of a receiver's page rest on: set, IF on trial, site, list, time. */
 @Injectable()
@@ -19,7 +23,7 @@ export class ReceiverOrigin implements ChartOrigin {
     { label: $localize`Stations`, value: this.stations() },
     {
       label: $localize`Time`,
-      value: this.store.period() === 'day' ? $localize`day` : $localize`night`,
+      value: this.store.address().at ?? byDayOrNight(this.store.period()),
     },
   ]);
 

@@ -1,7 +1,7 @@
 import { TestbedHarnessEnvironment } from '@angular/cdk/testing/testbed';
 import { provideHttpClient } from '@angular/common/http';
 import { HttpTestingController, provideHttpClientTesting } from '@angular/common/http/testing';
-import { TestBed } from '@angular/core/testing';
+import { DeferBlockBehavior, TestBed } from '@angular/core/testing';
 import { provideRouter, Router, withComponentInputBinding } from '@angular/router';
 import { RouterTestingHarness } from '@angular/router/testing';
 
@@ -92,6 +92,8 @@ const listed = (...items: unknown[]) => ({ items, total: items.length });
 
 async function open(address: string, sites: unknown[] = [site], editions: unknown[] = [edition]) {
   TestBed.configureTestingModule({
+    // What comes into view later has specs of its own.
+    deferBlockBehavior: DeferBlockBehavior.Manual,
     providers: [
       provideRouter(
         [

@@ -21,7 +21,7 @@ import { addressParams, readAddress, type TrialAddress } from '../address/trial-
 import { applyChanges, type Changes } from '../set-up-trial/changes';
 import { ChangesAddress } from '../set-up-trial/changes-address';
 import { ASSUMED_FIELD_DB, type StationSource } from '../trial/station-source';
-import type { TrialInputs, TrialSetup } from '../trial/trial-inputs';
+import type { TrialCase, TrialInputs, TrialSetup } from '../trial/trial-inputs';
 
 const MOST = 500;
 /** Keys may go through many marks: the address follows when they rest. */
@@ -77,6 +77,7 @@ export class ReceiverStore implements TrialInputs {
     return this.sites.value()?.items.find(({ id }) => id === siteId);
   });
   readonly period = computed<Period>(() => this.address().period);
+  readonly time = computed(() => this.address().at ?? this.address().period);
   readonly trialHz = linkedSignal(() => this.address().ifHz ?? this.receiver.value()?.ifHz ?? 0);
   private readonly addressed = computed(() => this.address().picked ?? null);
   readonly picked = linkedSignal(() => this.addressed());
@@ -86,13 +87,23 @@ export class ReceiverStore implements TrialInputs {
     const raster = this.raster();
     if (!receiver || !saved || !site || !source || !raster) return null;
     const trial = this.setUpOnTrial() ? { saved } : {};
-    return { receiver, ...trial, site: bareSite(site), source, raster };
+    const others = this.others();
+    return { receiver, ...trial, site: bareSite(site), source, raster, others };
   });
 
   private readonly raster = computed(() => {
     const site = this.site();
     if (this.address().source?.kind === 'edition') return this.regionOf(this.edition())?.raster;
     return site && defaultRaster(site.ituRegion);
+  });
+
+  /** The further sites that the address names; those that are not there are left out. */
+  private readonly others = computed(() => {
+    const sites = this.sites.value()?.items ?? [];
+    return this.address().others.flatMap(({ siteId, source }): TrialCase[] => {
+      const site = sites.find(({ id }) => id === siteId);
+      return site ? [{ name: site.name, site: bareSite(site), source }] : [];
+    });
   });
 
   constructor() {

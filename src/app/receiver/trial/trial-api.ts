@@ -8,10 +8,16 @@ import {
   type AssessmentInput,
 } from '../../../../shared/contracts/assessment';
 import {
+  type BreakthroughHoursAnswer,
+  breakthroughHoursAnswer,
+  type BreakthroughHoursInput,
+} from '../../../../shared/contracts/breakthrough-hours';
+import {
   type CandidatesAnswer,
   candidatesAnswer,
   type CandidatesInput,
 } from '../../../../shared/contracts/candidates';
+import { type CuresAnswer, curesAnswer, type CuresInput } from '../../../../shared/contracts/cures';
 import {
   type FieldStrengthsAnswer,
   fieldStrengthsAnswer,
@@ -42,6 +48,16 @@ export class TrialApi {
     return this.http
       .post('/api/if-candidates', body)
       .pipe(map((answer) => candidatesAnswer.parse(answer)));
+  }
+
+  cures(body: CuresInput): Observable<CuresAnswer> {
+    return this.http.post('/api/cures', body).pipe(map((answer) => curesAnswer.parse(answer)));
+  }
+
+  hours(body: BreakthroughHoursInput): Observable<BreakthroughHoursAnswer> {
+    return this.http
+      .post('/api/breakthrough-hours', body)
+      .pipe(map((answer) => breakthroughHoursAnswer.parse(answer)));
   }
 
   whistles(body: WhistlesInput): Observable<WhistlesAnswer> {

@@ -2,6 +2,7 @@ import type { Signal, WritableSignal } from '@angular/core';
 
 import type { ReceiverDraft } from '../../../../shared/contracts/receiver';
 import type { SiteDraft } from '../../../../shared/contracts/site';
+import type { ReceptionTimeAsked } from '../../../../shared/contracts/quantities';
 import type { Period } from '../../../../shared/radio/site';
 import type { RasterRange } from '../../../../shared/radio/station';
 import type { StationSource } from './station-source';
@@ -14,13 +15,25 @@ export interface TrialSetup {
   readonly site: SiteDraft;
   readonly source: StationSource;
   readonly raster: readonly RasterRange[];
+  /** Further sites with their lists that one IF is to serve as well. */
+  readonly others?: readonly TrialCase[];
+}
+
+/** A site and where its stations come from. */
+export interface TrialCase {
+  readonly name: string;
+  readonly site: SiteDraft;
+  readonly source: StationSource;
 }
 
 /** Given by the page to the trial it shows. */
 export abstract class TrialInputs {
   /** Null until everything is chosen. */
   abstract readonly setup: Signal<TrialSetup | null>;
+  /** Day or night, also where a moment is judged. */
   abstract readonly period: Signal<Period>;
+  /** Day, night, or the moment that is judged. */
+  abstract readonly time: Signal<ReceptionTimeAsked>;
   /** The IF on trial, hertz. */
   abstract readonly trialHz: WritableSignal<number>;
   /** Mark picked in any chart or table. */

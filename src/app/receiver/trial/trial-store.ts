@@ -38,6 +38,7 @@ export class TrialStore {
 
   readonly setup = this.inputs.setup;
   readonly period = this.inputs.period;
+  readonly time = this.inputs.time;
   readonly trialHz = this.inputs.trialHz;
   readonly presentHz = computed(() => this.setup()?.receiver.ifHz ?? 0);
   readonly isMoved = computed(
@@ -58,7 +59,7 @@ export class TrialStore {
     computed(
       () => {
         const setup = this.setup();
-        return setup && { ...place(setup), period: this.period() };
+        return setup && { ...place(setup), period: this.time() };
       },
       { equal: sameText },
     ),
@@ -72,7 +73,7 @@ export class TrialStore {
         const setup = this.setup();
         if (!setup) return null;
         const { receiver } = setup;
-        return { ...place(setup), receiver, periods: PERIODS, ...candidateRange(receiver) };
+        return { ...cases(setup), receiver, periods: PERIODS, ...candidateRange(receiver) };
       },
       { equal: sameText },
     ),
@@ -86,7 +87,7 @@ export class TrialStore {
         const setup = this.setup();
         if (!setup) return null;
         const receiver = setup.saved ?? setup.receiver;
-        return { ...place(setup), receiver, period: this.period(), limit: 1 };
+        return { ...place(setup), receiver, period: this.time(), limit: 1 };
       },
       { equal: sameText },
     ),
@@ -123,7 +124,7 @@ export class TrialStore {
         if (!setup || !known || known.some(({ ifHz }) => ifHz === trialHz)) return null;
         const { receiver } = setup;
         const only = { fromHz: trialHz, toHz: trialHz, stepHz: 1 };
-        return { ...place(setup), receiver, periods: PERIODS, ...only };
+        return { ...cases(setup), receiver, periods: PERIODS, ...only };
       },
       { equal: sameText },
     ),
@@ -174,13 +175,16 @@ export class TrialStore {
     this.inputs.settle();
   }
 
-  private judge(question: AssessmentInput & TrialQuestion): Observable<Assessment> {
+  private judge(
+    question: AssessmentInput & Pick<TrialQuestion, 'receiver' | 'limit'>,
+  ): Observable<Assessment> {
     const confirmed = timer(SETTLE_MS).pipe(
       switchMap(() => this.api.assess(question)),
       share(),
     );
     const list = untracked(this.list);
-    const { receiver, period, limit } = question;
+    const { receiver, limit } = question;
+    const period = untracked(this.period);
     const tried = list ? this.engine.assess(list, { receiver, period, limit }) : EMPTY;
     return merge(
       tried.pipe(
@@ -194,11 +198,18 @@ export class TrialStore {
   private onTrial({ receiver }: TrialSetup) {
     return {
       receiver: { ...receiver, ifHz: this.trialHz() },
-      period: this.period(),
+      period: this.time(),
       leaveOutBetterThan: null,
       limit: MOST_RESPONSES,
     };
   }
 }
 
-const place = ({ site, source }: TrialSetup) => ({ site, ...sourceFields(source) });
+const place = ({ site, source }: Pick<TrialSetup, 'site' | 'source'>) => ({
+  site,
+  ...sourceFields(source),
+});
+
+/** Several sites at once where there are any: the best IF is then the one best where it is worst. */
+const cases = (setup: TrialSetup) =>
+  setup.others?.length ? { cases: [setup, ...setup.others].map(place) } : place(setup);
