@@ -53,6 +53,7 @@ const KEPT = `name, call_sign, frequency_hz, latitude, longitude, power_day_w, p
   pattern_db, hours, note, identity, fingerprint`;
 
 const MARKS_AT_ONCE = 20_000;
+const KEPT_AT_ONCE = 20_000;
 const CLEARED_AT_ONCE = 5000;
 
 /** Writes whole editions and takes them back; the caller's transaction makes it all or nothing. */
@@ -116,20 +117,54 @@ export class EditionWriter {
     return EditionModel.findOne({ where: { id, regionId } });
   }
 
-  /** Takes over what stays of another edition; answers how many stations that are. */
+  /**
+   * Takes over what stays of another edition, some thousand stations at a time; answers how many the
+   * edition has then, or null where the other was taken away meanwhile.
+   */
   async keep(
     editionId: number,
     from: number,
     replaced: readonly number[],
     transaction: Transaction,
-  ): Promise<number> {
-    await this.database.query(
-      `INSERT INTO stations (edition_id, ${KEPT})
-       SELECT ?, ${KEPT} FROM stations WHERE edition_id = ? ${replaced.length > 0 ? 'AND id NOT IN (?)' : ''}
-       ORDER BY id`,
-      { replacements: [editionId, from, [...replaced]], type: QueryTypes.INSERT, transaction },
-    );
+    beat: () => Promise<void>,
+  ): Promise<number | null> {
+    const { first, last } = await this.idsOf(from, transaction);
+    for (let at = first; at <= last; at += KEPT_AT_ONCE) {
+      const to = at + KEPT_AT_ONCE - 1;
+      const gone = replaced.filter((id) => id >= at && id <= to);
+      await this.database.query(
+        `INSERT INTO stations (edition_id, ${KEPT})
+         SELECT ?, ${KEPT} FROM stations
+         WHERE edition_id = ? AND id BETWEEN ? AND ? ${gone.length > 0 ? 'AND id NOT IN (?)' : ''}
+         ORDER BY id`,
+        {
+          replacements: [editionId, from, at, to, gone],
+          type: QueryTypes.INSERT,
+          transaction,
+        },
+      );
+      await beat();
+    }
+    if (!(await this.isListed(from, transaction))) return null;
     return StationModel.count({ where: { editionId }, transaction });
+  }
+
+  private async idsOf(editionId: number, transaction: Transaction) {
+    const [range] = await this.database.query<{ first: number; last: number }>(
+      `SELECT COALESCE(MIN(id), 1) AS first, COALESCE(MAX(id), 0) AS last
+       FROM stations WHERE edition_id = ?`,
+      { replacements: [editionId], type: QueryTypes.SELECT, transaction },
+    );
+    return range ?? { first: 1, last: 0 };
+  }
+
+  /** Whether an edition is still its region's; it stays so until the transaction ends. */
+  private async isListed(editionId: number, transaction: Transaction): Promise<boolean> {
+    const found = await this.database.query(
+      'SELECT id FROM editions WHERE id = ? AND region_id IS NOT NULL LOCK IN SHARE MODE',
+      { replacements: [editionId], type: QueryTypes.SELECT, transaction },
+    );
+    return found.length > 0;
   }
 
   async finish(editionId: number, stations: number, transaction: Transaction): Promise<void> {

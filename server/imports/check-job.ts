@@ -51,7 +51,7 @@ export async function judgeIntoSpool(
 ): Promise<ImportCheck> {
   const path = uploads.path(row.storedName);
   const raster = await regions.rasterOf(row.regionId);
-  const tally = await tallyBeside(editions, row.reading, before, raster);
+  const tally = await tallyBeside(editions, row.reading, before, raster, () => pulse.beat(0));
   const spool = await SpoolWriter.begin(uploads.spool(row.storedName), row.reading);
   const progress = new ReadProgress(await sizeOf(path), pulse);
   try {

@@ -15,7 +15,10 @@ import { type ListWriter, runStore, type StoreTools } from './store-job.ts';
 /** What the jobs need beside the table they wait in. */
 export interface JobTools extends StoreTools {
   readonly editions: ListWriter & { clearSome(): Promise<boolean> };
-  readonly uploads: StoreTools['uploads'] & { removeSpool(storedName: string): Promise<void> };
+  readonly uploads: StoreTools['uploads'] & {
+    removeSpool(storedName: string): Promise<void>;
+    remove(storedName: string): Promise<void>;
+  };
 }
 
 /** A long list must not keep a short one waiting. */
@@ -98,11 +101,18 @@ export class ImportJobs implements ImportWorker {
     const { uploads } = this.tools;
     try {
       await (job.state === 'checking' ? runCheck : runStore)(this.tools, job, pulse);
-      if (job.state === 'committing') await uploads.removeSpool(job.storedName);
+      if (job.state === 'committing') await this.tidy(job);
     } catch (error) {
       if (error instanceof JobLost) await uploads.removeSpool(job.storedName);
       else await this.leave(job, error);
     }
+  }
+
+  /** The file of a stored list is kept only for its rejected rows. */
+  private async tidy({ storedName, counts }: ImportModel): Promise<void> {
+    const { uploads } = this.tools;
+    if (counts?.rejected === 0) await uploads.remove(storedName);
+    else await uploads.removeSpool(storedName);
   }
 
   /** Leaves a job unfinished; a database that is away is waited for, so that it can be told. */

@@ -18,7 +18,8 @@ import { cancel, layOut, queueCheck, queueCommit, undo } from './import-claims.t
 import { ImportModel } from './import-model.ts';
 import { toProposal, toState } from './import-answers.ts';
 import { proposeList } from './list-proposal.ts';
-import { rejectedRows } from './list-rejects.ts';
+import { noRejects, rejectedRows } from './list-rejects.ts';
+import { BASE_GONE } from './store-job.ts';
 import { busy } from './import-busy.ts';
 import type { ImportWatch } from './import-watch.ts';
 import type { ImportWorker } from './import-worker.ts';
@@ -27,6 +28,7 @@ import type { ReceivedFile, Uploads } from './uploads.ts';
 /** What the imports need of the regions. */
 interface RegionRegister {
   get(actor: Actor, id: number): Promise<Region>;
+  byId(actor: Actor): Promise<ReadonlyMap<number, Region>>;
 }
 
 /** What the imports need of the editions. */
@@ -36,8 +38,10 @@ interface EditionStore {
   hide(editionId: number): Promise<void>;
 }
 
-const MAX_OPEN = 50;
+const MAX_OPEN = 20;
+const OPEN = ['uploaded', 'checking', 'ready', 'failed'] as const;
 const KEPT_DAYS = 7;
+const BASE_CHANGED = 'edition-changed';
 const NO_FINDINGS = { causes: [], remarks: [] };
 
 /** Takes lists in: upload, check, commit as a job, cancel and undo. */
@@ -68,11 +72,12 @@ export class Imports {
   /** Refuses an upload before its body is read. */
   async admit(actor: Actor, regionId: number): Promise<void> {
     await this.regions.get(actor, regionId);
-    const open = await ImportModel.count({
-      where: { regionId, state: ['uploaded', 'checking', 'ready', 'failed'] },
-    });
+    const regions = [...(await this.regions.byId(actor)).keys()];
+    const open = await ImportModel.count({ where: { regionId: regions, state: OPEN } });
     if (open >= MAX_OPEN) {
-      throw new ConflictError(`This region has ${open} open imports. Cancel some first.`);
+      throw new ConflictError(
+        `This workshop has ${open} imports that are neither stored nor cancelled. Cancel some first.`,
+      );
     }
     this.worker.wake(); // By the time the file is here the worker is awake.
   }
@@ -153,7 +158,7 @@ export class Imports {
    */
   async commit(actor: Actor, regionId: number, id: number): Promise<ImportState> {
     const row = await this.find(actor, regionId, id);
-    const { counts } = row;
+    const { counts, reading } = row;
     if (counts && counts.new + counts.changed + counts.same === 0) {
       throw new ConflictError(
         'No row of the list can be stored. Mend the file and upload it again.',
@@ -164,8 +169,12 @@ export class Imports {
       if ((await this.editions.latest(regionId)) !== row.baseEditionId) {
         throw new ConflictError(
           'Another edition was stored or undone since this list was checked. Check it again.',
-          'edition-changed',
+          BASE_CHANGED,
         );
+      }
+      const { addsTo } = reading;
+      if (addsTo !== null && !(await this.editions.named(addsTo, regionId))) {
+        throw new ConflictError(BASE_GONE, BASE_CHANGED);
       }
     });
     this.worker.wake();
@@ -190,10 +199,16 @@ export class Imports {
         'There are rejected rows only after a check, and until it is undone.',
       );
     }
-    return {
-      rows: rejectedRows(this.uploads.path(row.storedName), row.reading),
-      delimiter: row.reading.delimiter,
-    };
+    const { reading, storedName } = row;
+    if (row.counts.rejected === 0)
+      return { rows: noRejects(reading), delimiter: reading.delimiter };
+    if (!(await this.uploads.has(storedName))) {
+      throw new ConflictError(
+        `Rejected rows can be downloaded until ${KEPT_DAYS} days after the list was stored.`,
+      );
+    }
+    const rows = rejectedRows(this.uploads.path(storedName), reading);
+    return { rows, delimiter: reading.delimiter };
   }
 
   /** Cancels an import, or undoes it as a whole where it was committed. */
@@ -213,18 +228,20 @@ export class Imports {
 
   /** Ends what was left lying: old uploads, files without an import. */
   async tidy(): Promise<void> {
+    const long = new Date(Date.now() - KEPT_DAYS * 24 * 3_600_000);
     const old = await ImportModel.findAll({
       attributes: ['id'],
-      where: {
-        state: ['uploaded', 'checking', 'ready', 'failed'],
-        createdAt: { [Op.lt]: new Date(Date.now() - KEPT_DAYS * 24 * 3_600_000) },
-      },
+      where: { state: OPEN, createdAt: { [Op.lt]: long } },
     });
     for (const { id } of old) await cancel(id);
     await this.uploads.sweep(async (names) => {
+      const kept = [
+        { state: [...OPEN, 'committing'] },
+        { state: 'committed', updatedAt: { [Op.gte]: long } },
+      ];
       const rows = await ImportModel.findAll({
         attributes: ['storedName', 'state'],
-        where: { storedName: [...names], state: { [Op.notIn]: ['cancelled', 'undone'] } },
+        where: { storedName: [...names], [Op.or]: kept },
       });
       return new Map(rows.map(({ storedName, state }) => [storedName, state !== 'committed']));
     });

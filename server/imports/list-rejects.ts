@@ -18,13 +18,24 @@ export const rejectedImport = (fileName: string): number | null => {
   return digits === undefined ? null : Number(digits);
 };
 
+/** What stands above rejected rows. */
+const headersOf = ({ columns }: ListReading): string[] => [
+  ...REJECT_HEADERS,
+  ...columns.map(({ header }) => header),
+];
+
+/** The rejects of a list without any; its file need not be there. */
+export async function* noRejects(reading: ListReading): AsyncGenerator<string[]> {
+  yield await Promise.resolve(headersOf(reading));
+}
+
 /**
  * The rejected rows as CSV in UTF-8: `line` and `fault`, then the file's own columns, so
  * that the mended file can be imported again. Text that a spreadsheet would run as a formula is defused by
  * an apostrophe; numbers stay numbers.
  */
 export async function* rejectedRows(path: string, reading: ListReading): AsyncGenerator<string[]> {
-  yield [...REJECT_HEADERS, ...reading.columns.map(({ header }) => header)];
+  yield headersOf(reading);
   for await (const { judged } of judgedRows(path, reading, new RowTally())) {
     for (const row of judged) if ('faults' in row) yield rejected(row);
   }

@@ -8,27 +8,23 @@ export interface EditionMarks {
   marks(editionId: number): AsyncIterable<readonly PlacedRow[]>;
 }
 
-/** A tally that knows the edition a list is compared with: the one it adds to, else the one before. */
+/**
+ * A tally that knows the edition a list is compared with: the one it adds to, else the one before.
+ * @param beat Is waited for between some thousand stations: reading a long edition takes its time.
+ */
 export async function tallyBeside(
   editions: EditionMarks,
   { addsTo }: Pick<ListReading, 'addsTo'>,
   before: number | null,
   raster: readonly RasterRange[],
+  beat: () => Promise<void>,
 ): Promise<RowTally> {
-  if (addsTo !== null) return addingTally(editions, addsTo, raster);
-  const tally = new RowTally(raster);
-  if (before === null) return tally;
-  for await (const marks of editions.marks(before)) tally.know(marks);
-  return tally;
-}
-
-/** A tally of rows that are added to an edition. */
-export async function addingTally(
-  editions: EditionMarks,
-  addsTo: number,
-  raster: readonly RasterRange[] = [],
-): Promise<AddingTally> {
-  const tally = new AddingTally(raster);
-  for await (const marks of editions.marks(addsTo)) tally.know(marks);
+  const tally = addsTo === null ? new RowTally(raster) : new AddingTally(raster);
+  const beside = addsTo ?? before;
+  if (beside === null) return tally;
+  for await (const marks of editions.marks(beside)) {
+    tally.know(marks);
+    await beat();
+  }
   return tally;
 }

@@ -1,5 +1,6 @@
 import type { Sequelize, Transaction } from 'sequelize';
 
+import { BadListError } from './bad-list-error.ts';
 import { type CheckedEditions, type CheckTools, judgeIntoSpool } from './check-job.ts';
 import { finishCommit } from './import-claims.ts';
 import type { ImportModel } from './import-model.ts';
@@ -17,15 +18,23 @@ export interface ListWriter extends CheckedEditions {
     stations: readonly StationValues[],
     transaction: Transaction,
   ): Promise<void>;
-  /** Takes over what stays of another edition; answers how many stations the new one has then. */
+  /**
+   * Takes over what stays of another edition; answers how many stations the new one has then, or null
+   * where that edition is no longer there.
+   */
   keep(
     editionId: number,
     from: number,
     replaced: readonly number[],
     transaction: Transaction,
-  ): Promise<number>;
+    beat: () => Promise<void>,
+  ): Promise<number | null>;
   finish(editionId: number, stations: number, transaction: Transaction): Promise<void>;
 }
+
+/** Why rows cannot be added to an edition that was undone or deleted. */
+export const BASE_GONE =
+  'The edition that these rows were to complete is no longer there. Check the list again.';
 
 /** What storing needs beside the import. */
 export interface StoreTools extends CheckTools {
@@ -86,5 +95,8 @@ async function storeSpool(
   }
   if (replaced === null) throw new Error('The spool is gone, or is not whole.');
   const { addsTo } = reading;
-  return addsTo === null ? stored : editions.keep(editionId, addsTo, replaced, transaction);
+  if (addsTo === null) return stored;
+  const whole = await editions.keep(editionId, addsTo, replaced, transaction, () => pulse.beat(1));
+  if (whole === null) throw new BadListError(BASE_GONE);
+  return whole;
 }

@@ -1,6 +1,6 @@
 import { randomUUID } from 'node:crypto';
 import { mkdirSync } from 'node:fs';
-import { readdir, rm, stat } from 'node:fs/promises';
+import { access, readdir, rm, stat } from 'node:fs/promises';
 import { basename, join } from 'node:path';
 
 import type { Request, Response } from 'express';
@@ -89,6 +89,13 @@ export class Uploads {
   /** Where the good rows of a checked list wait to be stored. */
   spool(storedName: string): string {
     return `${this.path(storedName)}${SPOOL_ENDING}`;
+  }
+
+  has(storedName: string): Promise<boolean> {
+    return access(this.path(storedName)).then(
+      () => true,
+      () => false,
+    );
   }
 
   async remove(storedName: string): Promise<void> {

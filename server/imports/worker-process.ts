@@ -8,7 +8,7 @@ import { releaseJobsOf } from './import-claims.ts';
 import type { ImportWorker } from './import-worker.ts';
 
 const MAIN = fileURLToPath(new URL('../import-worker-main.ts', import.meta.url));
-const LOOK_EVERY_MS = 5000;
+const LOOK_EVERY_MS = 1000;
 const STOP_MS = 10_000;
 
 /** What the worker's process says. */

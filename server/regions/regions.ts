@@ -63,9 +63,18 @@ export class Regions {
     return this.get(actor, id);
   }
 
-  /** Removes the region with its editions; plans keep what they were judged against. */
+  /**
+   * Removes the region; its editions are gone at once, their many stations are cleared bit by bit.
+   * Plans keep what they were judged against.
+   */
   async remove(actor: Actor, id: number): Promise<void> {
-    await this.whileFree(actor, id, (row) => row.destroy());
+    await this.whileFree(actor, id, async (row) => {
+      await this.database.query('UPDATE editions SET region_id = NULL WHERE region_id = ?', {
+        replacements: [id],
+        type: QueryTypes.UPDATE,
+      });
+      await row.destroy();
+    });
   }
 
   /** An import in progress holds the region; waiting for it could take as long as the import. */

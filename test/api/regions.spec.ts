@@ -1,4 +1,4 @@
-import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { afterAll, beforeAll, describe, expect, it, vi } from 'vitest';
 
 import { type SuppliedRaster, suppliedRaster } from '../../shared/contracts/raster.ts';
 import { region } from '../../shared/contracts/region.ts';
@@ -78,7 +78,9 @@ describe('a region', () => {
     expect(changed.body).toMatchObject({ name: 'New', ituRegion: 2, raster, editions: 1 });
     await admin.get(`/api/regions/${id}`).expect(404);
     await admin.get(`/api/editions/${editionId}`).expect(404);
-    expect(await rowsOf(server, `stations WHERE edition_id = ${editionId}`)).toBe(0);
+    server.services.importWorker.wake(); // As it does by itself in a process of its own.
+    const left = () => rowsOf(server, `stations WHERE edition_id = ${editionId}`);
+    await vi.waitUntil(async () => (await left()) === 0);
   });
 
   it('keeps dated rasters until others are given or the ITU Region changes', async () => {

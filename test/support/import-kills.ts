@@ -43,8 +43,13 @@ export class Mortals {
 
   async kill(who: 'api' | 'worker' | 'database'): Promise<void> {
     if (who === 'worker') {
-      const worker = runningProcesses().find(({ parentPid }) => parentPid === this.api?.child.pid);
-      if (worker) process.kill(worker.pid, 'SIGKILL');
+      const worker = runningProcesses().find(
+        ({ parentPid, command }) =>
+          parentPid === this.api?.child.pid &&
+          command.some((word) => word.includes('import-worker')),
+      );
+      if (!worker) throw new Error('There is no worker to kill.');
+      process.kill(worker.pid, 'SIGKILL');
       return;
     }
     const child = who === 'api' ? this.api?.child : this.mariadb;
