@@ -1,3 +1,4 @@
+import { TestKey } from '@angular/cdk/testing';
 import { TestbedHarnessEnvironment } from '@angular/cdk/testing/testbed';
 import { provideHttpClient } from '@angular/common/http';
 import { HttpTestingController, provideHttpClientTesting } from '@angular/common/http/testing';
@@ -8,6 +9,7 @@ import { MatExpansionPanelHarness } from '@angular/material/expansion/testing';
 import { MatFormFieldHarness } from '@angular/material/form-field/testing';
 import { MatInputHarness } from '@angular/material/input/testing';
 import { MatRadioButtonHarness } from '@angular/material/radio/testing';
+import { MatSelectHarness } from '@angular/material/select/testing';
 import { provideRouter, Router, withComponentInputBinding } from '@angular/router';
 import { RouterTestingHarness } from '@angular/router/testing';
 
@@ -121,6 +123,28 @@ describe('setting up a receiver', () => {
       aerial: { kind: 'primary', resonanceHz: 300_000, q: 30 },
       secondConversion: { ifHz: 50_000, oscillator: 'below' },
       bands: [{ oscillatorHarmonic: 3 }],
+    });
+  });
+
+  it('takes a selectivity by its IF transformers', async () => {
+    const { calls, loader, input, press, load } = await arrange('/receivers/3/set-up');
+    await load();
+    const known = MatFormFieldHarness.with({ floatingLabelText: 'Selectivity known by' });
+    const select = await (await loader.getHarness(known)).getControl(MatSelectHarness);
+    await (await select?.host())?.sendKeys(TestKey.DOWN_ARROW);
+    await press('Save');
+    calls.verify();
+    const problems = await loader.getHarness(FormProblemsHarness);
+    expect(await problems.messages()).toEqual([
+      'Give the loaded Q of each winding, for example 60.',
+    ]);
+
+    await (await input('Q of a winding')).setValue('60');
+    await press('Save');
+
+    const { request } = calls.expectOne({ url: '/api/receivers/3', method: 'PUT' });
+    expect(request.body).toMatchObject({
+      selectivity: { kind: 'transformers', count: 2, q: 60, coupling: 1 },
     });
   });
 

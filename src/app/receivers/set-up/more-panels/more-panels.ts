@@ -14,6 +14,7 @@ import { MixerFields } from '../mixer-fields/mixer-fields';
 import type { ReceiverControls } from '../receiver-form/controls';
 import { SecondConversionFields } from '../second-conversion-fields/second-conversion-fields';
 import { SelectivityFields } from '../selectivity-fields/selectivity-fields';
+import { TrackingFields } from '../tracking-fields/tracking-fields';
 import { TrapFields } from '../trap-fields/trap-fields';
 import { isUntouched, type Panel, panelOf, panelsOf, summaries } from './panels';
 
@@ -30,6 +31,7 @@ import { isUntouched, type Panel, panelOf, panelsOf, summaries } from './panels'
     MixerFields,
     SecondConversionFields,
     SelectivityFields,
+    TrackingFields,
     TrapFields,
   ],
   templateUrl: './more-panels.html',
@@ -47,6 +49,7 @@ export class MorePanels {
     { name: 'selectivity', title: $localize`Selectivity and audio` },
     { name: 'circuits', title: $localize`Tuned circuits` },
     { name: 'bands', title: $localize`Oscillator, listening and dial of each band` },
+    { name: 'tracking', title: $localize`Tracking of the oscillator` },
     { name: 'aerial', title: $localize`Aerial` },
     { name: 'mixer', title: $localize`Stray pick-up and mixer` },
     { name: 'filter', title: $localize`Fixed filter` },

@@ -9,6 +9,8 @@ describe('the panels of a set-up', () => {
     ['aerial.resonanceHz', 'aerial'],
     ['secondConversion.ifHz', 'second'],
     ['bands.1.tuningToleranceHz', 'bands'],
+    ['bands.0.tracking.points.2', 'tracking'],
+    ['selectivity.points.3.offsetHz', 'selectivity'],
     ['bands.2.lowHz', undefined],
     ['name', undefined],
   ])('hide %s in %s', (path, panel) => {

@@ -4,7 +4,16 @@ import type { ReceiverControls, ReceiverFields } from '../receiver-form/controls
 
 /** The parts of the set-up that open on demand. */
 export type Panel =
-  'selectivity' | 'circuits' | 'bands' | 'aerial' | 'mixer' | 'filter' | 'bfo' | 'trap' | 'second';
+  | 'selectivity'
+  | 'circuits'
+  | 'bands'
+  | 'tracking'
+  | 'aerial'
+  | 'mixer'
+  | 'filter'
+  | 'bfo'
+  | 'trap'
+  | 'second';
 
 const panelOfField: Readonly<Record<string, Panel>> = {
   selectivity: 'selectivity',
@@ -26,6 +35,7 @@ const panelOfBand: Readonly<Record<string, Panel>> = {
   assumedWantedDb: 'bands',
   tuningToleranceHz: 'bands',
   dialStepHz: 'bands',
+  tracking: 'tracking',
 };
 
 /** The panel that hides a field, if one does. */
@@ -53,7 +63,7 @@ export function summaries(fields: ReceiverFields): Record<Panel, string> {
   const { selectivity, strayDb, fixedFilter, bfo, trap, aerial, secondConversion, bands } = fields;
   const none = $localize`none`;
   return {
-    selectivity: widths(selectivity),
+    selectivity: selectivityWords(selectivity),
     circuits: circuits(bands),
     mixer: strayDb.fitted
       ? $localize`at most ${strayDb.if ?? '…'}:if: dB at the IF, ${strayDb.image ?? '…'}:image: dB for images`
@@ -64,15 +74,28 @@ export function summaries(fields: ReceiverFields): Record<Panel, string> {
     aerial: aerialWords(aerial),
     second: secondConversion.fitted ? frequency(secondConversion.ifHz) : none,
     bands: harmonics(bands),
+    tracking: trackings(bands),
   };
 }
 
 const frequency = (hz: number | null): string => (hz === null ? '…' : formatFrequency(hz));
 
-function widths({ other, b6Hz, b60Hz }: ReceiverFields['selectivity']): string {
-  return other === null
-    ? $localize`${frequency(b6Hz)}:b6: at −6 dB, ${frequency(b60Hz)}:b60: at −60 dB`
-    : $localize`known in another way`;
+function selectivityWords(fields: ReceiverFields['selectivity']): string {
+  const { kind, b6Hz, b60Hz, count, q, points } = fields;
+  if (kind === 'transformers') {
+    return $localize`${count ?? '…'}:count: IF transformers of Q ${q ?? '…'}:q:`;
+  }
+  return kind === 'table'
+    ? $localize`a measured curve of ${points.length}:count: points`
+    : $localize`${frequency(b6Hz)}:b6: at −6 dB, ${frequency(b60Hz)}:b60: at −60 dB`;
+}
+
+function trackings(bands: ReceiverFields['bands']): string {
+  const known = bands.filter(({ tracking }) => tracking.fitted).length;
+  if (known === 0) return $localize`taken as perfect`;
+  return known === bands.length
+    ? $localize`known on every band`
+    : $localize`known on ${known}:known: of ${bands.length}:all: bands`;
 }
 
 function aerialWords({ kind, resonanceHz }: ReceiverFields['aerial']): string {

@@ -1,27 +1,12 @@
-import {
-  type AbstractControl,
-  FormArray,
-  FormControl,
-  FormGroup,
-  type ValidatorFn,
-} from '@angular/forms';
+import { type AbstractControl, FormArray, FormGroup } from '@angular/forms';
 
 import type { ReceiverDraft } from '../../../../../shared/contracts/receiver';
 import { needed } from '../../../ui/form-problems/form-issues';
+import { fittedNumber, held, neededWhile, number } from './held';
+import { selectivityControls } from './selectivity-controls';
+import { trackingControls } from './tracking-controls';
 
 type Band = ReceiverDraft['bands'][number];
-
-const held = <T>(value: T, ...validators: ValidatorFn[]) =>
-  new FormControl(value, { nonNullable: true, validators });
-const number = (value: number | null, message?: string) =>
-  held(value, ...(message === undefined ? [] : [needed(message)]));
-
-/** Needed only while the group's box "fitted" is ticked. */
-function neededWhenFitted(message: string): ValidatorFn {
-  const check = needed(message);
-  return (control) => (control.parent?.get('fitted')?.value === true ? check(control) : null);
-}
-const fittedNumber = (message: string) => held<number | null>(null, neededWhenFitted(message));
 
 const q = () => $localize`Give the loaded Q.`;
 
@@ -29,7 +14,7 @@ export const circuitControls = (qLow: number | null = 80, qHigh: number | null =
   new FormGroup({ qLow: number(qLow, q()), qHigh: number(qHigh, q()) });
 export type CircuitControls = ReturnType<typeof circuitControls>;
 
-/** A band's row. What has no field of its own is carried along unchanged. */
+/** A band's row, and what is said of it below. */
 export const bandControls = () =>
   new FormGroup({
     name: held('', needed($localize`Name the band, for example Medium wave.`)),
@@ -42,7 +27,7 @@ export const bandControls = () =>
     assumedWantedDb: number(null),
     tuningToleranceHz: number(null),
     dialStepHz: number(null),
-    tracking: held<Band['tracking']>(null),
+    tracking: trackingControls(),
   });
 export type BandControls = ReturnType<typeof bandControls>;
 
@@ -80,22 +65,25 @@ const filterControls = () =>
     widthHz: fittedNumber($localize`Give the filter's width.`),
   });
 
-/** Needed only while the aerial is coupled by a resonant primary. */
-function neededOfPrimary(message: string): ValidatorFn {
-  const check = needed(message);
-  return (control) => (control.parent?.get('kind')?.value === 'primary' ? check(control) : null);
-}
+const isPrimary = (group: AbstractControl | null): boolean =>
+  group?.get('kind')?.value === 'primary';
 
 const aerialControls = () =>
   new FormGroup({
     kind: held<'plain' | 'primary' | 'loop'>('plain'),
     resonanceHz: held<number | null>(
       null,
-      neededOfPrimary($localize`Give the frequency the primary resonates on, with the aerial.`),
+      neededWhile(
+        isPrimary,
+        $localize`Give the frequency the primary resonates on, with the aerial.`,
+      ),
     ),
     q: held<number | null>(
       null,
-      neededOfPrimary($localize`Give the Q of the primary, with the usual dummy aerial about 30.`),
+      neededWhile(
+        isPrimary,
+        $localize`Give the Q of the primary, with the usual dummy aerial about 30.`,
+      ),
     ),
   });
 
@@ -105,27 +93,6 @@ const secondConversionControls = () =>
     ifHz: fittedNumber($localize`Give the second IF, for example 85 kHz.`),
     oscillator: held<Band['oscillator']>('above'),
   });
-
-const selectivityControls = () =>
-  new FormGroup({
-    /** A selectivity known in another way than by two widths, carried along unchanged. */
-    other: held<ReceiverDraft['selectivity'] | null>(null),
-    b6Hz: held<number | null>(
-      null,
-      neededWithoutOther($localize`Give the width at −6 dB, for example 6 kHz.`),
-    ),
-    b60Hz: held<number | null>(
-      null,
-      neededWithoutOther($localize`Give the width at −60 dB, for example 22 kHz.`),
-    ),
-  });
-
-function neededWithoutOther(text: string) {
-  return (control: AbstractControl) => {
-    const other: unknown = control.parent?.get('other')?.value;
-    return other == null ? needed(text)(control) : null;
-  };
-}
 
 /** Every field of a receiver's set-up, in the order of the page. */
 export const receiverControls = () =>

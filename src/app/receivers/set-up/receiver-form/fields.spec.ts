@@ -51,10 +51,30 @@ describe('the fields of a set-up', () => {
     expect(throughTheForm(typical)).toEqual(typical);
   });
 
-  it('carry along a selectivity known in another way', () => {
-    const selectivity = { kind: 'transformers', count: 2, q: 60, coupling: 1 } as const;
+  it.each([
+    { kind: 'transformers', count: 2, q: 60, coupling: 1.2 },
+    {
+      kind: 'table',
+      points: [0, 3000, 4500, 10_000].map((offsetHz) => ({
+        offsetHz,
+        rejectionDb: offsetHz / 200,
+      })),
+    },
+  ] as const)('give back a selectivity by $kind', (selectivity) => {
+    const receiver = receiverDraft.parse({ ...whole, selectivity });
 
-    expect(throughTheForm({ ...whole, selectivity })).toMatchObject({ selectivity });
+    expect(throughTheForm(receiver)).toEqual(receiver);
+  });
+
+  it('give back tracking data in full', () => {
+    const tracking = {
+      ...{ gangMinF: 4e-11, gangMaxF: 4e-10, strayF: 5e-12, trimmer: 'coil' },
+      ...{ points: [600e3, 1e6, 1.4e6], fixedPadderF: 4.4e-10, alignHz: [600e3, 1.4e6] },
+    };
+    const bands = [{ ...whole.bands[0], oscillator: 'above', tracking }];
+    const receiver = receiverDraft.parse({ ...whole, bands });
+
+    expect(throughTheForm(receiver)).toEqual(receiver);
   });
 
   it('come back from a draft as they were left, complete or not', () => {

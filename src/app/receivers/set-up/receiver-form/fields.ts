@@ -8,15 +8,17 @@ import {
   type ReceiverControls,
   type ReceiverFields,
 } from './controls';
+import { pointControls, selectivityFieldsOf, selectivityOf } from './selectivity-controls';
+import { trackingFieldsOf, trackingOf } from './tracking-controls';
 
 /** What the fields say, as the contract wants it; it may still be incomplete or wrong. */
 export function receiverOf(fields: ReceiverFields): unknown {
   const { selectivity, strayDb, fixedFilter, bfo, trap, secondConversion, aerial, ...rest } =
     fields;
-  const { other, ...widths } = selectivity;
   return {
     ...rest,
-    selectivity: other ?? { kind: 'widths', ...widths },
+    bands: rest.bands.map((band) => ({ ...band, tracking: trackingOf(band.tracking) })),
+    selectivity: selectivityOf(selectivity),
     strayDb: whenFitted(strayDb),
     fixedFilter: whenFitted(fixedFilter),
     bfo: whenFitted(bfo),
@@ -42,11 +44,12 @@ export function fieldsOf(receiver: ReceiverDraft): Patch {
     receiver;
   return {
     ...rest,
-    bands: rest.bands.map((band) => ({ ...band, circuits: [...band.circuits] })),
-    selectivity:
-      selectivity.kind === 'widths'
-        ? { other: null, b6Hz: selectivity.b6Hz, b60Hz: selectivity.b60Hz }
-        : { other: selectivity, b6Hz: null, b60Hz: null },
+    bands: rest.bands.map((band) => ({
+      ...band,
+      circuits: [...band.circuits],
+      tracking: trackingFieldsOf(band.tracking),
+    })),
+    selectivity: selectivityFieldsOf(selectivity),
     strayDb: { fitted: strayDb !== null, ...strayDb },
     fixedFilter: { fitted: fixedFilter !== null, ...fixedFilter },
     bfo: { fitted: bfo !== null, ...bfo },
@@ -59,6 +62,7 @@ export function fieldsOf(receiver: ReceiverDraft): Patch {
 /** Rows a draft must have; the rest of it may be missing or strange, the fields sort it out. */
 const rowsOfDraft = z.looseObject({
   bands: z.array(z.looseObject({ circuits: z.array(z.looseObject({})) })).min(1),
+  selectivity: z.looseObject({ points: z.array(z.looseObject({})).min(1).optional() }).optional(),
 });
 
 /** Writes whatever fits into the fields; answers whether it had the shape of fields at all. */
@@ -70,6 +74,8 @@ export function writeFields(form: ReceiverControls, fields: unknown): boolean {
     const band = form.controls.bands.controls[at];
     if (band) resize(band.controls.circuits, circuits.length, circuitControls);
   });
+  const points = rows.data.selectivity?.points;
+  if (points) resize(form.controls.selectivity.controls.points, points.length, pointControls);
   form.patchValue(fields as Patch);
   return true;
 }

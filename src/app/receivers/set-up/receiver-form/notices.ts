@@ -56,8 +56,8 @@ function ifInsideBand({ ifHz, bands }: ReceiverFields): Notice[] {
 }
 
 function steepSelectivity({ selectivity, fixedFilter }: ReceiverFields): Notice[] {
-  const { b6Hz, b60Hz, other } = selectivity;
-  if (b6Hz === null || b60Hz === null || other !== null || fixedFilter.fitted) return [];
+  const { b6Hz, b60Hz, kind } = selectivity;
+  if (b6Hz === null || b60Hz === null || kind !== 'widths' || fixedFilter.fitted) return [];
   const factor = b60Hz / b6Hz;
   if (factor <= 1 || factor >= LEAST_SHAPE_FACTOR) return [];
   return [

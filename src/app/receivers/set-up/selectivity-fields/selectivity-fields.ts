@@ -1,14 +1,26 @@
 import { ChangeDetectionStrategy, Component, input } from '@angular/core';
-import { MatButtonModule } from '@angular/material/button';
+import { ReactiveFormsModule } from '@angular/forms';
+import { MatFormFieldModule } from '@angular/material/form-field';
+import { MatSelectModule } from '@angular/material/select';
 
 import { checkWithForm } from '../../../ui/form-problems/check-with-form';
 import { QuantityInput } from '../../../ui/quantity/quantity-input';
+import { CurveRows } from '../curve-rows/curve-rows';
 import type { ReceiverControls } from '../receiver-form/controls';
+import { TransformerFields } from '../transformer-fields/transformer-fields';
+import { widthsInWords } from './selectivity-widths';
 
-/** The IF amplifier's two widths and what follows it. */
+/** The IF amplifier's selectivity, by whatever is known of it, and what follows it. */
 @Component({
   selector: 'app-selectivity-fields',
-  imports: [MatButtonModule, QuantityInput],
+  imports: [
+    CurveRows,
+    MatFormFieldModule,
+    MatSelectModule,
+    QuantityInput,
+    ReactiveFormsModule,
+    TransformerFields,
+  ],
   templateUrl: './selectivity-fields.html',
   changeDetection: ChangeDetectionStrategy.OnPush,
 })
@@ -19,15 +31,8 @@ export class SelectivityFields {
     checkWithForm(this.form);
   }
 
-  /** B60 over B6, once both are known. */
-  protected shapeFactor(): string | null {
-    const { b6Hz, b60Hz } = this.form().controls.selectivity.getRawValue();
-    return b6Hz !== null && b60Hz !== null && b60Hz > b6Hz ? (b60Hz / b6Hz).toFixed(2) : null;
-  }
-
-  protected useWidths(): void {
-    const { selectivity } = this.form().controls;
-    selectivity.controls.other.setValue(null);
-    selectivity.markAsDirty();
+  protected widths(): string | null {
+    const { selectivity, ifHz } = this.form().controls;
+    return widthsInWords(selectivity.getRawValue(), ifHz.value);
   }
 }
