@@ -6,6 +6,7 @@ import {
 import { InvalidError } from '../http/errors.ts';
 import { openUnits } from './column-matching.ts';
 import { readPatternHeader } from './pattern-headers.ts';
+import { unplaced } from './place-columns.ts';
 
 type Asked = NonNullable<ImportMatching['columns']>;
 type Issue = InvalidError['issues'][number];
@@ -117,9 +118,6 @@ function missing(columns: readonly ImportColumn[]): Issue[] {
   if (!has('frequency')) {
     issues.push({ path: 'columns', message: 'Say which column holds the frequency.' });
   }
-  if (has('latitude') !== has('longitude')) {
-    const lacking = has('latitude') ? 'longitude' : 'latitude';
-    issues.push({ path: 'columns', message: `Say which column holds the ${lacking}.` });
-  }
+  issues.push(...unplaced(columns).map((message) => ({ path: 'columns', message })));
   return issues;
 }

@@ -3,6 +3,7 @@ import { InvalidError } from '../http/errors.ts';
 import { askedColumns } from './asked-columns.ts';
 import { type Inspection, inspectList } from './list-inspection.ts';
 import type { ListReading } from './list-reading.ts';
+import { sayEastOrWest } from './place-columns.ts';
 
 /**
  * How a file is read once its text is to be taken apart otherwise than it was: looked at anew, as
@@ -36,7 +37,7 @@ export async function asLaidOut(
  */
 export function asMatched(reading: ListReading, asked: ImportMatching): ListReading {
   const columns = askedColumns(reading.columns, asked.columns);
-  const isPlaced = columns.some(({ field }) => field === 'longitude');
+  const isPlaced = columns.some(sayEastOrWest);
   const letterO = asked.letterO ?? reading.letterO;
   if (isPlaced && letterO === 'open') {
     throw new InvalidError({

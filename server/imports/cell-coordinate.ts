@@ -40,7 +40,8 @@ export function readCoordinate(
   { unit, mark, letterO = null }: CoordinateSpelling,
 ): number | null {
   const plain = unit === 'dms' ? null : readNumber(cell, mark);
-  if (plain !== null) return Math.abs(plain) <= LIMITS[axis] ? plain : null;
+  // "11E36" is 11 degrees 36 minutes east, no power of ten.
+  if (plain !== null && !/e/i.test(cell)) return Math.abs(plain) <= LIMITS[axis] ? plain : null;
   const text = cell.trim().replace('\u2212', '-').replace(MARK_OF_SECONDS, '$1$2');
   const inside = LETTER_INSIDE.exec(text);
   const { body, word, minus } = inside ? joined(inside) : split(text, axis);

@@ -7,9 +7,12 @@ import {
 import { readCoordinate } from './cell-coordinate.ts';
 import type { Axis } from './cell-hemisphere.ts';
 import { type DecimalMark, isBlank } from './cell-number.ts';
+import { readPlace } from './cell-place.ts';
 import { readHeader } from './header-words.ts';
 import type { ListReading } from './list-reading.ts';
 import { patternColumns } from './pattern-headers.ts';
+import { placeColumns } from './place-headers.ts';
+import { unplaced } from './place-columns.ts';
 
 /**
  * Proposes what each column holds, by its header. Of two columns for one field the first is taken.
@@ -22,13 +25,16 @@ export function proposeColumns(
 ): ImportColumn[] {
   const taken = new Set<ImportField>();
   const pattern = patternColumns(headers);
+  const split = placeColumns(headers);
   return headers.map((header, index) => {
     const bearing = pattern.get(index);
     if (bearing) return { header, field: 'pattern', unit: patternUnit(bearing.unit) };
-    const { field, unit } = readHeader(header);
-    if (field === null || taken.has(field)) return { header, field: null, unit: null };
-    taken.add(field);
+    const part = split.get(index);
+    const { field, unit } = part ? { field: part, unit: null } : readHeader(header);
     const cells = sample.map((row) => row[index] ?? '').filter((cell) => !isBlank(cell));
+    const isOther = field === 'place' && !arePlaces(cells, mark);
+    if (field === null || taken.has(field) || isOther) return { header, field: null, unit: null };
+    taken.add(field);
     return { header, field, unit: unitOf(field, unit, cells, mark) };
   });
 }
@@ -46,6 +52,10 @@ function unitOf(
   if (field === 'latitude' || field === 'longitude') return angleUnit(field, cells, mark);
   return importUnitsOf[field].length === 0 ? null : cellUnit(field, cells);
 }
+
+/** A column called "Position" may hold anything: it is taken for places if half of it reads so. */
+const arePlaces = (cells: readonly string[], mark: DecimalMark): boolean =>
+  cells.filter((cell) => readPlace(cell, mark, 'east') !== null).length * 2 > cells.length;
 
 /** Packed digits (DDMMSS) are no decimal degrees: where most cells are, the unit is dms. */
 function angleUnit(axis: Axis, cells: readonly string[], mark: DecimalMark): ImportUnit {
@@ -74,7 +84,7 @@ export function isComplete({
 }: Pick<ListReading, 'columns' | 'letterO'>): boolean {
   const fields = new Set(columns.map(({ field }) => field));
   const isNamed = fields.has('name') || fields.has('callSign');
-  const isPlaced = fields.has('latitude') === fields.has('longitude');
+  const isPlaced = unplaced(columns).length === 0;
   const isClear = openUnits(columns).length === 0 && letterO !== 'open';
   return fields.has('frequency') && isNamed && isPlaced && isClear;
 }

@@ -78,6 +78,8 @@ function markOf(cell: string): { sign: 1 | -1; sure: boolean } | null {
   const behind = digits.slice(digits.lastIndexOf(last) + 1);
   const sign = last === ',' ? 1 : -1;
   const before = marks.at(-2);
+  // "48.1467, 11.6083" is two numbers.
+  if (before !== last && marks.slice(0, -1).includes(last)) return null;
   if (before !== undefined && before !== last) return { sign, sure: true };
   // "46.58.48" is no number but degrees, minutes and seconds.
   const isGrouped = /^\d{1,3}(?:[.,]\d{3})+$/.test(digits);

@@ -11,6 +11,7 @@ import { type CsvLayout, type CsvRow, csvRows } from './csv-rows.ts';
 import { findDecimalMark } from './decimal-mark.ts';
 import { findHeader } from './header-place.ts';
 import type { ListReading } from './list-reading.ts';
+import { sayEastOrWest } from './place-columns.ts';
 import { checkEncoding, detectEncoding } from './text-encoding.ts';
 
 /** What a file seems to be. */
@@ -55,8 +56,8 @@ export async function inspectList(path: string, asked: ImportLayout = {}): Promi
 }
 
 function letterOOf(columns: readonly ImportColumn[], rows: readonly string[][]): LetterO {
-  const at = columns.findIndex(({ field }) => field === 'longitude');
-  return at < 0 ? null : meaningOfO(rows.map((row) => row[at] ?? ''));
+  const places = columns.flatMap((column, index) => (sayEastOrWest(column) ? [index] : []));
+  return meaningOfO(rows.flatMap((row) => places.map((index) => row[index] ?? '')));
 }
 
 async function firstRows(path: string, layout: CsvLayout): Promise<CsvRow[]> {

@@ -4,15 +4,13 @@ import type {
   ImportField,
   ImportUnit,
 } from '../../shared/contracts/list-import.ts';
-import { readCoordinate } from './cell-coordinate.ts';
-import type { Axis } from './cell-hemisphere.ts';
-import { readLocator } from './cell-locator.ts';
 import { isBlank } from './cell-number.ts';
 import { type Period, readPeriod } from './cell-period.ts';
 import { readFrequency, readPower } from './cell-unit.ts';
 import type { CsvRow } from './csv-rows.ts';
 import type { ListReading } from './list-reading.ts';
 import { PatternReader } from './pattern-reader.ts';
+import { PlaceReader } from './place-reader.ts';
 
 /** A row that can be stored. */
 export interface StationRow {
@@ -40,13 +38,13 @@ const UNTIDY = /[\p{Cc}\s]{2}|[\p{Cc}\u00a0]/u;
 /** As our own exports keep a spreadsheet from running a cell. */
 const DEFUSED = /^'(?='*[=+\-@])/;
 const DECIMAL_WORDS = { '.': 'a decimal point', ',': 'a decimal comma' } as const;
-const NOWHERE = { latitude: null, longitude: null } as const;
 
 /** Reads the rows of one list by its matching; built once a file, called once a row. */
 export class RowReader {
   readonly #at = new Map<ImportField, number>();
   readonly #columns: readonly ImportColumn[];
   readonly #reading: ListReading;
+  readonly #place: PlaceReader;
   readonly #pattern: PatternReader | null;
   readonly #hasPeriods: boolean;
 
@@ -56,6 +54,7 @@ export class RowReader {
     reading.columns.forEach(({ field }, index) => {
       if (field !== null && field !== 'pattern') this.#at.set(field, index);
     });
+    this.#place = new PlaceReader(reading);
     this.#pattern = PatternReader.of(reading);
     this.#hasPeriods =
       this.#at.has('hours') &&
@@ -78,7 +77,7 @@ export class RowReader {
     const hours = this.#text('hours', row, faults);
     const note = this.#text('note', row, faults);
     const frequencyHz = this.#frequency(row, faults);
-    const { latitude, longitude } = this.#place(row, faults);
+    const { latitude, longitude } = this.#place.read(row, faults);
     const always = this.#power('power', row, faults);
     const day = this.#power('powerDay', row, faults) ?? always;
     const night = this.#power('powerNight', row, faults) ?? always;
@@ -145,49 +144,6 @@ export class RowReader {
     if (value === null) {
       const expected = `a frequency in ${unit} with ${this.#markWords()}, 1 kHz to 1 GHz`;
       faults.push(this.faultOf(row, 'frequency', expected));
-    }
-    return value;
-  }
-
-  #place(row: CsvRow, faults: ImportFault[]): Pick<StationRow, 'latitude' | 'longitude'> {
-    const latitude = this.#degrees('latitude', row, faults);
-    const longitude = this.#degrees('longitude', row, faults);
-    if (latitude !== null && longitude !== null) return { latitude, longitude };
-    this.#checkPair(row, latitude, longitude, faults);
-    const cell = this.cell('locator', row);
-    if (isBlank(cell)) return NOWHERE;
-    const place = readLocator(cell);
-    if (place) return place;
-    faults.push(this.faultOf(row, 'locator', 'a locator of 4, 6 or 8 characters, such as JN58td'));
-    return NOWHERE;
-  }
-
-  /** Half a place is a slip of the pen, not a station without place. */
-  #checkPair(
-    row: CsvRow,
-    latitude: number | null,
-    longitude: number | null,
-    faults: ImportFault[],
-  ): void {
-    if (latitude !== null && isBlank(this.cell('longitude', row))) {
-      faults.push(this.faultOf(row, 'longitude', 'a longitude, as there is a latitude'));
-    }
-    if (longitude !== null && isBlank(this.cell('latitude', row))) {
-      faults.push(this.faultOf(row, 'latitude', 'a latitude, as there is a longitude'));
-    }
-  }
-
-  #degrees(axis: Axis, row: CsvRow, faults: ImportFault[]): number | null {
-    const cell = this.cell(axis, row);
-    if (isBlank(cell)) return null;
-    const { decimalMark: mark, letterO } = this.#reading;
-    const unit = this.#unit(axis);
-    const value = readCoordinate(cell, axis, { unit, mark, letterO });
-    if (value === null) {
-      const range = axis === 'latitude' ? '-90 (south) to 90' : '-180 (west) to 180';
-      const form = unit === 'dms' ? 'degrees, minutes and seconds' : 'degrees';
-      const expected = `${form} from ${range}, with ${this.#markWords()}`;
-      faults.push(this.faultOf(row, axis, expected));
     }
     return value;
   }

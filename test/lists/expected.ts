@@ -1,4 +1,14 @@
 import type { ImportCheck, ImportMatching } from '../../shared/contracts/list-import.ts';
+import {
+  alder,
+  ferry,
+  quay,
+  ridge,
+  south,
+  steady,
+  thousands,
+  type StationTuple,
+} from './stations.ts';
 
 /** How a file of this folder is to be read. */
 export interface ExpectedList {
@@ -15,33 +25,6 @@ export interface ExpectedList {
   readonly stations: readonly StationTuple[];
 }
 
-type StationTuple = readonly [
-  name: string,
-  frequencyHz: number,
-  latitude: number | null,
-  longitude: number | null,
-  powerDayW: number | null,
-  powerNightW: number | null,
-];
-
-const ferry = (name = 'Ferry Point'): StationTuple => [name, 612_000, 47.31, 8.05, 50_000, 10_000];
-const steady = (name = 'Ferry Point'): StationTuple => [name, 612_000, 47.31, 8.05, 50_000, 50_000];
-const alder = (name = 'Alder Ridge'): StationTuple => [name, 621_000, 47.9, 8.4, 1500, 0];
-const ridge = (name = 'Alder Ridge'): StationTuple => [name, 621_000, 47.9, 8.4, 1500, 1500];
-const quay = (name = 'Northquay'): StationTuple => [name, 747_000, 46.98, 7.45, 100_000, 100_000];
-const south = (name = 'Northquay'): StationTuple => [
-  name,
-  747_000,
-  -46.98,
-  -7.45,
-  100_000,
-  100_000,
-];
-const thousands = (name: string, other: string, third: string): StationTuple[] => [
-  [other, 621_000, 47.9, 8.4, 1500, 1500],
-  [name, 1_359_000, 47.31, 8.05, 1234.5, 1234.5],
-  [third, 1_404_000, 46.98, 7.45, 100_000, 100_000],
-];
 const all = (count: number) => ({ total: count, new: count });
 const field = (
   header: string,
@@ -360,6 +343,38 @@ export const LISTS: readonly ExpectedList[] = [
     file: '43-bad-rows.csv',
     rows: { total: 6, new: 1, rejected: 5 },
     stations: [['Good Hope', 774_000, 46.9, 7.4, 1000, 1000]],
+  },
+  {
+    file: '44-parts-in-columns.csv',
+    rows: { total: 6, new: 4, rejected: 2, withoutPlace: 1 },
+    stations: [
+      steady('XQFP'),
+      ridge('XQAR'),
+      south('XQNQ'),
+      ['XQBL', 756_000, null, null, 1000, 1000],
+    ],
+  },
+  {
+    file: '45-signs-and-letters.csv',
+    found: { encoding: 'windows-1252', decimalMark: ',', letterO: 'east' },
+    rows: all(3),
+    stations: [steady('F\u00e4hrhafen'), ridge('Erlenr\u00fccken'), south('Nordkai')],
+  },
+  {
+    file: '46-letters-beside.csv',
+    rows: all(3),
+    stations: [steady(), ridge(), south()],
+  },
+  {
+    file: '47-both-in-one-cell.csv',
+    found: { decimalMark: ',' },
+    rows: { total: 6, new: 4, rejected: 2, withoutPlace: 1 },
+    stations: [
+      steady(),
+      ridge(),
+      ['Southquay', 756_000, -46.9666667, -7.45, 100_000, 100_000],
+      ['Nowhere', 765_000, null, null, 1000, 1000],
+    ],
   },
 ];
 

@@ -20,17 +20,17 @@ interface Style {
   readonly end: '\n' | '\r\n' | '\r';
   readonly titles: number;
   readonly unit: 'kHz' | 'MHz';
-  readonly place: 'decimal' | 'letters' | 'signs';
+  readonly place: 'decimal' | 'letters' | 'signs' | 'parts' | 'beside' | 'together';
 }
 
-const HEADERS = [
-  'Station',
-  'Frequency',
-  'Latitude',
-  'Longitude',
-  'Power day (kW)',
-  'Power night (kW)',
-];
+const PLACE_HEADERS: Readonly<Record<Style['place'], readonly string[]>> = {
+  decimal: ['Latitude', 'Longitude'],
+  letters: ['Latitude', 'Longitude'],
+  signs: ['Latitude', 'Longitude'],
+  parts: ['Lat Deg', 'Lat Min', 'Lat Sec', 'N/S', 'Lon Deg', 'Lon Min', 'Lon Sec', 'E/W'],
+  beside: ['Latitude', 'N/S', 'Longitude', 'E/W'],
+  together: ['Coordinates'],
+};
 const LETTERS = [
   'a',
   'b',
@@ -77,7 +77,7 @@ const style: fc.Arbitrary<Style> = fc.record({
   end: fc.constantFrom('\n', '\r\n', '\r'),
   titles: fc.integer({ min: 0, max: 3 }),
   unit: fc.constantFrom('kHz', 'MHz'),
-  place: fc.constantFrom('decimal', 'letters', 'signs'),
+  place: fc.constantFrom('decimal', 'letters', 'signs', 'parts', 'beside', 'together'),
 });
 
 /** A list that says what its stations are, in any style. */
@@ -102,9 +102,13 @@ export const spoiltList = fc
 
 function written(stations: readonly GeneratedStation[], style: Style): Buffer {
   const titles = Array.from({ length: style.titles }, (_, index) => `Title ${index}`);
-  const headers = HEADERS.map((header) =>
-    header === 'Frequency' ? `Frequency (${style.unit})` : header,
-  );
+  const headers = [
+    'Station',
+    `Frequency (${style.unit})`,
+    ...PLACE_HEADERS[style.place],
+    'Power day (kW)',
+    'Power night (kW)',
+  ];
   const rows = stations.map((each) => cellsOf(each, style));
   const lines = [headers, ...rows].map((cells) =>
     cells.map((cell) => quoted(cell, style.delimiter)).join(style.delimiter),
@@ -118,23 +122,30 @@ function written(stations: readonly GeneratedStation[], style: Style): Buffer {
 const cellsOf = (each: GeneratedStation, style: Style): string[] => [
   each.name,
   decimal(style.unit === 'kHz' ? each.frequencyHz / 1e3 : each.frequencyHz / 1e6, style),
-  angle(each.latitude, 'NS', style),
-  angle(each.longitude, 'EW', style),
+  ...placeCells(each, style),
   decimal(each.powerDayW / 1e3, style),
   decimal(each.powerNightW / 1e3, style),
 ];
 
 const decimal = (value: number, { mark }: Style): string => String(value).replace('.', mark);
 
-function angle(value: number, letters: string, style: Style): string {
-  if (style.place === 'decimal') return value.toFixed(7).replace('.', style.mark);
-  const minutes = Math.round(Math.abs(value) * 60);
-  const letter = letters.charAt(value < 0 ? 1 : 0);
-  const [whole, rest] = [Math.floor(minutes / 60), minutes % 60];
-  return style.place === 'letters'
-    ? `${letter} ${whole} ${rest} 00`
-    : `${whole}\u00b0${String(rest).padStart(2, '0')}'00"${letter}`;
+function placeCells({ latitude, longitude }: GeneratedStation, style: Style): string[] {
+  const cells = [angle(latitude, 'NS', style), angle(longitude, 'EW', style)];
+  return style.place === 'together' ? [cells.flat().join(' ')] : cells.flat();
 }
+
+function angle(value: number, letters: string, style: Style): string[] {
+  if (style.place === 'decimal') return [decimals(value, style)];
+  const letter = letters.charAt(value < 0 ? 1 : 0);
+  if (style.place === 'beside') return [decimals(Math.abs(value), style), letter];
+  const minutes = Math.round(Math.abs(value) * 60);
+  const [whole, rest] = [Math.floor(minutes / 60), minutes % 60];
+  if (style.place === 'parts') return [String(whole), String(rest), '0', letter];
+  if (style.place === 'letters') return [`${letter} ${whole} ${rest} 00`];
+  return [`${whole}\u00b0${String(rest).padStart(2, '0')}'00"${letter}`];
+}
+
+const decimals = (value: number, { mark }: Style): string => value.toFixed(7).replace('.', mark);
 
 const quoted = (cell: string, delimiter: string): string =>
   cell.includes(delimiter) || cell.includes('"') ? `"${cell.replaceAll('"', '""')}"` : cell;
