@@ -186,6 +186,29 @@ describe('laws of the verdict', () => {
     );
   });
 
+  /*
+   * It may by several: each response under the noise leaves a ratio of 32 dB or more, but two of
+   * them add up to 29, and 30 are required. So the count of harmed stations may rise as noise falls.
+   */
+  it('a quieter site may bare two responses that harm together what neither harms alone', () => {
+    const floor = 20;
+    const wanted = [1_000_000, floor + 26] as const;
+    const harmedAt = (noiseFloorDb: number, images: readonly number[]): number => {
+      const list = [wanted, ...images.map((db) => [1_910_000, db] as const)];
+      return assessed(plainReceiver(), siteIn(1, { noiseFloorDb }), list).verdict.harmed.length;
+    };
+    const loud = assessed(plainReceiver(), siteIn(1), [wanted, [1_910_000, 90]]);
+    const image = loud.bands
+      .flatMap(({ responses }) => responses)
+      .find(({ cause, dialHz }) => cause === 'image' && dialHz === 1_000_000);
+    const levelDb = (image?.interferenceDb ?? NaN) + (image?.weightingDb ?? NaN);
+    const justHidden = 90 + (floor - 6.01 - levelDb);
+
+    expect(harmedAt(floor, [justHidden, justHidden])).toBe(0);
+    expect(harmedAt(floor - 6, [justHidden])).toBe(0);
+    expect(harmedAt(floor - 6, [justHidden, justHidden])).toBe(1);
+  });
+
   it('a quieter site never loses a usable station', () => {
     fc.assert(
       fc.property(receivers, list, fc.integer({ min: -10, max: 40 }), (receiver, drawn, floor) => {
