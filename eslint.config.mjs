@@ -145,8 +145,10 @@ const WORDLESS_ATTRIBUTES = [
   'aria-labelledby',
   'aria-live',
   'ariaCurrentWhenActive',
+  'clip-path',
   'd',
   'displayMode',
+  'fact',
   'inputmode',
   'mat-sort-header',
   'matColumnDef',
@@ -154,8 +156,11 @@ const WORDLESS_ATTRIBUTES = [
   'orientation',
   'path',
   'quantity',
+  'queryParamsHandling',
   'scope',
+  'start',
   'text-anchor',
+  'vector-effect',
   'xPosition',
 ];
 

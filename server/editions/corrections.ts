@@ -197,8 +197,11 @@ async function listedIn(
 const isEdit = ({ kind }: Pick<CorrectionModel, 'kind'>): boolean =>
   kind === 'added' || kind === 'changed';
 
-const isEditable = (actor: Actor, row: CorrectionModel): boolean =>
-  hasRole(actor, 'librarian') || (row.authorId === actor.accountId && !isEdit(row));
+/** Whether a person may change or remove a correction. */
+export const isEditable = (
+  actor: Actor,
+  row: Pick<CorrectionModel, 'kind' | 'authorId'>,
+): boolean => hasRole(actor, 'librarian') || (row.authorId === actor.accountId && !isEdit(row));
 
 async function refuseTooMany(regionId: number): Promise<void> {
   if ((await CorrectionModel.count({ where: { regionId } })) < MAX_CORRECTIONS) return;

@@ -18,7 +18,7 @@ import type { StationOrders } from '../computing/station-orders.ts';
 import type { Actor } from '../http/actor.ts';
 import { NotFoundError } from '../http/errors.ts';
 import type { CorrectedList } from './corrected-list.ts';
-import { authorsOf } from './corrections.ts';
+import { authorsOf, isEditable } from './corrections.ts';
 import type { EditionStations } from './edition-stations.ts';
 import type { Ordering, PagedList, StationPages } from './station-pages.ts';
 
@@ -68,7 +68,7 @@ export class StationLists {
         : await this.sources.pages.page(pagedList(opened), query, orderingOf(query));
     const records = await stations.byId(editionId, found.ids, opened.corrected);
     const shown = found.ids.flatMap((id) => records.get(id) ?? []);
-    const items = await this.present(opened, shown);
+    const items = await this.present(actor, opened, shown);
     const fields = site ? await this.measure(actor, site, items, query, signal) : [];
     return {
       items: items.map((item, index) => ({ ...item, ...fields[index] })),
@@ -87,7 +87,7 @@ export class StationLists {
     const opened = await stations.open(actor, editionId, query.corrections);
     const site = await this.siteOf(actor, query);
     const records = await stations.byId(editionId, [stationId], opened.corrected);
-    const [item] = await this.present(opened, [...records.values()]);
+    const [item] = await this.present(actor, opened, [...records.values()]);
     if (!item) throw new NotFoundError('station', stationId);
     const [field] = site ? await this.measure(actor, site, [item], query) : [];
     return { ...item, ...field };
@@ -179,6 +179,7 @@ export class StationLists {
   }
 
   private async present(
+    actor: Actor,
     { edition, corrected }: Opened,
     records: readonly StationRecord[],
   ): Promise<ListedStation[]> {
@@ -192,12 +193,10 @@ export class StationLists {
       official: official.get(record.id) ?? null,
       onRaster: nearestChannel(edition.raster, record.frequencyHz) === record.frequencyHz,
       offAir: marked[index]?.offAir ?? false,
-      corrections: (marked[index]?.corrections ?? []).map(({ id, kind, date, note, authorId }) => ({
-        id,
-        kind,
-        date,
-        note,
-        authorName: names?.get(authorId ?? 0) ?? '',
+      corrections: (marked[index]?.corrections ?? []).map((mark) => ({
+        ...{ id: mark.id, kind: mark.kind, date: mark.date, note: mark.note },
+        authorName: names?.get(mark.authorId ?? 0) ?? '',
+        editable: isEditable(actor, mark),
       })),
       distanceM: null,
       fieldDb: null,

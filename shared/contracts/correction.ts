@@ -146,5 +146,7 @@ export const correctionMark = z.object({
   date: z.iso.date(),
   note: z.string(),
   authorName: z.string(),
+  /** Whether the caller may change or remove it. */
+  editable: z.boolean(),
 });
 export type CorrectionMark = z.infer<typeof correctionMark>;

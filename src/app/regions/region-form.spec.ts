@@ -1,6 +1,14 @@
 import { regionDraft } from '../../../shared/contracts/region';
 import { formIssues } from '../ui/form-problems/form-issues';
-import { addRange, fill, proposeRaster, regionForm, removeRange } from './region-form';
+import {
+  addRange,
+  addRaster,
+  draftOf,
+  fill,
+  proposeRaster,
+  regionForm,
+  removeRange,
+} from './region-form';
 
 const BY_9 = [
   { lowHz: 153_000, highHz: 279_000, stepHz: 9_000 },
@@ -14,48 +22,71 @@ describe('regionForm', () => {
 
     form.patchValue({ ituRegion: 1 });
     proposeRaster(form);
-    expect(form.getRawValue().raster).toEqual(BY_9);
+    expect(form.getRawValue().rasters).toEqual([{ from: '', ranges: BY_9 }]);
 
     form.patchValue({ ituRegion: 2 });
     proposeRaster(form);
-    expect(form.getRawValue().raster).toEqual(BY_10);
+    expect(form.getRawValue().rasters).toEqual([{ from: '', ranges: BY_10 }]);
   });
 
   it('leaves a raster that was entered by hand as it is', () => {
     const form = regionForm();
     form.patchValue({ ituRegion: 1 });
     proposeRaster(form);
-    removeRange(form, 0);
+    const [raster] = form.controls.rasters.controls;
+    if (raster) removeRange(raster, 0);
 
     form.patchValue({ ituRegion: 2 });
     proposeRaster(form);
 
-    expect(form.getRawValue().raster).toEqual(BY_9.slice(1));
+    expect(form.getRawValue().rasters).toEqual([{ from: '', ranges: BY_9.slice(1) }]);
+  });
+
+  it('says a raster without a day as one from ever', () => {
+    const form = regionForm();
+    form.patchValue({ name: 'Westmark', ituRegion: 1 });
+    proposeRaster(form);
+    addRaster(form, { from: '1978-11-23', ranges: BY_10 });
+
+    expect(regionDraft.parse(draftOf(form)).rasters).toEqual([
+      { from: null, ranges: BY_9 },
+      { from: '1978-11-23', ranges: BY_10 },
+    ]);
   });
 
   it('names the limits that an empty range lacks', () => {
     const form = regionForm();
     form.patchValue({ name: 'Westmark', ituRegion: 3 });
-    addRange(form);
+    addRaster(form);
+    const [raster] = form.controls.rasters.controls;
+    if (raster) addRange(raster);
 
-    const issues = formIssues(form, regionDraft, form.getRawValue());
+    const issues = formIssues(form, regionDraft, draftOf(form));
 
-    expect(issues.map(({ path }) => path)).toEqual([
-      'raster.0.lowHz',
-      'raster.0.highHz',
-      'raster.0.stepHz',
-    ]);
+    expect(issues.map(({ path }) => path)).toEqual(
+      ['0', '1'].flatMap((range) =>
+        ['lowHz', 'highHz', 'stepHz'].map((limit) => `rasters.0.ranges.${range}.${limit}`),
+      ),
+    );
   });
 
-  it('objects to a range that is upside down', () => {
+  it('objects to a range that is upside down, and to two rasters from one day', () => {
     const form = regionForm();
-    const raster = [{ lowHz: 1_602_000, highHz: 531_000, stepHz: 9_000 }];
-    fill(form, { name: 'Westmark', ituRegion: 1, raster });
+    const ranges = [{ lowHz: 1_602_000, highHz: 531_000, stepHz: 9_000 }];
+    fill(form, { name: 'Westmark', ituRegion: 1, rasters: [{ from: '', ranges }] });
 
-    const issues = formIssues(form, regionDraft, form.getRawValue());
+    expect(formIssues(form, regionDraft, draftOf(form))).toEqual([
+      {
+        path: 'rasters.0.ranges.0.highHz',
+        message: 'The raster must end at or above where it begins.',
+      },
+    ]);
 
-    expect(issues).toEqual([
-      { path: 'raster.0.highHz', message: 'The raster must end at or above where it begins.' },
+    const twice = [0, 1].map(() => ({ from: '1978-11-23', ranges: BY_9 }));
+    fill(form, { name: 'Westmark', ituRegion: 1, rasters: twice });
+
+    expect(formIssues(form, regionDraft, draftOf(form)).map(({ path }) => path)).toEqual([
+      'rasters.1.from',
     ]);
   });
 });

@@ -3,6 +3,7 @@ import { inject, Injectable } from '@angular/core';
 import { firstValueFrom } from 'rxjs';
 
 import { pageOf } from '../../../shared/contracts/paging';
+import { suppliedRaster } from '../../../shared/contracts/raster';
 import { edition, region, type Region, type RegionDraft } from '../../../shared/contracts/region';
 import { type Remote, remote } from '../core/remote';
 
@@ -25,6 +26,11 @@ export class RegionStore {
   /** Editions of a region's list. Call in an injection context. */
   editions(id: () => string) {
     return remote(() => `${addressOf(id()) ?? ''}/editions?pageSize=${MOST}`, pageOf(edition));
+  }
+
+  /** Rasters that come with the product. Call in an injection context. */
+  suppliedRasters() {
+    return remote(() => `/api/rasters?pageSize=${MOST}`, pageOf(suppliedRaster));
   }
 
   /** Stores a new region, or changes the one of that id. */

@@ -2,6 +2,7 @@ import type { Routes } from '@angular/router';
 
 import { signedInGuard } from '../core/session/signed-in-guard';
 import { unsavedChangesGuard } from '../ui/unsaved-changes-guard';
+import { CorrectionStore } from './correction-store';
 import { EditionStore } from './edition-store';
 import { importMatcher } from './import/import-matcher';
 import { RegionStore } from './region-store';
@@ -12,7 +13,7 @@ const regionEdit = () => import('./region-edit/region-edit').then((m) => m.Regio
 export const regionsRoutes: Routes = [
   {
     path: '',
-    providers: [RegionStore],
+    providers: [CorrectionStore, RegionStore],
     canActivate: [signedInGuard],
     children: [
       {
@@ -46,13 +47,49 @@ export const regionsRoutes: Routes = [
   },
 ];
 
-/** One edition, under `/editions/:id`. */
+const stationEdit = () => import('./station-edit/station-edit').then((m) => m.StationEdit);
+
+/** One edition, its stations and its differences, under `/editions/:id`. */
 export const editionRoutes: Routes = [
   {
     path: '',
-    title: $localize`Edition`,
-    providers: [EditionStore],
+    providers: [EditionStore, CorrectionStore],
     canActivate: [signedInGuard],
-    loadComponent: () => import('./edition-page/edition-page').then((m) => m.EditionPage),
+    children: [
+      {
+        path: '',
+        title: $localize`Edition`,
+        loadComponent: () => import('./edition-page/edition-page').then((m) => m.EditionPage),
+      },
+      {
+        path: 'change',
+        title: $localize`Change an edition`,
+        loadComponent: () => import('./edition-edit/edition-edit').then((m) => m.EditionEdit),
+        canDeactivate: [unsavedChangesGuard],
+      },
+      {
+        path: 'differences',
+        title: $localize`What changed`,
+        loadComponent: () =>
+          import('./differences-page/differences-page').then((m) => m.DifferencesPage),
+      },
+      {
+        path: 'stations/new',
+        title: $localize`Add a station`,
+        loadComponent: stationEdit,
+        canDeactivate: [unsavedChangesGuard],
+      },
+      {
+        path: 'stations/:stationId',
+        title: $localize`Station`,
+        loadComponent: () => import('./station-page/station-page').then((m) => m.StationPage),
+      },
+      {
+        path: 'stations/:stationId/change',
+        title: $localize`Change a station`,
+        loadComponent: stationEdit,
+        canDeactivate: [unsavedChangesGuard],
+      },
+    ],
   },
 ];

@@ -22,7 +22,7 @@ import { Printing } from './printing';
 
 /**
  * What every chart stands in: its name and sentence, zoom, the same rows as a table, what saves,
- * copies and prints it. The drawing is given as a template with an `app-plot` in it:
+ * copies and prints it. The drawing is given as a template with an `app-plot` (or another `.surface`) in it:
  *
  *     <app-chart heading="…" description="…" [table]="table" [(picked)]="picked">
  *       <ng-template><app-plot …>…</app-plot></ng-template>
@@ -68,7 +68,7 @@ export class Chart {
   protected readonly picture = <T>(take: (svg: SVGSVGElement) => T): T | undefined => {
     this.isWanted.set(true);
     this.application.tick();
-    const svg = this.host.querySelector<SVGSVGElement>('app-plot svg');
+    const svg = this.host.querySelector<SVGSVGElement>('.surface svg');
     const taken = svg ? take(svg) : undefined;
     this.isWanted.set(false);
     return taken;

@@ -18,7 +18,7 @@ import { ITU_REGIONS, ituWords } from '../../ui/itu-regions';
 import { Loading } from '../../ui/page-state/loading';
 import { ProblemNote } from '../../ui/page-state/problem-note';
 import type { Unsaved } from '../../ui/unsaved-changes-guard';
-import { fill, proposeRaster, regionForm, regionTyped } from '../region-form';
+import { draftOf, fill, proposeRaster, regionForm, regionTyped, typedRaster } from '../region-form';
 import { RegionStore } from '../region-store';
 import { RasterFields } from './raster-fields';
 
@@ -53,6 +53,7 @@ export class RegionEdit implements Unsaved {
   protected readonly ituRegions = ITU_REGIONS;
   protected readonly ituWords = ituWords;
   protected readonly region = this.store.one(this.id);
+  protected readonly supplied = this.store.suppliedRasters();
   protected readonly form = regionForm();
   protected readonly submission = new Submission(this.form, regionDraft, toProblem);
 
@@ -65,7 +66,7 @@ export class RegionEdit implements Unsaved {
     shape: regionTyped,
     show: (typed) => {
       fill(this.form, typed);
-      this.form.controls.raster.markAsDirty();
+      this.form.controls.rasters.markAsDirty();
     },
   });
 
@@ -90,7 +91,7 @@ export class RegionEdit implements Unsaved {
   }
 
   protected async save(): Promise<void> {
-    const saved = await this.submission.send(this.form.getRawValue(), (valid) =>
+    const saved = await this.submission.send(draftOf(this.form), (valid) =>
       this.store.save(valid, this.id()),
     );
     if (!saved) return;
@@ -100,6 +101,12 @@ export class RegionEdit implements Unsaved {
 
   /** A new region is shown as the form begins. */
   private showStored(): void {
-    fill(this.form, this.region.value() ?? { name: '', ituRegion: null, raster: [] });
+    const region = this.region.value();
+    fill(
+      this.form,
+      region
+        ? { ...region, rasters: region.rasters.map(typedRaster) }
+        : { name: '', ituRegion: null, rasters: [] },
+    );
   }
 }

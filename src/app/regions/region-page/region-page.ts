@@ -9,16 +9,27 @@ import { rasterChannels } from '../../../../shared/radio/channels/raster';
 import { toProblem } from '../../core/api-problem';
 import { Confirm } from '../../ui/confirm/confirm';
 import { Icon } from '../../ui/icon/icon';
-import { Empty } from '../../ui/page-state/empty';
 import { Loading } from '../../ui/page-state/loading';
 import { ProblemNote } from '../../ui/page-state/problem-note';
 import { RasterPipe } from '../raster-pipe';
 import { RegionStore } from '../region-store';
+import { CorrectionList } from './correction-list';
+import { EditionList } from './edition-list';
 
 /** A region: its raster and the editions of its list. */
 @Component({
   selector: 'app-region-page',
-  imports: [DatePipe, Empty, Icon, Loading, MatButtonModule, ProblemNote, RasterPipe, RouterLink],
+  imports: [
+    CorrectionList,
+    DatePipe,
+    EditionList,
+    Icon,
+    Loading,
+    MatButtonModule,
+    ProblemNote,
+    RasterPipe,
+    RouterLink,
+  ],
   templateUrl: './region-page.html',
   styleUrl: './region-page.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,
@@ -31,7 +42,6 @@ export class RegionPage {
   readonly id = input.required<string>();
 
   protected readonly region = this.store.one(this.id);
-  protected readonly editions = this.store.editions(this.id);
   protected readonly channels = computed(
     () => rasterChannels(this.region.value()?.raster ?? [], 0, Number.MAX_SAFE_INTEGER).length,
   );

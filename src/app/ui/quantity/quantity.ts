@@ -21,7 +21,7 @@ const hertz = {
   ghz: 1e9,
 };
 
-/** What can be typed, by name. Stored are Hz, dB, F, H, W, ohms, degrees, fractions and numbers. */
+/** What can be typed, by name. Stored are Hz, dB, F, H, W, ohms, metres, degrees, fractions and numbers. */
 export const quantities = {
   frequency: { unit: 'kHz', factors: hertz, whole: true },
   tone: { unit: 'Hz', factors: hertz, whole: true },
@@ -31,6 +31,7 @@ export const quantities = {
   inductance: { unit: 'μH', factors: { nh: 1e-9, μh: 1e-6, uh: 1e-6, mh: 1e-3, h: 1 } },
   power: { unit: 'kW', factors: { w: 1, kw: 1e3, MW: 1e6 } },
   resistance: { unit: 'Ω', factors: { ω: 1, ohm: 1, ohms: 1, k: 1e3, kω: 1e3, kohm: 1e3 } },
+  distance: { unit: 'km', factors: { m: 1, km: 1e3 } },
   degrees: { unit: '°', factors: { '°': 1, deg: 1 } },
   percent: { unit: '%', factors: { '%': 0.01 } },
   plain: { unit: '', factors: {} },
