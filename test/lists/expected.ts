@@ -360,11 +360,7 @@ export const LISTS: readonly ExpectedList[] = [
     rows: all(3),
     stations: [steady('F\u00e4hrhafen'), ridge('Erlenr\u00fccken'), south('Nordkai')],
   },
-  {
-    file: '46-letters-beside.csv',
-    rows: all(3),
-    stations: [steady(), ridge(), south()],
-  },
+  { file: '46-letters-beside.csv', rows: all(3), stations: [steady(), ridge(), south()] },
   {
     file: '47-both-in-one-cell.csv',
     found: { decimalMark: ',' },

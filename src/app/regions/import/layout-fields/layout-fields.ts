@@ -54,7 +54,9 @@ export class LayoutFields {
     ];
   });
 
+  /** One request a change: what is said again, or while the last one is under way, is not sent. */
   protected async choose(name: LayoutName, select: HTMLSelectElement): Promise<void> {
+    if (this.isBusy() || select.value === this.proposal()[name]) return;
     this.isBusy.set(true);
     this.refusal.set(null);
     try {
