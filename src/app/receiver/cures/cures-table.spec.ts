@@ -80,6 +80,15 @@ describe('the table of cures', () => {
     expect([part.query().get('if'), part.query().get('set')]).toEqual([null, null]);
   });
 
+  it('shows on demand what gains nothing', async () => {
+    const idle = sampleCure({ kind: 'screening', name: 'Screen against stray pick-up' });
+    const part = await open(() => ({ cures: [idle, both] }));
+    expect(part.text()).not.toContain('Screen against stray pick-up');
+
+    await press(part, /^Show 1 more that gain nothing/);
+    expect(part.text()).toContain('Screen against stray pick-up');
+  });
+
   it('stays the table of the set as saved while a cure is on trial', async () => {
     const server = sampleServer().on(CURES, () => ({ cures: [both] }));
     await press(await openPart(Page, server), /^Put on trial/);

@@ -1,4 +1,4 @@
-import { ChangeDetectionStrategy, Component, computed, inject } from '@angular/core';
+import { ChangeDetectionStrategy, Component, computed, inject, signal } from '@angular/core';
 import { MatButtonModule } from '@angular/material/button';
 
 import { whole } from '../../charts/readings';
@@ -30,13 +30,19 @@ export class CuresTable {
       ...this.store.cures().flatMap(({ cure }) => [cure.deficitBeforeDb, cure.deficitAfterDb]),
     ),
   );
+  /** Those that gain nothing are shown on demand, unless one of them is on trial. */
+  protected readonly isWhole = signal(false);
   protected readonly rows = computed(() =>
+    this.all().filter(({ isIdle, isOnTrial }) => this.isWhole() || !isIdle || isOnTrial),
+  );
+  protected readonly rest = computed(() => this.all().length - this.rows().length);
+  private readonly all = computed(() =>
     this.store.cures().map(({ cure, ...trial }) => ({
       ...trial,
       name: cure.name,
       isIdle: gainOf(cure) < LEAST_GAIN_DB,
       parts: cure.parts,
-      isReversible: cure.reversible,
+      undo: cure.reversible ? $localize`can be undone` : $localize`cannot be undone`,
       cost: costText(cure),
       before: whole(cure.deficitBeforeDb),
       after: whole(cure.deficitAfterDb),

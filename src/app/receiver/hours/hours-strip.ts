@@ -97,11 +97,11 @@ export class HoursStrip {
   protected readonly rules = computed(() => {
     const at = this.at();
     const { longitude = 0 } = this.place() ?? {};
-    const noon = NOON - MINUTES_A_DEGREE * longitude;
-    return [
-      ...(noon >= 0 && noon <= 2 * NOON ? [{ at: noon, text: $localize`sun highest` }] : []),
-      ...(at?.startsWith(this.date()) ? [{ at: minutesOf(at), text: $localize`judged` }] : []),
-    ];
+    const noon = (3 * NOON - MINUTES_A_DEGREE * longitude) % (2 * NOON);
+    // Two names side by side would lie over each other: what was chosen is named.
+    return at?.startsWith(this.date())
+      ? [{ at: minutesOf(at), text: $localize`judged` }]
+      : [{ at: noon, text: $localize`sun highest` }];
   });
 
   /** Time read out in the strip, minutes since midnight. */

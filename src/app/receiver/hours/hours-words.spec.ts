@@ -32,7 +32,7 @@ describe('the hours in words', () => {
 
   it('say so when nothing changes, or nothing is heard', () => {
     expect(words(day([30, 30], [null, null]))).toBe(
-      'Breakthrough is as strong at every hour: at 00:00, Alder with 30 dB(µV/m). ' +
+      'Breakthrough is as strong at every hour: Alder with 30 dB(µV/m). ' +
         'No image is heard all day.',
     );
     expect(words(day([null], [null]))).toBe(

@@ -40,9 +40,10 @@ function throughText(
   nameOf: (station: number) => string,
 ): string {
   const at = peakText(loudest, nameOf);
+  const steady = levelText(loudest, nameOf);
   if (rises.length === 0 && falls.length === 0) {
     return swingOf(hours, 'breakthrough') < LEAST_SWING_DB
-      ? $localize`Breakthrough is as strong at every hour: ${at}:peak:.`
+      ? $localize`Breakthrough is as strong at every hour: ${steady}:peak:.`
       : $localize`Breakthrough is loudest ${at}:peak:.`;
   }
   const up = rises.map(clockOf).join(', ');
@@ -59,9 +60,9 @@ function imageText(
   hours: readonly Hour[],
   nameOf: (station: number) => string,
 ): string {
-  const at = peakText(loudest, nameOf);
+  const [at, steady] = [peakText(loudest, nameOf), levelText(loudest, nameOf)];
   return swingOf(hours, 'image') < LEAST_SWING_DB
-    ? $localize`The worst image hardly changes: ${at}:peak:.`
+    ? $localize`The worst image hardly changes: ${steady}:peak:.`
     : $localize`The worst image is loudest ${at}:peak:.`;
 }
 
@@ -73,8 +74,11 @@ function peak(hours: readonly Hour[], kind: Kind): Peak | undefined {
     .sort((a, b) => b.levelDb - a.levelDb)[0];
 }
 
-const peakText = ({ at, levelDb, station }: Peak, nameOf: (station: number) => string): string =>
-  $localize`at ${clockOf(at)}:time:, ${nameOf(station)}:station: with ${whole(levelDb)}:level: dB(µV/m)`;
+const peakText = (loudest: Peak, nameOf: (station: number) => string): string =>
+  $localize`at ${clockOf(loudest.at)}:time:, ${levelText(loudest, nameOf)}:level:`;
+
+const levelText = ({ levelDb, station }: Peak, nameOf: (station: number) => string): string =>
+  $localize`${nameOf(station)}:station: with ${whole(levelDb)}:level: dB(µV/m)`;
 
 /** Infinite where it comes and goes altogether. */
 function swingOf(hours: readonly Hour[], kind: Kind): number {
