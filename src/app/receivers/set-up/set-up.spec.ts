@@ -77,7 +77,8 @@ async function arrange(address: string) {
   return { page, calls, loader, input, press, load, router: TestBed.inject(Router) };
 }
 
-describe('setting up a receiver', () => {
+// The first to draw the whole form compiles it: seconds on a busy machine.
+describe('setting up a receiver', { timeout: 20_000 }, () => {
   beforeEach(() => localStorage.clear());
 
   it('begins with a type of set, a name and nothing else', async () => {
