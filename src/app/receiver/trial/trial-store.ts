@@ -153,7 +153,13 @@ export class TrialStore {
     () => new Map(this.stations().map(({ id, name }) => [id, name])),
   );
 
-  private readonly answers = [this.fields, this.candidates, this.present, this.judged];
+  private readonly answers = [
+    this.fields,
+    this.candidates,
+    this.present,
+    this.judged,
+    this.ownCandidate,
+  ];
   readonly isLoading = computed(() => this.answers.some(({ isLoading }) => isLoading()));
   readonly problem = computed(() =>
     this.answers.map(({ problem }) => problem()).find((each) => each !== undefined),
