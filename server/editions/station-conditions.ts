@@ -34,6 +34,9 @@ function searched(text: string): Condition[] {
   if (text === '') return [];
   const pattern = `%${text.replace(/[\\%_]/g, '\\$&')}%`;
   const frequencyHz = searchedFrequency(text);
+  // With its unit it is a frequency and nothing else, which an index finds.
+  if (frequencyHz !== null && /hz$/i.test(text))
+    return [condition('frequency_hz = ?', frequencyHz)];
   return [
     condition(
       'name LIKE ? OR call_sign LIKE ? OR frequency_hz = ?',
