@@ -1,7 +1,6 @@
 import type { Browser, Page } from 'playwright-core';
 import { afterAll, beforeAll, describe, expect, inject, it } from 'vitest';
 
-import type { Role } from '../../shared/contracts/session.ts';
 import {
   accessibilityFaults,
   DESK,
@@ -11,6 +10,7 @@ import {
   PHONE,
   signIn,
 } from '../support/browser.ts';
+import { accountOf } from '../support/import-journey.ts';
 
 const REGION = 'Tidewater';
 const SCREENS = [
@@ -38,11 +38,6 @@ describe('importing a list from a spreadsheet', () => {
   let page: Page;
   let address = '';
 
-  const accountOf = (role: Role) => {
-    const account = inject('demoSignIns').find((each) => each.role === role);
-    if (!account) throw new Error(`The demo club has no ${role}.`);
-    return account;
-  };
   const heading = (name: string) => page.getByRole('heading', { name, exact: true });
   const press = (name: string) => page.getByRole('button', { name, exact: true }).click();
 

@@ -12,7 +12,7 @@ export const FIELDS: readonly { readonly value: ImportField; readonly words: str
   { value: 'callSign', words: $localize`Call sign` },
   { value: 'latitude', words: $localize`Latitude` },
   { value: 'longitude', words: $localize`Longitude` },
-  { value: 'place', words: $localize`Latitude and longitude, both in one cell` },
+  { value: 'place', words: $localize`Both coordinates in one cell` },
   { value: 'latitudeDegrees', words: $localize`Latitude: its degrees` },
   { value: 'latitudeMinutes', words: $localize`Latitude: its minutes` },
   { value: 'latitudeSeconds', words: $localize`Latitude: its seconds` },
