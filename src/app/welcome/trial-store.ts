@@ -46,6 +46,7 @@ export class TrialStore {
   readonly trialHz = this.moved.asReadonly();
   readonly candidates = lastValue(this.candidatesResource);
   readonly assessment = lastValue(this.assessmentResource);
+  readonly isAssessing = computed(() => this.assessmentResource.isLoading());
   readonly stations = computed(() => {
     const fields = this.fieldsResource.hasValue() ? this.fieldsResource.value().fields : [];
     return fields.map(({ station, ...rest }) => ({ id: station, ...rest }));

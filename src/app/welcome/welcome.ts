@@ -5,6 +5,8 @@ import { noiseField } from '../../../shared/radio/propagation/noise';
 import { BandStrip } from '../charts/band-strip/band-strip';
 import { loudness } from '../charts/band-strip/strip-layout';
 import { CandidateLane } from '../charts/candidate-lane/candidate-lane';
+import { awaitedWords } from '../charts/chart/awaited-words';
+import { ChartOrigin } from '../charts/chart/chart-origin';
 import { FrequencyPipe } from '../ui/frequency-pipe';
 import { Loading } from '../ui/page-state/loading';
 import { ProblemNote } from '../ui/page-state/problem-note';
@@ -14,6 +16,7 @@ import { NextStep } from './next-step/next-step';
 import { ASSUMED_FIELD_DB, siteOf } from './trial';
 import { TrialFields } from './trial-fields';
 import { TrialStore } from './trial-store';
+import { WelcomeOrigin } from './welcome-origin';
 
 /** Bandwidth in which a visitor's noise is counted: a broadcast channel, hertz. */
 const NOISE_BANDWIDTH_HZ = 8000;
@@ -31,6 +34,7 @@ const NOISE_BANDWIDTH_HZ = 8000;
     ProblemNote,
     TrialFields,
   ],
+  providers: [{ provide: ChartOrigin, useClass: WelcomeOrigin }],
   templateUrl: './welcome.html',
   styleUrl: './welcome.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,
@@ -54,6 +58,11 @@ export class Welcome {
       strip: tellingStrip(trial, assessment.bands),
       loudness: loudness(assessment.bands),
     };
+  });
+  /** The strip still holds for what was asked before. */
+  protected readonly awaited = computed(() => {
+    const hz = this.store.trialHz();
+    return this.store.isAssessing() && hz !== undefined ? awaitedWords(hz, hz) : null;
   });
   protected readonly noise = computed(() => {
     const trial = this.store.trial();

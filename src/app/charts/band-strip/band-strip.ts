@@ -64,6 +64,8 @@ export class BandStrip {
   /** What Enter does with a response, in words; empty where nobody listens to `working`. */
   readonly leadsOn = input($localize`Enter shows the working.`);
   readonly picked = model<string | null>(null);
+  /** The band is being judged anew: said instead of the old figures. */
+  readonly awaited = input<string | null>(null);
   /** Asks for the working behind a response. */
   readonly working = output<string>();
 
@@ -112,16 +114,20 @@ export class BandStrip {
       .join(''),
   );
   protected readonly marks = computed<PlotMark[]>(() => [...this.heard(), ...this.wanted()]);
+  /** Apart from what is judged: thousands of stations stay where they are while the IF moves. */
+  private readonly wantedOrder = computed(() =>
+    wantedMarks(this.stations(), this.wholeScale(), this.noise()).map(({ id, station }) => ({
+      id,
+      value: station.frequencyHz,
+    })),
+  );
   protected readonly order = computed(() => [
     ...this.band().responses.flatMap((each) =>
       each.dialHz === null || each.interferenceDb === null
         ? []
         : { id: responseMark(this.band().name, each), value: each.dialHz },
     ),
-    ...wantedMarks(this.stations(), this.wholeScale(), this.noise()).map(({ id, station }) => ({
-      id,
-      value: station.frequencyHz,
-    })),
+    ...this.wantedOrder(),
   ]);
   protected readonly harmonics = computed<StripHarmonic[]>(() => {
     const [low, high] = this.shown();

@@ -1,12 +1,4 @@
-import {
-  ChangeDetectionStrategy,
-  Component,
-  computed,
-  input,
-  model,
-  output,
-  signal,
-} from '@angular/core';
+import { ChangeDetectionStrategy, Component, computed, input, model, output } from '@angular/core';
 import { scaleLinear } from 'd3';
 
 import { formatFrequency } from '../../ui/frequency-pipe';
@@ -43,11 +35,12 @@ export class CandidateLane {
   readonly trialHz = input.required<number>();
   readonly range = input.required<{ readonly low: number; readonly high: number }>();
   readonly window = model<Window | null>(null);
+  /** The candidate picked, as text of its frequency. */
+  readonly picked = model<string | null>(null);
   /** Puts a candidate on trial. */
   readonly taken = output<number>();
 
   private readonly width = observeWidth();
-  protected readonly picked = signal<string | null>(null);
   protected readonly heading = $localize`What each candidate leaves to be desired`;
   protected readonly sentence = computed(() => {
     const at = (hz: number | null) => this.candidates().find(({ ifHz }) => ifHz === hz);

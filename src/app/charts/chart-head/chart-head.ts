@@ -19,6 +19,8 @@ const ZOOM_STEP = 1.6;
 export class ChartHead {
   readonly heading = input.required<string>();
   readonly description = input.required<string>();
+  /** Said instead of the description, in its room, while what is drawn is being replaced. */
+  readonly awaited = input<string | null>(null);
   /** Frequency scale over the whole range; null: the chart does not zoom. */
   readonly wholeScale = input<WholeScale | null>(null);
   readonly window = model<Window | null>(null);

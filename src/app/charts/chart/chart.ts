@@ -46,6 +46,8 @@ export class Chart {
   readonly description = input.required<string>();
   /** The chart's rows, made when they are wanted: drawing does not wait for them. */
   readonly table = input.required<() => ChartTable>();
+  /** What is drawn is being replaced: said in place of the description, and nothing is saved. */
+  readonly awaited = input<string | null>(null);
   /** Scale over the whole range; null: the chart does not zoom. */
   readonly wholeScale = input<WholeScale | null>(null);
   readonly window = model<Window | null>(null);

@@ -40,6 +40,9 @@ export class ExportMenu {
   readonly table = input.required<() => ChartTable>();
   readonly picture = input.required<TakePicture>();
 
+  /** What is drawn is being replaced: it waits. */
+  readonly isAwaited = input(false);
+
   protected readonly done = signal('');
 
   protected async saveSvg(): Promise<void> {

@@ -1,7 +1,6 @@
 import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
 import { scaleLinear } from 'd3';
 
-import { observeWidth } from '../observe-width';
 import { bandUnit } from '../readings';
 
 interface Stretch {
@@ -9,35 +8,28 @@ interface Stretch {
   readonly high: number;
 }
 
-const ROW = 18;
-const LABEL = 84;
-const FIGURES = 92;
-
-/** The band, its oscillator and its image on one scale: how far the image keeps clear of the band. */
+/**
+ * The band, its oscillator and its image as a list with a bar each on one scale: how far the image
+ * keeps clear of the band. All it says stands in words and figures; there is nothing to read out.
+ */
 @Component({
   selector: 'app-range-bars',
   template: `
-    <svg role="img" [attr.aria-label]="sentence()" [attr.width]="width()" [attr.height]="height">
-      @for (bar of bars(); track bar.label) {
-        <text class="label" dy="0.32em" [attr.y]="bar.y">{{ bar.label }}</text>
-        <line
-          [class]="bar.kind"
-          [attr.x1]="bar.from"
-          [attr.x2]="bar.to"
-          [attr.y1]="bar.y"
-          [attr.y2]="bar.y"
-        />
-        <text class="figures" dy="0.32em" [attr.x]="width()" [attr.y]="bar.y">{{ bar.text }}</text>
+    <p>{{ sentence() }}</p>
+    <dl>
+      @for (bar of bars(); track bar.kind) {
+        <div>
+          <dt>{{ bar.label }}</dt>
+          <dd class="bar" aria-hidden="true">
+            @if (shared(); as both) {
+              <span class="shared" [style.left.%]="both.left" [style.width.%]="both.width"></span>
+            }
+            <span [class]="bar.kind" [style.left.%]="bar.left" [style.width.%]="bar.width"></span>
+          </dd>
+          <dd class="figures">{{ bar.text }}</dd>
+        </div>
       }
-      @if (shared(); as both) {
-        <rect
-          class="shared"
-          [attr.x]="both.from"
-          [attr.width]="both.width"
-          [attr.height]="height"
-        />
-      }
-    </svg>
+    </dl>
   `,
   styleUrl: './range-bars.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,
@@ -47,27 +39,28 @@ export class RangeBars {
   readonly oscillator = input.required<Stretch>();
   readonly image = input.required<Stretch>();
 
-  protected readonly width = observeWidth();
-  protected readonly height = 3 * ROW;
   private readonly unit = computed(() => bandUnit(this.band().high));
-  private readonly x = computed(() => {
+  /** Share of the whole that a stretch begins at and takes, percent. */
+  private readonly placed = computed(() => {
     const all = [this.band(), this.oscillator(), this.image()];
     const low = Math.min(...all.map((each) => each.low));
     const high = Math.max(...all.map((each) => each.high));
-    return scaleLinear([low, high], [LABEL, Math.max(LABEL + 40, this.width() - FIGURES)]);
+    const share = scaleLinear([low, high], [0, 100]);
+    return (stretch: Stretch) => ({
+      left: share(stretch.low),
+      width: share(stretch.high) - share(stretch.low),
+    });
   });
   protected readonly bars = computed(() =>
     [
       { kind: 'band', label: $localize`band`, stretch: this.band() },
       { kind: 'oscillator', label: $localize`oscillator`, stretch: this.oscillator() },
       { kind: 'image', label: $localize`image`, stretch: this.image() },
-    ].map(({ kind, label, stretch }, at) => ({
+    ].map(({ kind, label, stretch }) => ({
       kind,
       label,
-      y: ROW * (at + 0.5),
-      from: this.x()(stretch.low),
-      to: this.x()(stretch.high),
-      text: `${this.unit().write(stretch.low)}–${this.unit().write(stretch.high)}`,
+      ...this.placed()(stretch),
+      text: $localize`${this.unit().write(stretch.low)}:low:\u2013${this.unit().write(stretch.high)}:high: ${this.unit().unit}:unit:`,
     })),
   );
   private readonly overlap = computed<Stretch | null>(() => {
@@ -77,9 +70,7 @@ export class RangeBars {
   });
   protected readonly shared = computed(() => {
     const overlap = this.overlap();
-    if (!overlap) return null;
-    const from = this.x()(overlap.low);
-    return { from, width: this.x()(overlap.high) - from };
+    return overlap ? this.placed()(overlap) : null;
   });
   protected readonly sentence = computed(() => {
     const overlap = this.overlap();

@@ -26,6 +26,8 @@ export class DialStrips {
   /** Dial setting pointed at, hertz. */
   readonly pointerHz = model<number | null>(null);
   readonly pointerSettled = output();
+  /** The set is being judged anew: what stands over the strips meanwhile. */
+  readonly awaited = input<string | null>(null);
   readonly working = output<string>();
 
   protected readonly loudness = computed(() => loudness(this.bands()));

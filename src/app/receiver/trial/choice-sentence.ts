@@ -1,3 +1,5 @@
+import { greatestIndex } from 'd3';
+
 import type { StationAtSite } from '../../charts/choice-chart/choice-layout';
 import { kilohertz, tenths } from '../../charts/readings';
 import type { Stretch } from './surroundings';
@@ -16,7 +18,7 @@ export function choiceSentence(
   const ends = $localize`${kilohertz(low)}:low: and ${kilohertz(high)}:high: kHz`;
   const passed = (each: { frequencyHz: number; fieldDb: number }) =>
     each.fieldDb - rejection(each.frequencyHz - ifHz);
-  const worst = [...around].sort((a, b) => passed(b) - passed(a))[0];
+  const worst = around[greatestIndex(around, passed) ?? -1];
   if (!worst) return $localize`No station with a known field lies between ${ends}:ends:.`;
   return $localize`${around.length}:count: stations lie between ${ends}:ends:. With the IF at ${kilohertz(ifHz)}:if: kHz most gets through from ${worst.name}:station: on ${kilohertz(worst.frequencyHz)}:frequency: kHz: ${tenths(worst.fieldDb)}:field: dB(µV/m) at the aerial, ${tenths(passed(worst))}:passed: after the IF.`;
 }

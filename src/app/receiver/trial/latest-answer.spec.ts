@@ -34,6 +34,18 @@ describe('latestAnswer', () => {
     expect(answer.value()).toBe('fresh');
   });
 
+  it('says which question its value answers while the next is on its way', async () => {
+    const question = signal<string | null>('first');
+    const call = new Subject<string>();
+    const answer = TestBed.runInInjectionContext(() => latestAnswer(question, () => call));
+    await settle();
+    call.next('one');
+    question.set('second');
+    TestBed.tick();
+
+    expect([answer.value(), answer.answered(), answer.isLoading()]).toEqual(['one', 'first', true]);
+  });
+
   it('asks once when the question settles', async () => {
     const question = signal<number | null>(0);
     const ask = vi.fn(() => new Subject<number>());

@@ -25,16 +25,19 @@ import type { Problem } from '../../../../shared/contracts/problem';
 import { toProblem } from '../../core/api-problem';
 
 /** The answer to the question as it stands now; the one before stays until the new one is there. */
-export interface LatestAnswer<A> {
+export interface LatestAnswer<Q, A> {
   readonly value: Signal<A | undefined>;
+  /** What the value answers; not what is asked now while that is on its way. */
+  readonly answered: Signal<Q | undefined>;
   readonly isLoading: Signal<boolean>;
   readonly problem: Signal<Problem | undefined>;
   /** Asks the same again. */
   readonly retry: () => void;
 }
 
-interface State<A> {
+interface State<Q, A> {
   readonly value: A | undefined;
+  readonly answered: Q | undefined;
   readonly isLoading: boolean;
   readonly problem: Problem | undefined;
 }
@@ -53,9 +56,14 @@ export function latestAnswer<Q, A>(
   question: Signal<Q | null>,
   ask: (question: Q) => Observable<A>,
   settleMs = SETTLE_MS,
-): LatestAnswer<A> {
-  const idle: State<A> = { value: undefined, isLoading: false, problem: undefined };
-  const state = signal<State<A>>(idle);
+): LatestAnswer<Q, A> {
+  const idle: State<Q, A> = {
+    value: undefined,
+    answered: undefined,
+    isLoading: false,
+    problem: undefined,
+  };
+  const state = signal(idle);
   const again = new Subject<void>();
   merge(
     toObservable(question, { injector: inject(Injector) }),
@@ -63,10 +71,10 @@ export function latestAnswer<Q, A>(
   )
     .pipe(
       tap((asked) => {
-        state.update(({ value }) => ({ value, isLoading: asked !== null, problem: undefined }));
+        state.update((before) => ({ ...before, isLoading: asked !== null, problem: undefined }));
       }),
       settleMs > 0 ? debounceTime(settleMs) : identity,
-      switchMap((asked) => (asked === null ? of(idle) : stated(ask(asked)))),
+      switchMap((asked) => (asked === null ? of(idle) : stated(asked, ask(asked)))),
       takeUntilDestroyed(inject(DestroyRef)),
     )
     .subscribe((next) => {
@@ -74,6 +82,7 @@ export function latestAnswer<Q, A>(
     });
   return {
     value: computed(() => state().value),
+    answered: computed(() => state().answered),
     isLoading: computed(() => state().isLoading),
     problem: computed(() => state().problem),
     retry: () => {
@@ -82,10 +91,10 @@ export function latestAnswer<Q, A>(
   };
 }
 
-const stated = <A>(answer: Observable<A>): Observable<State<A>> =>
+const stated = <Q, A>(answered: Q, answer: Observable<A>): Observable<State<Q, A>> =>
   answer.pipe(
-    map((value): State<A> => ({ value, isLoading: false, problem: undefined })),
+    map((value) => ({ value, answered, isLoading: false, problem: undefined })),
     catchError((error: unknown) =>
-      of<State<A>>({ value: undefined, isLoading: false, problem: toProblem(error) }),
+      of({ value: undefined, answered: undefined, isLoading: false, problem: toProblem(error) }),
     ),
   );

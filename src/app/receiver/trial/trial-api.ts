@@ -28,6 +28,7 @@ import {
   type WhistlesAnswer,
   type WhistlesInput,
 } from '../../../../shared/contracts/whistles';
+import { ofOurServer, sampleOfAssessment, sampleOfFields } from './sampled-answer';
 
 /** The computing calls a trial makes. */
 @Injectable({ providedIn: 'root' })
@@ -36,12 +37,14 @@ export class TrialApi {
 
   fieldStrengths(body: FieldStrengthsInput): Observable<FieldStrengthsAnswer> {
     return this.http
-      .post('/api/field-strengths', body)
-      .pipe(map((answer) => fieldStrengthsAnswer.parse(answer)));
+      .post<FieldStrengthsAnswer>('/api/field-strengths', body)
+      .pipe(map((answer) => ofOurServer(fieldStrengthsAnswer, answer, sampleOfFields)));
   }
 
   assess(body: AssessmentInput): Observable<Assessment> {
-    return this.http.post('/api/assessments', body).pipe(map((answer) => assessment.parse(answer)));
+    return this.http
+      .post<Assessment>('/api/assessments', body)
+      .pipe(map((answer) => ofOurServer(assessment, answer, sampleOfAssessment)));
   }
 
   candidates(body: CandidatesInput): Observable<CandidatesAnswer> {

@@ -13,6 +13,7 @@ import {
 
 import type { Assessment, AssessmentInput } from '../../../../shared/contracts/assessment';
 import type { Period } from '../../../../shared/radio/site';
+import { awaitedWords } from '../../charts/chart/awaited-words';
 import { candidateRange, reachOf } from './candidate-range';
 import { latestAnswer, SETTLE_MS } from './latest-answer';
 import { sourceFields } from './station-source';
@@ -113,6 +114,14 @@ export class TrialStore {
     (question) => this.judge(question),
     0,
   );
+
+  /** While a new judgement is on its way: for what, and what the one in sight holds for. */
+  readonly awaited = computed(() => {
+    const before = this.judged.answered()?.receiver.ifHz;
+    return this.judged.isLoading() && before !== undefined
+      ? awaitedWords(this.trialHz(), before)
+      : null;
+  });
 
   /** The IF on trial as a candidate, when it is none of the round ones. */
   private readonly ownCandidate = latestAnswer(
