@@ -17,8 +17,8 @@ import { ChoiceViewStore } from './choice-view-store';
 /** For specs: a receiver, two sites and a list, and what the server says of them. */
 
 const when = '2026-03-01T10:00:00.000Z';
-const raster = [{ lowHz: 540_000, highHz: 1_700_000, stepHz: 10_000 }];
-const receiver = {
+export const raster = [{ lowHz: 540_000, highHz: 1_700_000, stepHz: 10_000 }];
+export const receiver = {
   id: 1,
   version: 1,
   ownerName: 'Ottil Marrow',
@@ -44,7 +44,7 @@ const sites = [
   site(5, 'Loft', { latitude: 48, longitude: -66 }),
   site(6, 'Nowhere', {}),
 ];
-const edition = {
+export const edition = {
   id: 7,
   regionId: 2,
   regionName: 'Coast',
@@ -57,7 +57,7 @@ const edition = {
   editable: true,
   createdAt: when,
 };
-const region = { id: 2, name: 'Coast', ituRegion: 2, editable: true, editions: 1, raster };
+export const region = { id: 2, name: 'Coast', ituRegion: 2, editable: true, editions: 1, raster };
 
 const none = { deficitDb: 0, worstRatioDb: null, grade: null, dialHz: null, station: null };
 const judged = {

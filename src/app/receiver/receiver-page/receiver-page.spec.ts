@@ -6,39 +6,11 @@ import { provideRouter, Router, withComponentInputBinding } from '@angular/route
 import { RouterTestingHarness } from '@angular/router/testing';
 
 import { ChoicePage } from '../choice-page/choice-page';
+import { edition, raster, receiver, region } from '../choice-page/choice-sample';
 import { ReceiverPage } from './receiver-page';
 import { ReceiverPageHarness } from './receiver-page-harness';
 
-const when = '2026-03-01T10:00:00.000Z';
-const receiver = {
-  id: 1,
-  version: 1,
-  ownerName: 'Ottil Marrow',
-  editable: true,
-  createdAt: when,
-  updatedAt: when,
-  name: 'Bench set',
-  ifHz: 560_000,
-  selectivity: { kind: 'widths', b6Hz: 3000, b60Hz: 12_000 },
-  bands: [{ name: 'Range 4', lowHz: 600_000, highHz: 1_600_000, oscillator: 'above' }],
-};
 const site = { id: 4, name: 'Shed', editable: true, noise: 'rural', ituRegion: 2 };
-const raster = [{ lowHz: 540_000, highHz: 1_700_000, stepHz: 10_000 }];
-const region = { id: 2, name: 'Coast', ituRegion: 2, editable: true, editions: 1 };
-const edition = {
-  id: 7,
-  regionId: 2,
-  regionName: 'Coast',
-  label: 'Spring',
-  date: '2026-03-01',
-  source: 'list.csv',
-  note: '',
-  stations: 1,
-  raster,
-  editable: true,
-  createdAt: when,
-};
-
 const none = { deficitDb: 0, worstRatioDb: null, grade: null, dialHz: null, station: null };
 const judged = {
   breakthrough: none,
