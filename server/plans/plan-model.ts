@@ -22,7 +22,11 @@ export type PlanSnapshot = Pick<
   | 'results'
 > &
   // Plans of old lack these.
-  Partial<Pick<Plan, 'edition' | 'savedReceiver'>> & { readonly regionId?: number | null };
+  Partial<Pick<Plan, 'edition' | 'savedReceiver'>> & {
+    readonly regionId?: number | null;
+    /** Which stations computing took: it changes with corrections by hand. */
+    readonly listVersion?: string;
+  };
 
 /** The stations a plan names and all that was heard; read only with a single plan. */
 export type PlanWorking = Pick<WholePlan, 'stations' | 'judged'>;

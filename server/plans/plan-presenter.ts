@@ -14,7 +14,7 @@ export interface PlanSurroundings {
 
 /** What a plan says by itself. */
 const findingsOf = ({ name, ifHz, createdAt, snapshot }: PlanModel) => {
-  const { regionId: _regionId, ...kept } = snapshot;
+  const { regionId: _regionId, listVersion: _listVersion, ...kept } = snapshot;
   const [edition, savedReceiver] = [kept.edition ?? null, kept.savedReceiver ?? null];
   return { ...kept, edition, savedReceiver, name, ifHz, keptAt: createdAt.toISOString() };
 };

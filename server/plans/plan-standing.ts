@@ -12,6 +12,8 @@ export interface PresentState {
   readonly sites: ReadonlyMap<number, StoredSite>;
   /** The newest first. */
   readonly editions: readonly Edition[];
+  /** What computing takes of an edition now, by its id. */
+  readonly listVersions: ReadonlyMap<number, string>;
 }
 
 /** What has changed since a plan was judged. */
@@ -21,12 +23,22 @@ export function standingOf(row: PlanModel, present: PresentState): Plan['standin
   const saved = snapshot.savedReceiver ?? snapshot.receiver;
   return {
     newerEdition: newerThan(row, present.editions),
+    isEditionCorrected: isCorrected(row, present.listVersions),
     isReceiverChanged: !isDeepStrictEqual(
       bareReceiver.parse(saved),
       bareReceiver.parse(present.receiver),
     ),
     isSiteChanged: !site || !isDeepStrictEqual(bareSite.parse(snapshot.site), bareSite.parse(site)),
   };
+}
+
+/** Stations were added, changed or put off the air by hand since; plans of old cannot tell. */
+function isCorrected(
+  { editionId, snapshot }: PlanModel,
+  versions: PresentState['listVersions'],
+): boolean {
+  const [then, now] = [snapshot.listVersion, versions.get(editionId ?? 0)];
+  return then !== undefined && now !== undefined && then !== now;
 }
 
 /** The newest edition of the region whose list a plan was judged by, if that is another one. */

@@ -43,6 +43,7 @@ export interface PlanSources {
       editionId: number,
       ids: readonly number[],
     ): Promise<(PlanStation & { id: number })[]>;
+    computedWith(actor: Actor, editionId: number): Promise<{ readonly version: string }>;
   };
   readonly assessments: Judge;
   readonly workshops: { nameOf(id: number): Promise<string> };
@@ -85,12 +86,13 @@ export class Plans {
 
   /** Judges the receiver with its present and the chosen IF, and keeps everything as it is now. */
   async keep(actor: Actor, receiverId: number, draft: PlanDraft): Promise<WholePlan> {
-    const { receivers, sites, editions, assessments } = this.sources;
+    const { receivers, sites, editions, stations, assessments } = this.sources;
     const receiver = await receivers.get(actor, receiverId);
     const saved = bareReceiver.parse(receiver);
     const { name: siteName, ...place } = await sites.get(actor, draft.siteId);
     const site = bareSite.parse(place);
     const edition = draft.editionId === null ? null : await editions.get(actor, draft.editionId);
+    const listed = edition && (await stations.computedWith(actor, edition.id));
     const found = await judgePlan(assessments, actor, { saved, site, draft });
     const ids = stationsIn(found);
     const { results, judged } = byPlaceIn(ids, found);
@@ -103,6 +105,7 @@ export class Plans {
         receiver: draft.receiver ?? saved,
         savedReceiver: draft.receiver && saved,
         results,
+        ...(listed && { listVersion: listed.version }),
       },
       working: { stations: await this.stations(actor, site, draft, ids), judged },
     });
@@ -183,6 +186,19 @@ export class Plans {
     });
   }
 
+  private async listVersions(
+    actor: Actor,
+    rows: readonly PlanModel[],
+  ): Promise<ReadonlyMap<number, string>> {
+    const versions = new Map<number, string>();
+    for (const { editionId } of rows) {
+      if (editionId === null || versions.has(editionId)) continue;
+      const { version } = await this.sources.stations.computedWith(actor, editionId);
+      versions.set(editionId, version);
+    }
+    return versions;
+  }
+
   private async surroundings(
     actor: Actor,
     receiver: StoredReceiver,
@@ -197,6 +213,7 @@ export class Plans {
         receiver,
         sites: new Map(items.map((each) => [each.id, each])),
         editions: (await editions.list(actor, ALL)).items,
+        listVersions: await this.listVersions(actor, rows),
       },
       names: await people.namesOf([...rows.map(({ ownerId }) => ownerId), ...sharers]),
       shares,

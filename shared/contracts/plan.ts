@@ -112,6 +112,8 @@ export const plan = z.object({
   /** What has changed since it was judged. */
   standing: z.object({
     newerEdition: z.object({ id: resourceId, label: z.string(), date: z.iso.date() }).nullable(),
+    /** The edition it was judged by was corrected by hand. */
+    isEditionCorrected: z.boolean(),
     isReceiverChanged: z.boolean(),
     isSiteChanged: z.boolean(),
   }),

@@ -156,7 +156,12 @@ describe('a plan', () => {
       ...kept,
       editionId: null,
       siteId: null,
-      standing: { newerEdition: null, isReceiverChanged: true, isSiteChanged: true },
+      standing: {
+        newerEdition: null,
+        isEditionCorrected: false,
+        isReceiverChanged: true,
+        isSiteChanged: true,
+      },
     });
     await person.delete(`/api/receivers/${receiverId}`).expect(204);
     await person.get(`${path}/${kept.id}`).expect(404);
@@ -222,6 +227,7 @@ describe('a plan', () => {
     const { body: kept } = await person.post(path, draft).expect(201);
     expect(kept.standing).toEqual({
       newerEdition: null,
+      isEditionCorrected: false,
       isReceiverChanged: false,
       isSiteChanged: false,
     });
@@ -238,5 +244,31 @@ describe('a plan', () => {
       isReceiverChanged: true,
       isSiteChanged: true,
     });
+  });
+
+  it('says that stations of its list were corrected by hand since, not only remarked on', async () => {
+    const { siteId, path } = await benchOf(person);
+    const region = await addRegion(person);
+    const editionId = await importList(person, region, cleanList(20), 'Spring');
+    const draft = draftOf(siteId, { everyChannelDb: null, editionId });
+    const { body: kept } = await person.post(path, draft).expect(201);
+    const { body: stations } = await person.get(`/api/editions/${editionId}/stations`).expect(200);
+    const stationId = stations.items[0].id;
+    const isCorrected = async () => {
+      const { body } = await person.get(`${path}/${kept.id}`).expect(200);
+      const { body: all } = await person.get(path).expect(200);
+      expect(all.items[0].standing).toEqual(body.standing);
+      return body.standing.isEditionCorrected;
+    };
+
+    const corrections = `/api/regions/${region}/corrections`;
+    await person.post(corrections, { kind: 'heard', stationId, note: 'Weak.' }).expect(201);
+    expect(await isCorrected()).toBe(false);
+    const { body: off } = await person
+      .post(corrections, { kind: 'off-air', stationId, note: 'Mast down.' })
+      .expect(201);
+    expect(await isCorrected()).toBe(true);
+    await person.delete(`${corrections}/${off.id}`).expect(204);
+    expect(await isCorrected()).toBe(false);
   });
 });

@@ -25,7 +25,12 @@ const OTHER = 'GET /api/receivers/1/plans/4';
 const other = keptPlan({ id: 4, name: 'Left where it is', ifHz: 560_000 }, { harmed: [1] });
 const newerEdition = { id: 9, label: 'Autumn', date: '2026-09-01' };
 const outdated = keptPlan({
-  standing: { newerEdition, isReceiverChanged: true, isSiteChanged: false },
+  standing: {
+    newerEdition,
+    isEditionCorrected: true,
+    isReceiverChanged: true,
+    isSiteChanged: false,
+  },
 });
 
 async function open<T extends ComponentHarness>(
@@ -65,6 +70,7 @@ describe('the list of plans', () => {
     expect(text).toContain('Into the guard band');
     expect(text).toContain('a newer edition of the list exists');
     expect(text).toContain('the set-up was changed since');
+    expect(text).toContain('its list was corrected since');
   });
 
   it('leads to the comparison of two that are chosen, the older first', async () => {
@@ -118,6 +124,8 @@ describe('the page of a plan', () => {
       .on(POST, () => other);
     const page = await open('/receivers/1/plans/3', server, OnePlanHarness);
     expect(await page.text()).toContain('A newer edition of this region’s list'.replace('’', "'"));
+
+    expect(await page.text()).toContain('Stations of its list were corrected by hand since');
 
     await page.press('Judge again');
 

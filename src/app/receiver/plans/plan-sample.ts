@@ -129,7 +129,12 @@ export function keptPlan(
     keptAt: '2026-03-02T10:00:00.000Z',
     keptBy: 'Ottil Marrow',
     editable: true,
-    standing: { newerEdition: null, isReceiverChanged: false, isSiteChanged: false },
+    standing: {
+      newerEdition: null,
+      isEditionCorrected: false,
+      isReceiverChanged: false,
+      isSiteChanged: false,
+    },
     sharing: null,
     stations: [
       { name: 'Alder', callSign: 'QAA', frequencyHz: 1_730_000 },

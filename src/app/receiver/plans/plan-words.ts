@@ -20,9 +20,10 @@ export function stationName({ stations }: Pick<ReadablePlan, 'stations'>, place:
 
 /** What is to be known about a plan at a glance. */
 export function notesOn({ standing, sharing, savedReceiver }: Plan): string[] {
-  const { newerEdition, isReceiverChanged, isSiteChanged } = standing;
+  const { newerEdition, isEditionCorrected, isReceiverChanged, isSiteChanged } = standing;
   return [
     ...(newerEdition ? [$localize`a newer edition of the list exists`] : []),
+    ...(isEditionCorrected ? [$localize`its list was corrected since`] : []),
     ...(isReceiverChanged ? [$localize`the set-up was changed since`] : []),
     ...(isSiteChanged ? [$localize`the site was changed since`] : []),
     ...(savedReceiver ? [$localize`judged with a set-up on trial`] : []),

@@ -29,8 +29,8 @@ export class PlanStanding {
   protected readonly refusal = signal<Problem | null>(null);
   protected readonly trialOf = trialOf;
   protected readonly isStale = computed(() => {
-    const { newerEdition, isReceiverChanged, isSiteChanged } = this.plan().standing;
-    return newerEdition !== null || isReceiverChanged || isSiteChanged;
+    const { newerEdition, ...changed } = this.plan().standing;
+    return newerEdition !== null || Object.values(changed).includes(true);
   });
   protected readonly anew = computed(() => judgedAnew(this.plan()));
 
