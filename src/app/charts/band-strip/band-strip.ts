@@ -1,12 +1,4 @@
-import {
-  ChangeDetectionStrategy,
-  Component,
-  computed,
-  input,
-  model,
-  output,
-  signal,
-} from '@angular/core';
+import { ChangeDetectionStrategy, Component, computed, input, model, output } from '@angular/core';
 import { type ScaleLinear } from 'd3';
 
 import { Chart } from '../chart/chart';
@@ -63,6 +55,8 @@ export class BandStrip {
   readonly pointerSettled = output();
   /** What Enter does with a response, in words; empty where nobody listens to `working`. */
   readonly leadsOn = input($localize`Enter shows the working.`);
+  /** What of the band is shown; null: the whole of it. */
+  readonly window = model<Window | null>(null);
   readonly picked = model<string | null>(null);
   /** The band is being judged anew: said instead of the old figures. */
   readonly awaited = input<string | null>(null);
@@ -70,12 +64,14 @@ export class BandStrip {
   readonly working = output<string>();
 
   private readonly width = observeWidth();
-  protected readonly window = signal<Window | null>(null);
   protected readonly strip = STRIP;
   private readonly isNarrow = computed(() => this.width() < NARROW);
+  /** Room over the strip: a row for its label, and one for the flag of the pointer. */
+  private readonly top = computed(() => (this.pointerHz() === null ? 26 : 48));
+  protected readonly labelY = computed(() => 16 - this.top());
   protected readonly frame = computed(() =>
-    frame(this.width(), STRIP_HEIGHT + 28, {
-      top: 26,
+    frame(this.width(), STRIP_HEIGHT + 2 + this.top(), {
+      top: this.top(),
       right: this.isNarrow() ? 6 : 16,
       bottom: 2,
       left: this.isNarrow() ? 26 : 36,
