@@ -1,8 +1,9 @@
-import { ChangeDetectionStrategy, Component } from '@angular/core';
+import { ChangeDetectionStrategy, Component, inject } from '@angular/core';
 import { MatButtonHarness } from '@angular/material/button/testing';
 import { MatSelectHarness } from '@angular/material/select/testing';
 
 import { AROUND, openPart, sampleCandidate, sampleServer } from '../choice-page/choice-sample';
+import { TrialStore } from '../trial/trial-store';
 import { CasesPanel } from './cases-panel';
 
 @Component({
@@ -11,7 +12,11 @@ import { CasesPanel } from './cases-panel';
   template: '<app-cases-panel />',
   changeDetection: ChangeDetectionStrategy.OnPush,
 })
-class Page {}
+class Page {
+  constructor() {
+    inject(TrialStore).areCandidatesShown.set(true);
+  }
+}
 
 const CANDIDATES = 'POST /api/if-candidates';
 const press = async (part: Awaited<ReturnType<typeof openPart>>, text: string | RegExp) => {

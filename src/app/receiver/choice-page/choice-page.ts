@@ -1,4 +1,4 @@
-import { ChangeDetectionStrategy, Component, computed, inject } from '@angular/core';
+import { ChangeDetectionStrategy, Component, computed, DestroyRef, inject } from '@angular/core';
 
 import { advise } from '../advice/advice';
 import { AdvicePanel } from '../advice/advice-panel';
@@ -35,4 +35,11 @@ export class ChoicePage {
     const sites = 1 + (setup.others?.length ?? 0);
     return advise({ answer, receiver, stations, channels, period, sites });
   });
+
+  constructor() {
+    this.store.areCandidatesShown.set(true);
+    inject(DestroyRef).onDestroy(() => {
+      this.store.areCandidatesShown.set(false);
+    });
+  }
 }

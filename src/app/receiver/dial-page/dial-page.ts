@@ -4,6 +4,7 @@ import { ActivatedRoute, Router } from '@angular/router';
 
 import { responseMark } from '../../charts/band-strip/strip-layout';
 import { dialParams, type DialView, readDialView } from '../address/dial-view';
+import { ZoomStore } from '../address/zoom-store';
 import { verdictSentences } from '../advice/verdict-words';
 import { DialStrips } from '../dial-strips/dial-strips';
 import type { LedgerContext } from '../ledger/ledger-facts';
@@ -34,10 +35,15 @@ export class DialPage {
   private readonly router = inject(Router);
   protected readonly store = inject(TrialStore);
   protected readonly pointer = inject(PointerStore);
+  protected readonly zoom = inject(ZoomStore);
   private readonly query = toSignal(this.route.queryParamMap, { requireSync: true });
 
   protected readonly view = computed(() => readDialView(this.query()));
   protected readonly receiver = computed(() => this.store.setup()?.receiver);
+  protected readonly windowOf = (at: number) => {
+    const band = this.receiver()?.bands[at];
+    return band ? this.zoom.of(at, band) : null;
+  };
   private readonly all = computed(() => this.store.judged.value()?.bands ?? []);
   protected readonly heard = computed(() => causesHeard(this.all()));
   protected readonly bands = computed(() =>

@@ -6,6 +6,7 @@ import type { Receiver } from '../../../../shared/radio/receiver';
 import { BandStrip } from '../../charts/band-strip/band-strip';
 import { type JudgedBand, loudness } from '../../charts/band-strip/strip-layout';
 import { type StationAtSite } from '../../charts/choice-chart/choice-layout';
+import { type Window } from '../../charts/zoom-window';
 import { disturbanceSentence } from './disturbance-words';
 
 /** The dial of the set: one strip for each band, all with the same scale of levels. */
@@ -28,9 +29,13 @@ export class DialStrips {
   readonly pointerSettled = output();
   /** The set is being judged anew: what stands over the strips meanwhile. */
   readonly awaited = input<string | null>(null);
+  /** The window of the band at a place; null: the whole of it. */
+  readonly windowOf = input<(at: number) => Window | null>(() => null);
+  readonly zoomed = output<{ readonly at: number; readonly window: Window | null }>();
   readonly working = output<string>();
 
   protected readonly loudness = computed(() => loudness(this.bands()));
+  protected readonly windows = computed(() => this.bands().map((_, at) => this.windowOf()(at)));
   protected readonly strips = computed(() =>
     this.bands().flatMap((band, at) => {
       const own = this.receiver().bands[at];
@@ -38,6 +43,7 @@ export class DialStrips {
       const { lowHz, highHz } = own;
       const { bfo } = this.receiver();
       return {
+        at,
         band,
         range: { low: lowHz, high: highHz },
         beatHarmonics: bfo ? ifHarmonics(bfo.centreHz, lowHz, highHz) : [],

@@ -24,7 +24,9 @@ import {
   pointerSentence,
   strengthWords,
 } from './beat-words';
+import { PairList } from './pair-list';
 import { PointerStore } from './pointer-store';
+import { apartFromPairs } from './silent-pairs';
 
 const FIRST = 6;
 
@@ -39,6 +41,7 @@ const FIRST = 6;
     MatButtonModule,
     MatFormFieldModule,
     MatInputModule,
+    PairList,
     ProblemNote,
     RouterLink,
   ],
@@ -56,10 +59,12 @@ export class HeardHere {
     return answer && dialHz !== null ? pointerSentence(answer, dialHz, this.trial.nameOf) : '';
   });
   protected readonly beats = computed(() => this.answer()?.causes ?? []);
+  private readonly apart = computed(() => apartFromPairs(this.beats()));
+  protected readonly pairs = computed(() => this.apart().pairs);
   private readonly length = linkedSignal({ source: this.text, computation: () => FIRST });
   protected readonly rows = computed(() =>
-    this.beats()
-      .slice(0, this.length())
+    this.apart()
+      .heard.slice(0, this.length())
       .map((beat, at) => ({
         at,
         look: beatMark(beat),
@@ -70,7 +75,7 @@ export class HeardHere {
         strength: strengthWords(beat),
       })),
   );
-  protected readonly rest = computed(() => this.beats().length - this.rows().length);
+  protected readonly rest = computed(() => this.apart().heard.length - this.rows().length);
 
   protected read(typed: string): void {
     const reading = parseQuantity(typed, 'frequency');
@@ -88,6 +93,6 @@ export class HeardHere {
   }
 
   protected more(): void {
-    this.length.set(this.beats().length);
+    this.length.set(this.apart().heard.length);
   }
 }

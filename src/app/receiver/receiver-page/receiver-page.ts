@@ -17,6 +17,7 @@ import { kilohertz } from '../../charts/readings';
 import { FrequencyPipe } from '../../ui/frequency-pipe';
 import { Loading } from '../../ui/page-state/loading';
 import { ProblemNote } from '../../ui/page-state/problem-note';
+import { ZoomStore } from '../address/zoom-store';
 import { KeepPlan, type PlanToKeep } from '../keep-plan/keep-plan';
 import { Pickers } from '../pickers/pickers';
 import { SectionNav } from '../section-nav/section-nav';
@@ -53,6 +54,7 @@ import { ReceiverStore } from './receiver-store';
     { provide: ChartOrigin, useClass: ReceiverOrigin },
     TrialStore,
     SetUpTrial,
+    ZoomStore,
   ],
   changeDetection: ChangeDetectionStrategy.OnPush,
 })

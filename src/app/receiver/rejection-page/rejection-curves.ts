@@ -26,6 +26,8 @@ const names = new Map<RejectionChange, string>([
 /** Image or IF rejection along one band. */
 export interface RejectionChart {
   readonly id: string;
+  /** Place of its band in the set. */
+  readonly at: number;
   readonly heading: string;
   readonly sentence: string;
   readonly range: { readonly low: number; readonly high: number };
@@ -52,6 +54,7 @@ export function rejectionCharts(
     return [
       {
         id: `${at}-image`,
+        at,
         heading: $localize`Image rejection, ${band.name}:band:`,
         sentence: leastSentence(image),
         range,
@@ -59,6 +62,7 @@ export function rejectionCharts(
       },
       {
         id: `${at}-if`,
+        at,
         heading: $localize`IF rejection, ${band.name}:band:`,
         sentence: leastSentence(breakthrough),
         range,

@@ -5,6 +5,7 @@ import { ActivatedRoute, Router } from '@angular/router';
 
 import type { RejectionChange } from '../../../../shared/radio/rejection/rejection-alternatives';
 import { LineChart } from '../../charts/line-chart/line-chart';
+import { ZoomStore } from '../address/zoom-store';
 import { TrialStore } from '../trial/trial-store';
 import { TrialInput } from '../trial-input/trial-input';
 import { REJECTION_CHANGES, rejectionCharts } from './rejection-curves';
@@ -21,6 +22,7 @@ export class RejectionPage {
   private readonly route = inject(ActivatedRoute);
   private readonly router = inject(Router);
   protected readonly store = inject(TrialStore);
+  protected readonly zoom = inject(ZoomStore);
   private readonly query = toSignal(this.route.queryParamMap, { requireSync: true });
 
   protected readonly changes = REJECTION_CHANGES;
@@ -36,6 +38,12 @@ export class RejectionPage {
       ? rejectionCharts({ ...receiver, ifHz: this.store.trialHz() }, this.chosen())
       : [];
   });
+
+  protected readonly windows = computed(() =>
+    this.charts().map(({ at, range }) =>
+      this.zoom.of(at, { lowHz: range.low, highHz: range.high }),
+    ),
+  );
 
   protected choose(changes: readonly RejectionChange[]): void {
     void this.router.navigate([], {

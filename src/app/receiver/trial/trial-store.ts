@@ -1,4 +1,4 @@
-import { computed, inject, Injectable, signal, untracked } from '@angular/core';
+import { computed, inject, Injectable, linkedSignal, signal, untracked } from '@angular/core';
 import {
   catchError,
   EMPTY,
@@ -12,6 +12,7 @@ import {
 } from 'rxjs';
 
 import type { Assessment, AssessmentInput } from '../../../../shared/contracts/assessment';
+import type { CandidatesInput } from '../../../../shared/contracts/candidates';
 import type { Period } from '../../../../shared/radio/site';
 import { awaitedWords } from '../../charts/chart/awaited-words';
 import { candidateRange, reachOf } from './candidate-range';
@@ -67,19 +68,23 @@ export class TrialStore {
     (body) => this.api.fieldStrengths(body),
   );
 
+  /** The section in sight shows the candidates. Judging them all is the dearest call. */
+  readonly areCandidatesShown = signal(false);
+  private readonly everyCandidate = computed(() => {
+    const setup = this.setup();
+    if (!setup) return null;
+    const { receiver } = setup;
+    return { ...cases(setup), receiver, periods: PERIODS, ...candidateRange(receiver) };
+  });
+  /** What was last asked stands while other sections are in sight. */
+  private readonly candidatesQuestion = linkedSignal({
+    source: () => (this.areCandidatesShown() ? this.everyCandidate() : undefined),
+    computation: (shown, before?: { readonly value: CandidatesInput | null }) =>
+      shown === undefined ? (before?.value ?? null) : shown,
+    equal: sameText,
+  });
   /** All candidates; they do not depend on the IF on trial. */
-  readonly candidates = latestAnswer(
-    computed(
-      () => {
-        const setup = this.setup();
-        if (!setup) return null;
-        const { receiver } = setup;
-        return { ...cases(setup), receiver, periods: PERIODS, ...candidateRange(receiver) };
-      },
-      { equal: sameText },
-    ),
-    (body) => this.api.candidates(body),
-  );
+  readonly candidates = latestAnswer(this.candidatesQuestion, (body) => this.api.candidates(body));
 
   /** The set as it stands now: only its verdict is used. */
   readonly present = latestAnswer(
@@ -130,7 +135,8 @@ export class TrialStore {
         const setup = this.setup();
         const trialHz = this.trialHz();
         const known = this.candidates.value()?.candidates;
-        if (!setup || !known || known.some(({ ifHz }) => ifHz === trialHz)) return null;
+        if (!this.areCandidatesShown() || !setup || !known) return null;
+        if (known.some(({ ifHz }) => ifHz === trialHz)) return null;
         const { receiver } = setup;
         const only = { fromHz: trialHz, toHz: trialHz, stepHz: 1 };
         return { ...cases(setup), receiver, periods: PERIODS, ...only };

@@ -12,7 +12,9 @@ import { ProblemNote } from '../../ui/page-state/problem-note';
 import { QuantityInput } from '../../ui/quantity/quantity-input';
 import { Caution } from '../advice/caution';
 import { pointerSentence } from '../pointer/beat-words';
+import { PairList } from '../pointer/pair-list';
 import { PointerStore } from '../pointer/pointer-store';
+import { apartFromPairs } from '../pointer/silent-pairs';
 import { TrialStore } from '../trial/trial-store';
 import { whistleCauses } from './whistle-words';
 
@@ -32,6 +34,7 @@ const noted = z.object({
     Caution,
     FormProblems,
     MatButtonModule,
+    PairList,
     ProblemNote,
     QuantityInput,
     ReactiveFormsModule,
@@ -57,10 +60,9 @@ export class WhistlePage {
     const [answer, dialHz] = [this.pointer.heard.value(), this.pointer.dialHz()];
     return answer && dialHz !== null ? pointerSentence(answer, dialHz, this.trial.nameOf) : '';
   });
-  protected readonly causes = computed(() => {
-    const answer = this.pointer.heard.value();
-    return answer ? whistleCauses(answer, this.trial.nameOf) : [];
-  });
+  private readonly apart = computed(() => apartFromPairs(this.pointer.heard.value()?.causes ?? []));
+  protected readonly pairs = computed(() => this.apart().pairs);
+  protected readonly causes = computed(() => whistleCauses(this.apart().heard, this.trial.nameOf));
 
   constructor() {
     effect(() => {

@@ -21,7 +21,7 @@ const answer = {
 
 describe('causes of a whistle in words', () => {
   it('keep the test, and leave the caution to the page', () => {
-    const [first] = whistleCauses(answer, () => 'Alder');
+    const [first] = whistleCauses(answer.causes, () => 'Alder');
 
     expect(first).toMatchObject({
       cause: 'image',

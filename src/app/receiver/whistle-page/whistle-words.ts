@@ -18,7 +18,7 @@ export interface WhistleWords {
 
 /** The causes in words, the most likely first. */
 export const whistleCauses = (
-  { causes }: WhistlesAnswer,
+  causes: WhistlesAnswer['causes'],
   nameOf: (station: number) => string,
 ): WhistleWords[] =>
   causes.map((each) => ({
