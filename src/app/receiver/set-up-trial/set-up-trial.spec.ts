@@ -123,4 +123,37 @@ describe('a set-up on trial', () => {
     expect(trial.refusal()?.type).toBe('server-unreachable');
     expect(trial.isChanged()).toBe(true);
   });
+
+  it('stays on trial in its address when the session has ended, to be taken over after sign-in', async () => {
+    const server = new FakeServer().on(PUT, () => problemOf(401, 'Sign in again.'));
+    const { trial, tryOut, address } = arrange(server);
+    await tryOut({ ifRange: 0.1 });
+    const kept = address().setUp;
+
+    await trial.takeOver();
+    expect(trial.refusal()?.title).toBe('Sign in again.');
+    expect(address().setUp).toBe(kept);
+    expect(trial.isBusy()).toBe(false);
+
+    server.on(PUT, () => ({ ...stored, version: 2, ifRange: 0.1 }));
+    await trial.takeOver();
+    expect(trial.refusal()).toBeNull();
+    expect(server.sent(PUT)).toHaveLength(2);
+  });
+
+  it('goes on from what the other has saved, with the same fields on trial', async () => {
+    const current = { ...stored, version: 2, name: 'Renamed' };
+    const refused = problemOf(409, 'Somebody changed this receiver in the meantime.');
+    const error = { ...(refused.error as object), current };
+    const server = new FakeServer().on(PUT, () => new HttpErrorResponse({ status: 409, error }));
+    const { trial, tryOut, store } = arrange(server);
+    await tryOut({ ifRange: 0.1 });
+    await trial.takeOver();
+
+    trial.goOnFromTheirs();
+    store.receiver.value.set(storedReceiver.parse(current));
+
+    expect(trial.conflict()).toBeNull();
+    expect(trial.onTrial()).toMatchObject({ name: 'Renamed', ifRange: 0.1 });
+  });
 });
