@@ -1,5 +1,5 @@
 import { DatePipe } from '@angular/common';
-import { ChangeDetectionStrategy, Component, input } from '@angular/core';
+import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
 import { RouterLink } from '@angular/router';
 
 import type { Plan } from '../../../../../shared/contracts/plan';
@@ -20,5 +20,12 @@ export class ComparedTerms {
   readonly plans = input.required<readonly Plan[]>();
   readonly terms = input.required<readonly ComparedTerm[]>();
 
-  protected readonly stationsOf = stationsOf;
+  /** Site and list of both, where they are the same. */
+  protected readonly shared = computed(() => {
+    const [first, ...others] = this.plans().map(whereOf);
+    return first !== undefined && others.every((each) => each === first) ? first : null;
+  });
+  protected readonly whereOf = whereOf;
 }
+
+const whereOf = (plan: Plan): string => `${plan.siteName} · ${stationsOf(plan)}`;

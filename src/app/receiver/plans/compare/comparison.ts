@@ -131,10 +131,12 @@ function harmedOf({ stations, results }: WholePlan, period: Period) {
 /** The comparison in a sentence, from its own counts. */
 export function comparisonSentence(
   terms: readonly ComparedTerm[],
-  { added, removed }: ReturnType<typeof comparedHarm>,
+  { added, removed, still }: ReturnType<typeof comparedHarm>,
 ): string {
   const count = (outcome: Outcome) => terms.filter((each) => each.outcome === outcome).length;
   const counts = $localize`The second plan is better in ${count('better')}:better: terms, worse in ${count('worse')}:worse: and the same in ${count('same')}:same:.`;
+  if (added.length + removed.length + still.length === 0)
+    return $localize`${counts}:counts: Neither harms a station.`;
   if (added.length + removed.length === 0)
     return $localize`${counts}:counts: The same stations are harmed.`;
   return $localize`${counts}:counts: Stations no longer harmed: ${removed.length}:removed:; newly harmed: ${added.length}:added:.`;
