@@ -1,5 +1,5 @@
 import type { Browser, Page } from 'playwright-core';
-import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { afterAll, beforeAll, describe, expect, inject, it } from 'vitest';
 
 import {
   accessibilityFaults,
@@ -9,7 +9,6 @@ import {
   type Screen,
   signIn,
 } from '../support/browser.ts';
-import { Product } from '../support/product.ts';
 
 const RECEIVER = 'Fennimore 12-valve communications receiver, IF 560';
 const screen = (width: number): Screen => ({ width, height: 900, scheme: 'light' });
@@ -23,21 +22,22 @@ const SECTIONS = [
 ] as const;
 
 describe('finding out what is heard on a dial', () => {
-  const product = new Product();
   let browser: Browser;
   let page: Page;
   let dial = '';
+  /** Where the image was found, as the chart writes it. */
+  let imageAt = '';
 
   const member = () =>
-    product.signIns.find(({ role }) => role === 'member') ?? expect.fail('There is no member.');
+    inject('demoSignIns').find(({ role }) => role === 'member') ??
+    expect.fail('There is no member.');
   const plot = () => page.getByRole('application').first();
   const working = () => page.getByRole('dialog');
   const query = () => new URL(page.url()).searchParams;
 
   beforeAll(async () => {
-    await product.start();
     browser = await openBrowser();
-    page = await openPage(browser, product.url);
+    page = await openPage(browser, inject('productUrl'));
     await signIn(page, member());
     await page.getByRole('link', { name: RECEIVER, exact: true }).click();
     await page.getByRole('heading', { name: 'The choice of IF' }).waitFor();
@@ -45,7 +45,6 @@ describe('finding out what is heard on a dial', () => {
 
   afterAll(async () => {
     await browser.close();
-    await product.remove();
   });
 
   it('goes from section to section with site, list and time, and back', async () => {
@@ -67,10 +66,11 @@ describe('finding out what is heard on a dial', () => {
     await plot().focus();
     await page.keyboard.press('Home');
     const said = () => page.locator('app-plot').first().locator('[aria-live]').innerText();
-    for (let step = 0; step < 400 && !/Heard as: image/.test(await said()); step++) {
+    for (let step = 0; step < 400 && !(await said()).includes('Heard as: image'); step++) {
       await page.keyboard.press('ArrowRight');
     }
     expect(await said()).toMatch(/at dial [\d.]+.kHz.*Heard as: image/);
+    imageAt = /at dial ([\d.]+.kHz)/.exec(await said())?.[1] ?? '';
 
     await page.keyboard.press('Enter');
     await working().waitFor();
@@ -107,12 +107,12 @@ describe('finding out what is heard on a dial', () => {
     await field.fill('1,0 MHz');
     await field.press('Enter');
     await expect.poll(() => query().get('dial')).toBe('1000000');
-    await page.getByText(/^At 1000.kHz /).waitFor();
+    await page.getByText(/^At 1000.kHz:/).waitFor();
 
     const pointer = page.getByRole('slider', { name: /^Pointer of the dial/ }).first();
     await pointer.press('ArrowRight');
     await expect.poll(() => query().get('dial')).toBe('1001000');
-    await page.getByText(/^At 1001.kHz /).waitFor();
+    await page.getByText(/^At 1001.kHz:/).waitFor();
 
     const flag = await pointer.locator('.flag').boundingBox();
     if (!flag) throw new Error('The pointer is not shown.');
@@ -121,6 +121,32 @@ describe('finding out what is heard on a dial', () => {
     await page.mouse.move(flag.x + 90, flag.y + 5, { steps: 6 });
     await page.mouse.up();
     await expect.poll(() => Number(query().get('dial'))).toBeGreaterThan(1_010_000);
+  });
+
+  it('zooms a band, and back and forward go through what was shown', async () => {
+    const strip = page.locator('app-band-strip').first();
+    const [from, to] = ['From', 'to'].map((name) => strip.getByRole('textbox', { name }));
+    if (!from || !to) throw new Error('The strip has no limits to type.');
+    const high = await to.inputValue();
+    await from.fill('700');
+    await from.press('Enter');
+    await expect.poll(() => query().get('zoom')).toMatch(/^1:700000-/);
+    await to.fill('800');
+    await to.press('Enter');
+    await expect.poll(() => query().get('zoom')).toBe('1:700000-800000');
+
+    await page.getByRole('tab', { name: 'Rejection', exact: true }).click();
+    await page.getByRole('heading', { name: 'Rejection along the dial' }).waitFor();
+    expect(await page.getByRole('textbox', { name: 'From' }).first().inputValue()).toBe('700');
+    await page.goBack();
+    await page.getByRole('heading', { name: 'What is heard, and why' }).waitFor();
+    await page.goBack();
+    await expect.poll(() => to.inputValue()).toBe(high);
+    expect(await from.inputValue()).toBe('700');
+    await page.goForward();
+    await expect.poll(() => to.inputValue()).toBe('800');
+    await strip.getByRole('button', { name: 'Whole range' }).click();
+    await expect.poll(() => query().get('zoom')).toBeNull();
   });
 
   it('filters by what the address says', async () => {
@@ -138,6 +164,7 @@ describe('finding out what is heard on a dial', () => {
   it('traces a whistle from the pointer to its ranked causes', async () => {
     await page.getByRole('link', { name: 'What is this whistle?' }).click();
     await page.getByRole('heading', { name: 'Causes, the most likely first' }).waitFor();
+    await page.getByLabel('Dial setting').fill(imageAt);
     await page.getByLabel('Slope, Hz a hertz (optional)').fill('2');
     await page.getByRole('button', { name: 'Find the causes' }).click();
 
@@ -150,7 +177,7 @@ describe('finding out what is heard on a dial', () => {
   });
 
   it.each(SCREENS)('is readable for everyone, %d wide on %s', async (width, theme) => {
-    const viewer = await openPage(browser, product.url, screen(width));
+    const viewer = await openPage(browser, inject('productUrl'), screen(width));
     await viewer.addInitScript((chosen) => {
       localStorage.setItem('fallow.theme', chosen);
     }, theme);
@@ -171,7 +198,7 @@ describe('finding out what is heard on a dial', () => {
   });
 
   it('answers a visitor with a sentence and a dial, without an account', async () => {
-    const visitor = await openPage(browser, product.url);
+    const visitor = await openPage(browser, inject('productUrl'));
     await visitor.goto('/');
     await visitor.getByRole('combobox', { name: 'Type of set' }).click();
     await visitor.getByRole('option').nth(1).click();
