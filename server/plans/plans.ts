@@ -186,15 +186,16 @@ export class Plans {
     });
   }
 
+  /** Of the editions that are still there: an import may have been undone. */
   private async listVersions(
     actor: Actor,
     rows: readonly PlanModel[],
+    editions: readonly Edition[],
   ): Promise<ReadonlyMap<number, string>> {
     const versions = new Map<number, string>();
-    for (const { editionId } of rows) {
-      if (editionId === null || versions.has(editionId)) continue;
-      const { version } = await this.sources.stations.computedWith(actor, editionId);
-      versions.set(editionId, version);
+    const named = new Set(rows.map(({ editionId }) => editionId));
+    for (const { id } of editions.filter((each) => named.has(each.id))) {
+      versions.set(id, (await this.sources.stations.computedWith(actor, id)).version);
     }
     return versions;
   }
@@ -208,12 +209,13 @@ export class Plans {
     const shares = await this.shares.openOf(rows.map(({ id }) => id));
     const sharers = [...shares.values()].map(({ sharedBy }) => sharedBy);
     const { items } = await sites.list(actor, { ...ALL, search: '' });
+    const { items: present } = await editions.list(actor, ALL);
     return {
       present: {
         receiver,
         sites: new Map(items.map((each) => [each.id, each])),
-        editions: (await editions.list(actor, ALL)).items,
-        listVersions: await this.listVersions(actor, rows),
+        editions: present,
+        listVersions: await this.listVersions(actor, rows, present),
       },
       names: await people.namesOf([...rows.map(({ ownerId }) => ownerId), ...sharers]),
       shares,
