@@ -71,7 +71,7 @@ describe('the pointer of the dial', () => {
     const { page } = await openSection(DialPage);
 
     expect(await page.typed('Dial setting')).toBe('610');
-    expect(await page.text()).toMatch(/At 610\skHz: the set hears Birch, 40 dB over the noise/);
+    expect(await page.text()).toMatch(/At 610\skHz the set hears Birch, 40 dB over the noise/);
     const items = await page.itemTexts();
     expect(items.filter((text) => text.includes('Alder on 1730'))).toHaveLength(1);
     expect(await page.text()).toContain('and 2 pairs of stations that make the IF between them');
