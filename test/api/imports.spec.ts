@@ -343,7 +343,9 @@ describe('DELETE of an import', () => {
 
     expect((await librarian.get(path)).body).toMatchObject({ state: 'undone', editionId: null });
     await librarian.get(`/api/editions/${editionId}`).expect(404);
-    await vi.waitUntil(async () => (await rowsOf(server, `editions WHERE id = ${editionId}`)) === 0);
+    await vi.waitUntil(
+      async () => (await rowsOf(server, `editions WHERE id = ${editionId}`)) === 0,
+    );
     expect(await rowsOf(server, `stations WHERE edition_id = ${editionId}`)).toBe(0);
   });
 });
