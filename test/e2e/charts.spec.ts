@@ -182,16 +182,48 @@ describe('the charts of a receiver', () => {
     await page.waitForLoadState('networkidle');
     const { bands } = answer('assessments');
     const { fields } = answer('field-strengths');
-    const said = new Set([
-      ...bands.flatMap(({ responses }) =>
-        responses.map((each) => `${tenths(each.ratioDb ?? NaN)} dB`),
-      ),
-      ...fields.map(({ fieldDb }) => `${tenths(fieldDb ?? NaN)} dB(µV/m)`),
-    ]);
+    const located = bands.map(
+      ({ responses }) => responses.filter(({ dialHz }) => dialHz !== null).length,
+    );
+    const most = located.indexOf(Math.max(...located));
+    const nameOf = new Map(fields.map(({ station, name }) => [station, name]));
+    const frequency = (hz: number) => (hz < 3e6 ? `${hz / 1000}\u00a0kHz` : `${hz / 1e6}\u00a0MHz`);
+    const heard = (bands[most]?.responses ?? []).flatMap((each) => {
+      const { interferenceDb, weightingDb, noiseDb, dialHz, ratioDb, beatHz, station } = each;
+      if (interferenceDb === null || weightingDb === null || noiseDb === null) return [];
+      const over = `${tenths(interferenceDb + weightingDb - noiseDb)} dB`;
+      const ratio = ratioDb === null ? '\u2013' : `${tenths(ratioDb)} dB`;
+      const title = `${nameOf.get(station)} at dial ${frequency(dialHz ?? 0)}`;
+      return { dialHz, said: [title, over, ratio, frequency(beatHz)].join('; ') };
+    });
+    const wanted = fields.map(
+      ({ name, frequencyHz, fieldDb }) =>
+        `${name}, ${frequency(frequencyHz)}; ${tenths(fieldDb ?? NaN)} dB(µV/m)`,
+    );
 
-    const most = await plot('app-band-strip').count();
-    for (const each of await readouts('app-band-strip', most - 1)) {
-      expect(said).toContain(each['Wanted to unwanted'] ?? each['Field']);
+    const read = await readouts('app-band-strip', most);
+
+    const isHeard = (each: Record<string, string>) => 'Beat' in each;
+    const saidHeard = read
+      .filter(isHeard)
+      .map((each) =>
+        [each['title'], each['Over the noise'], each['Wanted to unwanted'], each['Beat']].join(
+          '; ',
+        ),
+      );
+    // From left to right the marks are those of the answer, each once.
+    const inOrder = heard
+      .filter(({ dialHz }) => dialHz !== null)
+      .sort((a, b) => (a.dialHz ?? 0) - (b.dialHz ?? 0));
+    const last = inOrder[saidHeard.length - 1]?.dialHz ?? Infinity;
+    const upToLast = inOrder.filter(({ dialHz }) => (dialHz ?? 0) <= last).map(({ said }) => said);
+    const beforeLast = inOrder.filter(({ dialHz }) => (dialHz ?? 0) < last).map(({ said }) => said);
+    expect(read.length).toBe(POSITIONS);
+    expect(saidHeard.filter((each) => !upToLast.includes(each))).toEqual([]);
+    expect(beforeLast.filter((each) => !saidHeard.includes(each))).toEqual([]);
+    expect(new Set(saidHeard).size).toBe(new Set(upToLast.slice(0, saidHeard.length)).size);
+    for (const each of read.filter((one) => !isHeard(one))) {
+      expect(wanted).toContain(`${each['title']}; ${each['Field']}`);
     }
   });
 });
