@@ -142,6 +142,7 @@ const WORDLESS_ATTRIBUTES = [
   'accept',
   'appQuantity',
   'aria-describedby',
+  'aria-haspopup',
   'aria-labelledby',
   'aria-live',
   'ariaCurrentWhenActive',

@@ -151,10 +151,11 @@ describe('Engine', () => {
     await engine.run('assess', await task(1));
 
     await expect(
-      engine.run('judgeCandidates', await manyCandidates(10_000, 20)),
+      engine.run('judgeCandidates', await manyCandidates(10_000, 100)),
     ).rejects.toMatchObject({
       status: 400,
       type: 'too-costly',
+      issues: [], // Ended by the clock: what is refused before it begins says what to leave out.
     });
     expect((await engine.run('assess', await task(1))).read().bands).toHaveLength(1);
   });

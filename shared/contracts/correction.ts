@@ -29,7 +29,10 @@ const fields = {
   note: lineText('Give a note.').max(1000, 'Give at most 1000 characters.'),
 };
 
-type Place = { readonly latitude?: number | null; readonly longitude?: number | null };
+interface Place {
+  readonly latitude?: number | null | undefined;
+  readonly longitude?: number | null | undefined;
+}
 
 const isWhole = ({ latitude = null, longitude = null }: Place): boolean =>
   (latitude === null) === (longitude === null);
@@ -66,7 +69,7 @@ export const changedFields = z
     path: ['longitude'],
     error: 'Change latitude and longitude together.',
   })
-  .refine(isWhole as (changed: object) => boolean, halfAPlace);
+  .refine(isWhole, halfAPlace);
 export type ChangedFields = z.output<typeof changedFields>;
 
 /** The day it was heard, or found silent; left out: today. */
