@@ -84,3 +84,25 @@ export const SITE = {
   ituRegion: 1,
   editable: true,
 };
+
+/** A correction of Ferry Point as the server keeps it; for specs. */
+export const correctionOf = (kind: 'heard' | 'off-air' | 'changed' | 'added') => ({
+  id: 7,
+  regionId: 1,
+  kind,
+  station: {
+    name: 'Ferry Point',
+    callSign: '',
+    frequencyHz: 613_500,
+    latitude: 47.31,
+    longitude: -8.05,
+  },
+  stationId: 1,
+  fields: kind === 'changed' ? { powerNightW: 250 } : null,
+  note: 'Silent all week',
+  date: '2026-03-02',
+  authorName: 'Ada Quill',
+  editable: true,
+  createdAt: '2026-03-02T10:00:00.000Z',
+  updatedAt: '2026-03-02T10:00:00.000Z',
+});
