@@ -1,7 +1,7 @@
 import { TestbedHarnessEnvironment } from '@angular/cdk/testing/testbed';
 import { provideHttpClient, withInterceptors } from '@angular/common/http';
 import { ChangeDetectionStrategy, Component, signal, type Type } from '@angular/core';
-import { TestBed } from '@angular/core/testing';
+import { type ComponentFixture, TestBed } from '@angular/core/testing';
 import { MatButtonHarness } from '@angular/material/button/testing';
 import { MatDialogHarness } from '@angular/material/dialog/testing';
 import { MatInputHarness } from '@angular/material/input/testing';
@@ -24,7 +24,7 @@ interface Visit {
   readonly role?: Role;
 }
 
-/** A page of the feature as a person works with it; for specs. */
+/** Opens a page of the feature; for specs. */
 export async function openPage<T>(
   component: Type<T>,
   server: FakeServer,
@@ -46,35 +46,43 @@ export async function openPage<T>(
     ],
   });
   const { fixture } = await RouterTestingHarness.create(url);
+  return handlesOf(fixture);
+}
+
+const TRIES = 100;
+const PAUSE_MS = 20;
+
+/** What a person does with a page, and sees of it. */
+function handlesOf(fixture: ComponentFixture<unknown>) {
   const loader = TestbedHarnessEnvironment.documentRootLoader(fixture);
   const element = fixture.nativeElement as HTMLElement;
   const input = (label: string) => loader.getHarness(MatInputHarness.with({ label }));
-  const press = async (text: string | RegExp) =>
-    (await loader.getHarness(MatButtonHarness.with({ text }))).click();
+  const until = async (isSo: () => boolean | Promise<boolean>): Promise<void> => {
+    await fixture.whenStable();
+    for (let tries = 0; tries < TRIES && !(await isSo()); tries++) {
+      await new Promise((resolve) => setTimeout(resolve, PAUSE_MS));
+      await fixture.whenStable();
+    }
+  };
   return {
     loader,
-    press,
     element,
     /** Texts of what a selector finds once nothing is on its way, white space made plain. */
-    texts: async (selector: string) => {
-      await vi.waitFor(async () => {
-        await fixture.whenStable();
-        expect(element.querySelector('app-loading')).toBeNull();
-      });
+    texts: async (selector: string): Promise<string[]> => {
+      await until(() => element.querySelector('app-loading') === null);
       return [...element.querySelectorAll(selector)].map(({ textContent }) =>
         textContent.replace(/\s+/g, ' ').trim(),
       );
     },
+    press: async (text: string | RegExp) =>
+      (await loader.getHarness(MatButtonHarness.with({ text }))).click(),
     type: async (label: string, text: string) => (await input(label)).setValue(text),
     valueOf: async (label: string) => (await input(label)).getValue(),
     /** Answers the question that was asked. */
     answer: async (text: string) => {
       const dialog = await loader.getHarness(MatDialogHarness);
       await (await dialog.getHarness(MatButtonHarness.with({ text }))).click();
-      await vi.waitFor(async () => {
-        expect(await loader.getAllHarnesses(MatDialogHarness)).toEqual([]);
-      });
-      await fixture.whenStable();
+      await until(async () => (await loader.getAllHarnesses(MatDialogHarness)).length === 0);
     },
     address: () => TestBed.inject(Router).url,
   };

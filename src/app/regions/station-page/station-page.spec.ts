@@ -1,3 +1,4 @@
+import type { Role } from '../../../../shared/contracts/session';
 import { FakeServer, problemOf } from '../../core/fake-server';
 import { openPage } from '../page-for-specs';
 import { EDITION, FERRY_POINT, NOWHERE } from '../stations-for-specs';
@@ -9,7 +10,7 @@ const REMOVE = 'DELETE /api/regions/1/corrections/7';
 
 async function open(
   station: object = NOWHERE,
-  { query = '', role = 'librarian' as 'librarian' | 'member' } = {},
+  { query = '', role = 'librarian' }: { query?: string; role?: Role } = {},
 ) {
   const server = new FakeServer()
     .on(EDITION_READ, () => EDITION)
