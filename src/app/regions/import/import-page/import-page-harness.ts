@@ -35,7 +35,12 @@ export class ImportPageHarness extends ComponentHarness {
       MatFormFieldHarness.with({ floatingLabelText: label }),
     )();
     const select = await fields[0]?.getControl(MatNativeSelectHarness);
-    await select?.selectOptions({ text: option });
+    const [chosen] = (await select?.getOptions({ text: option })) ?? [];
+    if (!select || !chosen) throw new Error(`No option "${option}" under "${label}".`);
+    // As a browser does, one change a choice; the harness's own way sends another on the way there.
+    const host = await select.host();
+    await host.setInputValue(await (await chosen.host()).getProperty<string>('value'));
+    await host.dispatchEvent('change');
   }
 
   async pick(radio: string): Promise<void> {
