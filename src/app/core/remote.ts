@@ -18,7 +18,9 @@ export interface Remote<T> {
  * undefined. For stores, in an injection context.
  */
 export function remote<T>(address: () => string | undefined, schema: z.ZodType<T>): Remote<T> {
-  const resource = httpResource(address, { parse: (body) => schema.parse(body) });
+  // What is said again in the same words is not read again.
+  const present = computed(address);
+  const resource = httpResource(() => present(), { parse: (body) => schema.parse(body) });
   return {
     value: computed(() => (resource.hasValue() ? resource.value() : undefined)),
     isLoading: resource.isLoading,

@@ -1,5 +1,5 @@
 import { HttpClient } from '@angular/common/http';
-import { inject, Injectable, linkedSignal } from '@angular/core';
+import { inject, Injectable, linkedSignal, type Signal } from '@angular/core';
 import { firstValueFrom } from 'rxjs';
 
 import {
@@ -35,6 +35,14 @@ const withQuery = (address: string, query: Readonly<Record<string, string>>): st
   return text === '' ? address : `${address}?${text}`;
 };
 
+/** What was there last, until there is something newer. */
+function kept<T>(source: () => T | undefined): Signal<T | undefined> {
+  return linkedSignal<T | undefined, T | undefined>({
+    source,
+    computation: (next, previous) => next ?? previous?.value,
+  }).asReadonly();
+}
+
 /** Editions and their stations. What is read, is read in an injection context. */
 @Injectable()
 export class EditionStore {
@@ -62,19 +70,16 @@ export class EditionStore {
       () => withQuery(`${editionAddress(id())}/stations`, asked(query())),
       pageOf(listedStation),
     );
-    const value = linkedSignal<StationPage | undefined, StationPage | undefined>({
-      source: () => {
-        const found = page.value();
-        return found && { ...found, query: query() };
-      },
-      computation: (next, previous) => next ?? previous?.value,
+    const value = kept((): StationPage | undefined => {
+      const found = page.value();
+      return found && { ...found, query: query() };
     });
-    return { ...page, value: value.asReadonly() };
+    return { ...page, value };
   }
 
-  /** The strongest stations that the filter finds, for a map. */
+  /** The strongest stations that the filter finds, for a map; those before stay meanwhile. */
   places(id: () => string, query: () => StationQuery) {
-    return remote(() => {
+    const places = remote(() => {
       const {
         page: _page,
         pageSize: _size,
@@ -84,6 +89,7 @@ export class EditionStore {
       } = query();
       return withQuery(`${editionAddress(id())}/stations/places`, asked(filter));
     }, stationPlaces);
+    return { ...places, value: kept(places.value) };
   }
 
   /** One station; nothing while there is no id. */

@@ -67,9 +67,10 @@ function handlesOf(fixture: ComponentFixture<unknown>) {
   return {
     loader,
     element,
-    /** Texts of what a selector finds once nothing is on its way, white space made plain. */
+    /** Texts of what a selector finds once all of it is there, white space made plain. */
     texts: async (selector: string): Promise<string[]> => {
-      await until(() => element.querySelector('app-loading') === null);
+      const isThere = () => element.querySelector('h1, app-problem-note') !== null;
+      await until(() => isThere() && element.querySelector('app-loading') === null);
       return [...element.querySelectorAll(selector)].map(({ textContent }) =>
         textContent.replace(/\s+/g, ' ').trim(),
       );

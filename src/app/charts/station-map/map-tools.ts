@@ -1,17 +1,18 @@
-import { ChangeDetectionStrategy, Component, computed, input, model } from '@angular/core';
+import { ChangeDetectionStrategy, Component, computed, input, model, signal } from '@angular/core';
 import { MatButtonModule } from '@angular/material/button';
+import { MatMenuModule } from '@angular/material/menu';
 
 import { Icon } from '../../ui/icon/icon';
 import { formatPlace, parsePlace } from '../../ui/place/place';
 import { formatQuantity, parseQuantity } from '../../ui/quantity/quantity';
-import { type Frame } from '../frame';
+import { type Frame, NARROW } from '../frame';
 import { closer, moved, moves } from './map-moves';
 import { fittedView, type MapPlane, type MapView } from './map-plane';
 
-/** Buttons and typed limits that move and zoom a map, as dragging does. */
+/** Buttons and typed limits that move and zoom a map, as dragging does; on a phone in a menu. */
 @Component({
   selector: 'app-map-tools',
-  imports: [Icon, MatButtonModule],
+  imports: [Icon, MatButtonModule, MatMenuModule],
   templateUrl: './map-tools.html',
   styleUrl: './map-tools.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,
@@ -28,6 +29,9 @@ export class MapTools {
     { key: 'ArrowDown', icon: 'down', name: $localize`Move the map down` },
     { key: 'ArrowRight', icon: 'forward', name: $localize`Move the map to the right` },
   ] as const;
+  protected readonly isNarrow = computed(() => this.frame().width < NARROW);
+  /** Whether the limits are shown where there is little room. */
+  protected readonly isTyping = signal(false);
   protected readonly middle = computed(() => {
     const { latitude, longitude } = this.plane().invert(this.view());
     return formatPlace(Number(latitude.toFixed(2)), Number(longitude.toFixed(2)));

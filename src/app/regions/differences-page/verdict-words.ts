@@ -14,7 +14,9 @@ export function verdictSentence({ usable, harmed, worst, emptyDial }: VerdictFig
   const parts = [counted(usable, harmed)];
   if (worst) {
     parts.push(
-      $localize`Worst is ${named(worst)}:station:, ${whole(worst.ratioDb)}:ratio: dB above what disturbs it.`,
+      worst.ratioDb < 0
+        ? $localize`Worst is ${named(worst)}:station:, ${whole(-worst.ratioDb)}:ratio: dB below what disturbs it.`
+        : $localize`Worst is ${named(worst)}:station:, ${whole(worst.ratioDb)}:ratio: dB above what disturbs it.`,
     );
   }
   parts.push(
@@ -41,7 +43,10 @@ export function causeSentence(cause: ReceiverVerdicts['causes'][number]): string
   if (cause.edition === 'before') {
     return $localize`${who}:station: was heard at ${dial}:dial: before.`;
   }
-  return cause.ratioDb === null
-    ? $localize`${who}:station: is heard on an empty dial at ${dial}:dial:.`
+  if (cause.ratioDb === null) {
+    return $localize`${who}:station: is heard on an empty dial at ${dial}:dial:.`;
+  }
+  return cause.ratioDb < 0
+    ? $localize`${who}:station: is heard at ${dial}:dial:, ${whole(-cause.ratioDb)}:ratio: dB over the station wanted there.`
     : $localize`${who}:station: is heard at ${dial}:dial:, ${whole(cause.ratioDb)}:ratio: dB under the station wanted there.`;
 }

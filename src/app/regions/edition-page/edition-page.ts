@@ -23,7 +23,8 @@ import { StationFilter } from './station-filter/station-filter';
 import type { Filter } from './station-filter/filter-form';
 import { StationResults } from './station-results';
 
-const NARROW = '(max-width: 44rem)';
+/** Below this the rows of the table have no room for all they say. */
+const NARROW = '(max-width: 60rem)';
 
 /** One edition of a region's list. What is filtered, chosen and shown is in the address. */
 @Component({

@@ -2,7 +2,6 @@ import { DatePipe } from '@angular/common';
 import { ChangeDetectionStrategy, Component, inject, input } from '@angular/core';
 import { RouterLink } from '@angular/router';
 
-import type { Edition } from '../../../../shared/contracts/region';
 import { Empty } from '../../ui/page-state/empty';
 import { Loading } from '../../ui/page-state/loading';
 import { ProblemNote } from '../../ui/page-state/problem-note';
@@ -20,8 +19,4 @@ export class EditionList {
   readonly regionId = input.required<string>();
 
   protected readonly editions = inject(RegionStore).editions(this.regionId);
-
-  protected compareName({ label }: Edition): string {
-    return $localize`Compare ${label}:edition: with another edition`;
-  }
 }

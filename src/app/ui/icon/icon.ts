@@ -18,6 +18,11 @@ import { type IconName, iconPaths } from './icon-paths';
       height: 1.25em;
       vertical-align: -0.25em;
     }
+    :host-context([mat-icon-button]) {
+      display: flex;
+      width: 1em;
+      height: 1em;
+    }
     path {
       fill: none;
       stroke: currentColor;
