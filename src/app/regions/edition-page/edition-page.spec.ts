@@ -127,12 +127,14 @@ describe('EditionPage', () => {
   });
 
   it('goes through the stations of the map by keys, and chooses them in the table', async () => {
-    const { page } = await open();
+    const { page, server } = await open();
 
     await page.keyOnMap('Home');
 
     expect(address()).toBe('/editions/5?station=1');
     expect((await page.chosen())[0]).toContain('Ferry Point');
+
+    expect(server.sent(`${LIST}/places`)).toHaveLength(1);
 
     await page.keyOnMap('Enter');
 
