@@ -240,6 +240,9 @@ describe.each(charts)('the chart of the $name', ({ selector, tab, enter, sentenc
 
   it('is laid out again at 320 px: no sideways scroll, no label over another', async () => {
     await page.setViewportSize({ width: 320, height: 700 });
+    await page.reload();
+    await chart.surface.waitFor();
+    await page.waitForLoadState('networkidle');
     await chart.host.scrollIntoViewIfNeeded();
     await page.waitForFunction(() => document.documentElement.scrollWidth <= innerWidth);
     await chart.said();

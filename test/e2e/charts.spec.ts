@@ -52,12 +52,19 @@ describe('the charts of a receiver', () => {
     for (let at = 0; at < POSITIONS; at++) {
       const shown = page.locator(`${host} app-plot-readout`);
       await shown.waitFor();
-      const [title, labels, values] = [
-        await shown.locator('.title').innerText(),
-        await shown.locator('dt').allInnerTexts(),
-        await shown.locator('dd').allInnerTexts(),
-      ];
-      read.push({ title, ...Object.fromEntries(labels.map((each, i) => [each, values[i] ?? ''])) });
+      // One reading of one frame: the readout is drawn anew after each key.
+      read.push(
+        await shown.evaluate(async (readout) => {
+          await new Promise((drawn) => requestAnimationFrame(() => requestAnimationFrame(drawn)));
+          const texts = (selector: string) =>
+            [...readout.querySelectorAll<HTMLElement>(selector)].map((each) => each.innerText);
+          const values = texts('dd');
+          return {
+            title: texts('.title')[0] ?? '',
+            ...Object.fromEntries(texts('dt').map((label, i) => [label, values[i] ?? ''])),
+          };
+        }),
+      );
       await surface.press('ArrowRight');
     }
     await surface.press('Escape');

@@ -114,6 +114,9 @@ describe('finding out what is heard on a dial', () => {
     await expect.poll(() => query().get('dial')).toBe('1001000');
     await page.getByText(/At 1001.kHz /).waitFor();
 
+    // What is heard there moves the strip when it comes.
+    await expect.poll(() => page.locator('[aria-busy="true"]').count()).toBe(0);
+    await pointer.locator('.flag').scrollIntoViewIfNeeded();
     const flag = await pointer.locator('.flag').boundingBox();
     if (!flag) throw new Error('The pointer is not shown.');
     await page.mouse.move(flag.x + flag.width / 2, flag.y + flag.height / 2);
@@ -170,7 +173,10 @@ describe('finding out what is heard on a dial', () => {
 
     await expect.poll(() => query().get('slope')).toBe('2');
     await expect.poll(() => page.locator('[aria-busy="true"]').count()).toBe(0);
-    expect(await page.locator('ol').innerText()).toMatch(/: image\n/);
+    expect(query().get('dial')).toBe(String(Math.round(1000 * parseFloat(imageAt))));
+    expect(await page.locator('ol > li').first().innerText()).toMatch(
+      /.kHz: [^]*Hz a hertz of dial/,
+    );
     expect(await page.locator('app-caution').innerText()).toContain('high tension');
   });
 

@@ -96,7 +96,7 @@ describe('moving an IF off a channel and keeping the plan', () => {
     await page.getByRole('button', { name: 'Keep the plan' }).click();
     await page.getByRole('link', { name: 'Open the plan' }).click();
     await page.getByRole('heading', { name: PLAN }).waitFor();
-    const kept = await page.getByRole('table').innerText();
+    const kept = await page.getByRole('table').last().innerText();
 
     await product.stop();
     await product.start();
@@ -107,7 +107,7 @@ describe('moving an IF off a channel and keeping the plan', () => {
     await page.getByRole('link', { name: PLAN }).click();
     await page.getByRole('heading', { name: PLAN }).waitFor();
 
-    expect(await page.getByRole('table').innerText()).toBe(kept);
+    expect(await page.getByRole('table').last().innerText()).toBe(kept);
   });
 
   it.each(SCREENS)('is readable for everyone at %s', async (name, screen, theme) => {
