@@ -176,10 +176,10 @@ describe.each(charts)('the chart of the $name', ({ selector, tab, enter, sentenc
       expect(last?.title).toContain(picked);
     }
     await rows.nth(0).getByRole('button').click();
-    expect(await rows.nth(0).getAttribute('aria-current')).toBe('true');
+    await expect.poll(() => rows.nth(0).getAttribute('aria-current')).toBe('true');
     await chart.button('Chart').click();
     await chart.surface.focus();
-    expect(await chart.host.locator('.picked, line.active').count()).toBeGreaterThan(0);
+    await expect.poll(() => chart.host.locator('.picked, line.active').count()).toBeGreaterThan(0);
   });
 
   it('is saved as picture, dots and rows that say what they rest on', async () => {
