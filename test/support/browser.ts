@@ -55,6 +55,11 @@ export async function signIn(
 
 /** What axe finds against WCAG 2.2 A and AA on the page as it stands; empty when all is well. */
 export async function accessibilityFaults(page: Page): Promise<readonly string[]> {
+  // What is being computed anew is dimmed, too faint to be read for good.
+  await page.waitForFunction(
+    () => document.querySelector('[aria-busy="true"], .stale, .awaited') === null,
+  );
+  await page.waitForTimeout(200); // The light comes back within 150 ms.
   await page.evaluate(axe.source);
   const { violations } = await page.evaluate<AxeResults>(
     `axe.run({ runOnly: ${JSON.stringify(CONFORMANCE)} })`,
